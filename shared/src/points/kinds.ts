@@ -1,0 +1,46 @@
+/** The kinds of garment, and of part, that Ellwand keeps. Ids are kebab-case and never change. */
+export const kindIds = [
+  'dress',
+  'bodice',
+  'skirt',
+  'coat',
+  'jacket',
+  'waistcoat',
+  'trousers',
+  'breeches',
+  'cape',
+  'shirt',
+  'chemise',
+  'corset',
+  'crinoline',
+  'bustle',
+  'petticoat',
+  'child-dress',
+  'hat',
+  'glove',
+  'shoe',
+] as const;
+export type GarmentKind = (typeof kindIds)[number];
+
+/** What a kind is called, one and many, as it stands in a sentence. */
+export const kindLabels: Readonly<Record<GarmentKind, { readonly one: string; readonly many: string }>> = {
+  dress: { one: 'dress', many: 'dresses' },
+  bodice: { one: 'bodice', many: 'bodices' },
+  skirt: { one: 'skirt', many: 'skirts' },
+  coat: { one: 'coat', many: 'coats' },
+  jacket: { one: 'jacket', many: 'jackets' },
+  waistcoat: { one: 'waistcoat', many: 'waistcoats' },
+  trousers: { one: 'trousers', many: 'trousers' },
+  breeches: { one: 'breeches', many: 'breeches' },
+  cape: { one: 'cape', many: 'capes' },
+  shirt: { one: 'shirt', many: 'shirts' },
+  chemise: { one: 'chemise', many: 'chemises' },
+  corset: { one: 'corset', many: 'corsets' },
+  crinoline: { one: 'crinoline', many: 'crinolines' },
+  bustle: { one: 'bustle', many: 'bustles' },
+  petticoat: { one: 'petticoat', many: 'petticoats' },
+  'child-dress': { one: 'child’s dress', many: 'children’s dresses' },
+  hat: { one: 'hat', many: 'hats' },
+  glove: { one: 'pair of gloves', many: 'gloves' },
+  shoe: { one: 'pair of shoes', many: 'shoes' },
+};
