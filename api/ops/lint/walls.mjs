@@ -15,9 +15,15 @@ export const walls = [
     target: './api/src/catalogue',
     from: './api/src',
     except: ['./catalogue', './common'],
-    message: 'The public side reads published copies only: catalogue imports common and shared, nothing else.',
+    message:
+      'The public side reads published copies only: catalogue imports common and shared, nothing else.',
   },
-  { target: './api/src/common', from: './api/src', except: ['./common'], message: 'common stands below every room.' },
+  {
+    target: './api/src/common',
+    from: './api/src',
+    except: ['./common'],
+    message: 'common stands below every room.',
+  },
   { target: './site', from: './admin', message: 'The public site and the Workroom share only shared.' },
   { target: './admin', from: './site', message: 'The public site and the Workroom share only shared.' },
   { target: './site/src', from: './api', message: 'The site meets the API over its contract, in shared.' },

@@ -1,0 +1,98 @@
+// @ts-check
+import { spawn, spawnSync } from 'node:child_process';
+import fs from 'node:fs';
+import path from 'node:path';
+
+/**
+ * @typedef {object} Outcome
+ * @property {number} code exit code; 128 + the signal's number is not used: a killed child has code 1
+ * @property {string} output stdout and stderr as they came
+ */
+
+/**
+ * Finds a program on PATH or among the system's own, where Debian keeps servers out of a person's PATH.
+ * @param {string} name
+ * @returns {string | undefined} absolute path
+ */
+export function findProgram(name) {
+  const folders = [...(process.env['PATH'] ?? '').split(path.delimiter), '/usr/sbin', '/sbin', '/usr/bin'];
+  return folders
+    .filter((folder) => folder !== '')
+    .map((folder) => path.join(folder, name))
+    .find(isExecutable);
+}
+
+/** @param {string} file */
+function isExecutable(file) {
+  try {
+    fs.accessSync(file, fs.constants.X_OK);
+    return fs.statSync(file).isFile();
+  } catch {
+    return false;
+  }
+}
+
+/**
+ * Runs a program to its end and keeps what it says.
+ * @param {string} program
+ * @param {readonly string[]} args
+ * @param {{ cwd?: string, env?: NodeJS.ProcessEnv, input?: string, uid?: number, gid?: number,
+ *           onStart?: (child: import('node:child_process').ChildProcess) => void }} [options]
+ * @returns {Promise<Outcome>}
+ */
+export function run(program, args, { input, onStart, ...options } = {}) {
+  return new Promise((resolve) => {
+    const child = spawn(program, args, { ...options, stdio: ['pipe', 'pipe', 'pipe'] });
+    let output = '';
+    const keep = (/** @type {Buffer} */ chunk) => (output += chunk.toString());
+    child.stdout.on('data', keep);
+    child.stderr.on('data', keep);
+    // A child that ends before it has read its input is reported by its exit code, not by a broken pipe.
+    child.stdin.on('error', () => {});
+    child.on('error', (error) => resolve({ code: 127, output: `${output}${error.message}\n` }));
+    child.on('close', (code) => resolve({ code: code ?? 1, output }));
+    child.stdin.end(input ?? '');
+    onStart?.(child);
+  });
+}
+
+/**
+ * The first line a program prints, or undefined where it fails.
+ * @param {string} program
+ * @param {readonly string[]} args
+ * @returns {string | undefined}
+ */
+export function firstLineOf(program, args) {
+  const { status, stdout } = spawnSync(program, args, { encoding: 'utf8' });
+  return status === 0 ? stdout.split('\n')[0] : undefined;
+}
+
+/**
+ * @param {number} ms
+ * @returns {Promise<void>}
+ */
+export function pause(ms) {
+  return new Promise((resolve) => setTimeout(resolve, ms));
+}
+
+/**
+ * The last lines of a file, for a message about what went wrong.
+ * @param {string} file
+ * @param {number} [lines]
+ */
+export function tailOf(file, lines = 15) {
+  if (!fs.existsSync(file)) return '';
+  return fs.readFileSync(file, 'utf8').trimEnd().split('\n').slice(-lines).join('\n');
+}
+
+/**
+ * @param {number} pid
+ * @returns {boolean} whether a process of this id exists and has not ended (a zombie has)
+ */
+export function isAlive(pid) {
+  try {
+    return !/^State:\s+Z/m.test(fs.readFileSync(`/proc/${pid}/status`, 'utf8'));
+  } catch {
+    return false;
+  }
+}
