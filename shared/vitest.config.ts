@@ -2,5 +2,5 @@ import { defineConfig } from 'vitest/config';
 
 export default defineConfig({
   resolve: { conditions: ['source'] },
-  test: { include: ['src/**/*.spec.ts'] },
+  test: { include: ['src/**/*.spec.ts', 'look/**/*.spec.ts'] },
 });
