@@ -224,6 +224,7 @@ async function untilAnswering(places, child) {
   const deadline = Date.now() + READY_WITHIN_MS;
   while (!(await answers(places.socket))) {
     if (child.exitCode !== null || child.signalCode !== null || Date.now() > deadline) {
+      child.kill('SIGKILL');
       throw new PlainFailure(`MariaDB did not start; its log is ${places.log}.`, {
         detail: tailOf(places.log),
       });

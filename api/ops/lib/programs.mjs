@@ -5,7 +5,7 @@ import path from 'node:path';
 
 /**
  * @typedef {object} Outcome
- * @property {number} code exit code; 128 + the signal's number is not used: a killed child has code 1
+ * @property {number} code exit code; 1 where a signal ended it, 127 where it could not be run
  * @property {string} output stdout and stderr as they came
  */
 
@@ -32,27 +32,38 @@ function isExecutable(file) {
   }
 }
 
+/** @type {Set<import('node:child_process').ChildProcess>} */
+const runningPrograms = new Set();
+
+/** Asks every program that `run` waits for to end; their callers see them fail. */
+export function stopRunningPrograms() {
+  for (const child of runningPrograms) child.kill('SIGTERM');
+}
+
 /**
  * Runs a program to its end and keeps what it says.
  * @param {string} program
  * @param {readonly string[]} args
- * @param {{ cwd?: string, env?: NodeJS.ProcessEnv, input?: string, uid?: number, gid?: number,
- *           onStart?: (child: import('node:child_process').ChildProcess) => void }} [options]
+ * @param {{ cwd?: string, env?: NodeJS.ProcessEnv, input?: string, uid?: number, gid?: number }} [options]
  * @returns {Promise<Outcome>}
  */
-export function run(program, args, { input, onStart, ...options } = {}) {
+export function run(program, args, { input, ...options } = {}) {
   return new Promise((resolve) => {
     const child = spawn(program, args, { ...options, stdio: ['pipe', 'pipe', 'pipe'] });
+    runningPrograms.add(child);
     let output = '';
     const keep = (/** @type {Buffer} */ chunk) => (output += chunk.toString());
     child.stdout.on('data', keep);
     child.stderr.on('data', keep);
     // A child that ends before it has read its input is reported by its exit code, not by a broken pipe.
     child.stdin.on('error', () => {});
-    child.on('error', (error) => resolve({ code: 127, output: `${output}${error.message}\n` }));
-    child.on('close', (code) => resolve({ code: code ?? 1, output }));
+    const end = (/** @type {Outcome} */ outcome) => {
+      runningPrograms.delete(child);
+      resolve(outcome);
+    };
+    child.on('error', (error) => end({ code: 127, output: `${output}${error.message}\n` }));
+    child.on('close', (code) => end({ code: code ?? 1, output }));
     child.stdin.end(input ?? '');
-    onStart?.(child);
   });
 }
 

@@ -1,0 +1,60 @@
+// @ts-check
+import path from 'node:path';
+import { PlainFailure } from './plain-failure.mjs';
+import { readJsonIfThere } from './private-files.mjs';
+import { run } from './programs.mjs';
+
+/**
+ * @typedef {{ version?: string, link?: boolean, optional?: boolean, devOptional?: boolean }} LockEntry
+ * @typedef {Record<string, LockEntry>} LockPackages
+ */
+
+/**
+ * Brings node_modules to what the lock file says; does nothing where it is so already.
+ * @param {string} root
+ * @param {<T>(label: string, work: () => Promise<T>) => Promise<T>} step
+ */
+export async function installNpmPackages(root, step) {
+  const wanted = lockPackages(path.join(root, 'package-lock.json'));
+  const installed = lockPackages(path.join(root, 'node_modules', '.package-lock.json'));
+  if (isInstalled(wanted, installed)) return;
+  const { code, output } = await step('Installing npm packages', () =>
+    run('npm', ['ci', '--no-audit', '--no-fund'], { cwd: root }),
+  );
+  if (code !== 0) {
+    throw new PlainFailure('npm ci failed: its last words are above.', { detail: output.slice(-3000) });
+  }
+}
+
+/**
+ * Whether every package of the lock file is there in its version. Optional packages may be missing: those of
+ * other systems always are.
+ * @param {LockPackages} wanted
+ * @param {LockPackages} installed
+ */
+export function isInstalled(wanted, installed) {
+  return Object.entries(wanted)
+    .filter(([place]) => place.includes('node_modules/'))
+    .every(([place, entry]) => {
+      const there = installed[place];
+      if (!there) return entry.optional === true || entry.devOptional === true;
+      return there.version === entry.version && there.link === entry.link;
+    });
+}
+
+/**
+ * @param {string} file
+ * @returns {LockPackages}
+ */
+function lockPackages(file) {
+  const lock = readJsonIfThere(file);
+  return hasPackages(lock) ? lock.packages : {};
+}
+
+/**
+ * @param {unknown} value
+ * @returns {value is { packages: LockPackages }}
+ */
+function hasPackages(value) {
+  return typeof value === 'object' && value !== null && 'packages' in value;
+}
