@@ -6,7 +6,10 @@ export const Uuid = z.uuid();
 /** An exact length in millimetres as a decimal string of at most four places: "612", "920.75". Never a float. */
 export const LengthMm = z
   .string()
-  .regex(/^\d{1,6}(\.\d{1,4})?$/, 'a length in millimetres with at most four decimal places, for example 612 or 920.75');
+  .regex(
+    /^\d{1,6}(\.\d{1,4})?$/,
+    'a length in millimetres with at most four decimal places, for example 612 or 920.75',
+  );
 
 /** A moment: ISO 8601 in UTC, `2026-12-01T09:30:00.000Z`. */
 export const Moment = z.iso.datetime();
@@ -21,11 +24,18 @@ export const line = (longest: number) =>
     .trim()
     .min(1, 'Write something here')
     .max(longest, `At most ${longest} characters`)
-    .refine((text) => ![...text].some((c) => c < ' ' || c === '\u007f'), 'One line, without control characters');
+    .refine(
+      (text) => ![...text].some((c) => c < ' ' || c === '\u007f'),
+      'One line, without control characters',
+    );
 
 /** Several lines of plain text; empty means "nothing said". Never markup. */
 export const prose = (longest: number) =>
-  z.string().trim().max(longest, `At most ${longest} characters`).refine((text) => !text.includes('\u0000'), 'Plain text');
+  z
+    .string()
+    .trim()
+    .max(longest, `At most ${longest} characters`)
+    .refine((text) => !text.includes('\u0000'), 'Plain text');
 
 /** Numbers of pages begin at 1; `size` is at most 100. */
 export const Paging = z.object({

@@ -1,11 +1,11 @@
 import { z } from 'zod';
-import { kindIds } from '../points/kinds.js';
+import { garmentKinds } from '../points/kinds.js';
 import { line, Moment, pageOf, Paging, prose, Uuid } from './common.js';
 import { Image } from './image.js';
 import { RecordStage } from './record-moves.js';
 import { SheetSummary } from './sheet.js';
 
-export const PartKind = z.enum(kindIds);
+export const PartKind = z.enum(garmentKinds);
 
 export const wornByValues = ['woman', 'man', 'child', 'unknown'] as const;
 export const WornBy = z.enum(wornByValues);
@@ -28,7 +28,10 @@ export const Hazard = z.strictObject({
   note: prose(1000).default(''),
 });
 
-export const OtherNumber = z.strictObject({ kind: z.enum(['former', 'loan', 'temporary']), number: line(60) });
+export const OtherNumber = z.strictObject({
+  kind: z.enum(['former', 'loan', 'temporary']),
+  number: line(60),
+});
 
 /** The terms a record may be published under. */
 export const rightsStatements = {
@@ -47,7 +50,7 @@ export const RightsUri = z.enum(Object.keys(rightsStatements) as [keyof typeof r
 export const GarmentRecord = z.strictObject({
   ownNumber: line(60),
   title: line(200),
-  kind: z.enum([...kindIds, 'set']),
+  kind: z.enum([...garmentKinds, 'set']),
   wornBy: WornBy.default('unknown'),
   description: prose(8000).default(''),
   /** EDTF (ISO 8601-2): `1885~`, `1858/1861`, `1885~/1890~`. */
@@ -56,7 +59,10 @@ export const GarmentRecord = z.strictObject({
     .trim()
     .regex(/^[0-9~?%/.X[\]-]{4,40}$/, 'Write a year or a span, such as 1885, 1885~ (about) or 1858/1861'),
   maker: line(200).nullable().default(null),
-  label: z.strictObject({ transcription: prose(1000), where: line(200) }).nullable().default(null),
+  label: z
+    .strictObject({ transcription: prose(1000), where: line(200) })
+    .nullable()
+    .default(null),
   place: line(200).nullable().default(null),
   materials: z.array(line(80)).max(30).default([]),
   techniques: z.array(line(80)).max(30).default([]),
@@ -82,7 +88,15 @@ export const GarmentRecord = z.strictObject({
 export type GarmentRecord = z.infer<typeof GarmentRecord>;
 export type GarmentRecordInput = z.input<typeof GarmentRecord>;
 
-export const NewPart = z.strictObject({ kind: PartKind, name: line(120), suffix: z.string().trim().regex(/^[.a-z0-9/-]{0,8}$/i).default('') });
+export const NewPart = z.strictObject({
+  kind: PartKind,
+  name: line(120),
+  suffix: z
+    .string()
+    .trim()
+    .regex(/^[.a-z0-9/-]{0,8}$/i)
+    .default(''),
+});
 export type NewPart = z.infer<typeof NewPart>;
 
 /** `POST /workroom/garments`: the client may choose the id, so that a repeated request makes one garment. */

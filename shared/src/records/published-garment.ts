@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { kindIds } from '../points/kinds.js';
+import { garmentKinds } from '../points/kinds.js';
 import { Day, LengthMm, Moment, pageOf, Uuid } from './common.js';
 import { ImageView } from './image.js';
 import { VersionState } from './record-moves.js';
@@ -27,7 +27,7 @@ export type PublishedMeasurement = z.infer<typeof PublishedMeasurement>;
 export const PublishedPart = z.object({
   /** The part's own number, `LH.1966.30.1`. */
   number: z.string(),
-  kind: z.enum(kindIds),
+  kind: z.enum(garmentKinds),
   name: z.string(),
   measuredOn: Day.nullable(),
   support: z.string().nullable(),
@@ -61,10 +61,15 @@ export const PublishedDocument = z.object({
   version: z.number().int(),
   ownNumber: z.string(),
   title: z.string(),
-  kind: z.enum([...kindIds, 'set']),
+  kind: z.enum([...garmentKinds, 'set']),
   wornBy: z.string(),
   description: z.string(),
-  date: z.object({ edtf: z.string(), display: z.string(), fromYear: z.number().int(), toYear: z.number().int() }),
+  date: z.object({
+    edtf: z.string(),
+    display: z.string(),
+    fromYear: z.number().int(),
+    toYear: z.number().int(),
+  }),
   maker: z.string().nullable(),
   label: z.object({ transcription: z.string(), where: z.string() }).nullable(),
   place: z.string().nullable(),
@@ -106,7 +111,9 @@ export const CatalogueCard = z.object({
   dateDisplay: z.string(),
   image: PublishedImage.nullable(),
   /** Three that say most for the kind, searched points first. */
-  measurements: z.array(z.object({ pointId: z.string(), label: z.string(), partName: z.string(), valueMm: LengthMm })),
+  measurements: z.array(
+    z.object({ pointId: z.string(), label: z.string(), partName: z.string(), valueMm: LengthMm }),
+  ),
 });
 export type CatalogueCard = z.infer<typeof CatalogueCard>;
 

@@ -44,7 +44,10 @@ export const SearchQuery = Paging.extend({
       z.string().transform((text, context) => {
         const filter = parseMeasure(text);
         if (filter) return filter;
-        context.addIssue({ code: 'custom', message: `Expected a measure such as waist:560..620, got "${text.slice(0, 80)}"` });
+        context.addIssue({
+          code: 'custom',
+          message: `Expected a measure such as waist:560..620, got "${text.slice(0, 80)}"`,
+        });
         return z.NEVER;
       }),
     ),

@@ -11,7 +11,10 @@ export const NewPassword = z
   .min(12, 'Use at least 12 characters. Three or four words that do not belong together are easy to keep')
   .max(256, 'Use at most 256 characters');
 
-export const SignIn = z.strictObject({ email: EmailAddress, password: z.string().min(1, 'Write your password').max(256) });
+export const SignIn = z.strictObject({
+  email: EmailAddress,
+  password: z.string().min(1, 'Write your password').max(256),
+});
 export type SignIn = z.infer<typeof SignIn>;
 
 /** Answer of `GET /session` and `POST /session`: who is signed in. */
@@ -42,17 +45,28 @@ export const Invitation = z.object({
 export type Invitation = z.infer<typeof Invitation>;
 
 /** The secret part of an invitation's link: 32 random bytes, base64url. It travels in the body, never in a query. */
-export const InvitationToken = z.strictObject({ token: z.string().regex(/^[\w-]{43}$/, 'The link is not complete') });
+export const InvitationToken = z.strictObject({
+  token: z.string().regex(/^[\w-]{43}$/, 'The link is not complete'),
+});
 
 /** `POST /invitations/look-up`: what the person is shown before choosing a password. */
-export const InvitationShown = z.object({ email: z.string(), name: z.string(), roles: z.array(Role), museum: z.string() });
+export const InvitationShown = z.object({
+  email: z.string(),
+  name: z.string(),
+  roles: z.array(Role),
+  museum: z.string(),
+});
 export type InvitationShown = z.infer<typeof InvitationShown>;
 
 export const AcceptInvitation = InvitationToken.extend({ name: line(120), password: NewPassword });
 export type AcceptInvitation = z.infer<typeof AcceptInvitation>;
 
 /** `POST /first-administrator`: works once, in an empty house, with the address that `npm start -- --empty` printed. */
-export const FirstAdministrator = InvitationToken.extend({ email: EmailAddress, name: line(120), password: NewPassword });
+export const FirstAdministrator = InvitationToken.extend({
+  email: EmailAddress,
+  name: line(120),
+  password: NewPassword,
+});
 export type FirstAdministrator = z.infer<typeof FirstAdministrator>;
 
 export const Person = z.object({

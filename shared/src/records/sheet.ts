@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { kindIds } from '../points/kinds.js';
+import { garmentKinds } from '../points/kinds.js';
 import { Day, LengthMm, line, Moment, prose, Uuid } from './common.js';
 
 /** What somebody did at the measuring table. One person may do several; reading and holding take two. */
@@ -40,7 +40,10 @@ export const SheetFacts = z
     fasteningPair: prose(300).default(''),
     note: prose(4000).default(''),
   })
-  .refine((facts) => facts.people.some((p) => p.duty === 'read'), { path: ['people'], message: 'Say who read the tape' })
+  .refine((facts) => facts.people.some((p) => p.duty === 'read'), {
+    path: ['people'],
+    message: 'Say who read the tape',
+  })
   .refine(
     (facts) => {
       const readers = facts.people.filter((p) => p.duty === 'read').map((p) => p.userId);
@@ -190,7 +193,7 @@ export const Sheet = z.object({
   partId: Uuid,
   garmentId: Uuid,
   garmentVersion: z.number().int(),
-  kind: z.enum(kindIds),
+  kind: z.enum(garmentKinds),
   protocolVersion: z.number().int(),
   state: SheetState,
   facts: z.object({

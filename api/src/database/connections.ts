@@ -1,0 +1,95 @@
+import type { DataSourceOptions } from 'typeorm';
+import type { Environment } from '../config/environment';
+import { AuditEntryRow } from '../audit/audit-entry.entity';
+import { SessionRow } from '../auth/session.entity';
+import { SignInSlowdown } from '../auth/sign-in-slowdown.entity';
+import { GarmentEditor } from '../garments/garment-editor.entity';
+import { GarmentRow } from '../garments/garment.entity';
+import { PartRow } from '../garments/part.entity';
+import { MailOutboxRow } from '../mail/mail-outbox.entity';
+import { FindingAnswerRow } from '../measuring/findings/finding-answer.entity';
+import { ReadingRow } from '../measuring/readings/reading.entity';
+import { SheetPersonRow } from '../measuring/sheets/sheet-person.entity';
+import { SheetRow } from '../measuring/sheets/sheet.entity';
+import { ImageRow } from '../media/image.entity';
+import { RevisionRow } from '../publishing/revision.entity';
+import { InvitationRow } from '../users/invitation.entity';
+import { SettingRow } from '../users/setting.entity';
+import { UserRow } from '../users/user.entity';
+import { AuditTrail1764550000001 } from './migrations/1764550000001-audit-trail';
+import { Catalogue1764550000002 } from './migrations/1764550000002-catalogue';
+import { Workroom1764550000000 } from './migrations/1764550000000-workroom';
+
+const entities = [
+  AuditEntryRow,
+  FindingAnswerRow,
+  GarmentEditor,
+  GarmentRow,
+  ImageRow,
+  InvitationRow,
+  MailOutboxRow,
+  PartRow,
+  ReadingRow,
+  RevisionRow,
+  SessionRow,
+  SettingRow,
+  SheetPersonRow,
+  SheetRow,
+  SignInSlowdown,
+  UserRow,
+];
+
+/** A statement that runs longer is ended, a caller who waits longer for a connection is told 503. */
+const statementSeconds = 15;
+const connectionWaitMs = 5_000;
+
+function mariadb(account: Environment['workroom'], database: string, connections: number) {
+  return {
+    type: 'mariadb',
+    host: account.host,
+    port: account.port,
+    username: account.username,
+    password: account.password,
+    database,
+    charset: 'utf8mb4',
+    timezone: 'Z',
+    synchronize: false,
+    supportBigNumbers: true,
+    bigNumberStrings: true,
+    connectTimeout: connectionWaitMs,
+    poolSize: connections,
+    extra: {
+      waitForConnections: true,
+      queueLimit: 200,
+      // Sent with the handshake's first query: strict types and an end to runaway statements.
+      flags: ['-FOUND_ROWS'],
+    },
+  } as const;
+}
+
+export const workroomConnection = (environment: Environment): DataSourceOptions => ({
+  ...mariadb(environment.workroom, 'ellwand', 10),
+  entities,
+});
+
+/** Reads published tables only. The name must be in the result too, or Nest cannot close the connection. */
+export const catalogueConnection = (environment: Environment) => ({
+  ...mariadb(environment.catalogue, 'ellwand_catalogue', 10),
+  name: 'catalogue',
+  entities: [],
+});
+
+/** The owner's connection: migrations and nothing else. */
+export function ownerConnection(environment: Environment): DataSourceOptions {
+  if (!environment.owner)
+    throw new Error('Migrations need ELLWAND_DB_OWNER_USER and ELLWAND_DB_OWNER_PASSWORD');
+  return {
+    ...mariadb(environment.owner, 'ellwand', 2),
+    entities: [],
+    migrations: [Workroom1764550000000, AuditTrail1764550000001, Catalogue1764550000002],
+    migrationsTableName: 'migration',
+    migrationsTransactionMode: 'none',
+  };
+}
+
+export { statementSeconds };

@@ -1,0 +1,35 @@
+import type { GarmentRecord } from '@ellwand/shared/records/garment';
+import type { Image } from '@ellwand/shared/records/image';
+import type { GarmentKind } from '@ellwand/shared/points/kinds';
+import type { SheetPerson, StoredReading } from '@ellwand/shared/records/sheet';
+import type { z } from 'zod';
+
+/** The sheet that speaks for a part when a garment is published: the newest complete one. */
+export interface SnapshotSheet {
+  readonly id: string;
+  readonly protocolVersion: number;
+  readonly measuredOn: string;
+  readonly support: string;
+  readonly tape: string;
+  readonly tapeLengthMm: string;
+  readonly fasteningPair: string;
+  readonly people: readonly (z.infer<typeof SheetPerson> & { readonly name: string })[];
+  readonly readings: readonly StoredReading[];
+}
+
+export interface SnapshotPart {
+  readonly id: string;
+  readonly suffix: string;
+  readonly kind: GarmentKind;
+  readonly name: string;
+  readonly sheet: SnapshotSheet | null;
+}
+
+/** A garment frozen when it was sent to review: record, parts with their sheets, pictures, and who edited. */
+export interface Snapshot {
+  readonly garmentId: string;
+  readonly record: GarmentRecord;
+  readonly parts: readonly SnapshotPart[];
+  readonly images: readonly Image[];
+  readonly editedBy: readonly string[];
+}
