@@ -83,16 +83,17 @@ function stopSignal() {
     stopRunningPrograms();
     resolve();
   };
+  /** @type {import('./house.mjs').Step} */
+  const stepUnlessCalled = (label, work) => {
+    if (isCalled) throw new Error('asked to stop while starting');
+    return step(label, work);
+  };
   for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP']) process.on(signal, onSignal);
   return {
     called,
     fail,
     isCalled: () => isCalled,
-    /** @type {import('./house.mjs').Step} */
-    stepUnlessCalled(label, work) {
-      if (isCalled) throw new Error('asked to stop while starting');
-      return step(label, work);
-    },
+    stepUnlessCalled,
   };
 }
 

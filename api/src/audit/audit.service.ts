@@ -12,7 +12,7 @@ export interface AuditNote {
     'garment' | 'part' | 'sheet' | 'reading' | 'image' | 'user' | 'invitation' | 'session';
   readonly subjectId: string | null;
   readonly summary: string;
-  readonly facts?: Record<string, unknown>;
+  readonly facts?: Readonly<Record<string, string | number | boolean | null | readonly string[]>>;
 }
 
 /** Writes the audit trail, in the transaction of the verb it tells of: both stand or neither does. */

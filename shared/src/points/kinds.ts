@@ -1,4 +1,4 @@
-/** The kinds of garment, and of part, that Ellwand keeps. Ids are kebab-case and never change. */
+/** The kinds of part that have measuring points of their own. A `set` joins garments and is never measured itself. */
 export const kindIds = [
   'dress',
   'bodice',
@@ -20,27 +20,41 @@ export const kindIds = [
   'glove',
   'shoe',
 ] as const;
+
 export type GarmentKind = (typeof kindIds)[number];
 
-/** What a kind is called, one and many, as it stands in a sentence. */
-export const kindLabels: Readonly<Record<GarmentKind, { readonly one: string; readonly many: string }>> = {
-  dress: { one: 'dress', many: 'dresses' },
-  bodice: { one: 'bodice', many: 'bodices' },
-  skirt: { one: 'skirt', many: 'skirts' },
-  coat: { one: 'coat', many: 'coats' },
-  jacket: { one: 'jacket', many: 'jackets' },
-  waistcoat: { one: 'waistcoat', many: 'waistcoats' },
-  trousers: { one: 'trousers', many: 'trousers' },
-  breeches: { one: 'breeches', many: 'breeches' },
-  cape: { one: 'cape', many: 'capes' },
-  shirt: { one: 'shirt', many: 'shirts' },
-  chemise: { one: 'chemise', many: 'chemises' },
-  corset: { one: 'corset', many: 'corsets' },
-  crinoline: { one: 'crinoline', many: 'crinolines' },
-  bustle: { one: 'bustle', many: 'bustles' },
-  petticoat: { one: 'petticoat', many: 'petticoats' },
-  'child-dress': { one: 'child’s dress', many: 'children’s dresses' },
-  hat: { one: 'hat', many: 'hats' },
-  glove: { one: 'pair of gloves', many: 'gloves' },
-  shoe: { one: 'pair of shoes', many: 'shoes' },
+export interface KindLabel {
+  readonly singular: string;
+  readonly plural: string;
+}
+
+/** In sentence case, as they stand alone; `lowerKind` for the middle of a sentence. */
+export const kindLabels: Readonly<Record<GarmentKind, KindLabel>> = {
+  dress: { singular: 'Dress', plural: 'Dresses' },
+  bodice: { singular: 'Bodice', plural: 'Bodices' },
+  skirt: { singular: 'Skirt', plural: 'Skirts' },
+  coat: { singular: 'Coat', plural: 'Coats' },
+  jacket: { singular: 'Jacket', plural: 'Jackets' },
+  waistcoat: { singular: 'Waistcoat', plural: 'Waistcoats' },
+  trousers: { singular: 'Trousers', plural: 'Trousers' },
+  breeches: { singular: 'Breeches', plural: 'Breeches' },
+  cape: { singular: 'Cape', plural: 'Capes' },
+  shirt: { singular: 'Shirt', plural: 'Shirts' },
+  chemise: { singular: 'Chemise', plural: 'Chemises' },
+  corset: { singular: 'Corset', plural: 'Corsets' },
+  crinoline: { singular: 'Crinoline', plural: 'Crinolines' },
+  bustle: { singular: 'Bustle', plural: 'Bustles' },
+  petticoat: { singular: 'Petticoat', plural: 'Petticoats' },
+  'child-dress': { singular: 'Child’s dress', plural: 'Children’s dresses' },
+  hat: { singular: 'Hat', plural: 'Hats' },
+  glove: { singular: 'Gloves', plural: 'Gloves' },
+  shoe: { singular: 'Shoes', plural: 'Shoes' },
 };
+
+export function isGarmentKind(text: string): text is GarmentKind {
+  return kindIds.some((kind) => kind === text);
+}
+
+export function lowerKind(kind: GarmentKind): string {
+  return kindLabels[kind].singular.toLowerCase();
+}

@@ -1,11 +1,11 @@
 import { z } from 'zod';
-import { garmentKinds } from '../points/kinds.js';
+import { kindIds } from '../points/kinds.js';
 import { line, Moment, pageOf, Paging, prose, Uuid } from './common.js';
 import { Image } from './image.js';
 import { RecordStage } from './record-moves.js';
 import { SheetSummary } from './sheet.js';
 
-export const PartKind = z.enum(garmentKinds);
+export const PartKind = z.enum(kindIds);
 
 export const wornByValues = ['woman', 'man', 'child', 'unknown'] as const;
 export const WornBy = z.enum(wornByValues);
@@ -50,7 +50,7 @@ export const RightsUri = z.enum(Object.keys(rightsStatements) as [keyof typeof r
 export const GarmentRecord = z.strictObject({
   ownNumber: line(60),
   title: line(200),
-  kind: z.enum([...garmentKinds, 'set']),
+  kind: z.enum([...kindIds, 'set']),
   wornBy: WornBy.default('unknown'),
   description: prose(8000).default(''),
   /** EDTF (ISO 8601-2): `1885~`, `1858/1861`, `1885~/1890~`. */

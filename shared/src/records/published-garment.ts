@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { garmentKinds } from '../points/kinds.js';
+import { kindIds } from '../points/kinds.js';
 import { Day, LengthMm, Moment, pageOf, Uuid } from './common.js';
 import { ImageView } from './image.js';
 import { VersionState } from './record-moves.js';
@@ -27,7 +27,7 @@ export type PublishedMeasurement = z.infer<typeof PublishedMeasurement>;
 export const PublishedPart = z.object({
   /** The part's own number, `LH.1966.30.1`. */
   number: z.string(),
-  kind: z.enum(garmentKinds),
+  kind: z.enum(kindIds),
   name: z.string(),
   measuredOn: Day.nullable(),
   support: z.string().nullable(),
@@ -61,7 +61,7 @@ export const PublishedDocument = z.object({
   version: z.number().int(),
   ownNumber: z.string(),
   title: z.string(),
-  kind: z.enum([...garmentKinds, 'set']),
+  kind: z.enum([...kindIds, 'set']),
   wornBy: z.string(),
   description: z.string(),
   date: z.object({

@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { garmentKinds } from '../points/kinds.js';
+import { kindIds } from '../points/kinds.js';
 import { Day, LengthMm, line, Moment, prose, Uuid } from './common.js';
 
 /** What somebody did at the measuring table. One person may do several; reading and holding take two. */
@@ -193,7 +193,7 @@ export const Sheet = z.object({
   partId: Uuid,
   garmentId: Uuid,
   garmentVersion: z.number().int(),
-  kind: z.enum(garmentKinds),
+  kind: z.enum(kindIds),
   protocolVersion: z.number().int(),
   state: SheetState,
   facts: z.object({
