@@ -11,5 +11,5 @@ export class AuditEntryRow {
   @Column({ name: 'subject_kind', type: 'varchar', length: 30 }) subjectKind: string;
   @Column({ name: 'subject_id', type: 'uuid', nullable: true }) subjectId: string | null;
   @Column({ type: 'varchar', length: 500 }) summary: string;
-  @Column({ type: 'json' }) facts: Record<string, unknown>;
+  @Column({ type: 'json' }) facts: object;
 }
