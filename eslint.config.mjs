@@ -72,6 +72,41 @@ export default tseslint.config(
       '@typescript-eslint/no-unsafe-argument': 'off',
     },
   },
+  {
+    files: ['shared/src/**/*.ts'],
+    ignores: ['**/*.spec.ts', 'shared/src/testing/**'],
+    rules: {
+      'no-restricted-imports': [
+        'error',
+        {
+          patterns: [
+            {
+              regex: '^(?!\\.{1,2}/|(zod|fraction\\.js|@edtf-ts/core)$)',
+              message:
+                'shared knows no framework and does no I/O: it imports itself, zod, fraction.js and @edtf-ts/core.',
+            },
+          ],
+        },
+      ],
+    },
+  },
+  {
+    files: ['api/src/catalogue/**/*.ts'],
+    rules: {
+      'no-restricted-imports': [
+        'error',
+        {
+          paths: [
+            {
+              name: '@nestjs/typeorm',
+              message:
+                'Unnamed, it hands out the account of the Workroom: take the connection from common/catalogue-connection.',
+            },
+          ],
+        },
+      ],
+    },
+  },
   // tsc reads these files too (checkJs) and knows Node's globals; ESLint's own list would have to be kept by hand.
   { files: ['**/*.mjs', '**/*.cjs'], rules: { 'no-undef': 'off' } },
 );
