@@ -1,0 +1,77 @@
+/** The value of a point: the mean of the rounds that stand, and how far it can be trusted. */
+import { findMeasuringPoint } from '../points/measuring-points.js';
+import { type MeasuringHow } from '../points/point.js';
+import { type Length, lengthOf, longestOf, shortestOf, subtract } from '../units/length.js';
+import { divideHalfUp } from '../units/rounding.js';
+import { standingReadings, type Reading, type TakenReading } from './reading.js';
+import { readingStep } from './reading-step.js';
+import { layingUncertaintyMm, rootOfSquares, spreadUncertaintyMm, stepUncertaintyMm } from './uncertainty.js';
+import { tapeJoins } from './whole-value.js';
+
+export interface AcceptedValue {
+  readonly pointId: string;
+  /** Mean of the rounds, exact and rounded once, half-up, to 0.0001 mm. */
+  readonly value: Length;
+  /** How many readings it is the mean of. */
+  readonly n: number;
+  /** Longest less shortest reading; zero for a single one. */
+  readonly spread: Length;
+  /** Combined standard uncertainty in mm: reading step, method, tape joins, spread. */
+  readonly uncertaintyMm: number;
+  readonly tapeJoins: number;
+}
+
+/** Mean of lengths, rounded once, half-up, to 0.0001 mm. Throws RangeError for an empty list. */
+export function meanOf(lengths: readonly Length[]): Length {
+  const sum = lengths.reduce((total, length) => total + BigInt(length), 0n);
+  return lengthOf(Number(divideHalfUp(sum, BigInt(lengths.length))));
+}
+
+/** Nothing when no reading of the point was taken and stands. The order of readings does not matter. */
+export function acceptedValue(readings: readonly Reading[], pointId: string): AcceptedValue | undefined {
+  const taken = standingReadings(readings, pointId);
+  const lengths = taken.map(({ length }) => length);
+  const [first, ...others] = lengths;
+  if (first === undefined) return undefined;
+  const spread = subtract(longestOf(first, ...others), shortestOf(first, ...others));
+  return {
+    pointId,
+    value: meanOf(lengths),
+    n: taken.length,
+    spread,
+    uncertaintyMm: combinedUncertaintyMm(taken, spread),
+    tapeJoins: Math.max(...taken.map(joinsOf)),
+  };
+}
+
+/**
+ * Reading again by the same method does not make the method better, so step and laying count once, at the
+ * worst of the rounds; only the spread is the rounds' own.
+ */
+function combinedUncertaintyMm(taken: readonly TakenReading[], spread: Length): number {
+  return rootOfSquares([
+    Math.max(...taken.map((reading) => stepUncertaintyMm(readingStep(reading), howTaken(reading)))),
+    Math.max(...taken.map((reading) => layingUncertaintyMm(howTaken(reading), joinsOf(reading)))),
+    spreadUncertaintyMm(spread),
+  ]);
+}
+
+/** The reading's own method, else its point's; a point unknown here counts as laid along a curve. */
+export function howTaken({ method, pointId }: TakenReading): MeasuringHow {
+  return method ?? findMeasuringPoint(pointId)?.how ?? 'curve';
+}
+
+function joinsOf({ tapeLengths }: TakenReading): number {
+  return tapeLengths ? tapeJoins(tapeLengths) : 0;
+}
+
+/** The accepted value of every point that has one, by point, in the order the points first appear. */
+export function acceptedValues(readings: readonly Reading[]): ReadonlyMap<string, AcceptedValue> {
+  const pointIds = new Set(readings.map(({ pointId }) => pointId));
+  return new Map(
+    [...pointIds].flatMap((pointId) => {
+      const accepted = acceptedValue(readings, pointId);
+      return accepted ? [[pointId, accepted] as const] : [];
+    }),
+  );
+}
