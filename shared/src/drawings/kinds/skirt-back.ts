@@ -2,8 +2,8 @@ import { buttons, cloth, fold, piece, seam, stitching } from '../diagram/layers.
 import { type View } from '../diagram/model.js';
 import { pleatsBetween } from './pleats.js';
 
-const FLOUNCE_TOP = '0,1242{0}..{-14}170,1220..{-46}374,1040';
-const FLOUNCE_FOOT = '0,1392{0}..{-12}220,1366..{-52}410,1300..{-68}446,1216';
+const FLOUNCE_TOP = '0,1242{0}..{-14}170,1220..{-46}384,1040';
+const FLOUNCE_FOOT = '0,1392{0}..{-12}220,1366..{-52}404,1312..{-84}438,1216';
 
 /** The same skirt, back up: gathered at the placket, the fullness falling into the train. */
 export const skirtBack: View = {
@@ -14,12 +14,12 @@ export const skirtBack: View = {
     waistSide: [132, 0],
     centre: [0, 4],
     hip: [198, 176],
-    corner: [446, 1216],
+    corner: [438, 1216],
     hemBack: [0, 1392],
   },
   layers: [
     cloth(
-      'centre!{0}..{-3}waistSide!{54}..{76}hip..{74}262,560..{66}338,900..{46}corner!{112}..{128}410,1300..{180}hemBack!',
+      'centre!{0}..{-3}waistSide!{54}..{76}hip..{74}262,560..{66}334,900..{84}corner{96}..{128}404,1312..{180}hemBack!',
     ),
     seam('0,4--0,1400', 'once'),
     seam('8,4--8,262', 'once'),
@@ -38,7 +38,7 @@ export const skirtBack: View = {
     fold('190,720{70}..{58}298,1080'),
     fold('240,640{72}..{58}330,920'),
     seam(FLOUNCE_TOP),
-    stitching('0,1253{0}..{-14}174,1230..{-46}380,1048'),
+    stitching('0,1253{0}..{-14}174,1230..{-46}390,1048'),
     ...pleatsBetween(FLOUNCE_TOP, FLOUNCE_FOOT, 19, 0.012).map((pleat) => fold(pleat)),
     piece('0,-34!{0}..{-3}bandTop!--waistSide!{177}..{180}centre!'),
     seam('8,-36--8,6', 'once', 'last'),

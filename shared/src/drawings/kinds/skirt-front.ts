@@ -2,8 +2,8 @@ import { cloth, fold, lining, piece, seam, stitching } from '../diagram/layers.j
 import { type View } from '../diagram/model.js';
 import { pleatsBetween } from './pleats.js';
 
-const FLOUNCE_TOP = '0,898{0}..{22}190,924..{50}366,1030';
-const FLOUNCE_FOOT = '0,1040{0}..{20}220,1072..{44}446,1216';
+const FLOUNCE_TOP = '0,898{0}..{22}190,924..{46}380,1046';
+const FLOUNCE_FOOT = '0,1040{0}..{20}220,1072..{44}438,1216';
 
 /** A trained skirt of about 1880, front up: flat over the hips, a kilted flounce, the train lying behind. */
 export const skirtFront: View = {
@@ -14,17 +14,17 @@ export const skirtFront: View = {
     waistSide: [132, 0],
     centre: [0, 8],
     hip: [198, 176],
-    corner: [446, 1216],
+    corner: [438, 1216],
     hemFront: [0, 1040],
     sideHem: [276, 1098],
   },
   layers: [
-    lining('0,1030!--446,1190!--corner!{112}..{128}410,1300..{180}0,1392!'),
-    stitching('0,1366!{0}..{-48}404,1262', 'both', 'last'),
+    lining('0,1000!--320,1090!--corner!{96}..{128}404,1312..{180}0,1392!'),
+    stitching('0,1366!{0}..{-48}402,1262', 'both', 'last'),
     seam('0,1040!--0,1392', 'once', 'last'),
     seam('120,1040!{74}..{70}176,1400', 'both', 'last'),
     cloth(
-      'centre!{0}..{-5}waistSide!{54}..{76}hip..{74}262,560..{66}338,900..{46}corner!{-136}..{200}220,1072..{180}hemFront!',
+      'centre!{0}..{-5}waistSide!{54}..{76}hip..{74}262,560..{66}334,900..{84}corner!{-136}..{200}220,1072..{180}hemFront!',
     ),
     seam('50,6{80}..{82}96,300{82}..{84}150,930'),
     seam('102,2{62}..{78}160,220{78}..{76}236,640..{72}300,1000'),
@@ -36,7 +36,7 @@ export const skirtFront: View = {
     fold('270,700{72}..{62}330,960'),
     fold('60,20{86}..{86}70,230'),
     seam(FLOUNCE_TOP),
-    stitching('0,909{0}..{22}188,935..{50}362,1041'),
+    stitching('0,909{0}..{22}188,935..{46}376,1057'),
     ...pleatsBetween(FLOUNCE_TOP, FLOUNCE_FOOT, 17, 0.012).map((pleat) => fold(pleat)),
     piece('0,-28!{0}..{-6}bandTop!--waistSide!{175}..{180}centre!'),
   ],

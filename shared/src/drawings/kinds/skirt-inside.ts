@@ -14,16 +14,15 @@ export const skirtInside: View = {
     placketTop: [32, -36],
     placketEnd: [0, 262],
     hip: [200, 176],
-    corner: [446, 1216],
+    corner: [438, 1216],
     hemBack: [0, 1392],
   },
   layers: [
     pieceLining('0,-24!{0}..{-4}bandTop!--waistSide!{178}..{180}0,12!'),
     lining('0,8!--waistSide!--100,300!--0,300!'),
     lining(
-      'placket!{0}..{-3}waistSide!{54}..{76}hip..{74}262,560..{66}338,900..{46}corner!{112}..{128}410,1300..{180}hemBack!' +
-        '--placketEnd!{-90}..{-82}placket!',
-      'both',
+      'placketEnd!{-90}..{-82}placket!{0}..{-3}waistSide!{54}..{76}hip..{74}262,560..{66}334,900..{84}corner{96}..{128}404,1312' +
+        '..{180}hemBack!',
     ),
     seam('placketEnd--0,1400', 'once'),
     stitching('6,270--6,1290'),
@@ -35,7 +34,7 @@ export const skirtInside: View = {
     fold('60,560{84}..{80}120,1180'),
     fold('160,620{76}..{66}246,980'),
     seam(HEM_FACING),
-    stitching('0,1380{0}..{-12}216,1355..{-52}402,1290..{-68}436,1210'),
+    stitching('0,1380{0}..{-12}216,1355..{-52}396,1300..{-82}429,1210'),
     // Tapes that draw the fullness back, tied behind.
     piece('140,470!{178}..{170}22,486!--22,496!{-10}..{-2}140,480!', 'both'),
     seam('22,490{200}..{110}-14,520{110}..{70}-8,570', 'once', 'all'),

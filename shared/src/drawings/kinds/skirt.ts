@@ -7,13 +7,13 @@ import { skirtInside } from './skirt-inside.js';
 export const skirt: GarmentDiagram = {
   kind: 'skirt',
   title: 'Skirt',
-  leastScale: 0.24,
+  leastScale: 0.22,
   views: [skirtFront, skirtBack, skirtInside],
   lines: [
-    allRound('waistband', 'inside', ['~placketTop--~bandTop', 'bandTop--placketTop'], { beside: -19 }),
+    allRound('waistband', 'inside', ['-31,-19---141,-19', '141,-19--31,-19']),
     allRound('high-hip', 'inside', '-166,84--166,84', { sag: 10 }),
     allRound('hip', 'inside', '~hip--hip', { sag: 16 }),
-    allRound('hem', 'inside', '~corner{68}..{52}-410,1300..{0}hemBack..{-52}410,1300..{-68}corner', {
+    allRound('hem', 'inside', '~corner{84}..{52}-404,1312..{0}hemBack..{-52}404,1312..{-84}corner', {
       beside: -16,
     }),
     straightLine('hem-depth', 'inside', '-60,1282---60,1388'),
