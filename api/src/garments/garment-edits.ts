@@ -12,7 +12,6 @@ import { GarmentRow } from './garment.entity';
 const lockedBecause: Partial<Record<RecordStage, string>> = {
   'in-review': 'This record is in review. It can be edited again once a curator returns it.',
   approved: 'This record is approved. Return it to draft before editing it.',
-  withdrawn: 'This garment is withdrawn. Take it up again before editing it.',
 };
 
 /**
@@ -49,10 +48,19 @@ export class GarmentEdits {
     return this.edit(tx, actor, garment, {});
   }
 
+  /**
+   * Marks that a part of this garment is being measured. The record's version stays, so that readings do not get
+   * in the way of whoever describes the garment; who measured is known from the sheet.
+   */
+  async noteMeasuring(tx: Tx, actor: Pick<Actor, 'id'>, garmentId: string): Promise<void> {
+    const garment = await this.lock(tx, garmentId);
+    refuseLocked(garment);
+    if (garment.stage !== 'draft') await this.set(tx, actor, garment, { stage: 'draft' });
+  }
+
   /** `noteEdit` for a row that is already locked, together with the changes to its own columns. */
   async edit(tx: Tx, actor: Pick<Actor, 'id'>, garment: GarmentRow, changes: Partial<GarmentRow>): Promise<GarmentRow> {
-    const locked = lockedBecause[garment.stage];
-    if (locked !== undefined) throw conflict('record.locked', locked, { stage: garment.stage });
+    refuseLocked(garment);
     const now = this.clock.now();
     await tx
       .createQueryBuilder()
@@ -78,4 +86,9 @@ export class GarmentEdits {
     if (affected !== 1) throw staleVersion(garment.version, garment.version + 1, null, null);
     return { ...garment, ...next };
   }
+}
+
+function refuseLocked({ stage }: GarmentRow): void {
+  const because = lockedBecause[stage];
+  if (because !== undefined) throw conflict('record.locked', because, { stage });
 }

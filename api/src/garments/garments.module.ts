@@ -1,4 +1,13 @@
 import { Module } from '@nestjs/common';
+import { GarmentEdits } from './garment-edits';
+import { GarmentListService } from './garment-list.service';
+import { GarmentView } from './garment-view';
+import { GarmentsController } from './garments.controller';
+import { GarmentsService } from './garments.service';
 
-@Module({})
+@Module({
+  controllers: [GarmentsController],
+  providers: [GarmentEdits, GarmentView, GarmentsService, GarmentListService],
+  exports: [GarmentEdits, GarmentView],
+})
 export class GarmentsModule {}

@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import { kindIds } from '../points/kinds.js';
+import { levelLabels, notTakenReasons, type LevelFoundBy as Level, type NotTakenReason as Reason } from '../readings/reading.js';
 import { Day, LengthMm, line, Moment, prose, Uuid } from './common.js';
 
 /** What somebody did at the measuring table. One person may do several; reading and holding take two. */
@@ -21,8 +22,7 @@ export const supportLabels: Readonly<Record<(typeof supports)[number], string>> 
 };
 
 /** How the bust, waist or hip level was found. */
-export const levelFoundByValues = ['band', 'seam', 'nicks', 'dart-tips', 'stated'] as const;
-export const LevelFoundBy = z.enum(levelFoundByValues);
+export const LevelFoundBy = z.enum(Object.keys(levelLabels) as [Level, ...Level[]]);
 
 /** The facts of a measuring: who, when, where, on what, with which tape. */
 export const SheetFacts = z
@@ -57,18 +57,7 @@ export type SheetFactsInput = z.input<typeof SheetFacts>;
 
 export const NewSheet = z.strictObject({ id: Uuid.optional(), facts: SheetFacts });
 
-export const notTakenReasonIds = [
-  'absent',
-  'too-fragile',
-  'cannot-be-opened',
-  'fastening-stuck',
-  'sewn-to-a-mount',
-  'not-accessible',
-  'not-applicable',
-  'altered',
-  'stopped-damage-seen',
-] as const;
-export const NotTakenReason = z.enum(notTakenReasonIds);
+export const NotTakenReason = z.enum(Object.keys(notTakenReasons) as [Reason, ...Reason[]]);
 
 export const TypedUnit = z.enum(['mm', 'cm', 'in']);
 
@@ -171,7 +160,9 @@ export const DerivedView = z.object({
   id: z.string(),
   label: z.string(),
   formula: z.string(),
-  /** A length, or a plain ratio; one of the two. */
+  /** The formula with its figures: "1400 mm − 1020 mm = 380 mm". */
+  worked: z.string(),
+  /** A length (it may be negative), or a plain ratio; one of the two. */
   valueMm: z.string().nullable(),
   ratio: z.string().nullable(),
   uncertaintyMm: z.string().nullable(),

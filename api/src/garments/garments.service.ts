@@ -1,0 +1,142 @@
+import { Injectable } from '@nestjs/common';
+import type { Garment, GarmentRecord, NewGarment, NewPart } from '@ellwand/shared/records/garment';
+import { v7 as uuidv7 } from 'uuid';
+import { AuditService } from '../audit/audit.service';
+import type { Actor } from '../common/actor';
+import { Clock } from '../common/clock';
+import { conflict, notFound } from '../common/refusal';
+import { type Tx, Work } from '../common/work';
+import { SheetRow } from '../measuring/sheets/sheet.entity';
+import { GarmentEditor } from './garment-editor.entity';
+import { GarmentEdits } from './garment-edits';
+import { GarmentView } from './garment-view';
+import { GarmentRow } from './garment.entity';
+import { PartRow } from './part.entity';
+
+/** Garments and their parts: made, described, taken apart. */
+@Injectable()
+export class GarmentsService {
+  constructor(
+    private readonly work: Work,
+    private readonly edits: GarmentEdits,
+    private readonly view: GarmentView,
+    private readonly audit: AuditService,
+    private readonly clock: Clock,
+  ) {}
+
+  read(id: string): Promise<Garment> {
+    return this.view.of(this.work.reader, id);
+  }
+
+  /** Makes a garment. A repeated request with the same id answers with the garment that it made. */
+  make(made: NewGarment, actor: Actor): Promise<Garment> {
+    const id = made.id ?? uuidv7();
+    return this.work.run(async (tx) => {
+      if (await tx.existsBy(GarmentRow, { id })) return this.view.of(tx, id);
+      await refuseUsedNumber(tx, made.record.ownNumber, id);
+      const now = this.clock.now();
+      await tx.insert(GarmentRow, {
+        ...columnsOf(made.record),
+        id,
+        stage: 'draft',
+        version: 1,
+        isPublic: false,
+        createdAt: now,
+        createdBy: actor.id,
+        updatedAt: now,
+        updatedBy: actor.id,
+      });
+      await tx.insert(GarmentEditor, { garmentId: id, userId: actor.id, editedAt: now });
+      for (const [position, part] of made.parts.entries()) await insertPart(tx, id, part, position);
+      await this.audit.note(tx, actor, {
+        verb: 'make',
+        subjectKind: 'garment',
+        subjectId: id,
+        summary: `${actor.name} made the record of ${made.record.ownNumber}`,
+      });
+      return this.view.of(tx, id);
+    });
+  }
+
+  rewrite(id: string, seen: number, record: GarmentRecord, actor: Actor): Promise<Garment> {
+    return this.work.run(async (tx) => {
+      const garment = await this.edits.lockAt(tx, id, seen);
+      await refuseUsedNumber(tx, record.ownNumber, id);
+      await this.edits.edit(tx, actor, garment, columnsOf(record));
+      await this.audit.note(tx, actor, {
+        verb: 'edit',
+        subjectKind: 'garment',
+        subjectId: id,
+        summary: `${actor.name} edited the record of ${record.ownNumber}`,
+        facts: { fields: changedFields(garment.record, record) },
+      });
+      return this.view.of(tx, id);
+    });
+  }
+
+  addPart(id: string, seen: number, part: NewPart, actor: Actor): Promise<Garment> {
+    return this.work.run(async (tx) => {
+      const garment = await this.edits.edit(tx, actor, await this.edits.lockAt(tx, id, seen), {});
+      const parts = await tx.find(PartRow, { where: { garmentId: id } });
+      if (parts.length >= 12) throw conflict('part.too-many', 'A garment has at most twelve parts.');
+      if (parts.some((other) => other.suffix === part.suffix)) {
+        throw conflict('part.number-used', `Part number "${part.suffix}" is used already on this garment.`);
+      }
+      const position = Math.max(-1, ...parts.map((other) => other.position)) + 1;
+      const partId = await insertPart(tx, id, part, position);
+      await this.audit.note(tx, actor, {
+        verb: 'add',
+        subjectKind: 'part',
+        subjectId: partId,
+        summary: `${actor.name} added ${part.name} to ${garment.ownNumber}`,
+      });
+      return this.view.of(tx, id);
+    });
+  }
+
+  /** Takes away a part that nobody has measured yet. */
+  removePart(partId: string, seen: number, actor: Actor): Promise<Garment> {
+    return this.work.run(async (tx) => {
+      const part = await tx.findOne(PartRow, { where: { id: partId } });
+      if (!part) throw notFound('part.unknown', 'part');
+      const garment = await this.edits.edit(tx, actor, await this.edits.lockAt(tx, part.garmentId, seen), {});
+      if (await tx.existsBy(SheetRow, { partId })) {
+        throw conflict('part.measured', `${part.name} has a measuring sheet and cannot be taken away.`);
+      }
+      if ((await tx.countBy(PartRow, { garmentId: garment.id })) === 1) {
+        throw conflict('part.last', 'A garment has at least one part.');
+      }
+      await tx.delete(PartRow, { id: partId });
+      await this.audit.note(tx, actor, {
+        verb: 'remove',
+        subjectKind: 'part',
+        subjectId: partId,
+        summary: `${actor.name} took ${part.name} away from ${garment.ownNumber}`,
+      });
+      return this.view.of(tx, garment.id);
+    });
+  }
+}
+
+/** What lists need stands in columns of its own, always the same as in the record. */
+function columnsOf(record: GarmentRecord): Pick<GarmentRow, 'ownNumber' | 'title' | 'kind' | 'record'> {
+  return { ownNumber: record.ownNumber, title: record.title, kind: record.kind, record };
+}
+
+async function refuseUsedNumber(tx: Tx, ownNumber: string, exceptId: string): Promise<void> {
+  const other = await tx.findOne(GarmentRow, { where: { ownNumber } });
+  if (!other || other.id === exceptId) return;
+  const message = `${ownNumber} is the number of “${other.title}” already.`;
+  throw conflict('garment.number-used', message, { errors: [{ pointer: '/record/ownNumber', detail: message }] });
+}
+
+async function insertPart(tx: Tx, garmentId: string, part: NewPart, position: number): Promise<string> {
+  const id = uuidv7();
+  await tx.insert(PartRow, { id, garmentId, suffix: part.suffix, kind: part.kind, name: part.name, position });
+  return id;
+}
+
+function changedFields(before: GarmentRecord, after: GarmentRecord): string[] {
+  const fields = Object.keys(after) as (keyof GarmentRecord)[];
+  return fields.filter((field) => JSON.stringify(before[field]) !== JSON.stringify(after[field]));
+}

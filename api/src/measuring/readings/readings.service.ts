@@ -1,0 +1,128 @@
+import { Injectable } from '@nestjs/common';
+import type { NewReading, ReadingResults } from '@ellwand/shared/records/sheet';
+import type { z } from 'zod';
+import { AuditService } from '../../audit/audit.service';
+import type { Actor } from '../../common/actor';
+import { Clock } from '../../common/clock';
+import { conflict } from '../../common/refusal';
+import { type Tx, Work } from '../../common/work';
+import { SheetEdits, type SheetInHand } from '../sheets/sheet-edits';
+import { SheetPersonRow } from '../sheets/sheet-person.entity';
+import { takeIn, type TapeFacts } from './reading-intake';
+import { ReadingRow } from './reading.entity';
+import { toStored } from './stored-reading';
+
+type Results = z.output<typeof ReadingResults>;
+type Result = Results['results'][number];
+
+/**
+ * Takes readings in, batch by batch. Each carries its own id, so that a batch sent twice changes nothing; each
+ * correction names the reading it replaces, so that two people never overwrite one another without seeing it.
+ */
+@Injectable()
+export class ReadingsService {
+  constructor(
+    private readonly work: Work,
+    private readonly sheets: SheetEdits,
+    private readonly audit: AuditService,
+    private readonly clock: Clock,
+  ) {}
+
+  takeIn(sheetId: string, readings: readonly NewReading[], actor: Actor): Promise<Results> {
+    return this.work.run(async (tx) => {
+      const inHand = await this.sheets.take(tx, actor, sheetId);
+      const facts = await tapeFacts(tx, inHand);
+      const results: Result[] = [];
+      for (const reading of readings) results.push(await this.takeOne(tx, inHand, facts, reading, actor));
+      const kept = results.filter((result) => result.outcome === 'kept').length;
+      if (kept === 0) return { sheetVersion: inHand.sheet.version, results };
+      const { version } = await this.sheets.set(tx, actor, inHand.sheet, {});
+      await this.audit.note(tx, actor, {
+        verb: 'read',
+        subjectKind: 'sheet',
+        subjectId: sheetId,
+        summary: `${actor.name} entered ${kept === 1 ? 'a reading' : `${kept} readings`} of ${inHand.part.name}`,
+        facts: { readings: results.filter((result) => result.outcome === 'kept').map((result) => result.id) },
+      });
+      return { sheetVersion: version, results };
+    });
+  }
+
+  private async takeOne(tx: Tx, { sheet }: SheetInHand, facts: TapeFacts, reading: NewReading, actor: Actor): Promise<Result> {
+    const already = await tx.findOne(ReadingRow, { where: { id: reading.id } });
+    if (already) return repeated(already, sheet.id, reading);
+    // A repeat of what was kept before the sheet was completed is fine; anything new is not.
+    if (sheet.state === 'complete') throw conflict('sheet.complete', 'This sheet is complete. Open it again to go on.');
+    const intake = takeIn(reading, facts);
+    if (!intake.accepted) return { id: reading.id, outcome: 'refused', detail: intake.because };
+    const standing = await tx.findOne(ReadingRow, {
+      where: { sheetId: sheet.id, pointId: reading.pointId, round: reading.round, stands: true },
+    });
+    if ((standing?.id ?? null) !== reading.replaces) return disputed(reading, standing);
+
+    if (standing) await tx.update(ReadingRow, { id: standing.id }, { stands: false });
+    const row = this.rowOf(sheet.id, reading, intake, actor);
+    await tx.insert(ReadingRow, row);
+    return { id: reading.id, outcome: 'kept', reading: toStored(row) };
+  }
+
+  private rowOf(
+    sheetId: string,
+    reading: NewReading,
+    intake: Extract<ReturnType<typeof takeIn>, { accepted: true }>,
+    actor: Actor,
+  ): ReadingRow {
+    const taken = reading.state === 'taken' ? reading : null;
+    return {
+      id: reading.id,
+      sheetId,
+      pointId: reading.pointId,
+      round: reading.round,
+      state: reading.state,
+      valueMm: intake.valueMm,
+      typed: taken?.typed ?? null,
+      unit: intake.unit,
+      tapeCount: taken?.tapeCount ?? 0,
+      tapeLengthMm: intake.tapeLengthMm,
+      levelFoundBy: taken?.levelFoundBy ?? null,
+      reason: reading.state === 'not-taken' ? reading.reason : null,
+      replaces: reading.replaces,
+      stands: true,
+      note: reading.note,
+      readBy: reading.readBy,
+      recordedBy: actor.id,
+      device: reading.device,
+      keyedAt: new Date(reading.keyedAt),
+      receivedAt: this.clock.now(),
+    };
+  }
+}
+
+async function tapeFacts(tx: Tx, { sheet, part }: SheetInHand): Promise<TapeFacts> {
+  const readers = await tx.find(SheetPersonRow, { where: { sheetId: sheet.id, duty: 'read' } });
+  return {
+    kind: part.kind,
+    tapeLengthMm: sheet.tapeLengthMm,
+    tapeZeroMm: sheet.tapeZeroMm,
+    readers: readers.map((person) => person.userId),
+  };
+}
+
+/** The same reading again is answered with what was kept; another one under its id is refused. */
+function repeated(already: ReadingRow, sheetId: string, reading: NewReading): Result {
+  const same =
+    already.sheetId === sheetId &&
+    already.pointId === reading.pointId &&
+    already.round === reading.round &&
+    already.state === reading.state &&
+    already.typed === (reading.state === 'taken' ? reading.typed : null);
+  if (!same) return { id: reading.id, outcome: 'refused', detail: 'Another reading was sent under this id before.' };
+  return { id: reading.id, outcome: 'already-kept', reading: toStored(already) };
+}
+
+function disputed(reading: NewReading, standing: ReadingRow | null): Result {
+  const detail = standing
+    ? 'Another reading stands at this point and round. Keep one of the two, or keep both as two rounds.'
+    : 'The reading that this one corrects does not stand here any more.';
+  return { id: reading.id, outcome: 'conflict', detail, ...(standing ? { standing: toStored(standing) } : {}) };
+}

@@ -1,0 +1,123 @@
+import { Injectable } from '@nestjs/common';
+import { protocolFor } from '@ellwand/shared/protocols/standard-protocols';
+import type { NewSheet, Sheet, SheetFacts } from '@ellwand/shared/records/sheet';
+import { In } from 'typeorm';
+import { v7 as uuidv7 } from 'uuid';
+import type { z } from 'zod';
+import { AuditService } from '../../audit/audit.service';
+import type { Actor } from '../../common/actor';
+import { Clock } from '../../common/clock';
+import { conflict, notFound, Refusal } from '../../common/refusal';
+import { type Tx, Work } from '../../common/work';
+import { GarmentEdits } from '../../garments/garment-edits';
+import { PartRow } from '../../garments/part.entity';
+import { UserRow } from '../../users/user.entity';
+import { FindingsService } from '../findings/findings.service';
+import { SheetEdits } from './sheet-edits';
+import { SheetPersonRow } from './sheet-person.entity';
+import { SheetView } from './sheet-view';
+import { SheetRow } from './sheet.entity';
+
+type SheetShown = z.output<typeof Sheet>;
+
+/** Measuring sheets: opened, their facts kept true, completed, opened again. */
+@Injectable()
+export class SheetsService {
+  constructor(
+    private readonly work: Work,
+    private readonly garments: GarmentEdits,
+    private readonly sheets: SheetEdits,
+    private readonly view: SheetView,
+    private readonly findings: FindingsService,
+    private readonly audit: AuditService,
+    private readonly clock: Clock,
+  ) {}
+
+  read(id: string): Promise<SheetShown> {
+    return this.view.of(this.work.reader, id);
+  }
+
+  /** Opens a sheet for a part, by the protocol as it stands now. Repeating the request opens one sheet. */
+  open(partId: string, { id = uuidv7(), facts }: z.output<typeof NewSheet>, actor: Actor): Promise<SheetShown> {
+    return this.work.run(async (tx) => {
+      if (await tx.existsBy(SheetRow, { id, partId })) return this.view.of(tx, id);
+      const part = await tx.findOne(PartRow, { where: { id: partId } });
+      if (!part) throw notFound('part.unknown', 'part');
+      await this.garments.noteMeasuring(tx, actor, part.garmentId);
+      const now = this.clock.now();
+      await tx.insert(SheetRow, {
+        ...columnsOf(facts),
+        id,
+        partId,
+        protocolVersion: protocolFor(part.kind).version,
+        state: 'open',
+        version: 1,
+        createdAt: now,
+        createdBy: actor.id,
+        updatedAt: now,
+        updatedBy: actor.id,
+      });
+      await namePeople(tx, id, facts.people);
+      await this.note(tx, actor, 'open', id, `${actor.name} opened a measuring sheet for ${part.name}`);
+      return this.view.of(tx, id);
+    });
+  }
+
+  setFacts(id: string, seen: number, facts: SheetFacts, actor: Actor): Promise<SheetShown> {
+    return this.work.run(async (tx) => {
+      const { sheet, part } = await this.sheets.takeAt(tx, actor, id, seen);
+      refuseComplete(sheet);
+      await tx.delete(SheetPersonRow, { sheetId: id });
+      await namePeople(tx, id, facts.people);
+      await this.sheets.set(tx, actor, sheet, columnsOf(facts));
+      await this.note(tx, actor, 'edit', id, `${actor.name} changed who, where or how ${part.name} was measured`);
+      return this.view.of(tx, id);
+    });
+  }
+
+  /** Completes a sheet: every point read or given a reason, no stop left open. */
+  complete(id: string, seen: number, actor: Actor): Promise<SheetShown> {
+    return this.work.run(async (tx) => {
+      const { sheet, part } = await this.sheets.takeAt(tx, actor, id, seen);
+      refuseComplete(sheet);
+      await this.findings.refuseUnfinished(tx, id);
+      await this.sheets.set(tx, actor, sheet, { state: 'complete', completedAt: this.clock.now() });
+      await this.note(tx, actor, 'complete', id, `${actor.name} completed the measuring sheet of ${part.name}`);
+      return this.view.of(tx, id);
+    });
+  }
+
+  reopen(id: string, seen: number, actor: Actor): Promise<SheetShown> {
+    return this.work.run(async (tx) => {
+      const { sheet, part } = await this.sheets.takeAt(tx, actor, id, seen);
+      if (sheet.state === 'open') throw conflict('sheet.open', 'This sheet is open already.');
+      await this.sheets.set(tx, actor, sheet, { state: 'open', completedAt: null });
+      await this.note(tx, actor, 'reopen', id, `${actor.name} opened the measuring sheet of ${part.name} again`);
+      return this.view.of(tx, id);
+    });
+  }
+
+  private note(tx: Tx, actor: Actor, verb: string, sheetId: string, summary: string): Promise<void> {
+    return this.audit.note(tx, actor, { verb, subjectKind: 'sheet', subjectId: sheetId, summary });
+  }
+}
+
+function refuseComplete(sheet: SheetRow): void {
+  if (sheet.state === 'complete') throw conflict('sheet.complete', 'This sheet is complete. Open it again to change it.');
+}
+
+/** The sheet's own columns; people stand in a table of their own. */
+function columnsOf({ people: _people, ...columns }: SheetFacts) {
+  return columns;
+}
+
+async function namePeople(tx: Tx, sheetId: string, people: SheetFacts['people']): Promise<void> {
+  const ids = [...new Set(people.map((person) => person.userId))];
+  const known = await tx.countBy(UserRow, { id: In(ids), active: true });
+  if (known !== ids.length) {
+    const errors = [{ pointer: '/facts/people', detail: 'Name people who work here now' }];
+    throw new Refusal(400, 'sheet.unknown-person', 'The sheet names somebody who does not work here.', {}, errors);
+  }
+  const once = new Map(people.map(({ userId, duty }) => [`${userId} ${duty}`, { sheetId, userId, duty }]));
+  await tx.insert(SheetPersonRow, [...once.values()]);
+}

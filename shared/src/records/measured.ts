@@ -1,0 +1,53 @@
+/** From readings as they travel and are kept to readings as the domain reasons about them, and back to what is shown. */
+import type { z } from 'zod';
+import type { DerivedValue } from '../derivations/derivation.js';
+import { deriveFromReadings } from '../derivations/registry.js';
+import type { GarmentKind } from '../points/kinds.js';
+import type { Reading } from '../readings/reading.js';
+import { shownUncertainty } from '../readings/uncertainty.js';
+import { fromMmString, toMmString } from '../units/length.js';
+import { fromTyped } from '../units/parse-length.js';
+import type { DerivedView, StoredReading } from './sheet.js';
+
+/** The domain's reading. Throws LengthError where a kept value is not a length. */
+export function toReading(stored: StoredReading): Reading {
+  const { id, pointId, round, stands, note, readBy } = stored;
+  const facts = { id, pointId, round, stands, note, readBy };
+  if (stored.state === 'not-taken' || stored.valueMm === null) {
+    return { ...facts, state: 'not-taken', ...(stored.reason ? { notTakenReason: stored.reason } : {}) };
+  }
+  const tapeLengths = tapeLengthsOf(stored);
+  return {
+    ...facts,
+    state: 'taken',
+    length: fromMmString(stored.valueMm),
+    ...(stored.typed !== null ? { typed: stored.typed } : {}),
+    ...(stored.unit ? { unit: stored.unit } : {}),
+    ...(stored.levelFoundBy ? { levelFoundBy: stored.levelFoundBy } : {}),
+    ...(tapeLengths ? { tapeLengths } : {}),
+  };
+}
+
+function tapeLengthsOf({ tapeCount, tapeLengthMm, typed, unit }: StoredReading) {
+  if (tapeCount === 0 || tapeLengthMm === null || typed === null || unit === null) return undefined;
+  const rest = fromTyped({ text: typed, unit });
+  return rest.ok ? { count: tapeCount, tape: fromMmString(tapeLengthMm), rest: rest.value.length } : undefined;
+}
+
+/** The derived values that the readings of one part allow, as they are shown. */
+export function derivedViews(kind: GarmentKind, readings: readonly StoredReading[]): z.output<typeof DerivedView>[] {
+  return deriveFromReadings(kind, readings.map(toReading)).map(toDerivedView);
+}
+
+function toDerivedView({ id, label, formula, worked, figure, trace }: DerivedValue): z.output<typeof DerivedView> {
+  return {
+    id,
+    label,
+    formula,
+    worked,
+    valueMm: figure.type === 'length' ? toMmString(figure.length) : null,
+    ratio: figure.type === 'ratio' ? figure.text : null,
+    uncertaintyMm: figure.type === 'length' ? toMmString(shownUncertainty(figure.uncertaintyMm)) : null,
+    trace: trace.map(({ pointId, label: name, value }) => ({ pointId, label: name, valueMm: toMmString(value) })),
+  };
+}
