@@ -26,11 +26,15 @@ const AT_ONCE = 2;
  * Builds the workspaces whose sources have changed since their last build.
  * @param {string} root
  * @param {<T>(label: string, work: () => Promise<T>) => Promise<T>} step
- * @param {(root: string, workspace: string) => Promise<void>} [buildOne]
+ * @param {{ only?: string[], buildOne?: (root: string, workspace: string) => Promise<void> }} [options]
  * @returns {Promise<string[]>} the workspaces that were built
  */
-export async function buildWhatChanged(root, step, buildOne = buildWorkspace) {
-  const changed = Object.keys(builds).filter((name) => !isBuilt(root, name));
+export async function buildWhatChanged(
+  root,
+  step,
+  { only = Object.keys(builds), buildOne = buildWorkspace } = {},
+) {
+  const changed = only.filter((name) => !isBuilt(root, name));
   await runTasks(
     changed.map((name) => ({
       name,

@@ -44,12 +44,18 @@ export function stopRunningPrograms() {
  * Runs a program to its end and keeps what it says.
  * @param {string} program
  * @param {readonly string[]} args
- * @param {{ cwd?: string, env?: NodeJS.ProcessEnv, input?: string, uid?: number, gid?: number }} [options]
+ * @param {{ cwd?: string, env?: NodeJS.ProcessEnv, input?: string, uid?: number, gid?: number,
+ *           timeoutMs?: number }} [options] after `timeoutMs` the program is killed
  * @returns {Promise<Outcome>}
  */
-export function run(program, args, { input, ...options } = {}) {
+export function run(program, args, { input, timeoutMs, ...options } = {}) {
   return new Promise((resolve) => {
-    const child = spawn(program, args, { ...options, stdio: ['pipe', 'pipe', 'pipe'] });
+    const child = spawn(program, args, {
+      ...options,
+      timeout: timeoutMs,
+      killSignal: 'SIGKILL',
+      stdio: ['pipe', 'pipe', 'pipe'],
+    });
     runningPrograms.add(child);
     let output = '';
     const keep = (/** @type {Buffer} */ chunk) => (output += chunk.toString());

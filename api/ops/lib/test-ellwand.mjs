@@ -1,0 +1,109 @@
+// @ts-check
+import path from 'node:path';
+import { buildWhatChanged, builds } from './builds.mjs';
+import { CHROMIUM, installDebianPackages, MARIADB } from './debian-packages.mjs';
+import { installNpmPackages } from './npm-packages.mjs';
+import { root } from './places.mjs';
+import { runMain } from './plain-failure.mjs';
+import { stopRunningPrograms } from './programs.mjs';
+import { step } from './progress.mjs';
+import { journeysRunner } from './runners/journeys-runner.mjs';
+import { runAll } from './runners/run-all.mjs';
+import { lintRunners, typeRunners } from './runners/static-runners.mjs';
+import { jestRunner, vitestRunners } from './runners/unit-runners.mjs';
+import { startTestDatabase } from './test-database.mjs';
+import { closeTestHouses } from './test-house.mjs';
+import { makeTestFolder, removeTestFolder } from './test-folder.mjs';
+
+/** @typedef {import('./runners/outcome.mjs').Runner} Runner */
+
+const NOTHING_FAILED = 0;
+const SOMETHING_FAILED = 1;
+
+/** What `npm test` runs, in the order of its table. @type {(folder: string) => Runner[]} */
+const everything = (folder) => {
+  const others = Object.keys(builds).filter((name) => name !== 'shared');
+  const alone = [
+    buildRunner('build shared', ['shared'], []),
+    ...lintRunners(root).reverse(),
+    ...typeRunners(root),
+    buildRunner('build applications', others, ['build shared']),
+    ...vitestRunners(root, folder),
+    jestRunner(root, folder, {
+      after: ['build shared'],
+      env: () => startTestDatabase(path.join(folder, 'jest')),
+    }),
+  ];
+  // The journeys have the machine to themselves: a browser that waits for a core fails what is right.
+  return [
+    ...alone,
+    journeysRunner(
+      root,
+      folder,
+      alone.map(({ name }) => name),
+    ),
+  ];
+};
+
+/** Parts of a check, by name. @type {Record<string, (folder: string) => Runner[]>} */
+const parts = {
+  types: () => typeRunners(root),
+  lint: () => lintRunners(root),
+  unit: (folder) => vitestRunners(root, folder),
+};
+
+/** `npm test`: everything, with database folder and ports of its own. */
+export function testEllwand() {
+  return runMain(async () => {
+    await installDebianPackages([MARIADB, CHROMIUM], step);
+    await installNpmPackages(root, step);
+    return runInFolder(everything);
+  });
+}
+
+/**
+ * `npm run check` and its parts: what can be known in three minutes, without the whole house.
+ * @param {readonly string[]} names of parts
+ */
+export function checkEllwand(names) {
+  return runMain(async () => {
+    await installDebianPackages([MARIADB], step);
+    await installNpmPackages(root, step);
+    return runInFolder((folder) => names.flatMap((name) => parts[name]?.(folder) ?? []));
+  });
+}
+
+/** @param {(folder: string) => Runner[]} choose */
+async function runInFolder(choose) {
+  const folder = await makeTestFolder(root);
+  const onSignal = () => {
+    stopRunningPrograms();
+    void closeTestHouses()
+      .then(() => removeTestFolder(folder))
+      .finally(() => process.exit(SOMETHING_FAILED));
+  };
+  for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP']) process.once(signal, onSignal);
+  try {
+    return (await runAll(choose(folder))) ? NOTHING_FAILED : SOMETHING_FAILED;
+  } finally {
+    await removeTestFolder(folder);
+  }
+}
+
+/**
+ * A build is a test as well: that the house can be built.
+ * @param {string} name
+ * @param {string[]} workspaces
+ * @param {string[]} after
+ * @returns {Runner}
+ */
+function buildRunner(name, workspaces, after) {
+  return {
+    name,
+    after,
+    async work() {
+      await buildWhatChanged(root, step, { only: workspaces });
+      return { passed: workspaces.length, failures: [] };
+    },
+  };
+}
