@@ -1,4 +1,5 @@
 import { describe, expect, it } from 'vitest';
+import { pointsPage } from '../testing/measuring-pages.js';
 import { isLonger, mm, subtract } from '../units/length.js';
 import { groups, isPointGroup } from './groups.js';
 import { isGarmentKind, kindIds, kindLabels, lowerKind } from './kinds.js';
@@ -51,6 +52,10 @@ describe('the catalogue of points', () => {
   it('has no id and no name twice', () => {
     expect(new Set(measuringPoints.map(({ id }) => id)).size).toBe(measuringPoints.length);
     expect(new Set(measuringPoints.map(({ name }) => name)).size).toBe(measuringPoints.length);
+  });
+
+  it('has a page that says what the code does', async () => {
+    await expect(pointsPage()).toMatchFileSnapshot('../../../docs/measuring/points.md');
   });
 
   it('leaves no group and no kind without a point', () => {

@@ -1,0 +1,79 @@
+/** The pages docs/measuring/points.md and derivations.md, written from the code they describe. */
+import { derivations } from '../derivations/registry.js';
+import { kindLabels } from '../points/kinds.js';
+import { groups } from '../points/groups.js';
+import {
+  type CataloguedPoint,
+  measuringPoint,
+  pointsInGroup,
+  softRangeFor,
+} from '../points/measuring-points.js';
+import { handlingStepLabels, howLabels, sideLabels } from '../points/point.js';
+import { toMmString } from '../units/length.js';
+
+const WRITTEN_FROM_CODE = 'This page is written from the code; a test fails when they part.';
+
+export function derivationsPage(): string {
+  const sections = derivations.map(({ id, label, formula, kinds, needs }) => {
+    const figures = needs.map((need) => need.map((pointId) => measuringPoint(pointId).name).join(', else '));
+    return [
+      `## ${label}`,
+      '',
+      `\`${id}\` = ${formula}`,
+      '',
+      `- Needs: ${figures.join('; ')}`,
+      `- For: ${kinds.map((kind) => kindLabels[kind].plural).join(', ')}`,
+      '',
+    ].join('\n');
+  });
+  return `# Derived values
+
+Worked out from readings by a formula that is shown beside them, and never typed. ${WRITTEN_FROM_CODE}
+
+A difference carries u = √(u₁² + u₂²). A ratio q = a ÷ b carries u² = (u_a ÷ b)² + (q · u_b ÷ b)².
+The figures that were put in are shown with the value.
+
+${sections.join('\n')}`;
+}
+
+export function pointsPage(): string {
+  const sections = groups.map(
+    ({ id, label }) => `## ${label}\n\nGroup \`${id}\`\n\n${pointsInGroup(id).map(pointSection).join('\n')}`,
+  );
+  return `# Measuring points
+
+Every point of every protocol: where from, where to, how the tape lies, what to watch for. ${WRITTEN_FROM_CODE}
+
+Left and right are as worn. Ranges are for asking, never for refusing. Those of adults' girths and widths rest on
+ANSUR II, the body measurements of the US Army of 2012 (open data), widened for the cut and for what was worn
+beneath; for the others no published survey of garments was found, and they are the house's experience.
+
+${sections.join('\n')}`;
+}
+
+function pointSection(point: CataloguedPoint): string {
+  const kinds = point.kinds.map((kind) => kindLabels[kind].plural).join(', ');
+  const tape = `${sideLabels[point.side]}, ${howLabels[point.how]}. ${handlingStepLabels[point.handlingStep]}.`;
+  return [
+    `### ${point.name}`,
+    '',
+    `\`${point.id}\` ${point.definition}`,
+    '',
+    `- From ${point.from} to ${point.to}`,
+    `- ${tape}`,
+    `- For: ${kinds}`,
+    `- Usual: ${rangesText(point)}`,
+    `- Watch for: ${point.watchFor}`,
+    '',
+  ].join('\n');
+}
+
+function rangesText(point: CataloguedPoint): string {
+  const ranges = point.kinds.map((kind) => {
+    const { from, to } = softRangeFor(point, kind);
+    return { kind, text: `${toMmString(from)} to ${toMmString(to)} mm` };
+  });
+  const texts = [...new Set(ranges.map(({ text }) => text))];
+  if (texts.length === 1) return texts.join('');
+  return ranges.map(({ kind, text }) => `${kindLabels[kind].plural} ${text}`).join('; ');
+}
