@@ -1,4 +1,33 @@
-import { Module } from '@nestjs/common';
+import { Global, Module } from '@nestjs/common';
+import { APP_GUARD } from '@nestjs/core';
+import { JwtModule } from '@nestjs/jwt';
+import { PassportModule } from '@nestjs/passport';
+import { LimitGuard, throttlerModule } from '../common/limit.guard';
+import { OriginGuard } from '../common/origin.guard';
+import { AccessTokens } from './access-token';
+import { AccessStrategy } from './access.strategy';
+import { EntryGuard } from './entry.guard';
+import { PASSWORD_COST, passwordCost, Passwords } from './passwords.service';
+import { Secrets } from './secrets';
+import { SessionCookies } from './session-cookies';
+import { Sessions } from './sessions.service';
 
-@Module({})
+/** Signing in, sessions, and the guards at every route, in the order in which they look. */
+@Global()
+@Module({
+  imports: [PassportModule, JwtModule.register({}), throttlerModule],
+  providers: [
+    Secrets,
+    AccessTokens,
+    SessionCookies,
+    Sessions,
+    AccessStrategy,
+    Passwords,
+    { provide: PASSWORD_COST, useValue: passwordCost },
+    { provide: APP_GUARD, useClass: LimitGuard },
+    { provide: APP_GUARD, useClass: OriginGuard },
+    { provide: APP_GUARD, useClass: EntryGuard },
+  ],
+  exports: [Sessions, SessionCookies, Passwords, Secrets],
+})
 export class AuthModule {}

@@ -1,0 +1,64 @@
+import { type INestApplication, RequestMethod } from '@nestjs/common';
+import { NestFactory, Reflector } from '@nestjs/core';
+import type { NestExpressApplication } from '@nestjs/platform-express';
+import compression from 'compression';
+import cookieParser from 'cookie-parser';
+import { constants } from 'node:zlib';
+import { ZodSerializerInterceptor, ZodValidationPipe } from 'nestjs-zod';
+import { AppModule } from './app.module';
+import { ENVIRONMENT } from './common/environment.token';
+import { ProblemFilter } from './common/problem.filter';
+import type { Environment } from './config/environment';
+import { securityHeaders } from './security-headers';
+
+/** Whatever is not part of the API keeps its address as its controller writes it. */
+const outsideTheApi = [
+  'api/openapi.json',
+  'api/docs',
+  'api/docs.css',
+  'health/live',
+  'health/ready',
+  'media/:imageId/:form',
+  '/',
+  'search',
+  'g/:number',
+  'g/:number/v/:version',
+  'how-we-measure',
+  'how-we-measure/:pointId',
+  'workroom',
+  'workroom/{*path}',
+  // Written so that it means the catch-all route itself, not every route that it would catch.
+  '\\{\\*page\\}',
+];
+
+/** Bodies are read by `furnish`, with our own limits. */
+export const applicationOptions = { bodyParser: false, abortOnError: false, bufferLogs: true } as const;
+
+/** Builds the whole application, not yet listening. */
+export async function createApplication(): Promise<NestExpressApplication> {
+  const application = await NestFactory.create<NestExpressApplication>(AppModule, applicationOptions);
+  furnish(application);
+  return application;
+}
+
+/** Everything that stands before and behind the rooms: headers, bodies, cookies, validation, errors. */
+export function furnish(application: NestExpressApplication): void {
+  const environment = application.get<Environment>(ENVIRONMENT);
+  application.disable('x-powered-by');
+  if (environment.trustProxy) application.set('trust proxy', environment.trustProxy);
+  application.set('query parser', 'simple');
+  application.use(securityHeaders(application));
+  application.use(compression({ brotli: { params: { [constants.BROTLI_PARAM_QUALITY]: 4 } } }));
+  application.use(cookieParser());
+  application.useBodyParser('json', { limit: '1mb' });
+  application.setGlobalPrefix('api/v1', {
+    exclude: outsideTheApi.map((path) => ({ path, method: RequestMethod.ALL })),
+  });
+  furnishAnswers(application);
+}
+
+function furnishAnswers(application: INestApplication): void {
+  application.useGlobalPipes(new ZodValidationPipe());
+  application.useGlobalInterceptors(new ZodSerializerInterceptor(application.get(Reflector)));
+  application.useGlobalFilters(new ProblemFilter());
+}

@@ -1,0 +1,25 @@
+import { Injectable } from '@nestjs/common';
+
+/**
+ * Which inline scripts the pages may run. Whoever renders a page names the hashes of its constant scripts here;
+ * everything else inline is refused by the browser.
+ */
+@Injectable()
+export class ContentSecurity {
+  private readonly hashes = new Set<string>();
+
+  /** @param hashes as they stand in a policy, `sha256-…` in base64, without quotes */
+  allowScripts(hashes: readonly string[]): void {
+    for (const hash of hashes) {
+      if (!/^sha(256|384|512)-[A-Za-z0-9+/]+={0,2}$/.test(hash)) {
+        throw new Error(`Expected the hash of a script, sha256-…, got ${hash}`);
+      }
+      this.hashes.add(`'${hash}'`);
+    }
+  }
+
+  /** Sources of `script-src` beside 'self'. */
+  get scriptSources(): string {
+    return [...this.hashes].join(' ');
+  }
+}

@@ -1,0 +1,25 @@
+import { type CanActivate, type ExecutionContext, Inject, Injectable } from '@nestjs/common';
+import type { Request } from 'express';
+import { ENVIRONMENT } from './environment.token';
+import { forbidden } from './refusal';
+
+const readingMethods = new Set(['GET', 'HEAD', 'OPTIONS']);
+
+/**
+ * Lets a change through only when the browser says that our own pages asked for it. Cookies are SameSite=Strict
+ * already; this also stops what shares our site but not our origin, such as another port of this machine.
+ */
+@Injectable()
+export class OriginGuard implements CanActivate {
+  private readonly own: string;
+
+  constructor(@Inject(ENVIRONMENT) environment: { readonly publicUrl: string }) {
+    this.own = new URL(environment.publicUrl).origin;
+  }
+
+  canActivate(context: ExecutionContext): boolean {
+    const request = context.switchToHttp().getRequest<Request>();
+    if (readingMethods.has(request.method) || request.headers.origin === this.own) return true;
+    throw forbidden('origin.refused', 'Changes are taken only from this museum’s own pages.');
+  }
+}
