@@ -1,0 +1,41 @@
+import { createBrowserRouter, type RouteObject } from 'react-router-dom';
+import { Door } from './door.js';
+import { Shell } from './shell.js';
+import { Astray, Broken } from './astray.js';
+import { FirstAdministratorPage } from '../features/sign-in/components/first-administrator-page.js';
+import { InvitationPage } from '../features/sign-in/components/invitation-page.js';
+import { SignInPage } from '../features/sign-in/components/sign-in-page.js';
+
+/** The floor plan. What the table does not need at once is fetched when it is opened. */
+export const routes: RouteObject[] = [
+  {
+    errorElement: <Broken />,
+    children: [
+      { path: '/sign-in', element: <SignInPage /> },
+      { path: '/invitation', element: <InvitationPage /> },
+      { path: '/first-administrator', element: <FirstAdministratorPage /> },
+      {
+        element: <Door />,
+        children: [
+          {
+            element: <Shell />,
+            children: [
+              { index: true, lazy: async () => ({ Component: (await import('../features/garments/components/garment-list-page.js')).GarmentListPage }) },
+              { path: '/garments/new', lazy: async () => ({ Component: (await import('../features/garments/components/new-garment-page.js')).NewGarmentPage }) },
+              { path: '/garments/:garmentId', lazy: async () => ({ Component: (await import('./routes/garment-page.js')).GarmentPage }) },
+              { path: '/garments/:garmentId/parts/:partId/sheets/new', lazy: async () => ({ Component: (await import('../features/measuring/components/new-sheet-page.js')).NewSheetPage }) },
+              { path: '/review', lazy: async () => ({ Component: (await import('./routes/review-page.js')).ReviewPage }) },
+              { path: '/garments/:garmentId/review', lazy: async () => ({ Component: (await import('./routes/review-page.js')).ReviewPage }) },
+              { path: '/people', lazy: async () => ({ Component: (await import('../features/people/components/people-page.js')).PeoplePage }) },
+              { path: '/audit', lazy: async () => ({ Component: (await import('../features/audit/components/audit-page.js')).AuditPage }) },
+              { path: '*', element: <Astray /> },
+            ],
+          },
+          { path: '/sheets/:sheetId', lazy: async () => ({ Component: (await import('../features/measuring/components/sheet-page.js')).SheetPage }) },
+        ],
+      },
+    ],
+  },
+];
+
+export const makeRouter = () => createBrowserRouter(routes, { basename: '/workroom' });

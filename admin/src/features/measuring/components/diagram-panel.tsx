@@ -1,0 +1,78 @@
+import { diagramFor } from '@ellwand/shared/drawings/kinds/diagram-for';
+import { type ViewName, viewOfPoint } from '@ellwand/shared/drawings/diagram/model';
+import { paintDiagram } from '@ellwand/shared/drawings/diagram/paint-diagram';
+import type { GarmentKind } from '@ellwand/shared/points/kinds';
+import { useMemo, useState } from 'react';
+import { mannerOf, type SheetPoint } from '../model/sheet-points.js';
+import { SceneDrawing } from './scene-drawing.js';
+
+interface DiagramPanelProps {
+  readonly kind: GarmentKind;
+  readonly points: readonly SheetPoint[];
+  readonly current: SheetPoint;
+  readonly onChoose: (pointId: string) => void;
+}
+
+/** The view on which the current point lies, its line lit, and beneath it the one instruction that matters now. */
+export function DiagramPanel({ kind, points, current, onChoose }: DiagramPanelProps) {
+  const diagram = diagramFor(kind);
+  const own = diagram && viewOfPoint(diagram, current.id);
+  const [looking, setLooking] = useState<{ view: ViewName; at: string } | null>(null);
+  // A view that was chosen by hand holds until the work moves to another point.
+  const view = looking?.at === current.id ? looking.view : (own ?? diagram?.views[0]?.name);
+  const scene = useMemo(
+    () =>
+      view &&
+      paintDiagram({
+        kind,
+        views: [view],
+        widthPx: 368,
+        current: current.id,
+        points: points.map(({ id }) => id),
+        letters: new Map(points.map(({ id, letter }) => [id, letter])),
+      }),
+    [kind, view, current.id, points],
+  );
+  return (
+    <section aria-label="Diagram" className="flex h-full flex-col gap-4 bg-sheet p-4">
+      {scene && (
+        <div className="mx-auto w-full max-w-md shrink-0">
+          <SceneDrawing key={`${view ?? ''}`} scene={scene} current={current.id} onChoose={onChoose} className="max-h-[26rem] w-full max-md:max-h-56" />
+        </div>
+      )}
+      {diagram && diagram.views.length > 1 && (
+        <div role="group" aria-label="View" className="flex justify-center gap-2">
+          {diagram.views.map(({ name, caption }) => (
+            <button
+              key={name}
+              type="button"
+              aria-pressed={name === view}
+              onClick={() => setLooking({ view: name, at: current.id })}
+              className="min-h-11 rounded-sm border border-rule px-3 text-label aria-pressed:border-ink aria-pressed:bg-ink aria-pressed:text-paper"
+            >
+              {caption}
+            </button>
+          ))}
+        </div>
+      )}
+      <Instruction current={current} />
+    </section>
+  );
+}
+
+function Instruction({ current }: { readonly current: SheetPoint }) {
+  const { point, letter } = current;
+  return (
+    <div aria-live="polite">
+      <h2 className="flex items-center gap-2 text-body font-semibold">
+        <span className="letter letter-lit" aria-hidden="true">{letter}</span>
+        {point.name}
+      </h2>
+      <p className="mt-2 text-table text-ink">{point.definition}</p>
+      <p className="mt-1 text-table text-ink-2">
+        From {point.from} to {point.to}. {mannerOf(current)}
+      </p>
+      <p className="mt-1 text-table text-ink-2">{point.watchFor}</p>
+    </div>
+  );
+}

@@ -1,0 +1,45 @@
+import { type GarmentKind } from '@ellwand/shared/points/kinds';
+import { type CataloguedPoint, measuringPoint } from '@ellwand/shared/points/measuring-points';
+import { howLabels, sideLabels, type HandlingStep } from '@ellwand/shared/points/point';
+import { lettersFor } from '@ellwand/shared/protocols/protocol';
+import { protocolFor } from '@ellwand/shared/protocols/standard-protocols';
+
+/** A measuring point as it stands on a sheet: with its letter, and whether the sheet waits for it. */
+export interface SheetPoint {
+  readonly id: string;
+  readonly letter: string;
+  readonly required: boolean;
+  readonly point: CataloguedPoint;
+  readonly step: HandlingStep;
+}
+
+/** The points of a sheet, in handling order. */
+export function sheetPoints(kind: GarmentKind): readonly SheetPoint[] {
+  const protocol = protocolFor(kind);
+  const letters = lettersFor(protocol);
+  return protocol.points.map(({ pointId, required }) => {
+    const point = measuringPoint(pointId);
+    return { id: pointId, letter: letters.get(pointId) ?? '', required, point, step: point.handlingStep };
+  });
+}
+
+/** "Inside, round, from fastening to fastening." */
+export function mannerOf({ point }: SheetPoint): string {
+  return `${sideLabels[point.side]}, ${howLabels[point.how]}.`;
+}
+
+/** What is said when the work comes to a handling step: the garment is handled once for each. */
+export const stepWords: Readonly<Record<HandlingStep, { readonly title: string; readonly words: string }>> = {
+  'opened-inside': {
+    title: 'Opened, inside: two people',
+    words: 'Undo only what opens without strain and lay the garment open. One reads, the other holds the end of the tape and steadies the cloth.',
+  },
+  'front-up': {
+    title: 'Front up: two people',
+    words: 'Close it as it closes and lay it front up, together. Let the table carry the weight.',
+  },
+  'back-up': {
+    title: 'Turn over: two people',
+    words: 'Turn it once, together, with a board or both hands beneath. Do not lift it by the shoulders.',
+  },
+};

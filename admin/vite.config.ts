@@ -1,0 +1,17 @@
+import tailwindcss from '@tailwindcss/vite';
+import react from '@vitejs/plugin-react';
+import { defineConfig } from 'vite';
+
+export default defineConfig({
+  // The service worker's scope and every built address follow from this one line.
+  base: '/workroom/',
+  plugins: [react(), tailwindcss()],
+  resolve: { conditions: ['source', 'module', 'browser', 'development|production'] },
+  build: {
+    outDir: 'dist',
+    manifest: true,
+    // The API's content policy allows no inlined fonts: every asset keeps an address of its own.
+    assetsInlineLimit: 0,
+    chunkSizeWarningLimit: 700,
+  },
+});
