@@ -3,10 +3,13 @@ import { NestFactory, Reflector } from '@nestjs/core';
 import type { NestExpressApplication } from '@nestjs/platform-express';
 import compression from 'compression';
 import cookieParser from 'cookie-parser';
+import type { NextFunction, Request, Response } from 'express';
+import { Logger } from 'nestjs-pino';
 import { constants } from 'node:zlib';
 import { ZodSerializerInterceptor, ZodValidationPipe } from 'nestjs-zod';
 import { AppModule } from './app.module';
 import { ENVIRONMENT } from './common/environment.token';
+import { Lifecycle } from './common/lifecycle';
 import { ProblemFilter } from './common/problem.filter';
 import type { Environment } from './config/environment';
 import { securityHeaders } from './security-headers';
@@ -44,10 +47,12 @@ export async function createApplication(): Promise<NestExpressApplication> {
 /** Everything that stands before and behind the rooms: headers, bodies, cookies, validation, errors. */
 export function furnish(application: NestExpressApplication): void {
   const environment = application.get<Environment>(ENVIRONMENT);
+  application.useLogger(application.get(Logger));
   application.disable('x-powered-by');
   if (environment.trustProxy) application.set('trust proxy', environment.trustProxy);
   application.set('query parser', 'simple');
   application.use(securityHeaders(application));
+  application.use(closingWhenEnding(application.get(Lifecycle)));
   application.use(compression({ brotli: { params: { [constants.BROTLI_PARAM_QUALITY]: 4 } } }));
   application.use(cookieParser());
   application.useBodyParser('json', { limit: '1mb' });
@@ -61,4 +66,12 @@ function furnishAnswers(application: INestApplication): void {
   application.useGlobalPipes(new ZodValidationPipe());
   application.useGlobalInterceptors(new ZodSerializerInterceptor(application.get(Reflector)));
   application.useGlobalFilters(new ProblemFilter());
+}
+
+/** Tells clients to come back on another connection, and so perhaps to another process. */
+function closingWhenEnding(lifecycle: Lifecycle) {
+  return (_: Request, response: Response, next: NextFunction): void => {
+    if (lifecycle.isEnding) response.setHeader('Connection', 'close');
+    next();
+  };
 }

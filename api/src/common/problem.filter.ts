@@ -69,7 +69,7 @@ export class ProblemFilter implements ExceptionFilter {
     if (fault instanceof ThrottlerException) {
       return {
         problem: document(429, 'request.too-many', 'Too many requests; wait a little.'),
-        headers: { 'Retry-After': '30' },
+        headers: {},
       };
     }
     if (fault instanceof HttpException && !(fault instanceof ZodSerializationException)) {
@@ -80,7 +80,7 @@ export class ProblemFilter implements ExceptionFilter {
   }
 
   private surprise(fault: unknown): { problem: ProblemDocument; headers: Record<string, string> } {
-    this.log.error(fault instanceof Error ? (fault.stack ?? fault.message) : String(fault));
+    this.log.error(withoutValues(fault instanceof Error ? (fault.stack ?? fault.message) : String(fault)));
     const text =
       fault instanceof Error ? `${fault.message} ${'code' in fault ? String(fault.code) : ''}` : '';
     if (passing.test(text)) {
@@ -97,6 +97,9 @@ export class ProblemFilter implements ExceptionFilter {
     };
   }
 }
+
+/** A database names the values that it could not take ("Duplicate entry 'somebody@…'"): those are not for the log. */
+const withoutValues = (text: string) => text.replaceAll(/'[^'\n]*'/g, "'…'").replaceAll(/"[^"\n]*"/g, '"…"');
 
 /** Faults of body-parser and of the router carry a status of their own. */
 function bodyFault(fault: unknown): ProblemDocument | undefined {

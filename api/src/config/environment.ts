@@ -4,6 +4,7 @@ import { z } from 'zod';
 const port = z.coerce.number().int().min(1).max(65535);
 
 const Variables = z.object({
+  ELLWAND_HOST: z.string().min(1).default('127.0.0.1'),
   ELLWAND_PORT: port.default(4310),
   ELLWAND_DATA: z.string().min(1).default('.data'),
   ELLWAND_DB_HOST: z.string().min(1).default('127.0.0.1'),
@@ -36,6 +37,8 @@ interface DatabaseAccount {
 
 /** Everything the API is told from outside, checked once at start. */
 export interface Environment {
+  /** Address to listen on: loopback, unless a proxy on another machine stands before it. */
+  readonly host: string;
   readonly port: number;
   readonly dataFolder: string;
   readonly publicUrl: string;
@@ -69,6 +72,7 @@ export function readEnvironment(variables: NodeJS.ProcessEnv): Environment {
   });
   const publicUrl = (v.ELLWAND_PUBLIC_URL ?? `http://127.0.0.1:${v.ELLWAND_PORT}`).replace(/\/$/, '');
   return {
+    host: v.ELLWAND_HOST,
     port: v.ELLWAND_PORT,
     dataFolder: resolve(v.ELLWAND_DATA),
     publicUrl,

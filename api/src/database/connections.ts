@@ -39,6 +39,9 @@ const entities = [
   UserRow,
 ];
 
+/** In the order in which they run. */
+export const migrations = [Workroom1764550000000, AuditTrail1764550000001, Catalogue1764550000002];
+
 /** A statement that runs longer is ended, a caller who waits longer for a connection is told 503. */
 const statementSeconds = 15;
 const connectionWaitMs = 5_000;
@@ -86,7 +89,7 @@ export function ownerConnection(environment: Environment): DataSourceOptions {
   return {
     ...mariadb(environment.owner, 'ellwand', 2),
     entities: [],
-    migrations: [Workroom1764550000000, AuditTrail1764550000001, Catalogue1764550000002],
+    migrations,
     migrationsTableName: 'migration',
     migrationsTransactionMode: 'none',
   };
