@@ -24,7 +24,10 @@ export class GarmentEdits {
 
   /** The garment's row, locked until the transaction ends. @throws Refusal 404 */
   async lock(tx: Tx, garmentId: string): Promise<GarmentRow> {
-    const garment = await tx.findOne(GarmentRow, { where: { id: garmentId }, lock: { mode: 'pessimistic_write' } });
+    const garment = await tx.findOne(GarmentRow, {
+      where: { id: garmentId },
+      lock: { mode: 'pessimistic_write' },
+    });
     if (!garment) throw notFound('garment.unknown', 'garment');
     return garment;
   }
@@ -49,39 +52,66 @@ export class GarmentEdits {
   }
 
   /**
-   * Marks that a part of this garment is being measured. The record's version stays, so that readings do not get
-   * in the way of whoever describes the garment; who measured is known from the sheet.
+   * Marks that a part of this garment is being measured. Who writes on a sheet is an editor too; the record's
+   * version stays, so that readings do not get in the way of whoever describes the garment.
    */
   async noteMeasuring(tx: Tx, actor: Pick<Actor, 'id'>, garmentId: string): Promise<void> {
     const garment = await this.lock(tx, garmentId);
     refuseLocked(garment);
+    await this.noteEditor(tx, actor, garment.id);
     if (garment.stage !== 'draft') await this.set(tx, actor, garment, { stage: 'draft' });
   }
 
   /** `noteEdit` for a row that is already locked, together with the changes to its own columns. */
-  async edit(tx: Tx, actor: Pick<Actor, 'id'>, garment: GarmentRow, changes: Partial<GarmentRow>): Promise<GarmentRow> {
+  async edit(
+    tx: Tx,
+    actor: Pick<Actor, 'id'>,
+    garment: GarmentRow,
+    changes: Partial<GarmentRow>,
+  ): Promise<GarmentRow> {
     refuseLocked(garment);
-    const now = this.clock.now();
-    await tx
-      .createQueryBuilder()
-      .insert()
-      .into(GarmentEditor)
-      .values({ garmentId: garment.id, userId: actor.id, editedAt: now })
-      .orUpdate(['edited_at'])
-      .execute();
+    await this.noteEditor(tx, actor, garment.id);
     return this.set(tx, actor, garment, { ...changes, stage: 'draft' });
   }
 
   /** Moves a locked record along `recordMoves`; anything else is refused with 409. */
-  async move(tx: Tx, actor: Actor, garment: GarmentRow, to: RecordStage, changes: Partial<GarmentRow> = {}): Promise<GarmentRow> {
+  async move(
+    tx: Tx,
+    actor: Actor,
+    garment: GarmentRow,
+    to: RecordStage,
+    changes: Partial<GarmentRow> = {},
+  ): Promise<GarmentRow> {
     if (!mayMove(garment.stage, to)) {
-      throw conflict('record.no-such-move', `A record that is ${garment.stage} cannot become ${to}.`, { stage: garment.stage });
+      throw conflict('record.no-such-move', `A record that is ${garment.stage} cannot become ${to}.`, {
+        stage: garment.stage,
+      });
     }
     return this.set(tx, actor, garment, { ...changes, stage: to });
   }
 
-  private async set(tx: Tx, actor: Pick<Actor, 'id'>, garment: GarmentRow, changes: Partial<GarmentRow>): Promise<GarmentRow> {
-    const next = { ...changes, version: garment.version + 1, updatedAt: this.clock.now(), updatedBy: actor.id };
+  private async noteEditor(tx: Tx, actor: Pick<Actor, 'id'>, garmentId: string): Promise<void> {
+    await tx
+      .createQueryBuilder()
+      .insert()
+      .into(GarmentEditor)
+      .values({ garmentId, userId: actor.id, editedAt: this.clock.now() })
+      .orUpdate(['edited_at'])
+      .execute();
+  }
+
+  private async set(
+    tx: Tx,
+    actor: Pick<Actor, 'id'>,
+    garment: GarmentRow,
+    changes: Partial<GarmentRow>,
+  ): Promise<GarmentRow> {
+    const next = {
+      ...changes,
+      version: garment.version + 1,
+      updatedAt: this.clock.now(),
+      updatedBy: actor.id,
+    };
     const { affected } = await tx.update(GarmentRow, { id: garment.id, version: garment.version }, next);
     if (affected !== 1) throw staleVersion(garment.version, garment.version + 1, null, null);
     return { ...garment, ...next };

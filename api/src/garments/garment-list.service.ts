@@ -27,7 +27,9 @@ export class GarmentListService {
     const select = this.work.reader.createQueryBuilder(GarmentRow, 'garment').where('1 = 1');
     if (query.stage) select.andWhere('garment.stage = :stage', { stage: query.stage });
     if (query.q) {
-      select.andWhere('(garment.ownNumber LIKE :like OR garment.title LIKE :like)', { like: `%${escapeLike(query.q)}%` });
+      select.andWhere('(garment.ownNumber LIKE :like OR garment.title LIKE :like)', {
+        like: `%${escapeLike(query.q)}%`,
+      });
     }
     const [garments, total] = await select
       .orderBy(orders[query.sort])
@@ -35,7 +37,11 @@ export class GarmentListService {
       .limit(query.size)
       .getManyAndCount();
     const ids = garments.map((garment) => garment.id);
-    const [sheets, pictures, first] = await Promise.all([this.openSheets(ids), this.pictures(ids), this.firstImages(ids)]);
+    const [sheets, pictures, first] = await Promise.all([
+      this.openSheets(ids),
+      this.pictures(ids),
+      this.firstImages(ids),
+    ]);
     return {
       total,
       page: query.page,

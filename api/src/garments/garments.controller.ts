@@ -5,7 +5,14 @@ import { type Actor, CurrentActor } from '../common/actor';
 import { IdParam } from '../common/dto/id.dto';
 import { IfMatch } from '../common/if-match';
 import { Requires } from '../common/requires.decorator';
-import { GarmentDto, GarmentPageDto, GarmentQueryDto, GarmentRecordDto, NewGarmentDto, NewPartDto } from './dto/garment.dto';
+import {
+  GarmentDto,
+  GarmentPageDto,
+  GarmentQueryDto,
+  GarmentRecordDto,
+  NewGarmentDto,
+  NewPartDto,
+} from './dto/garment.dto';
 import { GarmentListService } from './garment-list.service';
 import { GarmentsService } from './garments.service';
 
@@ -41,14 +48,24 @@ export class GarmentsController {
   @Put('garments/:id/record')
   @Requires('garment:write')
   @ZodResponse({ status: 200, type: GarmentDto })
-  rewrite(@Param() { id }: IdParam, @IfMatch() seen: number, @Body() record: GarmentRecordDto, @CurrentActor() actor: Actor) {
+  rewrite(
+    @Param() { id }: IdParam,
+    @IfMatch() seen: number,
+    @Body() record: GarmentRecordDto,
+    @CurrentActor() actor: Actor,
+  ) {
     return this.garments.rewrite(id, seen, record, actor);
   }
 
   @Post('garments/:id/parts')
   @Requires('garment:write')
   @ZodResponse({ status: 201, type: GarmentDto })
-  addPart(@Param() { id }: IdParam, @IfMatch() seen: number, @Body() part: NewPartDto, @CurrentActor() actor: Actor) {
+  addPart(
+    @Param() { id }: IdParam,
+    @IfMatch() seen: number,
+    @Body() part: NewPartDto,
+    @CurrentActor() actor: Actor,
+  ) {
     return this.garments.addPart(id, seen, part, actor);
   }
 

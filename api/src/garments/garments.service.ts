@@ -1,10 +1,11 @@
 import { Injectable } from '@nestjs/common';
+import { readDate } from '@ellwand/shared/records/edtf-date';
 import type { Garment, GarmentRecord, NewGarment, NewPart } from '@ellwand/shared/records/garment';
 import { v7 as uuidv7 } from 'uuid';
 import { AuditService } from '../audit/audit.service';
 import type { Actor } from '../common/actor';
 import { Clock } from '../common/clock';
-import { conflict, notFound } from '../common/refusal';
+import { conflict, notFound, Refusal } from '../common/refusal';
 import { type Tx, Work } from '../common/work';
 import { SheetRow } from '../measuring/sheets/sheet.entity';
 import { GarmentEditor } from './garment-editor.entity';
@@ -33,6 +34,7 @@ export class GarmentsService {
     const id = made.id ?? uuidv7();
     return this.work.run(async (tx) => {
       if (await tx.existsBy(GarmentRow, { id })) return this.view.of(tx, id);
+      refuseUnreadableDate(made.record, '/record/date');
       await refuseUsedNumber(tx, made.record.ownNumber, id);
       const now = this.clock.now();
       await tx.insert(GarmentRow, {
@@ -61,6 +63,7 @@ export class GarmentsService {
   rewrite(id: string, seen: number, record: GarmentRecord, actor: Actor): Promise<Garment> {
     return this.work.run(async (tx) => {
       const garment = await this.edits.lockAt(tx, id, seen);
+      refuseUnreadableDate(record, '/date');
       await refuseUsedNumber(tx, record.ownNumber, id);
       await this.edits.edit(tx, actor, garment, columnsOf(record));
       await this.audit.note(tx, actor, {
@@ -123,16 +126,31 @@ function columnsOf(record: GarmentRecord): Pick<GarmentRow, 'ownNumber' | 'title
   return { ownNumber: record.ownNumber, title: record.title, kind: record.kind, record };
 }
 
+function refuseUnreadableDate({ date }: GarmentRecord, pointer: string): void {
+  if (readDate(date)) return;
+  const detail = `Write a year or a span, such as 1885, 1885~ (about) or 1858/1861; “${date}” cannot be read`;
+  throw new Refusal(400, 'garment.date', detail, {}, [{ pointer, detail }]);
+}
+
 async function refuseUsedNumber(tx: Tx, ownNumber: string, exceptId: string): Promise<void> {
   const other = await tx.findOne(GarmentRow, { where: { ownNumber } });
   if (!other || other.id === exceptId) return;
   const message = `${ownNumber} is the number of “${other.title}” already.`;
-  throw conflict('garment.number-used', message, { errors: [{ pointer: '/record/ownNumber', detail: message }] });
+  throw conflict('garment.number-used', message, {
+    errors: [{ pointer: '/record/ownNumber', detail: message }],
+  });
 }
 
 async function insertPart(tx: Tx, garmentId: string, part: NewPart, position: number): Promise<string> {
   const id = uuidv7();
-  await tx.insert(PartRow, { id, garmentId, suffix: part.suffix, kind: part.kind, name: part.name, position });
+  await tx.insert(PartRow, {
+    id,
+    garmentId,
+    suffix: part.suffix,
+    kind: part.kind,
+    name: part.name,
+    position,
+  });
   return id;
 }
 

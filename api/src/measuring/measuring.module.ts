@@ -1,4 +1,16 @@
 import { Module } from '@nestjs/common';
+import { GarmentsModule } from '../garments/garments.module';
+import { FindingsService } from './findings/findings.service';
+import { MeasuringController } from './measuring.controller';
+import { ReadingsService } from './readings/readings.service';
+import { SheetEdits } from './sheets/sheet-edits';
+import { SheetView } from './sheets/sheet-view';
+import { SheetsService } from './sheets/sheets.service';
 
-@Module({})
+@Module({
+  imports: [GarmentsModule],
+  controllers: [MeasuringController],
+  providers: [SheetEdits, SheetView, SheetsService, ReadingsService, FindingsService],
+  exports: [FindingsService],
+})
 export class MeasuringModule {}

@@ -1,4 +1,11 @@
-import { Garment, GarmentPage, GarmentQuery, GarmentRecord, NewGarment, NewPart } from '@ellwand/shared/records/garment';
+import {
+  Garment,
+  GarmentPage,
+  GarmentQuery,
+  GarmentRecord,
+  NewGarment,
+  NewPart,
+} from '@ellwand/shared/records/garment';
 import { createZodDto } from 'nestjs-zod';
 
 export class GarmentQueryDto extends createZodDto(GarmentQuery) {}

@@ -18,7 +18,12 @@ export interface TapeFacts {
 }
 
 export type Intake =
-  | { readonly accepted: true; readonly valueMm: string | null; readonly unit: LengthUnit | null; readonly tapeLengthMm: string | null }
+  | {
+      readonly accepted: true;
+      readonly valueMm: string | null;
+      readonly unit: LengthUnit | null;
+      readonly tapeLengthMm: string | null;
+    }
   | { readonly accepted: false; readonly because: string };
 
 const refused = (because: string): Intake => ({ accepted: false, because });
@@ -33,8 +38,10 @@ const longest = fromMmString('999999');
 export function takeIn(reading: NewReading, facts: TapeFacts): Intake {
   const point = findMeasuringPoint(reading.pointId);
   const asked = protocolPointIds(protocolFor(facts.kind)).some((id) => id === reading.pointId);
-  if (!point || !asked) return refused(`A ${lowerKind(facts.kind)} has no measuring point “${reading.pointId}”.`);
-  if (!facts.readers.includes(reading.readBy)) return refused('The sheet does not name that person as reading the tape.');
+  if (!point || !asked)
+    return refused(`A ${lowerKind(facts.kind)} has no measuring point “${reading.pointId}”.`);
+  if (!facts.readers.includes(reading.readBy))
+    return refused('The sheet does not name that person as reading the tape.');
   if (reading.state === 'not-taken') return { accepted: true, valueMm: null, unit: null, tapeLengthMm: null };
 
   const parsed = fromTyped({ text: reading.typed, unit: reading.unit });
@@ -46,13 +53,15 @@ export function takeIn(reading: NewReading, facts: TapeFacts): Intake {
     tapeLength: fromMmString(facts.tapeLengthMm),
     tapeZero: fromMmString(facts.tapeZeroMm),
   });
-  return inReach(value) ?? {
-    accepted: true,
-    valueMm: toMmString(value),
-    // A unit typed beside the figure wins over the field's own.
-    unit: parsed.value.unit,
-    tapeLengthMm: reading.tapeCount > 0 ? facts.tapeLengthMm : null,
-  };
+  return (
+    inReach(value) ?? {
+      accepted: true,
+      valueMm: toMmString(value),
+      // A unit typed beside the figure wins over the field's own.
+      unit: parsed.value.unit,
+      tapeLengthMm: reading.tapeCount > 0 ? facts.tapeLengthMm : null,
+    }
+  );
 }
 
 function inReach(value: Length): Intake | undefined {

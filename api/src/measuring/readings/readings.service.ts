@@ -48,11 +48,18 @@ export class ReadingsService {
     });
   }
 
-  private async takeOne(tx: Tx, { sheet }: SheetInHand, facts: TapeFacts, reading: NewReading, actor: Actor): Promise<Result> {
+  private async takeOne(
+    tx: Tx,
+    { sheet }: SheetInHand,
+    facts: TapeFacts,
+    reading: NewReading,
+    actor: Actor,
+  ): Promise<Result> {
     const already = await tx.findOne(ReadingRow, { where: { id: reading.id } });
     if (already) return repeated(already, sheet.id, reading);
     // A repeat of what was kept before the sheet was completed is fine; anything new is not.
-    if (sheet.state === 'complete') throw conflict('sheet.complete', 'This sheet is complete. Open it again to go on.');
+    if (sheet.state === 'complete')
+      throw conflict('sheet.complete', 'This sheet is complete. Open it again to go on.');
     const intake = takeIn(reading, facts);
     if (!intake.accepted) return { id: reading.id, outcome: 'refused', detail: intake.because };
     const standing = await tx.findOne(ReadingRow, {
@@ -116,7 +123,8 @@ function repeated(already: ReadingRow, sheetId: string, reading: NewReading): Re
     already.round === reading.round &&
     already.state === reading.state &&
     already.typed === (reading.state === 'taken' ? reading.typed : null);
-  if (!same) return { id: reading.id, outcome: 'refused', detail: 'Another reading was sent under this id before.' };
+  if (!same)
+    return { id: reading.id, outcome: 'refused', detail: 'Another reading was sent under this id before.' };
   return { id: reading.id, outcome: 'already-kept', reading: toStored(already) };
 }
 
@@ -124,5 +132,10 @@ function disputed(reading: NewReading, standing: ReadingRow | null): Result {
   const detail = standing
     ? 'Another reading stands at this point and round. Keep one of the two, or keep both as two rounds.'
     : 'The reading that this one corrects does not stand here any more.';
-  return { id: reading.id, outcome: 'conflict', detail, ...(standing ? { standing: toStored(standing) } : {}) };
+  return {
+    id: reading.id,
+    outcome: 'conflict',
+    detail,
+    ...(standing ? { standing: toStored(standing) } : {}),
+  };
 }

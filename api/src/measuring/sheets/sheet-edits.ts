@@ -28,7 +28,10 @@ export class SheetEdits {
     if (!found) throw notFound('sheet.unknown', 'measuring sheet');
     const part = await tx.findOneOrFail(PartRow, { where: { id: found.partId } });
     await this.garments.noteMeasuring(tx, actor, part.garmentId);
-    const sheet = await tx.findOneOrFail(SheetRow, { where: { id: sheetId }, lock: { mode: 'pessimistic_write' } });
+    const sheet = await tx.findOneOrFail(SheetRow, {
+      where: { id: sheetId },
+      lock: { mode: 'pessimistic_write' },
+    });
     return { sheet, part };
   }
 

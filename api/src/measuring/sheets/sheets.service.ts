@@ -38,7 +38,11 @@ export class SheetsService {
   }
 
   /** Opens a sheet for a part, by the protocol as it stands now. Repeating the request opens one sheet. */
-  open(partId: string, { id = uuidv7(), facts }: z.output<typeof NewSheet>, actor: Actor): Promise<SheetShown> {
+  open(
+    partId: string,
+    { id = uuidv7(), facts }: z.output<typeof NewSheet>,
+    actor: Actor,
+  ): Promise<SheetShown> {
     return this.work.run(async (tx) => {
       if (await tx.existsBy(SheetRow, { id, partId })) return this.view.of(tx, id);
       const part = await tx.findOne(PartRow, { where: { id: partId } });
@@ -70,7 +74,13 @@ export class SheetsService {
       await tx.delete(SheetPersonRow, { sheetId: id });
       await namePeople(tx, id, facts.people);
       await this.sheets.set(tx, actor, sheet, columnsOf(facts));
-      await this.note(tx, actor, 'edit', id, `${actor.name} changed who, where or how ${part.name} was measured`);
+      await this.note(
+        tx,
+        actor,
+        'edit',
+        id,
+        `${actor.name} changed who, where or how ${part.name} was measured`,
+      );
       return this.view.of(tx, id);
     });
   }
@@ -82,7 +92,13 @@ export class SheetsService {
       refuseComplete(sheet);
       await this.findings.refuseUnfinished(tx, id);
       await this.sheets.set(tx, actor, sheet, { state: 'complete', completedAt: this.clock.now() });
-      await this.note(tx, actor, 'complete', id, `${actor.name} completed the measuring sheet of ${part.name}`);
+      await this.note(
+        tx,
+        actor,
+        'complete',
+        id,
+        `${actor.name} completed the measuring sheet of ${part.name}`,
+      );
       return this.view.of(tx, id);
     });
   }
@@ -92,7 +108,13 @@ export class SheetsService {
       const { sheet, part } = await this.sheets.takeAt(tx, actor, id, seen);
       if (sheet.state === 'open') throw conflict('sheet.open', 'This sheet is open already.');
       await this.sheets.set(tx, actor, sheet, { state: 'open', completedAt: null });
-      await this.note(tx, actor, 'reopen', id, `${actor.name} opened the measuring sheet of ${part.name} again`);
+      await this.note(
+        tx,
+        actor,
+        'reopen',
+        id,
+        `${actor.name} opened the measuring sheet of ${part.name} again`,
+      );
       return this.view.of(tx, id);
     });
   }
@@ -103,7 +125,8 @@ export class SheetsService {
 }
 
 function refuseComplete(sheet: SheetRow): void {
-  if (sheet.state === 'complete') throw conflict('sheet.complete', 'This sheet is complete. Open it again to change it.');
+  if (sheet.state === 'complete')
+    throw conflict('sheet.complete', 'This sheet is complete. Open it again to change it.');
 }
 
 /** The sheet's own columns; people stand in a table of their own. */
@@ -116,7 +139,13 @@ async function namePeople(tx: Tx, sheetId: string, people: SheetFacts['people'])
   const known = await tx.countBy(UserRow, { id: In(ids), active: true });
   if (known !== ids.length) {
     const errors = [{ pointer: '/facts/people', detail: 'Name people who work here now' }];
-    throw new Refusal(400, 'sheet.unknown-person', 'The sheet names somebody who does not work here.', {}, errors);
+    throw new Refusal(
+      400,
+      'sheet.unknown-person',
+      'The sheet names somebody who does not work here.',
+      {},
+      errors,
+    );
   }
   const once = new Map(people.map(({ userId, duty }) => [`${userId} ${duty}`, { sheetId, userId, duty }]));
   await tx.insert(SheetPersonRow, [...once.values()]);

@@ -1,0 +1,92 @@
+import { measuringPoint, type PointId } from '@ellwand/shared/points/measuring-points';
+import { protocolFor } from '@ellwand/shared/protocols/standard-protocols';
+import { protocolPointIds } from '@ellwand/shared/protocols/protocol';
+import { acceptedValue } from '@ellwand/shared/readings/accepted-value';
+import { standingReadings, stands, type Reading } from '@ellwand/shared/readings/reading';
+import { shownUncertainty } from '@ellwand/shared/readings/uncertainty';
+import type { Image } from '@ellwand/shared/records/image';
+import { derivedViews, toReading } from '@ellwand/shared/records/measured';
+import type { PublishedMeasurement, PublishedPart } from '@ellwand/shared/records/published-garment';
+import { lengthOf, toMmString } from '@ellwand/shared/units/length';
+import { divideHalfUp } from '@ellwand/shared/units/rounding';
+import type { SnapshotPart, SnapshotSheet } from '../snapshot';
+
+interface PartContext {
+  readonly ownNumber: string;
+  readonly showPeople: boolean;
+  readonly pictures: readonly Image[];
+}
+
+/** A part as the public reads it. A part without a complete sheet is shown, and says that it is not measured. */
+export function projectPart(part: SnapshotPart, context: PartContext): PublishedPart {
+  const heading = { number: `${context.ownNumber}${part.suffix}`, kind: part.kind, name: part.name };
+  const { sheet } = part;
+  if (!sheet) return { ...heading, ...unmeasured };
+  const readings = sheet.readings.map(toReading);
+  const asked = protocolPointIds(protocolFor(part.kind));
+  return {
+    ...heading,
+    measuredOn: sheet.measuredOn,
+    support: sheet.support,
+    tape: sheet.tape,
+    fasteningPair: sheet.fasteningPair || null,
+    measuredBy: context.showPeople ? namesOf(sheet) : [],
+    peopleCount: new Set(sheet.people.map((person) => person.userId)).size,
+    measurements: asked.flatMap((id) => projectMeasurement(id, readings, context.pictures) ?? []),
+    notTaken: asked.flatMap((id) => projectNotTaken(id, readings) ?? []),
+    derived: derivedViews(part.kind, sheet.readings),
+  };
+}
+
+const unmeasured = {
+  measuredOn: null,
+  support: null,
+  tape: null,
+  fasteningPair: null,
+  measuredBy: [],
+  peopleCount: 0,
+  measurements: [],
+  notTaken: [],
+  derived: [],
+};
+
+function namesOf(sheet: SnapshotSheet): string[] {
+  return [...new Set(sheet.people.map((person) => person.name))];
+}
+
+function projectMeasurement(
+  pointId: PointId,
+  readings: readonly Reading[],
+  pictures: readonly Image[],
+): PublishedMeasurement | undefined {
+  const accepted = acceptedValue(readings, pointId);
+  if (!accepted) return undefined;
+  const point = measuringPoint(pointId);
+  const rounds = standingReadings(readings, pointId);
+  const lengths = rounds.find((reading) => reading.tapeLengths)?.tapeLengths;
+  const half = lengthOf(Number(divideHalfUp(BigInt(accepted.value), 2n)));
+  return {
+    pointId,
+    label: point.name,
+    valueMm: toMmString(accepted.value),
+    uncertaintyMm: toMmString(shownUncertainty(accepted.uncertaintyMm)),
+    rounds: accepted.n,
+    spreadMm: toMmString(accepted.spread),
+    levelFoundBy: rounds.find((reading) => reading.levelFoundBy)?.levelFoundBy ?? null,
+    tapeLengths: lengths
+      ? { count: lengths.count, tapeMm: toMmString(lengths.tape), restMm: toMmString(lengths.rest) }
+      : null,
+    halfMm: point.how === 'flat-doubled' ? toMmString(half) : null,
+    imageId: pictures.find((picture) => picture.pointId === pointId)?.id ?? null,
+  };
+}
+
+function projectNotTaken(
+  pointId: PointId,
+  readings: readonly Reading[],
+): PublishedPart['notTaken'][number] | undefined {
+  const standing = readings.filter((reading) => reading.pointId === pointId && stands(reading));
+  if (standing.some((reading) => reading.state === 'taken')) return undefined;
+  const reason = standing.find((reading) => reading.state === 'not-taken')?.notTakenReason;
+  return reason ? { pointId, label: measuringPoint(pointId).name, reason } : undefined;
+}

@@ -1,0 +1,62 @@
+import { GarmentRecord } from '@ellwand/shared/records/garment';
+import { supportLabels, supports } from '@ellwand/shared/records/sheet';
+import { IsNull } from 'typeorm';
+import type { Tx } from '../common/work';
+import { GarmentEditor } from '../garments/garment-editor.entity';
+import type { GarmentRow } from '../garments/garment.entity';
+import { PartRow } from '../garments/part.entity';
+import { toStored, trimmedMm } from '../measuring/readings/stored-reading';
+import { SheetRow } from '../measuring/sheets/sheet.entity';
+import { peopleOf, readingsOf } from '../measuring/sheets/sheet-view';
+import { ImageRow } from '../media/image.entity';
+import { toImage } from '../media/image-view';
+import type { Snapshot, SnapshotPart, SnapshotSheet } from './snapshot';
+
+/** Freezes a garment as it stands: what is reviewed is what is published, whatever happens in between. */
+export async function takeSnapshot(tx: Tx, garment: GarmentRow): Promise<Snapshot> {
+  const parts = await tx.find(PartRow, { where: { garmentId: garment.id }, order: { position: 'ASC' } });
+  const frozen: SnapshotPart[] = [];
+  for (const part of parts) {
+    frozen.push({
+      id: part.id,
+      suffix: part.suffix,
+      kind: part.kind,
+      name: part.name,
+      sheet: await speakingSheet(tx, part),
+    });
+  }
+  const images = await tx.find(ImageRow, {
+    where: { garmentId: garment.id, deletedAt: IsNull(), state: 'ready' },
+    order: { position: 'ASC', id: 'ASC' },
+  });
+  const editors = await tx.find(GarmentEditor, { where: { garmentId: garment.id } });
+  return {
+    garmentId: garment.id,
+    record: GarmentRecord.parse(garment.record),
+    parts: frozen,
+    images: images.map(toImage),
+    editedBy: editors.map((editor) => editor.userId),
+  };
+}
+
+/** Of several sheets over the years the newest complete one speaks for its part. */
+async function speakingSheet(tx: Tx, part: PartRow): Promise<SnapshotSheet | null> {
+  const sheet = await tx.findOne(SheetRow, {
+    where: { partId: part.id, state: 'complete' },
+    order: { measuredOn: 'DESC', createdAt: 'DESC' },
+  });
+  if (!sheet) return null;
+  const support = supports.find((id) => id === sheet.support);
+  const readings = await readingsOf(tx, sheet.id);
+  return {
+    id: sheet.id,
+    protocolVersion: sheet.protocolVersion,
+    measuredOn: sheet.measuredOn,
+    support: support ? supportLabels[support] : sheet.support,
+    tape: sheet.tape,
+    tapeLengthMm: trimmedMm(sheet.tapeLengthMm),
+    fasteningPair: sheet.fasteningPair,
+    people: await peopleOf(tx, sheet.id),
+    readings: readings.map(toStored),
+  };
+}
