@@ -1,3 +1,4 @@
+import { type PointId } from '../../points/measuring-points.js';
 import { type Point } from '../geometry/point.js';
 import {
   type ButtonLayer,
@@ -41,7 +42,7 @@ export const row = (count: number, from: Point, to: Point): Point[] =>
   });
 
 type LineWord = (
-  pointId: string,
+  pointId: PointId,
   view: ViewName,
   path: string | readonly string[],
   more?: { readonly beside?: number; readonly sag?: number },

@@ -1,4 +1,6 @@
 import { type Anchors } from '../geometry/path-language.js';
+import { type GarmentKind } from '../../points/kinds.js';
+import { type PointId } from '../../points/measuring-points.js';
 import { type Point } from '../geometry/point.js';
 
 /** How the garment lies while these lines are read. */
@@ -57,7 +59,7 @@ export interface View {
 export type MeasuringWay = 'straight' | 'curve' | 'round' | 'doubled';
 
 export interface MeasuringLine {
-  readonly pointId: string;
+  readonly pointId: PointId;
   readonly view: ViewName;
   readonly way: MeasuringWay;
   /** Paths over the view's anchors; between two of them the tape steps over to the next piece. */
@@ -69,7 +71,7 @@ export interface MeasuringLine {
 }
 
 export interface GarmentDiagram {
-  readonly kind: string;
+  readonly kind: GarmentKind;
   readonly title: string;
   readonly views: readonly View[];
   readonly lines: readonly MeasuringLine[];

@@ -1,15 +1,15 @@
 import { type GarmentKind } from '../../points/kinds.js';
-import { pathData, sampled, transformed } from '../geometry/path.js';
+import { sampled, transformed } from '../geometry/path.js';
 import { type Point } from '../geometry/point.js';
 import { diagramFor } from '../kinds/diagram-for.js';
 import { drawLine, type DrawnLine } from './drawn-line.js';
 import { LetterSheet } from './letter-sheet.js';
-import { lettersInOrder } from './letters-in-order.js';
 import { type View, type ViewName } from './model.js';
+import { CAPTION_SIZE, paintView } from './paint-view.js';
 import { placeLetters } from './place-letters.js';
 import { pointMarks, type LetterStyle } from './point-marks.js';
 import { layOut, projected, type SheetLayout } from './projection.js';
-import { type Scene, type SceneClip, type SceneMark, type ScenePrimitive } from './scene.js';
+import { type Scene, type SceneClip, type ScenePrimitive } from './scene.js';
 import { drawView, type ViewDrawing } from './view-shapes.js';
 
 export interface DiagramRequest {
@@ -18,30 +18,16 @@ export interface DiagramRequest {
   readonly views?: readonly ViewName[];
   /** Width of the sheet in CSS pixels, from about 320. */
   readonly widthPx: number;
-  /** Only these measuring points are drawn; left out: all. */
+  /** Only these measuring points are drawn; left out: those that have a letter. */
   readonly points?: readonly string[];
   /** The point being measured: its line is lit. */
   readonly current?: string;
-  /** Letter by point id, as in the table beside the diagram; left out: A, B, C… in the diagram's order. */
-  readonly letters?: Readonly<Record<string, string>> | ReadonlyMap<string, string>;
+  /** Letter by point id, as in the rows of the table beside the diagram. */
+  readonly letters: Readonly<Record<string, string>> | ReadonlyMap<string, string>;
   /** Before the ids of clips, where several diagrams share a page. */
   readonly idPrefix?: string;
 }
 
-/** Pixels: outline and seam as the look asks, folds finer, and one that follows the size of the button. */
-const STROKE = {
-  cloth: 2.2,
-  lining: 2.2,
-  edge: 2.2,
-  piece: 1.4,
-  'piece-lining': 1.4,
-  seam: 1.4,
-  fold: 0.9,
-  stitching: 0.9,
-} as const;
-const STITCH_DASH = '3 2.4';
-const BUTTON = { stroke: 1.2, least: 1.6 } as const;
-const CAPTION_SIZE = 13;
 /** Half the width of a character of the caption, on average, as a share of its size. */
 const CAPTION_HALF_CHARACTER = 0.27;
 const INK_STEP = 4;
@@ -67,19 +53,29 @@ export function paintDiagram(request: DiagramRequest): Scene | undefined {
     clips.push(...painted.clips);
     primitives.push(...painted.marks);
   });
-  const wanted = diagram.lines.filter(({ pointId }) => request.points?.includes(pointId) ?? true);
+  const letterOf = letterFinder(request.letters);
+  const wanted = diagram.lines.filter(
+    ({ pointId }) => request.points?.includes(pointId) ?? letterOf(pointId) !== '',
+  );
   const lines = wanted.flatMap((line): DrawnLine[] => {
     const index = views.findIndex((view) => view.name === line.view);
     const [view, place] = [views[index], layout.places[index]];
     return view && place ? [drawLine(line, view.anchors, place.projection)] : [];
   });
-  const order = diagram.lines.map((line) => line.pointId);
-  primitives.push(...paintLines(lines, request, order, { views, drawings, layout }));
+  primitives.push(...paintLines(lines, request, letterOf, { views, drawings, layout }));
   const title = `${diagram.title}: ${views.map((view) => view.caption.toLowerCase()).join('; ')}`;
   return { width: layout.width, height: layout.height, title, clips, primitives };
 }
 
-type Place = SheetLayout['places'][number];
+type LetterOf = (pointId: string) => string;
+
+function letterFinder(letters: DiagramRequest['letters']): LetterOf {
+  const byId = isMap(letters) ? letters : new Map(Object.entries(letters));
+  return (pointId) => byId.get(pointId) ?? '';
+}
+
+const isMap = (letters: DiagramRequest['letters']): letters is ReadonlyMap<string, string> =>
+  letters instanceof Map;
 
 interface Sheet {
   readonly views: readonly View[];
@@ -87,50 +83,14 @@ interface Sheet {
   readonly layout: SheetLayout;
 }
 
-function paintView(view: View, drawing: ViewDrawing, place: Place, prefix: string) {
-  const toSheet = projected(place.projection);
-  const clips = new Map<string, SceneClip>();
-  const clipId = (clip: { from: number; to: number }): string => {
-    const id = `${prefix}-${clip.from}-${clip.to}`;
-    if (!clips.has(id)) {
-      const outlines = drawing.silhouettes.slice(clip.from, clip.to);
-      clips.set(id, { id, paths: outlines.map((path) => pathData(transformed(path, toSheet), true)) });
-    }
-    return id;
-  };
-  const marks = drawing.shapes.map((shape): SceneMark => {
-    if (shape.kind === 'button') {
-      const [cx, cy] = toSheet(shape.at).map((value) => Math.round(value * 10) / 10) as [number, number];
-      const r = Math.round(Math.max(BUTTON.least, shape.radius * place.projection.scale) * 10) / 10;
-      return { type: 'circle', role: 'button', cx, cy, r, strokeWidth: BUTTON.stroke };
-    }
-    return {
-      type: 'path',
-      role: shape.role,
-      d: pathData(transformed(shape.path, toSheet), shape.closed),
-      strokeWidth: STROKE[shape.role],
-      ...(shape.role === 'stitching' ? { dash: STITCH_DASH } : {}),
-      ...(shape.clip ? { clip: clipId(shape.clip) } : {}),
-    };
-  });
-  const [x, y] = place.captionAt;
-  marks.push({ type: 'text', role: 'caption', x, y, size: CAPTION_SIZE, text: view.caption });
-  return { clips: [...clips.values()], marks };
-}
-
 function paintLines(
   lines: readonly DrawnLine[],
   request: DiagramRequest,
-  order: readonly string[],
+  letterOf: LetterOf,
   sheet: Sheet,
 ): ScenePrimitive[] {
   const style: LetterStyle =
     request.widthPx < NARROW_SHEET ? { radius: 9, size: 11.5 } : { radius: 10, size: 12 };
-  const given = request.letters ?? lettersInOrder(order);
-  const letterOf = (pointId: string): string =>
-    (given instanceof Map
-      ? (given as ReadonlyMap<string, string>).get(pointId)
-      : (given as Readonly<Record<string, string>>)[pointId]) ?? '';
   const letterSheet = new LetterSheet(sheet.layout, style.radius, lines, inkOf(sheet), captionsOf(sheet));
   const places = placeLetters(lines, letterSheet, style.radius);
   return lines.map((drawn, index) => {

@@ -7,7 +7,7 @@ import { bodiceInside } from './bodice-inside.js';
 export const bodice: GarmentDiagram = {
   kind: 'bodice',
   title: 'Bodice',
-  leastScale: 0.42,
+  leastScale: 0.34,
   views: [bodiceFront, bodiceBack, bodiceInside],
   lines: [
     allRound('bust', 'inside', [

@@ -1,4 +1,4 @@
-import { buttons, cloth, fold, piece, row, seam, stitching } from '../diagram/layers.js';
+import { buttons, cloth, fold, row, seam, stitching } from '../diagram/layers.js';
 import { type View } from '../diagram/model.js';
 
 /** The same dress, back up: it closes with hooks down the centre back, and the skirt's placket below. */
@@ -50,8 +50,7 @@ export const dressBack: View = {
     seam('0,-318--0,0', 'once'),
     seam('11,-317--11,0', 'once'),
     buttons(row(8, [5, -306], [5, -46]), 2.2),
-    piece('0,-26!{0}..{-4}126,-28!--124,10!{176}..{180}0,18!'),
-    seam('11,-30--11,22', 'once', 'last'),
+    stitching('0,0{0}..{-3}126,-8'),
     cloth(
       'tip!{-18}..{0}284,-352..{58}396,-262..{92}puffOuter..{112}394,-40..{90}wristOuter!{172}..wristInner!' +
         '{-92}..{-96}330,-20..{-150}258,-92..{-136}puffInner..{-104}underarm!{-132}..scye{-92}..{-50}tip!',

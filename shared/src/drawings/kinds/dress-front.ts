@@ -1,7 +1,7 @@
-import { cloth, fold, lining, piece, seam, stitching } from '../diagram/layers.js';
+import { cloth, fold, lining, seam, stitching } from '../diagram/layers.js';
 import { type View } from '../diagram/model.js';
 
-/** A dress of the 1830s, in one: wide neck, great sleeves narrowing to the wrist, a gathered skirt to the ankle. */
+/** A dress of the middle 1830s, in one: wide neck, great sleeves, a point in front, a gathered skirt to the ankle. */
 export const dressFront: View = {
   name: 'front',
   caption: 'Front',
@@ -13,6 +13,7 @@ export const dressFront: View = {
     underarm: [168, -190],
     waistSide: [122, 0],
     centre: [0, 10],
+    point: [0, 54],
     hemSide: [398, 976],
     hemFront: [0, 1024],
     wristOuter: [392, 206],
@@ -21,10 +22,10 @@ export const dressFront: View = {
     puffInner: [196, -140],
   },
   layers: [
-    lining('neck!{196}..{180}0,-346!--0,-290!--neck!'),
+    lining('0,-346!{0}..{16}neck!--0,-290!--0,-346', 'both'),
     cloth('centre!{0}..{-5}waistSide!{24}..{58}214,84..{80}330,560..{83}hemSide!{169}..{180}hemFront!'),
     ...[
-      [10, 88, 22, 89, 560],
+      [8, 88, 20, 89, 560],
       [22, 84, 56, 86, 900],
       [36, 78, 92, 84, 430],
       [50, 72, 140, 83, 780],
@@ -40,21 +41,19 @@ export const dressFront: View = {
     seam('0,924{0}..{-9}390,886'),
     seam('0,940{0}..{-9}394,902'),
     cloth(
-      'neckFront!{0}..{-22}70,-318..{-62}neck!{22}..{28}tip!{122}..scye{94}..{58}underarm!{104}..waistSide!{176}..{180}centre!',
+      'neckFront!{0}..{-22}70,-318..{-62}neck!{22}..{28}tip!{122}..scye{94}..{58}underarm!{104}..waistSide!{158}..{146}point!',
     ),
     stitching('0,-292{0}..{-22}73,-310..{-62}134,-372'),
-    seam('0,-300--0,0', 'once'),
+    seam('0,-300--0,60', 'once'),
     ...[
-      [134, -360, 118, 10, -8],
-      [146, -354, 116, 22, -8],
-      [158, -349, 115, 36, -8],
-      [170, -344, 114, 50, -8],
-      [182, -339, 113, 66, -8],
+      [134, -360, 118, 9, 44],
+      [146, -354, 116, 20, 37],
+      [158, -349, 115, 33, 30],
+      [170, -344, 114, 47, 24],
+      [182, -339, 113, 63, 16],
     ].map(([x, y, leaving, toX, toY]) => fold(`${x},${y}{${leaving}}..{106}${toX},${toY}`)),
-    seam('150,-204{104}..{104}96,-4'),
-    piece('0,-24!{0}..{-4}126,-28!--124,10!{175}..{180}0,20!'),
-    piece('-19,-30!--19,-30!--19,28!---19,28!---19,-30!', 'once'),
-    seam('-11,-21--11,-21--11,19---11,19---11,-21', 'once', 'all'),
+    seam('150,-204{104}..{104}96,14'),
+    stitching('0,43!{-34}..{-22}126,-10'),
     cloth(
       'tip!{-18}..{0}284,-352..{58}396,-262..{92}puffOuter..{112}394,-40..{90}wristOuter!{172}..wristInner!' +
         '{-92}..{-96}330,-20..{-150}258,-92..{-136}puffInner..{-104}underarm!{-122}..scye{-86}..{-58}tip!',

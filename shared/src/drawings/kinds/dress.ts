@@ -11,7 +11,7 @@ const SLEEVE_UNDER = '~underarm{76}..{44}~puffInner..{30}-258,-92..{84}-330,-20.
 export const dress: GarmentDiagram = {
   kind: 'dress',
   title: 'Dress',
-  leastScale: 0.3,
+  leastScale: 0.26,
   views: [dressFront, dressBack, dressInside],
   lines: [
     allRound('bust', 'inside', '~bustSide--bustSide', { sag: 14 }),
@@ -30,9 +30,10 @@ export const dress: GarmentDiagram = {
     straightLine('cloth-width', 'inside', '4,720--194,720'),
     alongCurve('shoulder-seam', 'front', '~neck--~tip', { beside: 12 }),
     straightLine('across-front', 'front', '~scye--scye'),
-    straightLine('neck-to-waist-front', 'front', '-26,-298---26,-6'),
+    straightLine('neck-to-waist-front', 'front', '-26,-298---26,-2'),
+    straightLine('point-depth', 'front', '64,0--64,52'),
     straightLine('neck-to-hem-front', 'front', '28,-298--28,1020'),
-    straightLine('waist-to-hem-front', 'front', '-26,14---26,1020'),
+    straightLine('waist-to-hem-front', 'front', '-26,4---26,1020'),
     alongCurve('sleeve-outer', 'front', SLEEVE_OUTER, { beside: -13 }),
     alongCurve('sleeve-under', 'front', SLEEVE_UNDER, { beside: -10 }),
     flatDoubled('sleeve-widest', 'front', 'puffInner--424,-156'),
