@@ -33,10 +33,14 @@ export async function installDebianPackages(needs, step, system = thisSystem) {
   const names = missing.join(' and ');
   const byHand = `sudo apt-get install ${missing.join(' ')}`;
   if (!system.findProgram('apt-get')) {
-    throw new PlainFailure(`${names} missing, and this system has no apt-get: install it, then start again.`);
+    throw new PlainFailure(
+      `Missing on this machine: ${names}, and it has no apt-get: install what is missing, then start again.`,
+    );
   }
   if (!system.isRoot && !system.maySudo()) {
-    throw new PlainFailure(`${names} missing, and this account may not install it. Run: ${byHand}`);
+    throw new PlainFailure(
+      `Missing on this machine: ${names}. This account may not install packages. Run: ${byHand}`,
+    );
   }
   const { code, output } = await step(`Installing ${names}`, () => installWithApt(missing, system));
   if (code !== 0) {

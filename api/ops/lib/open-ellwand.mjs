@@ -108,7 +108,6 @@ function printAddresses({ url, workroomUrl, inboxUrl, demonstration, firstAdmini
   ];
   const shown = lines.filter(([, value]) => value !== undefined);
   const width = Math.max(...shown.map(([label = '']) => label.length));
-  console.log('\nEllwand is open. Ctrl-C closes it.\n');
-  for (const [label = '', value = ''] of shown) console.log(`  ${label.padEnd(width)}  ${value}`);
-  console.log('');
+  const listed = shown.map(([label = '', value = '']) => `  ${label.padEnd(width)}  ${value}\n`);
+  console.log(`\nEllwand is open. Ctrl-C closes it.\n\n${listed.join('')}`);
 }

@@ -26,18 +26,31 @@ export function parsePort(name, text) {
  */
 export async function requirePort(port, setting) {
   const fault = await portFault(port);
-  if (fault === undefined) return;
+  if (fault !== undefined) throw new PlainFailure(portSentence(port, fault, setting));
+}
+
+/**
+ * @param {number} port
+ * @param {string} fault the system's code
+ * @param {string} setting
+ * @returns {string}
+ */
+export function portSentence(port, fault, setting) {
   if (fault === 'EADDRINUSE') {
-    throw new PlainFailure(
-      `Port ${port} is in use by another program: stop it, or choose another port with ${setting}=${port + 1000}.`,
-    );
+    return `Port ${port} is in use by another program: stop it, or choose another port with ${setting}=${otherPort(port)}.`;
   }
   if (fault === 'EACCES') {
-    throw new PlainFailure(
-      `This account may not listen on port ${port}: choose one above 1023 with ${setting}.`,
-    );
+    return `This account may not listen on port ${port}: choose one above 1023 with ${setting}.`;
   }
-  throw new PlainFailure(`Port ${port} cannot be listened on (${fault}): choose another with ${setting}.`);
+  return `Port ${port} cannot be listened on (${fault}): choose another with ${setting}.`;
+}
+
+/**
+ * A suggestion that is itself a port.
+ * @param {number} port
+ */
+function otherPort(port) {
+  return port + 1000 <= HIGHEST_PORT ? port + 1000 : port - 1000;
 }
 
 /**

@@ -1,5 +1,4 @@
 // @ts-check
-import os from 'node:os';
 import { applyAccounts } from './database-accounts.mjs';
 import { startDatabase } from './database-server.mjs';
 import { freePort } from './ports.mjs';
@@ -7,9 +6,8 @@ import { freePort } from './ports.mjs';
 /**
  * Starts a MariaDB for the API's tests and says in the environment where it is. It ends with this process.
  *
- * - ELLWAND_TEST_DB: the same JSON that `database.mjs start` prints
- * - ELLWAND_TEST_DB_DATA: what to hand to `database.mjs schemas --data`
- * - ELLWAND_TEST_DB_SOCKET, ELLWAND_TEST_DB_ROOT: for the server's administrator, without a password
+ * - ELLWAND_TEST_DATABASE: the same JSON that `database.mjs start` prints
+ * - ELLWAND_TEST_DATABASE_DATA: what to hand to `database.mjs schemas --data`
  * @param {string} dataFolder
  * @returns {Promise<NodeJS.ProcessEnv>}
  */
@@ -17,9 +15,7 @@ export async function startTestDatabase(dataFolder) {
   const { port, socket, pid } = await startDatabase({ dataFolder, port: await freePort() });
   const accounts = await applyAccounts(dataFolder);
   return {
-    ELLWAND_TEST_DB: JSON.stringify({ port, socket, pid, accounts }),
-    ELLWAND_TEST_DB_DATA: dataFolder,
-    ELLWAND_TEST_DB_SOCKET: socket,
-    ELLWAND_TEST_DB_ROOT: os.userInfo().username,
+    ELLWAND_TEST_DATABASE: JSON.stringify({ port, socket, pid, accounts }),
+    ELLWAND_TEST_DATABASE_DATA: dataFolder,
   };
 }

@@ -30,6 +30,7 @@ const everything = (folder) => {
     buildRunner('build applications', others, ['build shared']),
     ...vitestRunners(root, folder),
     jestRunner(root, folder, {
+      name: 'api (jest)',
       after: ['build shared'],
       env: () => startTestDatabase(path.join(folder, 'jest')),
     }),
@@ -49,7 +50,16 @@ const everything = (folder) => {
 const parts = {
   types: () => typeRunners(root),
   lint: () => lintRunners(root),
-  unit: (folder) => vitestRunners(root, folder),
+  // The API's specs that stand beside their sources; those that need a database are for npm test.
+  unit: (folder) => [
+    ...vitestRunners(root, folder),
+    jestRunner(root, folder, {
+      name: 'api (jest, unit)',
+      after: [],
+      env: () => Promise.resolve({}),
+      args: ['--selectProjects', 'unit'],
+    }),
+  ],
 };
 
 /** `npm test`: everything, with database folder and ports of its own. */

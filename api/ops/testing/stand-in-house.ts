@@ -47,7 +47,8 @@ export interface StandInHouse {
   start(options?: { args?: string[]; env?: NodeJS.ProcessEnv }): StartedHouse;
   /** Lines that the stand-ins have left, in order. */
   told(): string[];
-  remove(): void;
+  /** Ends what still runs and removes the folder. */
+  remove(): Promise<void>;
 }
 
 export interface StartedHouse {
@@ -67,13 +68,22 @@ export async function makeStandInHouse(): Promise<StandInHouse> {
   const port = await freePort();
   fs.cpSync(OPS, path.join(folder, 'api', 'ops'), { recursive: true });
   writeWorkspaces(folder);
+  const started: StartedHouse[] = [];
   return {
     folder,
     data,
     port,
-    start: ({ args = [], env = {} } = {}) => startIn(folder, args, { ELLWAND_PORT: String(port), ...env }),
+    start: ({ args = [], env = {} } = {}) => {
+      const house = startIn(folder, args, { ELLWAND_PORT: String(port), ...env });
+      started.push(house);
+      return house;
+    },
     told: () => linesOf(path.join(data, 'told.txt')),
-    remove: () => {
+    remove: async () => {
+      for (const house of started) {
+        house.child.kill('SIGTERM');
+        await house.ended();
+      }
       fs.rmSync(folder, { recursive: true, force: true });
     },
   };

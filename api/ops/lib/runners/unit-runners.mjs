@@ -36,17 +36,17 @@ export function vitestRunners(root, reports) {
 /**
  * @param {string} root
  * @param {string} reports
- * @param {{ after: string[], env: () => Promise<NodeJS.ProcessEnv>, args?: string[] }} options
+ * @param {{ name: string, after: string[], env: () => Promise<NodeJS.ProcessEnv>, args?: string[] }} options
  *   `env` is asked for when the runner begins: it may start the database that the tests need
  * @returns {Runner}
  */
-export function jestRunner(root, reports, { after, env, args = [] }) {
+export function jestRunner(root, reports, { name, after, env, args = [] }) {
   return {
-    name: 'api (jest)',
+    name,
     after,
     async work() {
       const report = path.join(reports, 'jest.json');
-      const all = ['--ci', '--json', `--outputFile=${report}`, `--maxWorkers=${WORKERS}`, ...args];
+      const all = ['--ci', '--json', `--outputFile=${report}`, ...args];
       return runAndCount(root, 'api', 'jest', all, report, { ...process.env, ...(await env()) });
     },
   };
