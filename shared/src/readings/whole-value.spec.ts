@@ -14,6 +14,12 @@ describe('tape lengths', () => {
     expect(tapeJoins({ count: 1, tape: mm(1500), rest: mm(0) })).toBe(0);
     expect(tapeJoins({ count: 0, tape: mm(1500), rest: mm(742) })).toBe(0);
   });
+
+  it('are never more joins than a garment could take, whatever the count', () => {
+    expect(tapeJoins({ count: 1e15, tape: mm(1500), rest: mm(1) })).toBe(100);
+    expect(tapeJoins({ count: -3, tape: mm(1500), rest: mm(1) })).toBe(0);
+    expect(tapeJoins({ count: Number.NaN, tape: mm(1500), rest: mm(1) })).toBe(0);
+  });
 });
 
 describe('the whole value', () => {

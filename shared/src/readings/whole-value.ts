@@ -7,9 +7,13 @@ export function tapeLengthsTotal({ count, tape, rest }: TapeLengths): Length {
   return add(times(tape, count), rest);
 }
 
+/** No garment takes more: a greater count is a slip, and must not carry any sum away with it. */
+const MOST_JOINS = 100;
+
 /** How often the end of one tape length was joined to the start of the next; none when there is no rest to join. */
 export function tapeJoins({ count, rest }: TapeLengths): number {
-  return rest > 0 ? count : Math.max(count - 1, 0);
+  if (!Number.isInteger(count)) return 0;
+  return Math.min(Math.max(rest > 0 ? count : count - 1, 0), MOST_JOINS);
 }
 
 /** How often the tape was laid down: each time its zero error is read along. */
