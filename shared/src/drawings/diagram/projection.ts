@@ -30,6 +30,10 @@ export interface SheetLayout {
 /** Room round the views, in pixels: letters and lines beside edges stand in it. */
 const MARGIN = { side: 34, narrowSide: 26, top: 34, between: 46, narrowBetween: 36, caption: 44 } as const;
 const NARROW_SHEET = 520;
+
+/** On a phone letters are a little smaller and margins thinner. */
+export const isNarrow = (sheetWidth: number): boolean => sheetWidth < NARROW_SHEET;
+
 /** Beyond this a view only grows, and says no more. */
 const LARGEST_SCALE = 0.95;
 
@@ -40,7 +44,7 @@ const widthOf = ({ bounds }: SheetView): number => bounds.right - bounds.left;
  * a row. Views of one row share their top in millimetres, so that waist stands beside waist.
  */
 export function layOut(views: readonly SheetView[], sheetWidth: number, leastScale: number): SheetLayout {
-  const narrow = sheetWidth < NARROW_SHEET;
+  const narrow = isNarrow(sheetWidth);
   const side = narrow ? MARGIN.narrowSide : MARGIN.side;
   const gap = narrow ? MARGIN.narrowBetween : MARGIN.between;
   const scaleOf = (rows: readonly (readonly SheetView[])[]): number =>

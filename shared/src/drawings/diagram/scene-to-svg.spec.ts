@@ -1,3 +1,4 @@
+import { readFileSync } from 'node:fs';
 import { describe, expect, it } from 'vitest';
 import { kindIds } from '../../points/kinds.js';
 import { paintSilhouette } from '../silhouettes/silhouette-for.js';
@@ -46,6 +47,11 @@ describe('a scene as SVG', () => {
     const whole = paintDiagram({ kind: 'dress', widthPx: 600, letters: { bust: 'A', hem: 'B' } })!;
     expect(sceneToSvg(whole, { palette: paperPalette })).not.toMatch(/\sstyle=/);
   });
+});
+
+it('has a rule in the screens’ style sheet for every role it can paint', () => {
+  const sheet = readFileSync(new URL('../../../look/drawings.css', import.meta.url), 'utf8');
+  for (const role of Object.keys(paperPalette)) expect(sheet).toMatch(new RegExp(`\\.drawing-${role}[ ,]`));
 });
 
 describe('silhouettes', () => {

@@ -24,7 +24,7 @@ const lettered = (fill: string) => ({
 });
 
 /** Ink on white, measuring lines in madder: the light look of the screens, for paper. */
-export const paperPalette: ScenePalette = {
+export const paperPalette: Required<ScenePalette> = {
   cloth: filled(SHEET),
   piece: filled(SHEET),
   lining: filled(WELL),
