@@ -1,0 +1,60 @@
+import { type PublishedMeasurement, type PublishedPart } from '@ellwand/shared/records/published-garment';
+import { findMeasuringPoint } from '@ellwand/shared/points/measuring-points';
+import { howLabels, sideLabels } from '@ellwand/shared/points/point';
+import { counted } from '../../lib/words';
+
+type NotTakenReason = PublishedPart['notTaken'][number]['reason'];
+
+/** Why a point was not taken, after its name and a colon. */
+export const reasonWords: Readonly<Record<NotTakenReason, string>> = {
+  absent: 'the garment has none',
+  'too-fragile': 'too fragile to be handled for it',
+  'cannot-be-opened': 'the garment cannot be opened',
+  'fastening-stuck': 'a fastening is stuck',
+  'sewn-to-a-mount': 'the garment is sewn to a mount',
+  'not-accessible': 'could not be reached',
+  'not-applicable': 'does not apply to this cut',
+  altered: 'altered there, so that it would mislead',
+  'stopped-damage-seen': 'measuring stopped because damage was seen',
+};
+
+const levelWords: Readonly<Record<NonNullable<PublishedMeasurement['levelFoundBy']>, string>> = {
+  band: 'level found at the band',
+  seam: 'level found at the seam',
+  nicks: 'level found by nicks in the seam',
+  'dart-tips': 'level found at the dart tips',
+  stated: 'level as stated',
+};
+
+const supportWords: Readonly<Record<string, string>> = {
+  flat: 'flat on the table',
+  'flat-tissue': 'flat, tissue inside',
+  'on-a-figure': 'on a figure',
+  'on-a-hanger': 'on a padded hanger',
+};
+
+/** What the garment lay or hung on; words that are not ours are left as they came. */
+export function supportText(support: string): string {
+  return supportWords[support] ?? support;
+}
+
+/** How the tape went: "Inside, round, from fastening to fastening". */
+export function howHeld(pointId: string): string | null {
+  const point = findMeasuringPoint(pointId);
+  return point ? `${sideLabels[point.side]}, ${howLabels[point.how]}` : null;
+}
+
+/** How the level was found, where the point has one. */
+export function levelText({ levelFoundBy }: PublishedMeasurement): string | null {
+  return levelFoundBy ? levelWords[levelFoundBy] : null;
+}
+
+/** "one reading", "2 readings". How far apart they lay is a length, and stands beside it. */
+export function roundsText({ rounds }: PublishedMeasurement): string {
+  return rounds === 1 ? 'one reading' : counted(rounds, 'reading');
+}
+
+/** Whether the point goes round: its letter is then double-ringed, as on the diagram. */
+export function goesRound(pointId: string): boolean {
+  return findMeasuringPoint(pointId)?.how === 'round';
+}

@@ -1,0 +1,66 @@
+import { type GarmentKind } from '@ellwand/shared/points/kinds';
+import { handlingStepLabels, handlingSteps } from '@ellwand/shared/points/point';
+import { measuringPoint } from '@ellwand/shared/points/measuring-points';
+import { lettersFor } from '@ellwand/shared/protocols/protocol';
+import { protocolFor } from '@ellwand/shared/protocols/standard-protocols';
+import { useMemo } from 'react';
+import { useLitPoints } from '../../components/diagram/lit-points';
+import { hasDiagram, MeasuringDiagram } from '../../components/diagram/measuring-diagram';
+import { SiteLink } from '../../components/ui/site-link';
+import { paths } from '../../config/paths';
+import { kindsName } from '../../lib/words';
+
+/** A kind's points in handling order, beside its diagram where there is one. */
+export function KindPoints({ kind }: { readonly kind: GarmentKind }) {
+  const { letters, points, entries } = useMemo(() => pointsOf(kind), [kind]);
+  const lit = useLitPoints((pointId) => `${kind}-${pointId}`);
+  return (
+    <section className="how-kind" id={`kind-${kind}`} aria-labelledby={`title-${kind}`}>
+      <h2 id={`title-${kind}`}>{kindsName(kind)}</h2>
+      {hasDiagram(kind) && (
+        <MeasuringDiagram kind={kind} points={points} letters={letters} lit={lit} prefix={`how-${kind}`} />
+      )}
+      <div className={hasDiagram(kind) ? 'how-steps' : 'how-steps how-steps-across'}>
+        {handlingSteps.map((step) => {
+          const here = entries.filter((entry) => entry.step === step);
+          if (here.length === 0) return null;
+          return (
+            <div key={step}>
+              <h3>{handlingStepLabels[step]}</h3>
+              <ul>
+                {here.map(({ pointId, name, letter, round }) => (
+                  <li
+                    key={pointId}
+                    data-lit={lit.lit === pointId ? '' : undefined}
+                    onPointerEnter={() => lit.light(pointId)}
+                    onPointerLeave={() => lit.light(null)}
+                    onFocus={() => lit.light(pointId)}
+                    onBlur={() => lit.light(null)}
+                  >
+                    <span className={round ? 'letter letter-round' : 'letter'} aria-hidden="true">
+                      {letter}
+                    </span>
+                    <SiteLink to={paths.point(pointId)}>
+                      <span id={`${kind}-${pointId}`}>{name}</span>
+                    </SiteLink>
+                  </li>
+                ))}
+              </ul>
+            </div>
+          );
+        })}
+      </div>
+    </section>
+  );
+}
+
+function pointsOf(kind: GarmentKind) {
+  const letters = new Map<string, string>(lettersFor(protocolFor(kind)));
+  const points = [...letters.keys()];
+  const entries = protocolFor(kind).points.map(({ pointId }) => {
+    const point = measuringPoint(pointId);
+    const letter = letters.get(pointId) ?? '';
+    return { pointId, letter, name: point.name, step: point.handlingStep, round: point.how === 'round' };
+  });
+  return { letters, points, entries };
+}
