@@ -11,6 +11,7 @@ import { AppModule } from './app.module';
 import { ENVIRONMENT } from './common/environment.token';
 import { Lifecycle } from './common/lifecycle';
 import { ProblemFilter } from './common/problem.filter';
+import { VersionTagInterceptor } from './common/version-tag.interceptor';
 import type { Environment } from './config/environment';
 import { securityHeaders } from './security-headers';
 
@@ -29,7 +30,7 @@ const outsideTheApi = [
   'how-we-measure',
   'how-we-measure/:pointId',
   'workroom',
-  'workroom/{*path}',
+  'workroom/\\{\\*path\\}',
   // Written so that it means the catch-all route itself, not every route that it would catch.
   '\\{\\*page\\}',
 ];
@@ -64,7 +65,10 @@ export function furnish(application: NestExpressApplication): void {
 
 function furnishAnswers(application: INestApplication): void {
   application.useGlobalPipes(new ZodValidationPipe());
-  application.useGlobalInterceptors(new ZodSerializerInterceptor(application.get(Reflector)));
+  application.useGlobalInterceptors(
+    new VersionTagInterceptor(),
+    new ZodSerializerInterceptor(application.get(Reflector)),
+  );
   application.useGlobalFilters(new ProblemFilter());
 }
 

@@ -8,7 +8,8 @@ export function slugOf(ownNumber: string): string {
     .toLowerCase()
     .replace(/[^a-z0-9]+/g, '-')
     .replace(/^-|-$/g, '')
-    .slice(0, 70);
+    .slice(0, 70)
+    .replace(/-$/, '');
   return slug || 'garment';
 }
 

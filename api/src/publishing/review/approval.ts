@@ -1,11 +1,21 @@
 import { forbidden, type Refusal } from '../../common/refusal';
-import type { Snapshot } from '../snapshot';
+
+/** As much of a snapshot as tells who had a hand in it. */
+export interface Involved {
+  readonly editedBy: readonly string[];
+  readonly parts: readonly {
+    readonly sheet: {
+      readonly people: readonly { readonly userId: string }[];
+      readonly readings: readonly { readonly readBy: string; readonly recordedBy: string }[];
+    } | null;
+  }[];
+}
 
 /**
  * Why a person may not approve what was frozen: whoever is named on a sheet, or read or keyed any of its readings,
  * may not approve what it measured; whoever edited may not approve what they edited. No role outweighs this.
  */
-export function mayNotApprove(snapshot: Snapshot, personId: string): Refusal | null {
+export function mayNotApprove(snapshot: Involved, personId: string): Refusal | null {
   if (measuredBy(snapshot).has(personId)) {
     return forbidden(
       'review.own-measuring',
@@ -18,7 +28,7 @@ export function mayNotApprove(snapshot: Snapshot, personId: string): Refusal | n
   return null;
 }
 
-function measuredBy(snapshot: Snapshot): Set<string> {
+function measuredBy(snapshot: Involved): Set<string> {
   const sheets = snapshot.parts.flatMap((part) => part.sheet ?? []);
   return new Set(
     sheets.flatMap((sheet) => [

@@ -1,0 +1,139 @@
+import { GarmentRecord } from '@ellwand/shared/records/garment';
+import type { StoredReading } from '@ellwand/shared/records/sheet';
+import type { Snapshot } from '../snapshot';
+import { projectGarment } from './project-garment';
+import { facetRows, searchText } from './search-rows';
+
+const imprint = {
+  number: 'lh-1949-11',
+  version: 2,
+  publishedAt: '2026-11-20T09:00:00.000Z',
+  museum: 'Larkmoor House',
+};
+const reader = '0190a0a0-0000-7000-8000-000000000001';
+
+function stored(pointId: string, valueMm: string, more: Partial<StoredReading> = {}): StoredReading {
+  return {
+    id: `0190a0a0-0000-7000-8000-${String(Math.abs(hash(pointId + valueMm)))
+      .padStart(12, '0')
+      .slice(-12)}`,
+    pointId,
+    round: 1,
+    state: 'taken',
+    valueMm,
+    typed: valueMm,
+    unit: 'mm',
+    tapeCount: 0,
+    tapeLengthMm: null,
+    levelFoundBy: null,
+    reason: null,
+    replaces: null,
+    stands: true,
+    note: 'PRIVATE',
+    readBy: reader,
+    recordedBy: reader,
+    device: 'tablet 1',
+    keyedAt: imprint.publishedAt,
+    receivedAt: imprint.publishedAt,
+    ...more,
+  };
+}
+
+const hash = (text: string) => [...text].reduce((sum, sign) => (sum * 31 + sign.charCodeAt(0)) | 0, 7);
+
+function snapshotWith(readings: StoredReading[], record: Partial<GarmentRecord> = {}): Snapshot {
+  return {
+    garmentId: reader,
+    record: GarmentRecord.parse({
+      ownNumber: 'LH.1949.11',
+      title: 'Skirt of violet faille',
+      kind: 'skirt',
+      date: '1858/1861',
+      creditLine: 'Larkmoor House Museum of Dress',
+      colours: ['violet', 'Violet'],
+      ...record,
+    }),
+    parts: [
+      {
+        id: reader,
+        suffix: '.2',
+        kind: 'skirt',
+        name: 'Skirt',
+        sheet: {
+          id: reader,
+          protocolVersion: 1,
+          measuredOn: '2026-11-20',
+          support: 'Flat on the table',
+          tape: 'Tape 3',
+          tapeLengthMm: '1500',
+          fasteningPair: 'upper hook and eye',
+          people: [{ userId: reader, name: 'Odile Marsh', duty: 'read' }],
+          readings,
+        },
+      },
+    ],
+    images: [],
+    editedBy: [reader],
+  };
+}
+
+describe('the public copy of a garment', () => {
+  it('gives the mean of the rounds that stand, with their number and spread', () => {
+    const readings = [
+      stored('waistband', '612'),
+      stored('waistband', '615', { round: 2 }),
+      stored('waistband', '1612', { round: 3, stands: false }),
+    ];
+    const [waist] = projectGarment(snapshotWith(readings), imprint).parts[0]?.measurements ?? [];
+    expect(waist).toMatchObject({ pointId: 'waistband', valueMm: '613.5', rounds: 2, spreadMm: '3' });
+  });
+
+  it('tells how a hem was read in tape lengths', () => {
+    const hem = stored('hem', '5242', { tapeCount: 3, tapeLengthMm: '1500', typed: '742' });
+    const [shown] = projectGarment(snapshotWith([hem]), imprint).parts[0]?.measurements ?? [];
+    expect(shown).toMatchObject({
+      valueMm: '5242',
+      tapeLengths: { count: 3, tapeMm: '1500', restMm: '742' },
+    });
+  });
+
+  it('gives the reason where a point was not taken, and no reason where a later round was', () => {
+    const left = {
+      state: 'not-taken',
+      valueMm: null,
+      typed: null,
+      unit: null,
+      reason: 'too-fragile',
+    } as const;
+    const readings = [
+      stored('hip', '0', left),
+      stored('waistband', '0', left),
+      stored('waistband', '612', { round: 2 }),
+    ];
+    const part = projectGarment(snapshotWith(readings), imprint).parts[0];
+    expect(part?.notTaken).toEqual([{ pointId: 'hip', label: 'Hip', reason: 'too-fragile' }]);
+    expect(part?.measurements.map((each) => each.pointId)).toEqual(['waistband']);
+  });
+
+  it('names the people only where the record says so, and counts them always', () => {
+    const quiet = projectGarment(snapshotWith([stored('waistband', '612')]), imprint).parts[0];
+    expect(quiet).toMatchObject({ measuredBy: [], peopleCount: 1 });
+    const open = projectGarment(snapshotWith([stored('waistband', '612')], { showPeople: true }), imprint)
+      .parts[0];
+    expect(open?.measuredBy).toEqual(['Odile Marsh']);
+  });
+
+  it('carries no private word', () => {
+    const secrets = { storeLocation: 'PRIVATE', provenance: 'PRIVATE', handling: 'PRIVATE' };
+    const copy = JSON.stringify(projectGarment(snapshotWith([stored('waistband', '612')], secrets), imprint));
+    expect(copy).not.toContain('PRIVATE');
+    expect(copy).not.toContain(reader);
+  });
+
+  it('is found in every decade that its date touches, and once in each colour', () => {
+    const rows = facetRows(projectGarment(snapshotWith([]), imprint));
+    expect(rows.filter((row) => row.facet === 'decade').map((row) => row.label)).toEqual(['1850s', '1860s']);
+    expect(rows.filter((row) => row.facet === 'colour')).toHaveLength(1);
+    expect(searchText(projectGarment(snapshotWith([]), imprint))).toContain('violet faille');
+  });
+});
