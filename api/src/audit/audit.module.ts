@@ -1,6 +1,12 @@
 import { Global, Module } from '@nestjs/common';
+import { AuditListService } from './audit-list.service';
+import { AuditController } from './audit.controller';
 import { AuditService } from './audit.service';
 
 @Global()
-@Module({ providers: [AuditService], exports: [AuditService] })
+@Module({
+  controllers: [AuditController],
+  providers: [AuditService, AuditListService],
+  exports: [AuditService],
+})
 export class AuditModule {}

@@ -12,6 +12,11 @@ import { Sessions } from './sessions.service';
 
 export const ACCESS = 'access';
 
+/** The actor, and until when this access token is good. */
+export interface SignedIn extends Actor {
+  readonly accessEndsAt: Date;
+}
+
 /** Reads the access token from its cookie, and looks up at each request whether its session still stands. */
 @Injectable()
 export class AccessStrategy extends PassportStrategy(Strategy, ACCESS) {
@@ -33,9 +38,10 @@ export class AccessStrategy extends PassportStrategy(Strategy, ACCESS) {
     });
   }
 
-  async validate(payload: unknown): Promise<Actor | false> {
+  async validate(payload: unknown): Promise<SignedIn | false> {
     const claims = AccessClaims.safeParse(payload);
     if (!claims.success || claims.data.exp * 1000 <= this.clock.now().getTime()) return false;
-    return (await this.sessions.actorOf(claims.data.sid, claims.data.sub)) ?? false;
+    const actor = await this.sessions.actorOf(claims.data.sid, claims.data.sub);
+    return actor ? { ...actor, accessEndsAt: new Date(claims.data.exp * 1000) } : false;
   }
 }

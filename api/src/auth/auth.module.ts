@@ -9,15 +9,23 @@ import { AccessTokens } from './access-token';
 import { AccessStrategy } from './access.strategy';
 import { EntryGuard } from './entry.guard';
 import { EveryRouteDecided } from './every-route-decided';
+import { FirstAdministratorController } from './first-administrator.controller';
+import { FirstAdministratorService } from './first-administrator.service';
 import { PASSWORD_COST, passwordCost, Passwords } from './passwords.service';
+import { RefreshService } from './refresh.service';
 import { Secrets } from './secrets';
 import { SessionCookies } from './session-cookies';
+import { SessionEndService } from './session-end.service';
+import { SessionController } from './session.controller';
 import { Sessions } from './sessions.service';
+import { SignInService } from './sign-in.service';
+import { SlowDown } from './slow-down.service';
 
 /** Signing in, sessions, and the guards at every route, in the order in which they look. */
 @Global()
 @Module({
   imports: [DiscoveryModule, PassportModule, JwtModule.register({}), throttlerModule],
+  controllers: [SessionController, FirstAdministratorController],
   providers: [
     Secrets,
     AccessTokens,
@@ -25,6 +33,11 @@ import { Sessions } from './sessions.service';
     Sessions,
     AccessStrategy,
     Passwords,
+    SlowDown,
+    SignInService,
+    RefreshService,
+    SessionEndService,
+    FirstAdministratorService,
     { provide: PASSWORD_COST, useValue: passwordCost },
     { provide: APP_GUARD, useClass: LimitGuard },
     { provide: APP_GUARD, useClass: OriginGuard },

@@ -19,6 +19,7 @@ const Variables = z.object({
   ELLWAND_SECRET: z.string().min(32, 'at least 32 characters'),
   ELLWAND_PUBLIC_URL: z.url({ protocol: /^https?$/ }).optional(),
   ELLWAND_SMTP_URL: z.url({ protocol: /^smtps?$/ }),
+  ELLWAND_MAIL_FROM: z.email().optional(),
   ELLWAND_TRUST_PROXY: z.string().optional(),
   ELLWAND_DISK_FLOOR: z.coerce
     .number()
@@ -45,6 +46,8 @@ export interface Environment {
   readonly secure: boolean;
   readonly secret: string;
   readonly smtpUrl: string;
+  /** Sender of all letters; `workroom@` the public address's host unless given. */
+  readonly mailFrom: string;
   readonly trustProxy: string | undefined;
   readonly diskFloorBytes: number;
   readonly logLevel: 'info' | 'warn' | 'silent';
@@ -79,6 +82,7 @@ export function readEnvironment(variables: NodeJS.ProcessEnv): Environment {
     secure: publicUrl.startsWith('https:'),
     secret: v.ELLWAND_SECRET,
     smtpUrl: v.ELLWAND_SMTP_URL,
+    mailFrom: v.ELLWAND_MAIL_FROM ?? `workroom@${mailHost(publicUrl)}`,
     trustProxy: v.ELLWAND_TRUST_PROXY,
     diskFloorBytes: v.ELLWAND_DISK_FLOOR,
     logLevel: v.ELLWAND_LOG,
@@ -93,4 +97,10 @@ export function readEnvironment(variables: NodeJS.ProcessEnv): Environment {
       v.ELLWAND_CATALOGUE_DB_HOST,
     ),
   };
+}
+
+/** A number or a bare name is no host that mail comes from. */
+function mailHost(publicUrl: string): string {
+  const { hostname } = new URL(publicUrl);
+  return /\.[a-z]{2,}$/i.test(hostname) ? hostname : 'ellwand.invalid';
 }

@@ -1,4 +1,8 @@
-import { Module } from '@nestjs/common';
+import { Global, Module } from '@nestjs/common';
+import { MailDispatcher } from './dispatcher.service';
+import { MailSender } from './sender.service';
+import { MailTransport } from './transport';
 
-@Module({})
+@Global()
+@Module({ providers: [MailSender, MailDispatcher, MailTransport], exports: [MailSender, MailDispatcher] })
 export class MailModule {}

@@ -1,5 +1,6 @@
 import type { Role } from '@ellwand/shared/records/roles';
 import { Column, Entity, PrimaryColumn } from 'typeorm';
+import { v7 as uuidv7 } from 'uuid';
 
 @Entity({ name: 'user', database: 'ellwand' })
 export class UserRow {
@@ -14,4 +15,24 @@ export class UserRow {
   @Column({ name: 'created_at', type: 'datetime', precision: 3 }) createdAt: Date;
   @Column({ name: 'last_sign_in_at', type: 'datetime', precision: 3, nullable: true })
   lastSignInAt: Date | null;
+}
+
+/** A person as they are on their first day. Addresses are kept in small letters, so that one is one. */
+export function newUser(
+  { name, email }: { readonly name: string; readonly email: string },
+  roles: Role[],
+  passwordHash: string,
+  now: Date,
+): UserRow {
+  return {
+    id: uuidv7(),
+    email: email.toLowerCase(),
+    name,
+    roles,
+    passwordHash,
+    active: true,
+    version: 1,
+    createdAt: now,
+    lastSignInAt: null,
+  };
 }
