@@ -7,6 +7,7 @@ testCheck(readingDecimalSlip, {
     { name: 'a usual waist', readings: { waist: 612 } },
     { name: 'a reading that no slip explains', readings: { waist: 1400 } },
     { name: 'a deep point, beyond its range by less than half again', readings: { 'point-depth': 250 } },
+    { name: 'a narrow rolled hem, not far under its range', kind: 'skirt', readings: { 'hem-depth': '2.5' } },
     {
       name: 'a slip that was corrected',
       readings: [read('waist', 61, { stands: false }), read('waist', 612, { round: 2 })],

@@ -1,5 +1,5 @@
-import { allowedSpread } from '../points/tolerance.js';
-import { isLonger, times } from '../units/length.js';
+import { allowedSpreadAt } from '../points/tolerance.js';
+import { isLonger } from '../units/length.js';
 import { sheetCheck } from './check.js';
 import { readPoints } from './sheet-view.js';
 
@@ -13,9 +13,7 @@ export const roundsApart = sheetCheck({
   },
   run: (sheet, raise) => {
     for (const { point, accepted } of readPoints(sheet)) {
-      const base = allowedSpread(point.tolerance, accepted.value, accepted.tapeJoins);
-      // A millimetre on the half that was read is two on the whole.
-      const allowed = point.how === 'flat-doubled' ? times(base, 2) : base;
+      const allowed = allowedSpreadAt(point, accepted.value, accepted.tapeJoins);
       if (!isLonger(accepted.spread, allowed)) continue;
       raise('apart', { point: { mentioned: point.id }, spread: accepted.spread, allowed });
     }

@@ -12,7 +12,7 @@ import {
   pointsInGroup,
   softRangeFor,
 } from './measuring-points.js';
-import { allowedSpread, houseTolerance } from './tolerance.js';
+import { allowedSpread, allowedSpreadAt, houseTolerance } from './tolerance.js';
 
 describe.each(measuringPoints.map((point) => [point.id, point] as const))('the point %s', (id, point) => {
   it('has a kebab-case id, a name and a group with a label', () => {
@@ -99,5 +99,7 @@ describe('the tolerance between rounds', () => {
     expect(allowedSpread(houseTolerance, mm(1000))).toBe(mm(3));
     expect(allowedSpread(houseTolerance, mm('1000.0001'))).toBe(mm(5));
     expect(subtract(allowedSpread(houseTolerance, mm(5242), 3), mm(5))).toBe(mm(6));
+    expect(allowedSpreadAt(measuringPoint('waist'), mm(612))).toBe(mm(3));
+    expect(allowedSpreadAt(measuringPoint('elbow'), mm(290))).toBe(mm(6));
   });
 });

@@ -1,3 +1,4 @@
+import { type MeasuringHow } from './point.js';
 import { add, isLonger, type Length, mm, times } from '../units/length.js';
 
 /** How far two rounds of one point may lie apart before it is read again. */
@@ -21,4 +22,14 @@ export const houseTolerance: ToleranceRule = {
 export function allowedSpread(rule: ToleranceRule, length: Length, tapeJoins = 0): Length {
   const base = isLonger(length, rule.longFrom) ? rule.long : rule.base;
   return add(base, times(rule.perTapeJoin, tapeJoins));
+}
+
+/** The same for a point's whole value: a millimetre on a half that is doubled is two on the whole. */
+export function allowedSpreadAt(
+  { tolerance, how }: { readonly tolerance: ToleranceRule; readonly how: MeasuringHow },
+  length: Length,
+  tapeJoins = 0,
+): Length {
+  const allowed = allowedSpread(tolerance, length, tapeJoins);
+  return how === 'flat-doubled' ? times(allowed, 2) : allowed;
 }
