@@ -1,4 +1,5 @@
 import { Module } from '@nestjs/common';
+import { PublishedPictures } from './published-pictures.service';
 
-@Module({})
+@Module({ providers: [PublishedPictures], exports: [PublishedPictures] })
 export class CatalogueModule {}

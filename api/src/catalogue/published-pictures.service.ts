@@ -1,0 +1,28 @@
+import { Injectable } from '@nestjs/common';
+import { DataSource } from 'typeorm';
+import { z } from 'zod';
+import { InjectCatalogue } from '../common/catalogue-connection';
+
+const Widths = z.array(z.number());
+const Row = z.object({
+  state: z.enum(['visible', 'withdrawn']),
+  // MariaDB's JSON is text.
+  widths: z.string().transform((json) => Widths.parse(JSON.parse(json))),
+});
+export type PublishedPicture = z.output<typeof Row>;
+
+/** Whether the public may see a picture: asked of the published tables each time, so that a withdrawal counts at once. */
+@Injectable()
+export class PublishedPictures {
+  constructor(@InjectCatalogue() private readonly catalogue: DataSource) {}
+
+  /** null: never published, or shown no more by the current version. */
+  async find(imageId: string): Promise<PublishedPicture | null> {
+    if (!/^[0-9a-f]{8}(-[0-9a-f]{4}){3}-[0-9a-f]{12}$/i.test(imageId)) return null;
+    const rows: unknown[] = await this.catalogue.query(
+      'SELECT state, widths FROM published_image WHERE image_id = ?',
+      [imageId],
+    );
+    return rows.length > 0 ? Row.parse(rows[0]) : null;
+  }
+}
