@@ -1,0 +1,107 @@
+import { Injectable } from '@nestjs/common';
+import type { NewReading, SheetFacts } from '@ellwand/shared/records/sheet';
+import { v7 as uuidv7 } from 'uuid';
+import type { Actor } from '../common/actor';
+import { FindingsService } from '../measuring/findings/findings.service';
+import { ReadingsService } from '../measuring/readings/readings.service';
+import { SheetsService } from '../measuring/sheets/sheets.service';
+import type { DemonstrationReading, DemonstrationSheet } from './demonstration-data';
+
+export type Staff = ReadonlyMap<string, Actor>;
+
+/** The person of that short name. @throws Error where the house has nobody of that name */
+export function staffMember(staff: Staff, key: string): Actor {
+  const actor = staff.get(key);
+  if (!actor) throw new Error(`The demonstration has nobody called “${key}”`);
+  return actor;
+}
+
+/** Fills a measuring sheet through the same doors as the table does. */
+@Injectable()
+export class DemonstrationSheets {
+  constructor(
+    private readonly sheets: SheetsService,
+    private readonly readings: ReadingsService,
+    private readonly findings: FindingsService,
+  ) {}
+
+  async fill(partId: string, data: DemonstrationSheet, staff: Staff): Promise<void> {
+    const reader = staffMember(staff, data.read);
+    const writer = staffMember(staff, data.wrote);
+    const sheet = await this.sheets.open(partId, { id: uuidv7(), facts: factsOf(data, staff) }, writer);
+    const keyedAt = `${data.measuredOn}T10:00:00.000Z`;
+    const batch = Object.entries(data.readings).flatMap(([pointId, reading]) =>
+      readingsOf(pointId, reading, reader.id, keyedAt),
+    );
+    const { results, sheetVersion } = await this.readings.takeIn(sheet.id, batch, writer);
+    const refused = results.find((result) => result.outcome !== 'kept');
+    if (refused)
+      throw new Error(
+        `${sheet.garment.ownNumber}, ${sheet.garment.partName}: ${refused.detail ?? refused.outcome}`,
+      );
+    if (!data.complete) return;
+    await this.answer(sheet.id, data, writer);
+    await this.sheets.complete(sheet.id, sheetVersion, writer);
+  }
+
+  /** The demonstration is coherent: only the findings that it means to show are there, and they have answers. */
+  private async answer(sheetId: string, data: DemonstrationSheet, writer: Actor): Promise<void> {
+    const { findings } = await this.findings.read(sheetId);
+    for (const finding of findings.filter(({ severity }) => severity !== 'note')) {
+      const answer = data.answers.find(({ checkId }) => checkId === finding.checkId);
+      if (!answer)
+        throw new Error(`A finding that was not meant to be there (${finding.checkId}): ${finding.sentence}`);
+      await this.findings.answer(sheetId, finding.key, answer.reason, writer);
+    }
+  }
+}
+
+function factsOf(data: DemonstrationSheet, staff: Staff): SheetFacts {
+  const { aloneBecause, measuredOn, place, support, tape, fasteningPair, note } = data;
+  const holder =
+    data.held === null ? [] : [{ userId: staffMember(staff, data.held).id, duty: 'held' as const }];
+  return {
+    people: [
+      { userId: staffMember(staff, data.read).id, duty: 'read' },
+      ...holder,
+      { userId: staffMember(staff, data.wrote).id, duty: 'wrote' },
+    ],
+    aloneBecause,
+    measuredOn,
+    place,
+    support,
+    tape,
+    tapeLengthMm: '1500',
+    tapeZeroMm: '0',
+    fasteningPair,
+    note,
+  };
+}
+
+function readingsOf(
+  pointId: string,
+  data: DemonstrationReading,
+  readBy: string,
+  keyedAt: string,
+): NewReading[] {
+  const base = { pointId, replaces: null, readBy, device: 'Table tablet', keyedAt };
+  if (typeof data === 'string') return readingsOf(pointId, plain(data), readBy, keyedAt);
+  if ('notTaken' in data)
+    return [{ ...base, id: uuidv7(), round: 1, note: '', state: 'not-taken', reason: data.notTaken }];
+  const { unit, tapeCount, levelFoundBy, note } = data;
+  return [data.typed, ...data.rounds].map((typed, index) => ({
+    ...base,
+    id: uuidv7(),
+    round: index + 1,
+    note: index === 0 ? note : '',
+    state: 'taken',
+    typed,
+    unit,
+    tapeCount,
+    levelFoundBy,
+  }));
+}
+
+function plain(typed: string): Exclude<DemonstrationReading, string | { notTaken: unknown }> {
+  return { typed, unit: 'mm', tapeCount: 0, levelFoundBy: null, note: '', rounds: [] };
+}
