@@ -36,6 +36,8 @@ export class DemonstrationGarments {
         alt,
         caption,
         credit: demonstration.museum,
+        pointId: null,
+        takenOn: null,
       });
     }
     for (const [index, part] of data.parts.entries()) {
