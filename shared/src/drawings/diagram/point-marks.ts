@@ -113,7 +113,14 @@ function letterMarks(
   const role = current ? 'ring-current' : 'ring';
   marks.push({ type: 'circle', role, cx, cy, r: tenth(radius - strokeWidth / 2), strokeWidth });
   if (round)
-    marks.push({ type: 'circle', role: 'inner-ring', cx, cy, r: tenth(radius - 3), strokeWidth: 0.9 });
+    marks.push({
+      type: 'circle',
+      role: current ? 'inner-ring-current' : 'inner-ring',
+      cx,
+      cy,
+      r: tenth(radius - 3),
+      strokeWidth: 0.9,
+    });
   const fitted = (text.length > 1 ? size - 2 : size) - (round ? 0.5 : 0);
   marks.push({
     type: 'text',

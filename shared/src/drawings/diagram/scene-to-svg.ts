@@ -46,6 +46,7 @@ export const paperPalette: Required<ScenePalette> = {
   ring: { fill: SHEET, stroke: MADDER },
   'ring-current': { fill: MADDER, stroke: MADDER },
   'inner-ring': { fill: 'none', stroke: MADDER },
+  'inner-ring-current': { fill: 'none', stroke: SHEET },
   letter: lettered(MADDER),
   'letter-current': lettered(SHEET),
 };

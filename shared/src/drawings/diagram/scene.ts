@@ -40,6 +40,7 @@ export type SceneRole =
   | 'ring'
   | 'ring-current'
   | 'inner-ring'
+  | 'inner-ring-current'
   | 'letter'
   | 'letter-current';
 

@@ -51,8 +51,12 @@ export function drawView(view: View): ViewDrawing {
       ...paths.map((path) => ({ kind: 'shape' as const, role: layer.role, path, closed, ...clip })),
     );
   }
-  return { shapes, silhouettes, bounds: boundsOf(silhouettes) };
+  return { shapes, silhouettes, bounds: boundsOf(shapes.flatMap((shape) => reachOf(shape))) };
 }
+
+/** What may show: filled shapes and lines that nothing cuts off (ties, hooks). */
+const reachOf = (shape: ViewShape | ViewButton): CubicPath[] =>
+  shape.kind === 'shape' && !shape.clip ? [shape.path] : [];
 
 function pathsOf(layer: ShapeLayer, view: View): CubicPath[] {
   const path = pathFrom(layer.path, view.anchors);

@@ -22,7 +22,7 @@ export const dressFront: View = {
     puffInner: [196, -140],
   },
   layers: [
-    lining('0,-346!{0}..{16}neck!--0,-290!--0,-346', 'both'),
+    lining('0,-346!{0}..{16}neck!--112,-318!--0,-288!--0,-346', 'both'),
     cloth('centre!{0}..{-5}waistSide!{24}..{58}214,84..{80}330,560..{83}hemSide!{169}..{180}hemFront!'),
     ...[
       [8, 88, 20, 89, 560],

@@ -47,6 +47,9 @@ export const dress: GarmentDiagram = {
     }),
     straightLine('across-back', 'back', '~scye--scye'),
     alongCurve('underarm-to-underarm-back', 'back', '~underarm{8}..{0}0,-176..{-8}underarm'),
+    // Of a bodice and skirt laid together as worn; the dress in one lends its drawing.
+    straightLine('worn-neck-to-hem-front', 'front', '70,-296--70,1016'),
+    straightLine('worn-neck-to-hem-back', 'back', '70,-316--70,1020'),
     straightLine('opening', 'back', '-62,-314---62,246'),
   ],
 };
