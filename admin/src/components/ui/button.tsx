@@ -1,4 +1,4 @@
-import type { ButtonHTMLAttributes } from 'react';
+import type { ComponentProps } from 'react';
 import { Link, type LinkProps } from 'react-router-dom';
 
 export type ButtonTone = 'action' | 'plain' | 'danger' | 'quiet';
@@ -28,7 +28,7 @@ export function Button({
   className,
   type = 'button',
   ...rest
-}: Look & ButtonHTMLAttributes<HTMLButtonElement>) {
+}: Look & ComponentProps<'button'>) {
   return <button {...rest} type={type} className={classes({ tone, height }, className)} />;
 }
 

@@ -1,5 +1,5 @@
 import { type MeasuringHow } from '@ellwand/shared/points/point';
-import { allowedSpread } from '@ellwand/shared/points/tolerance';
+import { allowedSpreadAt } from '@ellwand/shared/points/tolerance';
 import { wholeValue } from '@ellwand/shared/readings/whole-value';
 import type { NewReading, StoredReading } from '@ellwand/shared/records/sheet';
 import { isLonger, type Length, longestOf, mm, shortestOf, subtract } from '@ellwand/shared/units/length';
@@ -116,7 +116,7 @@ export function spreadOf(rows: readonly SheetRow[], pointId: string): { readonly
   if (first === undefined || others.length === 0) return null;
   const apart = subtract(longestOf(first, ...others), shortestOf(first, ...others));
   const joins = Math.max(...own.map(({ reading }) => reading?.tapeCount ?? 0));
-  const allowed = allowedSpread(own[0]!.point.point.tolerance, longestOf(first, ...others), joins);
+  const allowed = allowedSpreadAt(own[0]!.point.point, longestOf(first, ...others), joins);
   return { apart, allowed, within: !isLonger(apart, allowed) };
 }
 

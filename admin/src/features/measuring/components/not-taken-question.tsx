@@ -1,0 +1,53 @@
+import { notTakenReasonIds, notTakenReasons } from '@ellwand/shared/readings/reading';
+import { useState } from 'react';
+import { Button } from '../../../components/ui/button.js';
+import { Question } from '../../../components/ui/dialog.js';
+import { FieldError, TextField } from '../../../components/ui/field.js';
+import type { NotTakenReason } from '../model/use-sheet-desk.js';
+
+interface NotTakenQuestionProps {
+  readonly open: boolean;
+  readonly label: string;
+  readonly onClose: () => void;
+  readonly onSaid: (reason: NotTakenReason, note: string) => void;
+}
+
+/** Blank, zero and "not taken" differ: what is not taken has a reason. */
+export function NotTakenQuestion({ open, label, onClose, onSaid }: NotTakenQuestionProps) {
+  const [reason, setReason] = useState<NotTakenReason | null>(null);
+  const [note, setNote] = useState('');
+  const [asked, setAsked] = useState(false);
+  const say = () => {
+    if (reason) onSaid(reason, note.trim());
+    else setAsked(true);
+  };
+  return (
+    <Question
+      open={open}
+      onClose={onClose}
+      title={`${label}: why is it not taken?`}
+      actions={
+        <>
+          <Button tone="action" height="table" onClick={say}>
+            Keep the reason
+          </Button>
+          <Button height="table" onClick={onClose}>
+            Back to the sheet
+          </Button>
+        </>
+      }
+    >
+      <fieldset aria-describedby={asked && !reason ? 'reason-missing' : undefined}>
+        <legend className="sr-only">Reason</legend>
+        {notTakenReasonIds.map((id) => (
+          <label key={id} className="flex min-h-11 items-center gap-3">
+            <input type="radio" name="not-taken" value={id} checked={reason === id} onChange={() => setReason(id)} className="size-6 accent-indigo" />
+            {notTakenReasons[id]}
+          </label>
+        ))}
+        {asked && !reason && <FieldError id="reason-missing">Choose the reason that fits best.</FieldError>}
+      </fieldset>
+      <TextField id="not-taken-note" optional label="Note" value={note} maxLength={500} onChange={(event) => setNote(event.target.value)} />
+    </Question>
+  );
+}

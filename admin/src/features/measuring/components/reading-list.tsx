@@ -1,0 +1,40 @@
+import { handlingStepLabels, handlingSteps } from '@ellwand/shared/points/point';
+import { useEffect, useRef } from 'react';
+import type { SheetDesk } from '../model/use-sheet-desk.js';
+import { firstBoxId, ReadingRow } from './reading-row.js';
+
+/** Every row in handling order, under the step in which the garment lies. */
+export function ReadingList({ desk }: { readonly desk: SheetDesk }) {
+  const { focusAsked, rows } = desk;
+  const followed = useRef(0);
+  useEffect(() => {
+    // Each asking is followed once: a reading that arrives later must not pull the focus back.
+    if (focusAsked.times === followed.current) return;
+    const row = rows.find(({ key }) => key === focusAsked.key);
+    const box = row && document.getElementById(firstBoxId(row));
+    if (!box) return;
+    followed.current = focusAsked.times;
+    box.focus();
+    box.closest('li')?.scrollIntoView({ block: 'nearest' });
+  }, [focusAsked, rows]);
+  return (
+    <div>
+      {handlingSteps.map((step) => {
+        const own = rows.filter(({ point }) => point.step === step);
+        if (own.length === 0) return null;
+        return (
+          <section key={step} aria-labelledby={`step-${step}`}>
+            <h3 id={`step-${step}`} className="border-b border-ink px-3 pb-1 pt-4 text-label font-semibold text-ink-2">
+              {handlingStepLabels[step]}
+            </h3>
+            <ul>
+              {own.map((row) => (
+                <ReadingRow key={row.key} desk={desk} row={row} />
+              ))}
+            </ul>
+          </section>
+        );
+      })}
+    </div>
+  );
+}

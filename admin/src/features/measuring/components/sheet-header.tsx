@@ -1,0 +1,79 @@
+import { Link } from 'react-router-dom';
+import { PageTitle } from '../../../components/ui/page.js';
+import { paths, staffPicture } from '../../../config/paths.js';
+import { sheetUnits, type SheetDesk } from '../model/use-sheet-desk.js';
+
+/** What lies on the table, who reads, in which unit, and where the readings are. */
+export function SheetHeader({ desk }: { readonly desk: SheetDesk }) {
+  const { garment, garmentId, facts } = desk.sheet;
+  const number = `${garment.ownNumber}${garment.partSuffix}`;
+  const people = facts.people.map(({ name, duty }) => `${duty === 'read' ? 'Reads' : duty === 'held' ? 'Holds' : 'Writes'}: ${name}`);
+  return (
+    <header className="flex flex-wrap items-center gap-x-5 gap-y-2 border-b border-hair bg-sheet px-4 py-2">
+      {garment.firstImageId && <img src={staffPicture(garment.firstImageId, 320)} alt="" className="h-14 w-11 rounded-sm bg-well object-cover object-top max-sm:hidden" />}
+      <div className="min-w-0">
+        <Link to={paths.garment(garmentId)} className="figures text-label text-indigo underline underline-offset-2">
+          {number}
+          <span className="sr-only">, back to the garment</span>
+        </Link>
+        <PageTitle title={`${garment.partName}, ${garment.title}`} className="text-title-25! max-w-xl truncate leading-7!">
+          {garment.partName}
+          <span className="ml-3 align-middle font-sans text-table font-normal text-ink-2">
+            {[garment.title, garment.date, garment.maker].filter(Boolean).join(', ')}
+          </span>
+        </PageTitle>
+        <p className="text-label text-ink-2">{people.length > 0 ? people.join('. ') : 'Nobody is named yet'}</p>
+      </div>
+      <div className="ml-auto flex flex-wrap items-center gap-3">
+        {desk.reader.readers.length > 1 && <ReaderChoice desk={desk} />}
+        {!desk.locked && <UnitChoice desk={desk} />}
+        <SendStatus desk={desk} />
+      </div>
+    </header>
+  );
+}
+
+function ReaderChoice({ desk }: { readonly desk: SheetDesk }) {
+  const { readers, readBy, setReadBy } = desk.reader;
+  return (
+    <label className="flex items-center gap-2 text-label text-ink-2">
+      Reading now
+      <select value={readBy} onChange={(event) => setReadBy(event.target.value)} className="box min-h-11 w-auto py-1 text-table">
+        {readers.map(({ userId, name }) => (
+          <option key={userId} value={userId}>
+            {name}
+          </option>
+        ))}
+      </select>
+    </label>
+  );
+}
+
+function UnitChoice({ desk }: { readonly desk: SheetDesk }) {
+  return (
+    <div role="group" aria-label="Unit of new readings" className="flex">
+      {sheetUnits.map((unit) => (
+        <button
+          key={unit}
+          type="button"
+          aria-pressed={desk.unit === unit}
+          onClick={() => desk.setUnit(unit)}
+          className="-ml-px min-h-11 min-w-11 border border-rule bg-sheet px-3 text-table first:ml-0 first:rounded-l-sm last:rounded-r-sm aria-pressed:border-ink aria-pressed:bg-ink aria-pressed:text-paper"
+        >
+          {unit}
+        </button>
+      ))}
+    </div>
+  );
+}
+
+function SendStatus({ desk }: { readonly desk: SheetDesk }) {
+  const decide = desk.status.includes('decision');
+  const sent = desk.status.startsWith('All');
+  const look = decide ? 'bg-madder-tint text-madder' : sent ? 'bg-verdigris-tint text-verdigris' : 'bg-weld-tint text-weld-text';
+  return (
+    <p role="status" className={`figures rounded-sm text-table font-medium ${desk.status ? `px-3 py-2 ${look}` : ''}`}>
+      {desk.status}
+    </p>
+  );
+}

@@ -1,0 +1,109 @@
+import { Tab, TabGroup, TabList, TabPanel, TabPanels } from '@headlessui/react';
+import type { Sheet } from '@ellwand/shared/records/sheet';
+import { useQuery } from '@tanstack/react-query';
+import { type ReactNode, useEffect, useRef } from 'react';
+import { useSearchParams } from 'react-router-dom';
+import { Button } from '../../../components/ui/button.js';
+import { Question } from '../../../components/ui/dialog.js';
+import { findingsQuery } from '../api/findings.js';
+import { stepWords } from '../model/sheet-points.js';
+import { useSheetDesk, type SheetDesk } from '../model/use-sheet-desk.js';
+import { BottomBar } from './bottom-bar.js';
+import { BoxList } from './box-list.js';
+import { DerivedPanel } from './derived-panel.js';
+import { DiagramPanel } from './diagram-panel.js';
+import { FactsPanel } from './facts-panel.js';
+import { FindingsPanel } from './findings-panel.js';
+import { Keypad } from './keypad.js';
+import { ReadingList } from './reading-list.js';
+import { SheetHeader } from './sheet-header.js';
+
+const tabs = ['readings', 'findings', 'worked-out', 'box', 'facts'] as const;
+type TabName = (typeof tabs)[number];
+
+/** The measuring table: diagram at the left, rows at the right, the work's own bar beneath. */
+export function SheetScreen({ sheet }: { readonly sheet: Sheet }) {
+  const desk = useSheetDesk(sheet);
+  const [search, setSearch] = useSearchParams();
+  const shown = Math.max(0, tabs.indexOf((search.get('show') ?? 'readings') as TabName));
+  const show = (tab: TabName) => setSearch(tab === 'readings' ? {} : { show: tab }, { replace: true });
+  const chooseRow = (pointId: string) => {
+    show('readings');
+    const row = desk.rows.find(({ point, reading }) => point.id === pointId && !reading) ?? desk.rows.find(({ point }) => point.id === pointId);
+    if (row) desk.go(row.key);
+  };
+  return (
+    <div className="flex min-h-dvh flex-col md:h-dvh">
+      <SheetHeader desk={desk} />
+      <main className="grid min-h-0 grow md:grid-cols-[20rem_minmax(0,1fr)] lg:grid-cols-[25rem_minmax(0,1fr)]">
+        <div className="min-h-0 overflow-y-auto border-r border-hair">
+          <DiagramPanel kind={sheet.kind} points={desk.points} current={desk.current.point} onChoose={chooseRow} />
+        </div>
+        <div className="flex min-h-0 flex-col">
+          <TabGroup selectedIndex={shown} onChange={(index) => show(tabs[index] ?? 'readings')} className="flex min-h-0 grow flex-col">
+            <SheetTabs desk={desk} />
+            <TabPanels className="min-h-0 grow overflow-y-auto">
+              <Panel><ReadingList desk={desk} /></Panel>
+              <Panel><FindingsPanel desk={desk} onPoint={chooseRow} /></Panel>
+              <Panel><DerivedPanel sheetId={sheet.id} onPoint={chooseRow} /></Panel>
+              <Panel><BoxList desk={desk} onPoint={chooseRow} onFindings={() => show('findings')} /></Panel>
+              <Panel><FactsPanel sheet={sheet} /></Panel>
+            </TabPanels>
+          </TabGroup>
+          {desk.keypad && !desk.locked && shown === 0 && <Keypad desk={desk} />}
+        </div>
+      </main>
+      <BottomBar desk={desk} onReadings={() => show('readings')} />
+      <TurnQuestion desk={desk} />
+    </div>
+  );
+}
+
+const Panel = ({ children }: { readonly children: ReactNode }) => <TabPanel className="pb-8 focus:outline-none">{children}</TabPanel>;
+
+function SheetTabs({ desk }: { readonly desk: SheetDesk }) {
+  const findings = useQuery(findingsQuery(desk.sheet.id));
+  const open = findings.data?.findings.filter(({ severity, answer }) => severity !== 'note' && answer === null).length ?? 0;
+  const labels = ['Readings', open > 0 ? `Findings, ${open} open` : 'Findings', 'Worked out', 'Before the box', 'Sheet facts'];
+  return (
+    <TabList className="flex shrink-0 gap-1 overflow-x-auto border-b border-hair bg-sheet px-2">
+      {labels.map((label, index) => (
+        <Tab
+          key={tabs[index]}
+          className="min-h-11 whitespace-nowrap border-b-2 border-transparent px-3 text-table text-ink-2 focus-visible:-outline-offset-3 data-selected:border-indigo data-selected:font-medium data-selected:text-ink"
+        >
+          {label}
+        </Tab>
+      ))}
+    </TabList>
+  );
+}
+
+/** "Turn over: two people", said once when the work comes to a new handling step. */
+function TurnQuestion({ desk }: { readonly desk: SheetDesk }) {
+  const go = useRef<HTMLButtonElement>(null);
+  const { locked, enter, current, rows } = desk;
+  const started = useRef(false);
+  useEffect(() => {
+    // Opening the garment is the first handling step, and is said as soon as the sheet is.
+    if (started.current || locked || rows.every(({ reading }) => reading !== null)) return;
+    started.current = true;
+    enter(current.key);
+  }, [locked, enter, current.key, rows]);
+  const words = desk.turn && stepWords[desk.turn.step];
+  return (
+    <Question
+      open={words !== null && !locked}
+      onClose={desk.turned}
+      first={go}
+      title={words?.title ?? ''}
+      actions={
+        <Button ref={go} tone="action" height="table" onClick={desk.turned}>
+          It lies so: go on
+        </Button>
+      }
+    >
+      <p>{words?.words}</p>
+    </Question>
+  );
+}

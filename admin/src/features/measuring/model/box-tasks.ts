@@ -1,0 +1,60 @@
+import type { FindingView } from '@ellwand/shared/records/sheet';
+import { formatLength } from '@ellwand/shared/units/format-length';
+import type { OutboxEntry } from './outbox.js';
+import { type SheetRow, spreadOf } from './rows.js';
+
+export interface BoxTask {
+  readonly sentence: string;
+  /** A sheet is not complete without it. */
+  readonly must: boolean;
+  readonly pointId?: string;
+  readonly finding?: boolean;
+}
+
+export interface BoxAsked {
+  readonly rows: readonly SheetRow[];
+  readonly entries: readonly OutboxEntry[];
+  readonly findings: readonly FindingView[];
+  /** Views of the garment's pictures; null while they are not known. */
+  readonly views: readonly string[] | null;
+}
+
+/** Everything that must, and all that should, be done before the garment goes back. */
+export function boxTasks({ rows, entries, findings, views }: BoxAsked): readonly BoxTask[] {
+  const toTake = rows
+    .filter(({ reading }) => reading === null)
+    .map(({ point, round }): BoxTask => ({
+      sentence: round === 1 ? `Take ${point.point.name}, or say why not` : `Read ${point.point.name} again, blind`,
+      must: point.required || round > 1,
+      pointId: point.id,
+    }));
+  const toDecide = entries
+    .filter(({ state }) => state === 'decision')
+    .map(({ reading }): BoxTask => ({ sentence: `Decide between two readings: ${nameIn(rows, reading.pointId)}`, must: true, pointId: reading.pointId }));
+  const firstRounds = rows.filter(({ round }) => round === 1);
+  const toReread = firstRounds.flatMap(({ point }): BoxTask[] => {
+    const spread = spreadOf(rows, point.id);
+    if (!spread || spread.within) return [];
+    return [{ sentence: `Read ${point.point.name} once more: ${formatLength(spread.apart, 'mm')} apart`, must: false, pointId: point.id }];
+  });
+  const noLevel = firstRounds
+    .filter(({ point, reading }) => point.point.levelRecorded && reading?.value != null && reading.level === null)
+    .map(({ point }): BoxTask => ({ sentence: `Say how the level of ${point.point.name} was found`, must: false, pointId: point.id }));
+  const toAnswer = findings
+    .filter(({ severity, answer }) => severity !== 'note' && answer === null)
+    .map(({ sentence, severity }): BoxTask => ({ sentence, must: severity === 'stop', finding: true }));
+  return [...toDecide, ...toTake, ...toAnswer, ...toReread, ...noLevel, ...toPhotograph(views)];
+}
+
+function toPhotograph(views: readonly string[] | null): BoxTask[] {
+  if (views === null) return [];
+  const wanted: readonly (readonly [string, string])[] = [
+    ['front', 'Photograph the front'],
+    ['back', 'Photograph the back'],
+    ['tape', 'Photograph the tape where it lay'],
+  ];
+  return wanted.filter(([view]) => !views.includes(view)).map(([, sentence]) => ({ sentence, must: false }));
+}
+
+const nameIn = (rows: readonly SheetRow[], pointId: string): string =>
+  rows.find(({ point }) => point.id === pointId)?.point.point.name ?? pointId;
