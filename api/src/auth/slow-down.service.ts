@@ -53,13 +53,14 @@ export class SlowDown {
 
   private async countOne(tx: Tx, kind: SlowDownKind, keyHash: string): Promise<void> {
     const now = this.clock.now();
-    // Makes the row before it is locked: two first tries at once would else both find none.
+    // Makes the row before it is read: two first tries at once would else both find none. The update that changes
+    // nothing locks the row for writing at once; INSERT IGNORE takes a shared lock first, and two of those deadlock.
     await tx
       .createQueryBuilder()
       .insert()
       .into(SignInSlowdown)
       .values({ keyHash, failures: 0, lastFailedAt: now })
-      .orIgnore()
+      .orUpdate(['key_hash'], ['key_hash'])
       .execute();
     const row = await tx.findOneOrFail(SignInSlowdown, {
       where: { keyHash },

@@ -16,7 +16,8 @@ import { ENVIRONMENT } from '../../src/common/environment.token';
 import { type Limits, LIMITS } from '../../src/common/limits';
 import { Work } from '../../src/common/work';
 import { type Environment, readEnvironment } from '../../src/config/environment';
-import { MailSink } from './mail-sink';
+import { MailDispatcher } from '../../src/mail/dispatcher.service';
+import { type Letter, MailSink } from './mail-sink';
 import { Owner } from './owner';
 import { insertPerson, type TestPerson } from './people';
 import { SettableClock } from './settable-clock';
@@ -70,6 +71,23 @@ export class House {
       `${names.refresh}=${tokens.refreshToken}; path=/; domain=127.0.0.1`,
     ]);
     return agent;
+  }
+
+  /** Sends what is due, and hands over every letter caught since the house was emptied. */
+  async inbox(): Promise<readonly Letter[]> {
+    await this.app.get(MailDispatcher).dispatchDue();
+    return this.mail.letters;
+  }
+
+  /**
+   * The secret of the one-time link in the latest letter to somebody.
+   * @throws Error where there is no such letter
+   */
+  async tokenFor(email: string): Promise<string> {
+    const letters = (await this.inbox()).filter(({ recipients }) => recipients.includes(email));
+    const token = /#([\w-]{43})/.exec(letters.at(-1)?.mail.text ?? '')?.[1];
+    if (!token) throw new Error(`No letter with a link has come for ${email}`);
+    return token;
   }
 
   /** Leaves no row in any table, no letter, and the clock right. */
