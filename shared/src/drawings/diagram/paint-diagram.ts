@@ -12,6 +12,8 @@ export interface DiagramRequest {
   readonly views?: readonly ViewName[];
   /** Width of the sheet in CSS pixels, from about 320. */
   readonly widthPx: number;
+  /** The sheet then stays within it, the garment smaller where it must be. */
+  readonly mostHeightPx?: number;
   /** Only these measuring points are drawn; left out: those that have a letter. */
   readonly points?: readonly string[];
   /** The point being measured: its line is lit. */
@@ -32,7 +34,14 @@ export function paintDiagram(request: DiagramRequest): Scene | undefined {
   const names = request.views ?? diagram.views.map((view) => view.name);
   const views = names.flatMap((name) => diagram.views.filter((view) => view.name === name));
   const drawings = views.map(drawView);
-  const layout = layOut(drawings, request.widthPx, diagram.leastScale);
+  const layout = layOut(
+    drawings,
+    {
+      width: request.widthPx,
+      ...(request.mostHeightPx === undefined ? {} : { mostHeight: request.mostHeightPx }),
+    },
+    diagram.leastScale,
+  );
   const prefix = request.idPrefix ?? `diagram-${diagram.kind}`;
 
   const painted = views.map((view, index) =>

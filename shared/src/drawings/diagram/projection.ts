@@ -35,24 +35,51 @@ const NARROW_SHEET = 520;
 export const isNarrow = (sheetWidth: number): boolean => sheetWidth < NARROW_SHEET;
 
 /** Beyond this a view only grows, and says no more. */
-const LARGEST_SCALE = 0.95;
+const LARGEST_SCALE = 1.4;
 
 const widthOf = ({ bounds }: SheetView): number => bounds.right - bounds.left;
+
+export interface SheetSize {
+  readonly width: number;
+  /** What the sheet must not grow beyond; left out: it is as high as its width asks. */
+  readonly mostHeight?: number;
+}
 
 /**
  * Sets the views out in rows, in their order, at one scale: as few rows as keep `leastScale`, else one view to
  * a row. Views of one row share their top in millimetres, so that waist stands beside waist.
  */
-export function layOut(views: readonly SheetView[], sheetWidth: number, leastScale: number): SheetLayout {
-  const narrow = isNarrow(sheetWidth);
+export function layOut(views: readonly SheetView[], size: SheetSize, leastScale: number): SheetLayout {
+  const narrow = isNarrow(size.width);
   const side = narrow ? MARGIN.narrowSide : MARGIN.side;
   const gap = narrow ? MARGIN.narrowBetween : MARGIN.between;
-  const scaleOf = (rows: readonly (readonly SheetView[])[]): number =>
-    Math.min(LARGEST_SCALE, ...rows.map((row) => scaleOfRow(row, sheetWidth - 2 * side, gap)));
+  const scaleOf = (rows: SheetRows): number =>
+    Math.min(
+      LARGEST_SCALE,
+      scaleOfHeight(rows, size.mostHeight),
+      ...rows.map((row) => scaleOfRow(row, size.width - 2 * side, gap)),
+    );
   const arrangements = inRows(views);
   const fits = arrangements.find((rows) => scaleOf(rows) >= leastScale);
-  const rows = fits ?? arrangements.at(-1) ?? [];
-  return placeRows(rows, sheetWidth, scaleOf(rows), gap);
+  const rows =
+    fits ??
+    arrangements.reduce(
+      (best, rows) => (scaleOf(rows) > scaleOf(best) ? rows : best),
+      views.length === 0 ? [] : [views],
+    );
+  return placeRows(rows, size.width, scaleOf(rows), gap);
+}
+
+type SheetRows = readonly (readonly SheetView[])[];
+
+function heightOfRow(row: readonly SheetView[]): number {
+  const highest = Math.min(...row.map((view) => view.bounds.top));
+  return Math.max(...row.map((view) => view.bounds.bottom)) - highest;
+}
+
+function scaleOfHeight(rows: SheetRows, mostHeight = Infinity): number {
+  const room = mostHeight - rows.length * (MARGIN.top + MARGIN.caption) - 1;
+  return room / rows.reduce((sum, row) => sum + heightOfRow(row), 0);
 }
 
 const scaleOfRow = (row: readonly SheetView[], room: number, gap: number): number =>
@@ -70,20 +97,14 @@ function inRows(views: readonly SheetView[]): SheetView[][][] {
   return ways.sort((a, b) => a.length - b.length);
 }
 
-function placeRows(
-  rows: readonly (readonly SheetView[])[],
-  width: number,
-  scale: number,
-  gap: number,
-): SheetLayout {
+function placeRows(rows: SheetRows, width: number, scale: number, gap: number): SheetLayout {
   const places: SheetPlace[] = [];
   let top = 0;
   for (const row of rows) {
     const highest = Math.min(...row.map((view) => view.bounds.top));
-    const lowest = Math.max(...row.map((view) => view.bounds.bottom));
     const used = row.reduce((sum, view) => sum + widthOf(view) * scale, 0) + gap * (row.length - 1);
     let left = (width - used) / 2;
-    const bottom = top + MARGIN.top + (lowest - highest) * scale + MARGIN.caption;
+    const bottom = top + MARGIN.top + heightOfRow(row) * scale + MARGIN.caption;
     for (const view of row) {
       const originX = left - view.bounds.left * scale;
       const projection = { scale, originX, originY: top + MARGIN.top - highest * scale };
