@@ -1,4 +1,11 @@
-import { boxAround, distance, distanceToPolyline, type Box, type Point } from '../geometry/point.js';
+import {
+  boxAround,
+  distance,
+  distanceToPolyline,
+  distanceToSegment,
+  type Box,
+  type Point,
+} from '../geometry/point.js';
 import { type DrawnLine } from './drawn-line.js';
 
 /** A letter needs this much white, in pixels, to every measuring line but its own… */
@@ -9,6 +16,8 @@ export const CLEAR_OF_LETTERS = 3;
 const SAFETY = 0.1;
 
 const CELL = 24;
+/** A leader this close to a line seems to belong to it, in pixels. */
+const GRAZING = 3;
 
 interface Trace {
   readonly owner: DrawnLine;
@@ -87,9 +96,13 @@ export class LetterSheet {
 
   /** How many measuring lines a leader would cross or graze. */
   linesUnder(from: Point, to: Point, own: DrawnLine): number {
+    const middle: Point = [(from[0] + to[0]) / 2, (from[1] + to[1]) / 2];
+    const reach = distance(from, to) / 2 + GRAZING;
     return this.traces.filter(
       (trace) =>
-        trace.owner !== own && trace.points.some((point) => distanceToPolyline(point, [from, to]) < 3),
+        trace.owner !== own &&
+        !outside(middle, trace.box, reach) &&
+        trace.points.some((point) => distanceToSegment(point, from, to) < GRAZING),
     ).length;
   }
 }
