@@ -1,7 +1,9 @@
 import './styles/site.css';
 import { hydrateRoot } from 'react-dom/client';
 import { createBrowserRouter, matchRoutes, RouterProvider } from 'react-router-dom';
+import { type Hydration } from './app/document';
 import { siteRoutes } from './app/routes';
+import { beginTakingOver } from './components/diagram/hydration';
 import { httpCatalogue } from './lib/http-catalogue';
 
 /** Takes the page over once everything in it has arrived: until then its links and forms work by themselves. */
@@ -9,6 +11,7 @@ async function takeOver(): Promise<void> {
   const root = document.getElementById('root');
   const data = document.getElementById('hydration')?.textContent;
   if (!root || !data) return;
+  const { loaderData } = JSON.parse(data) as Hydration;
   const routes = siteRoutes(httpCatalogue);
   // What the server drew must be at hand before the first render here, or the two would differ.
   await Promise.all(
@@ -17,9 +20,8 @@ async function takeOver(): Promise<void> {
       Object.assign(route, { ...(await route.lazy()), lazy: undefined });
     }),
   );
-  const router = createBrowserRouter(routes, {
-    hydrationData: JSON.parse(data) as { loaderData: Record<string, unknown> },
-  });
+  const router = createBrowserRouter(routes, { hydrationData: { loaderData } });
+  beginTakingOver();
   hydrateRoot(root, <RouterProvider router={router} />);
 }
 

@@ -8,11 +8,16 @@ import {
   type StaticHandlerContext,
   StaticRouterProvider,
 } from 'react-router-dom';
-import { documentHtml, type SiteAssets } from './app/document';
+import { documentHtml, type Hydration, type SiteAssets } from './app/document';
 import { type PageHead, pageOf } from './app/page-handle';
 import { siteRoutes } from './app/routes';
 import { unitScript } from './components/units/unit-script';
+import { provideDrawings } from './components/diagram/drawings';
+import MeasuringSheet from './components/diagram/measuring-sheet';
+import OutlineShapes from './components/diagram/outline-shapes';
 import { isUnit } from './lib/range-boxes';
+
+provideDrawings({ Sheet: MeasuringSheet, Outline: OutlineShapes });
 
 export type { SiteAssets, SiteCatalogue };
 export { siteAssets } from './app/site-assets';
@@ -65,7 +70,7 @@ export async function render(
     unit: isUnit(unit) ? unit : 'mm',
     body: renderToString(<StaticRouterProvider router={router} context={found} hydrate={false} />),
     // A page that failed is sent as it is: the browser has nothing to go on from.
-    hydration: found.errors ? null : { loaderData: found.loaderData },
+    hydration: found.errors ? null : ({ loaderData: found.loaderData } satisfies Hydration),
     assets,
   });
   return { status, html, headers: headersFor(html, head, origin, assets) };
@@ -81,11 +86,19 @@ const failed: PageHead = {
 function pageSaid(found: StaticHandlerContext, url: URL): { head: PageHead; status: number } {
   const page = found.errors ? null : pageOf(found.matches, found.loaderData);
   if (!page) return { head: failed, status: found.errors ? Math.max(found.statusCode, 500) : 500 };
-  return { head: page.handle.head(page.data, { url, params: page.params }), status: page.handle.status(page.data) };
+  return {
+    head: page.handle.head(page.data, { url, params: page.params }),
+    status: page.handle.status(page.data),
+  };
 }
 
 /** Whatever may be withdrawn is asked for again each time; an unchanged page then costs a 304. */
-function headersFor(html: string, head: PageHead, origin: string, assets: SiteAssets): Record<string, string> {
+function headersFor(
+  html: string,
+  head: PageHead,
+  origin: string,
+  assets: SiteAssets,
+): Record<string, string> {
   const digest = createHash('sha256').update(assets.buildId).update(html).digest('base64url').slice(0, 22);
   const links = (head.links ?? []).map(({ rel, href }) => {
     return `<${href.startsWith('/') ? origin + href : href}>; rel="${rel}"`;

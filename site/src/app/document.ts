@@ -14,6 +14,11 @@ export interface SiteAssets {
   readonly buildId: string;
 }
 
+/** What the browser goes on from. */
+export interface Hydration {
+  readonly loaderData: Record<string, unknown>;
+}
+
 export interface DocumentParts {
   readonly head: PageHead;
   /** Scheme and host of the site, or empty where they are not known. */
@@ -21,7 +26,7 @@ export interface DocumentParts {
   readonly unit: string;
   readonly body: string;
   /** Null on a page that stays as it is sent: no script then takes it over. */
-  readonly hydration: unknown;
+  readonly hydration: Hydration | null;
   readonly assets: SiteAssets;
 }
 
@@ -57,12 +62,15 @@ function headHtml(head: PageHead, origin: string): string {
     meta('property', 'og:type', 'website'),
     meta('property', 'og:url', canonical),
     meta('property', 'og:site_name', museum.name),
-    picture ? meta('property', 'og:image', picture) + meta('property', 'og:image:alt', head.image?.alt ?? '') : '',
+    picture
+      ? meta('property', 'og:image', picture) + meta('property', 'og:image:alt', head.image?.alt ?? '')
+      : '',
     '<link rel="icon" href="/favicon.svg" type="image/svg+xml">',
   ].join('');
 }
 
-const widest = (widths: readonly number[]): number => Math.max(...widths.filter((width) => width <= 1280), 320);
+const widest = (widths: readonly number[]): number =>
+  Math.max(...widths.filter((width) => width <= 1280), 320);
 
 function assetsHtml({ preloadFonts, styles }: SiteAssets): string {
   const fonts = preloadFonts.map(

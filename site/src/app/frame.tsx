@@ -1,5 +1,6 @@
 import { useEffect, useRef } from 'react';
 import { Outlet, ScrollRestoration, useLocation, useMatches, useNavigation } from 'react-router-dom';
+import { endTakingOver } from '../components/diagram/hydration';
 import { chooseUnit } from '../components/units/unit-store';
 import { UnitSwitch } from '../components/units/unit-switch';
 import { SiteLink } from '../components/ui/site-link';
@@ -13,6 +14,7 @@ import { isPageHandle } from './page-handle';
 export function Frame() {
   useUnitOfAddress();
   usePageChange();
+  useEffect(endTakingOver, []);
   const waiting = useNavigation().state === 'loading';
   return (
     <>
@@ -38,7 +40,11 @@ function Header() {
   return (
     <header className="site-header">
       <div className="wide site-header-row">
-        <SiteLink to={paths.home()} className="site-name" aria-label={`${museum.name}: ${museum.catalogueName}`}>
+        <SiteLink
+          to={paths.home()}
+          className="site-name"
+          aria-label={`${museum.name}: ${museum.catalogueName}`}
+        >
           Larkmoor House <span>Museum of Dress</span>
         </SiteLink>
         <nav aria-label="Catalogue" className="site-nav">
@@ -60,8 +66,8 @@ function Footer() {
     <footer className="site-footer">
       <div className="wide site-footer-row">
         <p>
-          <strong>{museum.name}.</strong> Every garment here was measured by hand, once, inside, from fastening to
-          fastening.
+          <strong>{museum.name}.</strong> Every garment here was measured by hand, once, inside, from
+          fastening to fastening.
         </p>
         <nav aria-label="Help">
           <SiteLink to={paths.howWeMeasure()}>How to read the measurements</SiteLink>

@@ -9,7 +9,8 @@ export function RouteProblem() {
     <div className="wide notice">
       <h1 className="notice-title">This page could not be fetched</h1>
       <p>
-        The catalogue did not answer as it should. Nothing is lost; it often helps to ask once more in a moment.
+        The catalogue did not answer as it should. Nothing is lost; it often helps to ask once more in a
+        moment.
       </p>
       <p className="notice-actions">
         <button type="button" className="button" onClick={() => void revalidator.revalidate()}>

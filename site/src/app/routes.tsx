@@ -1,6 +1,7 @@
 import { type SiteCatalogue } from '@ellwand/shared/records/site-catalogue';
 import { type LoaderFunctionArgs, type RouteObject } from 'react-router-dom';
 import { garmentLoader } from '../features/garment/garment-loader';
+import { homeLoader } from '../features/home/home-loader';
 import { searchLoader } from '../features/search/search-loader';
 import { Frame } from './frame';
 import { RouteProblem } from './route-problem';
@@ -23,7 +24,7 @@ export function siteRoutes(catalogue: SiteCatalogue): RouteObject[] {
             {
               id: 'home',
               index: true,
-              loader: () => catalogue.front(),
+              loader: () => homeLoader(catalogue),
               lazy: () => import('../features/home/home-route'),
             },
             {

@@ -16,7 +16,8 @@ export type SiteManifest = Readonly<
 /** What a page must name, from the manifest of the browser's build. Throws where it has no entry. */
 export function siteAssets(manifest: SiteManifest): SiteAssets {
   const entry = Object.values(manifest).find(({ isEntry }) => isEntry === true);
-  if (!entry) throw new Error('The manifest of the site has no entry: build it with "npm run build -w site".');
+  if (!entry)
+    throw new Error('The manifest of the site has no entry: build it with "npm run build -w site".');
   const address = (file: string) => `/${file}`;
   const fonts = [...(entry.assets ?? []), ...Object.values(manifest).map(({ file }) => file)];
   return {

@@ -13,11 +13,16 @@ import { dressInTwoParts, withdrawnNotice } from './fixture-dress';
 export const fixtureCatalogue: SiteCatalogue = {
   search: (query) => Promise.resolve(answer(query)),
   garment(number, version) {
-    if (number === withdrawnNotice.number) return Promise.resolve({ found: 'withdrawn', notice: withdrawnNotice });
+    if (number === withdrawnNotice.number)
+      return Promise.resolve({ found: 'withdrawn', notice: withdrawnNotice });
     if (number !== dressInTwoParts.number) return Promise.resolve({ found: 'nothing' });
-    if (version === undefined || version === 3) return Promise.resolve({ found: 'garment', garment: dressInTwoParts });
+    if (version === undefined || version === 3)
+      return Promise.resolve({ found: 'garment', garment: dressInTwoParts });
     if (version > 3) return Promise.resolve({ found: 'nothing' });
-    return Promise.resolve({ found: 'garment', garment: { ...dressInTwoParts, version, state: 'superseded' } });
+    return Promise.resolve({
+      found: 'garment',
+      garment: { ...dressInTwoParts, version, state: 'superseded' },
+    });
   },
   front() {
     const kinds = counts(fixtureGarments, ({ card }) => card.kind);
@@ -40,11 +45,19 @@ function answer(query: SearchQuery): SearchAnswer {
     size: query.size,
     items: found.slice(start, start + query.size).map(({ card }) => card),
     facets: [
-      facet('kind', 'Kind', counts(fixtureGarments, ({ card }) => card.kind), (kind) =>
-        isKind(kind) ? kindLabels[kind].plural : kind,
+      facet(
+        'kind',
+        'Kind',
+        counts(fixtureGarments, ({ card }) => card.kind),
+        (kind) => (isKind(kind) ? kindLabels[kind].plural : kind),
       ),
       facet('decade', 'Decade', new Map(decades), (decade) => `${decade}s`),
-      facet('colour', 'Colour', counts(fixtureGarments, ({ colour }) => colour), (colour) => colour),
+      facet(
+        'colour',
+        'Colour',
+        counts(fixtureGarments, ({ colour }) => colour),
+        (colour) => colour,
+      ),
     ],
     ranges: ['bust', 'waist', 'hem'].map((point) => range(point, query)),
     advice:
@@ -67,7 +80,9 @@ function passes({ card, year, colour }: FixtureGarment, query: SearchQuery): boo
     year >= (query.from ?? 0) &&
     year <= (query.to ?? 9999) &&
     query.measure.every(({ point, minMm, maxMm }) =>
-      valuesOf(card, point).some((value) => value >= Number(minMm ?? 0) && value <= Number(maxMm ?? Infinity)),
+      valuesOf(card, point).some(
+        (value) => value >= Number(minMm ?? 0) && value <= Number(maxMm ?? Infinity),
+      ),
     )
   );
 }
@@ -106,6 +121,15 @@ function counts<T>(items: readonly T[], of: (item: T) => string): Map<string, nu
   return found;
 }
 
-function facet(name: string, label: string, values: ReadonlyMap<string, number>, labelOf: (value: string) => string) {
-  return { name, label, values: [...values].map(([value, count]) => ({ value, label: labelOf(value), count })) };
+function facet(
+  name: string,
+  label: string,
+  values: ReadonlyMap<string, number>,
+  labelOf: (value: string) => string,
+) {
+  return {
+    name,
+    label,
+    values: [...values].map(([value, count]) => ({ value, label: labelOf(value), count })),
+  };
 }

@@ -6,14 +6,13 @@ import { createServer, type IncomingMessage, type ServerResponse } from 'node:ht
 import { readdir, readFile } from 'node:fs/promises';
 import { extname, join, normalize } from 'node:path';
 import { fileURLToPath } from 'node:url';
+import type * as Site from '../entry-server';
 import { type SiteManifest } from '../app/site-assets';
 import { readSearch } from '../lib/search-address';
 import { fixtureCatalogue } from './fixture-catalogue';
 
-type Site = typeof import('../entry-server');
-
 const dist = fileURLToPath(new URL('../../dist/', import.meta.url));
-const site = (await import(join(dist, 'server/entry-server.js'))) as Site;
+const site = (await import(join(dist, 'server/entry-server.js'))) as typeof Site;
 const manifest = JSON.parse(await readFile(join(dist, 'client/.vite/manifest.json'), 'utf8')) as SiteManifest;
 const assets = site.siteAssets(manifest);
 const pictures = process.env.FIXTURE_PICTURES ?? '';
@@ -76,11 +75,8 @@ async function media(response: ServerResponse, path: string): Promise<void> {
 }
 
 async function file(response: ServerResponse, path: string, type: string): Promise<void> {
-  try {
-    response.writeHead(200, { 'Content-Type': type }).end(await readFile(path));
-  } catch {
-    response.writeHead(404).end();
-  }
+  const bytes = await readFile(path).catch(() => null);
+  response.writeHead(bytes ? 200 : 404, { 'Content-Type': bytes ? type : 'text/plain' }).end(bytes);
 }
 
 const port = Number(process.argv[2] ?? 4391);

@@ -1,40 +1,37 @@
-import { type Scene, type SceneMark, type ScenePoint, type ScenePrimitive } from '@ellwand/shared/drawings/diagram/scene';
+import { type Scene, type SceneMark, type ScenePoint } from '@ellwand/shared/drawings/diagram/scene';
 import { classOfRole } from '@ellwand/shared/drawings/diagram/scene-to-svg';
-import { memo } from 'react';
-import { type LitPoints } from './lit-points';
+import { TAPE_BREADTH, TapeMarks } from './tape';
 
 interface SceneDrawingProps {
   readonly scene: Scene;
-  readonly lit: LitPoints;
+  /** The drawing's own scale, where a tape stands at its left. */
+  readonly tapeMmPerPx: number | null;
 }
 
 /** Paints a scene. It is one picture to assistive technology: the table beside it says the same in words. */
-export function SceneDrawing({ scene, lit }: SceneDrawingProps) {
-  const { width, height, title, primitives } = scene;
+export function SceneDrawing({ scene, tapeMmPerPx }: SceneDrawingProps) {
+  const { width, height, title } = scene;
+  const left = tapeMmPerPx === null ? 0 : TAPE_BREADTH;
   return (
     <svg
       className="drawing"
       role="img"
-      width={width}
+      width={left + width}
       height={height}
-      viewBox={`0 0 ${width} ${height}`}
-      data-lit={lit.lit ?? undefined}
+      viewBox={`${-left} 0 ${left + width} ${height}`}
     >
       <title>{title}</title>
+      {tapeMmPerPx !== null && <TapeMarks upright lengthPx={height} mmPerPx={tapeMmPerPx} />}
       <SceneShapes scene={scene} />
-      {primitives.filter(isPoint).map((point, index) => (
-        <PointGroup key={index} point={point} lit={lit} />
-      ))}
     </svg>
   );
 }
 
-/** The garment itself: what stays the same whatever is pointed at. Measuring lines lie on top of all of it. */
-export const SceneShapes = memo(function SceneShapes({ scene }: { readonly scene: Scene }) {
+export function SceneShapes({ scene: { clips, primitives } }: { readonly scene: Scene }) {
   return (
     <>
       <defs>
-        {scene.clips.map(({ id, paths }) => (
+        {clips.map(({ id, paths }) => (
           <clipPath key={id} id={id}>
             {paths.map((d, index) => (
               <path key={index} d={d} />
@@ -42,27 +39,20 @@ export const SceneShapes = memo(function SceneShapes({ scene }: { readonly scene
           </clipPath>
         ))}
       </defs>
-      {scene.primitives.map((primitive, index) =>
-        isPoint(primitive) ? null : <Mark key={index} mark={primitive} />,
+      {primitives.map((primitive, index) =>
+        primitive.type === 'point' ? (
+          <PointGroup key={index} point={primitive} />
+        ) : (
+          <Mark key={index} mark={primitive} />
+        ),
       )}
     </>
   );
-});
+}
 
-const isPoint = (primitive: ScenePrimitive): primitive is ScenePoint => primitive.type === 'point';
-
-function PointGroup({ point, lit }: { readonly point: ScenePoint; readonly lit: LitPoints }) {
-  const { pointId, marks } = point;
+function PointGroup({ point: { pointId, marks } }: { readonly point: ScenePoint }) {
   return (
-    <g
-      className="drawing-point"
-      data-point={pointId}
-      data-lit={lit.lit === pointId ? '' : undefined}
-      data-chosen={lit.chosen === pointId ? '' : undefined}
-      onPointerEnter={() => lit.light(pointId)}
-      onPointerLeave={() => lit.light(null)}
-      onClick={() => lit.chooseLine(pointId)}
-    >
+    <g className="drawing-point" data-point={pointId}>
       {marks.map((mark, index) => (
         <Mark key={index} mark={mark} />
       ))}
@@ -70,7 +60,7 @@ function PointGroup({ point, lit }: { readonly point: ScenePoint; readonly lit: 
   );
 }
 
-const Mark = memo(function Mark({ mark }: { readonly mark: SceneMark }) {
+function Mark({ mark }: { readonly mark: SceneMark }) {
   const className = classOfRole(mark.role);
   if (mark.type === 'text') {
     return (
@@ -83,14 +73,9 @@ const Mark = memo(function Mark({ mark }: { readonly mark: SceneMark }) {
   if (mark.type === 'circle') {
     return <circle className={className} cx={mark.cx} cy={mark.cy} r={mark.r} strokeWidth={strokeWidth} />;
   }
-  return (
-    <path
-      className={className}
-      d={mark.d}
-      strokeWidth={strokeWidth}
-      strokeDasharray={mark.dash}
-      clipPath={mark.clip === undefined ? undefined : `url(#${mark.clip})`}
-      pathLength={mark.role === 'line' && mark.dash === undefined ? 1 : undefined}
-    />
-  );
-});
+  // A whole line can draw along its length when chosen; a broken one already has its dashes.
+  const pathLength = mark.role === 'line' && mark.dash === undefined ? 1 : undefined;
+  const clipPath = mark.clip === undefined ? undefined : `url(#${mark.clip})`;
+  const shape = { d: mark.d, strokeWidth, strokeDasharray: mark.dash, clipPath, pathLength };
+  return <path className={className} {...shape} />;
+}

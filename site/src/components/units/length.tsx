@@ -17,7 +17,9 @@ export function Length({ mm, uncertaintyMm, bare = false }: LengthProps) {
   const length = fromMmString(mm);
   const denominator = uncertaintyMm === undefined ? 8 : deservedDenominator(Number(uncertaintyMm), 8);
   const write = bare ? figureText : formatLength;
-  return <InEachUnit write={(unit) => write(length, unit, { denominator, places: placesOf(length, unit) })} />;
+  return (
+    <InEachUnit write={(unit) => write(length, unit, { denominator, places: placesOf(length, unit) })} />
+  );
 }
 
 /** Whole millimetres as people read them; a converted record keeps its one decimal. */

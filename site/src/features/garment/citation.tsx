@@ -10,7 +10,8 @@ export function Citation({ garment }: { readonly garment: PublishedGarment }) {
     <section>
       <h2>Cite this page</h2>
       <p>
-        {museum}, {ownNumber}: {title}, {date.display}. Version {version}, {dayText(publishedAt)}. {paths.version(number, version)}
+        {museum}, {ownNumber}: {title}, {date.display}. Version {version}, {dayText(publishedAt)}.{' '}
+        {paths.version(number, version)}
       </p>
       <dl className="facts">
         <div>

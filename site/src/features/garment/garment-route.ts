@@ -11,7 +11,8 @@ const statuses = { garment: 200, withdrawn: 410, nothing: 404 } as const;
 export const handle = pageHandle<GarmentFound>({
   head: (found, { url }) => {
     if (found.found === 'garment') return garmentHead(found.garment, url.pathname);
-    const title = found.found === 'withdrawn' ? 'This garment is no longer shown' : 'Nothing is kept at this address';
+    const title =
+      found.found === 'withdrawn' ? 'This garment is no longer shown' : 'Nothing is kept at this address';
     return { title, description: `${title}.`, canonicalPath: url.pathname, unlisted: true };
   },
   status: ({ found }) => statuses[found],

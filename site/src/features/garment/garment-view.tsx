@@ -59,8 +59,8 @@ function Label({ label }: { readonly label: PublishedGarment['label'] }) {
 function OldVersion({ garment }: { readonly garment: PublishedGarment }) {
   return (
     <p className="old-version">
-      <strong>Version {garment.version} is not the current one.</strong> It stays here unchanged so that citations of
-      it hold.
+      <strong>Version {garment.version} is not the current one.</strong> It stays here unchanged so that
+      citations of it hold.
     </p>
   );
 }

@@ -28,15 +28,16 @@ export function Hazards({ hazards }: { readonly hazards: PublishedGarment['hazar
       <ul className="hazards">
         {hazards.map(({ id, standing, note }) => (
           <li key={id}>
-            <strong>{hazardWords[id] ?? id}</strong>: {standingWords[standing] ?? standing}.{note && ` ${note}`}
+            <strong>{hazardWords[id] ?? id}</strong>: {standingWords[standing] ?? standing}.
+            {note && ` ${note}`}
           </li>
         ))}
       </ul>
       {present && (
         <p className="text-ink-2">
-          Whoever handles a garment like this wears disposable gloves and washes their hands; does not steam, iron or
-          brush it; airs the room, since a dust mask does not stop vapour; and follows the rules of their own
-          institution and country.
+          Whoever handles a garment like this wears disposable gloves and washes their hands; does not steam,
+          iron or brush it; airs the room, since a dust mask does not stop vapour; and follows the rules of
+          their own institution and country.
         </p>
       )}
     </section>

@@ -3,7 +3,7 @@ import { type LitPoints } from '../../components/diagram/lit-points';
 import { SiteLink } from '../../components/ui/site-link';
 import { Length, Uncertainty, UnitName } from '../../components/units/length';
 import { paths } from '../../config/paths';
-import { goesRound, howHeld, levelText, roundsText } from './measuring-words';
+import { howHeld, levelText, roundsText } from './measuring-words';
 
 interface MeasurementTableProps {
   readonly part: PublishedPart;
@@ -15,11 +15,14 @@ interface MeasurementTableProps {
 /** Every published number of a part: where, how held, how found, and how far it can be trusted. */
 export function MeasurementTable({ part, letters, lit, rowId }: MeasurementTableProps) {
   const order = [...letters.keys()];
-  const place = ({ pointId }: PublishedMeasurement) => (order.indexOf(pointId) + order.length + 1) % (order.length + 1);
+  const place = ({ pointId }: PublishedMeasurement) =>
+    (order.indexOf(pointId) + order.length + 1) % (order.length + 1);
   const measurements = [...part.measurements].sort((a, b) => place(a) - place(b));
   return (
     <table className="measures">
-      <caption className="sr-only">Measurements of the {part.name.toLowerCase()}, each with its uncertainty</caption>
+      <caption className="sr-only">
+        Measurements of the {part.name.toLowerCase()}, each with its uncertainty
+      </caption>
       <thead>
         <tr>
           <th scope="col">
@@ -29,7 +32,7 @@ export function MeasurementTable({ part, letters, lit, rowId }: MeasurementTable
           <th scope="col" className="text-end">
             <UnitName />
           </th>
-          <th scope="col" className="text-end">
+          <th scope="col" className="text-end whitespace-nowrap">
             ± <UnitName />
           </th>
         </tr>
@@ -71,7 +74,7 @@ function MeasurementRow({ measurement, letter, lit, id }: MeasurementRowProps) {
           <button
             type="button"
             id={id}
-            className={goesRound(pointId) ? 'letter letter-round' : 'letter'}
+            className="letter"
             aria-pressed={lit.chosen === pointId}
             aria-label={`${letter}: show ${label.toLowerCase()} on the diagram`}
             onClick={() => lit.chooseRow(pointId)}
@@ -108,7 +111,8 @@ function HowMeasured({ measurement }: { readonly measurement: PublishedMeasureme
       )}
       {tapeLengths && (
         <>
-          {tapeLengths.count} × <Length mm={tapeLengths.tapeMm} bare /> + <Length mm={tapeLengths.restMm} />;{' '}
+          {tapeLengths.count} × <Length mm={tapeLengths.tapeMm} bare /> + <Length mm={tapeLengths.restMm} />
+          ;{' '}
         </>
       )}
       {roundsText(measurement)}

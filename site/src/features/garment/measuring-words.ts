@@ -19,10 +19,10 @@ export const reasonWords: Readonly<Record<NotTakenReason, string>> = {
 };
 
 const levelWords: Readonly<Record<NonNullable<PublishedMeasurement['levelFoundBy']>, string>> = {
-  band: 'level found at the band',
-  seam: 'level found at the seam',
-  nicks: 'level found by nicks in the seam',
-  'dart-tips': 'level found at the dart tips',
+  band: 'level at the band',
+  seam: 'level at the seam',
+  nicks: 'level at nicks in the seam',
+  'dart-tips': 'level at the dart tips',
   stated: 'level as stated',
 };
 
@@ -52,9 +52,4 @@ export function levelText({ levelFoundBy }: PublishedMeasurement): string | null
 /** "one reading", "2 readings". How far apart they lay is a length, and stands beside it. */
 export function roundsText({ rounds }: PublishedMeasurement): string {
   return rounds === 1 ? 'one reading' : counted(rounds, 'reading');
-}
-
-/** Whether the point goes round: its letter is then double-ringed, as on the diagram. */
-export function goesRound(pointId: string): boolean {
-  return findMeasuringPoint(pointId)?.how === 'round';
 }

@@ -4,7 +4,8 @@ import { supportText } from './measuring-words';
 
 /** When and how the part was measured. */
 export function PartFacts({ part }: { readonly part: PublishedPart }) {
-  const people = part.measuredBy.length > 0 ? part.measuredBy.join(', ') : counted(part.peopleCount, 'person', 'people');
+  const people =
+    part.measuredBy.length > 0 ? part.measuredBy.join(', ') : counted(part.peopleCount, 'person', 'people');
   const facts: readonly (readonly [string, string | null])[] = [
     ['Part', part.number],
     ['Measured', part.measuredOn && dayText(part.measuredOn)],

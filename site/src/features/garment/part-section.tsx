@@ -3,7 +3,7 @@ import { lettersFor } from '@ellwand/shared/protocols/protocol';
 import { protocolFor } from '@ellwand/shared/protocols/standard-protocols';
 import { type ReactNode, useMemo } from 'react';
 import { useLitPoints } from '../../components/diagram/lit-points';
-import { hasDiagram, MeasuringDiagram } from '../../components/diagram/measuring-diagram';
+import { MeasuringDiagram } from '../../components/diagram/measuring-diagram';
 import { Picture } from '../../components/ui/picture';
 import { DerivedValues } from './derived-values';
 import { MeasurementTable } from './measurement-table';
@@ -15,7 +15,7 @@ interface PartSectionProps {
   readonly index: number;
   /** The garment's only part needs no heading of its own. */
   readonly alone: boolean;
-  /** Stands in the drawing's place for a kind that has no diagram yet. */
+  /** Stands in the drawing's place while nothing of the part is measured. */
   readonly picture: PublishedImage | null;
   /** The garment's own heading, beside its first part. */
   readonly heading: ReactNode;
@@ -25,7 +25,6 @@ interface PartSectionProps {
 export function PartSection({ part, index, alone, picture, heading }: PartSectionProps) {
   const rowId = (pointId: string) => `part-${index + 1}-${pointId}`;
   const lit = useLitPoints(rowId);
-  // Placing letters is the costly part of a drawing: it must not happen again because a row is pointed at.
   const letters = useMemo(() => new Map<string, string>(lettersFor(protocolFor(part.kind))), [part]);
   const points = useMemo(() => part.measurements.map(({ pointId }) => pointId), [part]);
   const title = alone ? 'Measurements' : `${part.name}: measurements`;
@@ -33,15 +32,23 @@ export function PartSection({ part, index, alone, picture, heading }: PartSectio
     <section className="part" aria-label={alone ? 'Measurements' : part.name}>
       {heading}
       <div className="part-drawing">
-        {hasDiagram(part.kind) && points.length > 0 ? (
-          <MeasuringDiagram kind={part.kind} points={points} letters={letters} lit={lit} prefix={`part-${index + 1}`} />
+        {points.length > 0 ? (
+          <MeasuringDiagram
+            kind={part.kind}
+            points={points}
+            letters={letters}
+            lit={lit}
+            prefix={`part-${index + 1}`}
+          />
         ) : (
           picture && <Picture image={picture} sizes="(width >= 64rem) 56vw, 92vw" first={index === 0} />
         )}
       </div>
       <div className="part-measures">
         <h2>{title}</h2>
-        <p className="inside-note">Inside of the garment as fastened; not the wearer’s body, nor a modern size.</p>
+        <p className="inside-note">
+          Inside of the garment as fastened; not the wearer’s body, nor a modern size.
+        </p>
         <MeasurementTable part={part} letters={letters} lit={lit} rowId={rowId} />
         <NotTaken part={part} />
         <DerivedValues part={part} />

@@ -1,3 +1,4 @@
+import { type ViewName } from '@ellwand/shared/drawings/diagram/model';
 import { diagramFor } from '@ellwand/shared/drawings/kinds/diagram-for';
 import { findMeasuringPoint } from '@ellwand/shared/points/measuring-points';
 import { type GarmentKind } from '@ellwand/shared/points/kinds';
@@ -14,36 +15,43 @@ export interface DrawnMeasure {
 
 export interface DrawnSubject {
   readonly kind: GarmentKind;
+  /** The front, and whatever else the lines lie on. */
+  readonly views: readonly ViewName[];
   readonly measures: readonly DrawnMeasure[];
-  readonly card: CatalogueCard | null;
+  readonly card: Pick<CatalogueCard, 'number' | 'title' | 'dateDisplay'> | null;
 }
 
 const LETTERS = 'ABCDEFGH';
-const explained = ['waist', 'across-front', 'neck-to-hem-back'];
+const explained = ['waist', 'across-front', 'sleeve-outer'];
 
 /** The newest garment whose figures can be drawn with at least two lines; else a bodice that only explains. */
 export function chooseSubject(newest: readonly CatalogueCard[]): DrawnSubject {
   for (const card of newest) {
     if (!isKind(card.kind)) continue;
-    const drawn = new Set(linesSeen(card.kind));
-    const measures = card.measurements.filter(({ pointId }) => drawn.has(pointId));
-    if (measures.length >= 2) return { kind: card.kind, measures: measures.map(lettered), card };
+    const lines = diagramFor(card.kind)?.lines ?? [];
+    const measures = card.measurements.filter((each) =>
+      lines.some(({ pointId }) => pointId === each.pointId),
+    );
+    if (measures.length >= 2) {
+      const { number, title, dateDisplay } = card;
+      return subject(card.kind, measures, { number, title, dateDisplay });
+    }
   }
-  const measures = explained.map((pointId, index) =>
-    lettered({ pointId, label: findMeasuringPoint(pointId)?.name ?? pointId, valueMm: null }, index),
-  );
-  return { kind: 'bodice', measures, card: null };
+  const measures = explained.map((pointId) => {
+    return { pointId, label: findMeasuringPoint(pointId)?.name ?? pointId, valueMm: null };
+  });
+  return subject('bodice', measures, null);
 }
 
-/** Points whose line lies on the front or the back; the inside is not shown here. */
-function linesSeen(kind: GarmentKind): string[] {
+function subject(kind: GarmentKind, measures: readonly Figure[], card: DrawnSubject['card']): DrawnSubject {
   const lines = diagramFor(kind)?.lines ?? [];
-  return lines.filter(({ view }) => view !== 'inside').map(({ pointId }) => pointId);
+  const lainOn = lines.filter((line) => measures.some(({ pointId }) => pointId === line.pointId));
+  const views = new Set<ViewName>(['front', ...lainOn.map(({ view }) => view)]);
+  return { kind, views: [...views], measures: measures.map(lettered), card };
 }
 
-function lettered(
-  { pointId, label, valueMm }: { pointId: string; label: string; valueMm: string | null },
-  index: number,
-): DrawnMeasure {
+type Figure = Omit<DrawnMeasure, 'letter'>;
+
+function lettered({ pointId, label, valueMm }: Figure, index: number): DrawnMeasure {
   return { pointId, label, valueMm, letter: LETTERS.charAt(index) };
 }

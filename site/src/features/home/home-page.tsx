@@ -1,24 +1,24 @@
-import { type CatalogueFront } from '@ellwand/shared/records/site-catalogue';
 import { Form, useLoaderData, useSearchParams } from 'react-router-dom';
 import { SiteLink } from '../../components/ui/site-link';
 import { paths } from '../../config/paths';
 import { isUnit } from '../../lib/range-boxes';
 import { counted } from '../../lib/words';
 import { GarmentCard } from '../search/garment-card';
+import { type HomeFound } from './home-loader';
 import { KindEntries } from './kind-entries';
 import { LivingDrawing } from './living-drawing';
 
 /** The first page: what is here, the way in by words, by kind, and by what was measured last. */
 export function HomePage() {
-  const { total, kinds, newest } = useLoaderData<CatalogueFront>();
+  const { total, kinds, newest, subject } = useLoaderData<HomeFound>();
   return (
     <>
       <section className="wide opening">
         <div className="opening-words">
           <h1>Historic dress, measured by hand, from the inside</h1>
           <p className="opening-more">
-            {counted(total, 'garment')}, each with its diagram, its measurements and how far they can be trusted. Read
-            them in millimetres, centimetres or inches.
+            {counted(total, 'garment')}, each with its diagram, its measurements and how far they can be
+            trusted. Read them in millimetres, centimetres or inches.
           </p>
           <HomeSearch />
           <p>
@@ -28,7 +28,7 @@ export function HomePage() {
             is one way to begin.
           </p>
         </div>
-        <LivingDrawing newest={newest} />
+        <LivingDrawing subject={subject} />
       </section>
       <KindEntries kinds={kinds} />
       {newest.length > 0 && (
@@ -37,7 +37,11 @@ export function HomePage() {
           <ul className="cards cards-four">
             {newest.map((card) => (
               <li key={card.number}>
-                <GarmentCard card={card} heading="h3" sizes="(width >= 64rem) 290px, (width >= 40rem) 45vw, 92vw" />
+                <GarmentCard
+                  card={card}
+                  heading="h3"
+                  sizes="(width >= 64rem) 290px, (width >= 40rem) 45vw, 38vw"
+                />
               </li>
             ))}
           </ul>

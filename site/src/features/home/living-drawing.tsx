@@ -1,35 +1,28 @@
-import { paintDiagram } from '@ellwand/shared/drawings/diagram/paint-diagram';
-import { type CatalogueCard } from '@ellwand/shared/records/published-garment';
-import { useMemo } from 'react';
-import { useLitPoints } from '../../components/diagram/lit-points';
-import { SceneDrawing } from '../../components/diagram/scene-drawing';
-import { sheetScale } from '../../components/diagram/sheet-scale';
-import { Tape } from '../../components/diagram/tape';
+import { LitDrawing } from '../../components/diagram/lit-drawing';
+import { type LitPoints, useLitPoints } from '../../components/diagram/lit-points';
 import { SiteLink } from '../../components/ui/site-link';
 import { Length } from '../../components/units/length';
 import { paths } from '../../config/paths';
-import { chooseSubject, type DrawnMeasure } from './drawn-subject';
+import { type DrawnMeasure, type DrawnSubject } from './drawn-subject';
 
-const WIDTH_PX = 560;
 const PREFIX = 'opening';
+/** With the tape beside it: what stands in half a page, and on a phone. */
+const WIDE_PX = 560;
+const NARROW_PX = 324;
 
 /** A garment of the catalogue with the lines it was measured along: pointing at a figure lights its line. */
-export function LivingDrawing({ newest }: { readonly newest: readonly CatalogueCard[] }) {
-  const { kind, measures, card } = useMemo(() => chooseSubject(newest), [newest]);
+export function LivingDrawing({ subject }: { readonly subject: DrawnSubject }) {
+  const { kind, views, measures, card } = subject;
   const lit = useLitPoints((pointId) => `${PREFIX}-${pointId}`);
-  const scene = useMemo(() => {
-    const letters = new Map(measures.map(({ pointId, letter }) => [pointId, letter]));
-    const points = measures.map(({ pointId }) => pointId);
-    return paintDiagram({ kind, points, letters, views: ['front', 'back'], widthPx: WIDTH_PX, idPrefix: PREFIX });
-  }, [kind, measures]);
-  if (!scene) return null;
-  const mmPerPx = 1 / sheetScale(kind, ['front', 'back'], WIDTH_PX);
+  const letters = new Map(measures.map(({ pointId, letter }) => [pointId, letter]));
+  const points = measures.map(({ pointId }) => pointId);
+  const sheet = (widthPx: number) => {
+    return { kind, views, points, letters, widthPx, idPrefix: `${PREFIX}-${widthPx}`, tape: true };
+  };
   return (
     <figure className="living">
-      <div className="living-sheet">
-        <Tape upright lengthPx={scene.height} mmPerPx={mmPerPx} />
-        <SceneDrawing scene={scene} lit={lit} />
-      </div>
+      <LitDrawing sheet={sheet(WIDE_PX)} lit={lit} className="living-sheet only-wide" />
+      <LitDrawing sheet={sheet(NARROW_PX)} lit={lit} className="living-sheet only-narrow" />
       <figcaption>
         <ol className="living-measures">
           {measures.map((measure) => (
@@ -52,7 +45,7 @@ export function LivingDrawing({ newest }: { readonly newest: readonly CatalogueC
 
 interface MeasureRowProps {
   readonly measure: DrawnMeasure;
-  readonly lit: ReturnType<typeof useLitPoints>;
+  readonly lit: LitPoints;
 }
 
 function MeasureRow({ measure: { pointId, letter, label, valueMm }, lit }: MeasureRowProps) {

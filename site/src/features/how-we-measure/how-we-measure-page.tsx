@@ -16,14 +16,16 @@ export function HowWeMeasurePage() {
         <h1>How we measure</h1>
         <div className="how-rules">
           <p>
-            Two people at a clean table: one reads the tape, the other holds its end and steadies the garment. In
-            millimetres, inside the opened garment, from fastening to fastening and not from the edge of the cloth,
-            because plackets overlap. The garment is turned over once, and the points come in that order.
+            Two people at a clean table: one reads the tape, the other holds its end and steadies the garment.
+            In millimetres, inside the opened garment, from fastening to fastening and not from the edge of
+            the cloth, because plackets overlap. The garment is turned over once, and the points come in that
+            order.
           </p>
           <p>
-            What can be worked out is not measured. A published figure is the mean of its readings; its ± tells how far
-            it can be trusted, from the step of the tape, the way it lay, each join of tape lengths and how far the
-            readings lay apart. A garment’s measure is not its wearer’s, nor a modern size.
+            What can be worked out is not measured. A published figure is the mean of its readings; its ±
+            tells how far it can be trusted, from the step of the tape, the way it lay, each join of tape
+            lengths and how far the readings lay apart. A garment’s measure is not its wearer’s, nor a modern
+            size.
           </p>
         </div>
       </header>

@@ -5,7 +5,7 @@ import { lettersFor } from '@ellwand/shared/protocols/protocol';
 import { protocolFor } from '@ellwand/shared/protocols/standard-protocols';
 import { useMemo } from 'react';
 import { useLitPoints } from '../../components/diagram/lit-points';
-import { hasDiagram, MeasuringDiagram } from '../../components/diagram/measuring-diagram';
+import { MeasuringDiagram } from '../../components/diagram/measuring-diagram';
 import { SiteLink } from '../../components/ui/site-link';
 import { paths } from '../../config/paths';
 import { kindsName } from '../../lib/words';
@@ -17,10 +17,8 @@ export function KindPoints({ kind }: { readonly kind: GarmentKind }) {
   return (
     <section className="how-kind" id={`kind-${kind}`} aria-labelledby={`title-${kind}`}>
       <h2 id={`title-${kind}`}>{kindsName(kind)}</h2>
-      {hasDiagram(kind) && (
-        <MeasuringDiagram kind={kind} points={points} letters={letters} lit={lit} prefix={`how-${kind}`} />
-      )}
-      <div className={hasDiagram(kind) ? 'how-steps' : 'how-steps how-steps-across'}>
+      <MeasuringDiagram kind={kind} points={points} letters={letters} lit={lit} prefix={`how-${kind}`} />
+      <div className="how-steps">
         {handlingSteps.map((step) => {
           const here = entries.filter((entry) => entry.step === step);
           if (here.length === 0) return null;
@@ -28,7 +26,7 @@ export function KindPoints({ kind }: { readonly kind: GarmentKind }) {
             <div key={step}>
               <h3>{handlingStepLabels[step]}</h3>
               <ul>
-                {here.map(({ pointId, name, letter, round }) => (
+                {here.map(({ pointId, name, letter }) => (
                   <li
                     key={pointId}
                     data-lit={lit.lit === pointId ? '' : undefined}
@@ -37,7 +35,7 @@ export function KindPoints({ kind }: { readonly kind: GarmentKind }) {
                     onFocus={() => lit.light(pointId)}
                     onBlur={() => lit.light(null)}
                   >
-                    <span className={round ? 'letter letter-round' : 'letter'} aria-hidden="true">
+                    <span className="letter" aria-hidden="true">
                       {letter}
                     </span>
                     <SiteLink to={paths.point(pointId)}>
@@ -60,7 +58,7 @@ function pointsOf(kind: GarmentKind) {
   const entries = protocolFor(kind).points.map(({ pointId }) => {
     const point = measuringPoint(pointId);
     const letter = letters.get(pointId) ?? '';
-    return { pointId, letter, name: point.name, step: point.handlingStep, round: point.how === 'round' };
+    return { pointId, letter, name: point.name, step: point.handlingStep };
   });
   return { letters, points, entries };
 }

@@ -1,7 +1,6 @@
 import { type GarmentKind } from '@ellwand/shared/points/kinds';
 import { findMeasuringPoint } from '@ellwand/shared/points/measuring-points';
 import { groupLabels } from '@ellwand/shared/points/groups';
-import { diagramFor } from '@ellwand/shared/drawings/kinds/diagram-for';
 import { lettersFor } from '@ellwand/shared/protocols/protocol';
 import { protocolFor } from '@ellwand/shared/protocols/standard-protocols';
 import { toMmString } from '@ellwand/shared/units/length';
@@ -20,7 +19,7 @@ import { PointFacts } from './point-facts';
 export function PointPage() {
   const point = findMeasuringPoint(useLoaderData<string | null>() ?? '');
   if (!point) return <NotFoundPage />;
-  const kind = point.kinds.find((each) => diagramFor(each)?.lines.some(({ pointId }) => pointId === point.id));
+  const [kind] = point.kinds;
   return (
     <article className="wide point">
       <div className="point-words">
@@ -36,8 +35,9 @@ export function PointPage() {
         <p>{point.kinds.map(kindName).join(', ')}</p>
         <h2>Usual figures</h2>
         <p>
-          From <Length mm={toMmString(point.softRange.from)} /> to <Length mm={toMmString(point.softRange.to)} />. A reading
-          outside is asked about at the table, never refused. {point.softRange.basis}
+          From <Length mm={toMmString(point.softRange.from)} /> to{' '}
+          <Length mm={toMmString(point.softRange.to)} />. A reading outside is asked about at the table, never
+          refused. {point.softRange.basis}
         </p>
         <p>
           <SiteLink className="button-quiet" to={paths.search(`measure=${point.group}%3A0..`)}>
@@ -45,7 +45,7 @@ export function PointPage() {
           </SiteLink>
         </p>
       </div>
-      {kind && <PointDiagram kind={kind} pointId={point.id} />}
+      {kind && !point.wornTogether && <PointDiagram kind={kind} pointId={point.id} />}
     </article>
   );
 }

@@ -15,7 +15,11 @@ export const handle = pageHandle<string | null>({
       const title = 'No such measuring point';
       return { title, description: `${title}.`, canonicalPath: paths.howWeMeasure(), unlisted: true };
     }
-    return { title: `${point.name}: how we measure`, description: point.definition, canonicalPath: paths.point(point.id) };
+    return {
+      title: `${point.name}: how we measure`,
+      description: point.definition,
+      canonicalPath: paths.point(point.id),
+    };
   },
   status: (pointId) => (pointId === null ? 404 : 200),
 });

@@ -24,8 +24,12 @@ export function WithdrawalPage({ notice }: { readonly notice: WithdrawalNotice }
       </dl>
       <p className="notice-words">{notice.notice}</p>
       <p>
-        Its versions and pictures are withdrawn with it. The number stays with this garment and is never given to
-        another. If you have cited it, write to <a className="link" href={`mailto:${museum.email}`}>the museum</a>.
+        Its versions and pictures are withdrawn with it. The number stays with this garment and is never given
+        to another. If you have cited it, write to{' '}
+        <a className="link" href={`mailto:${museum.email}`}>
+          the museum
+        </a>
+        .
       </p>
       <p className="notice-actions">
         <SiteLink to={paths.search()} className="button-quiet">

@@ -27,7 +27,13 @@ export function Facets({ query, facets, onTick }: FacetsProps) {
         const open = values.filter(({ value }, index) => index < SHOWN || ticked.includes(value));
         const rest = values.filter((each) => !open.includes(each));
         const box = (each: (typeof values)[number]) => (
-          <FacetBox key={each.value} name={name} ticked={ticked.includes(each.value)} onTick={onTick} {...each} />
+          <FacetBox
+            key={each.value}
+            name={name}
+            ticked={ticked.includes(each.value)}
+            onTick={onTick}
+            {...each}
+          />
         );
         return (
           <fieldset key={name} className="facet">

@@ -27,7 +27,11 @@ export function PagesNav({ query, total, view }: PagesNavProps) {
         {shown.map((page, index) => (
           <li key={page}>
             {page - (shown[index - 1] ?? page) > 1 && <span aria-hidden="true">…</span>}
-            <SiteLink to={to(page)} aria-label={`Page ${page}`} aria-current={page === query.page ? 'page' : undefined}>
+            <SiteLink
+              to={to(page)}
+              aria-label={`Page ${page}`}
+              aria-current={page === query.page ? 'page' : undefined}
+            >
               {page}
             </SiteLink>
           </li>

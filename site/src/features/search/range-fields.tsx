@@ -67,10 +67,26 @@ function OneRange({ range, filter, unit, problems }: OneRangeProps) {
       <RangeChart range={range} fromMm={asNumber(filter?.minMm)} toMm={asNumber(filter?.maxMm)} />
       {filter && <input type="hidden" name="was" value={formatMeasure(filter)} />}
       <div className="range-boxes">
-        <LengthBox name={`min.${range.point}`} label="From" of={range.label} bound={filter?.minMm} unit={unit} problems={problems} />
-        <LengthBox name={`max.${range.point}`} label="To" of={range.label} bound={filter?.maxMm} unit={unit} problems={problems} />
+        <LengthBox
+          name={`min.${range.point}`}
+          label="From"
+          of={range.label}
+          bound={filter?.minMm}
+          unit={unit}
+          problems={problems}
+        />
+        <LengthBox
+          name={`max.${range.point}`}
+          label="To"
+          of={range.label}
+          bound={filter?.maxMm}
+          unit={unit}
+          problems={problems}
+        />
       </div>
-      {range.missing > 0 && <p className="facet-hint">{counted(range.missing, 'garment')} without this measurement.</p>}
+      {range.missing > 0 && (
+        <p className="facet-hint">{counted(range.missing, 'garment')} without this measurement.</p>
+      )}
     </div>
   );
 }

@@ -6,7 +6,9 @@ import { kindName } from '../../lib/words';
 
 /** The same results with a column for each measurement that any of them shows. */
 export function ResultsTable({ cards }: { readonly cards: readonly CatalogueCard[] }) {
-  const columns = new Map(cards.flatMap((card) => card.measurements.map(({ pointId, label }) => [pointId, label])));
+  const columns = new Map(
+    cards.flatMap((card) => card.measurements.map(({ pointId, label }) => [pointId, label])),
+  );
   return (
     <div className="table-scroll" tabIndex={0} role="region" aria-labelledby="results-caption">
       <table className="table">

@@ -20,7 +20,14 @@ export function SearchForm({ query, view, answer, problems }: SearchFound) {
   const unit = params.get('unit');
   const send = () => void submit(form.current, { preventScrollReset: true });
   return (
-    <Form ref={form} method="get" action={paths.search()} preventScrollReset noValidate className="search-form">
+    <Form
+      ref={form}
+      method="get"
+      action={paths.search()}
+      preventScrollReset
+      noValidate
+      className="search-form"
+    >
       {view === 'table' && <input type="hidden" name="view" value="table" />}
       {isUnit(unit) && <input type="hidden" name="unit" value={unit} />}
       {query.size !== PAGE_SIZE && <input type="hidden" name="size" value={query.size} />}
@@ -29,7 +36,14 @@ export function SearchForm({ query, view, answer, problems }: SearchFound) {
           Words in title, description, maker or label
         </label>
         <div className="search-row">
-          <input id="search-words" key={query.q} name="q" type="search" defaultValue={query.q} className="input" />
+          <input
+            id="search-words"
+            key={query.q}
+            name="q"
+            type="search"
+            defaultValue={query.q}
+            className="input"
+          />
           <button type="submit" className="button">
             Search
           </button>
@@ -39,7 +53,14 @@ export function SearchForm({ query, view, answer, problems }: SearchFound) {
         <label htmlFor="search-sort" className="label">
           Order
         </label>
-        <select id="search-sort" name="sort" key={query.sort} defaultValue={query.sort} className="input" onChange={send}>
+        <select
+          id="search-sort"
+          name="sort"
+          key={query.sort}
+          defaultValue={query.sort}
+          className="input"
+          onChange={send}
+        >
           {Object.entries(sortLabels).map(([value, label]) => (
             <option key={value} value={value}>
               {label}

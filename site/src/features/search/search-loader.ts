@@ -20,11 +20,15 @@ export interface SearchFound {
  * Answers a search, but only at its one address: whatever a form or an old link sends is read first, and
  * sent on to where the same search stands in order.
  */
-export async function searchLoader(catalogue: SiteCatalogue, request: Request): Promise<SearchFound | Response> {
+export async function searchLoader(
+  catalogue: SiteCatalogue,
+  request: Request,
+): Promise<SearchFound | Response> {
   const params = new URL(request.url).searchParams;
   const boxes = readBoxes(params);
   const read = readSearch(params);
-  const query = boxPoints(params).length > 0 ? { ...read, measure: [...read.measure, ...boxes.filters] } : read;
+  const query =
+    boxPoints(params).length > 0 ? { ...read, measure: [...read.measure, ...boxes.filters] } : read;
   const view: SearchView = params.get('view') === 'table' ? 'table' : 'cards';
   const address = searchAddress(query, { view, unit: params.get('unit') });
   if (boxes.problems.length === 0 && `?${params.toString()}` !== `?${address}`) {

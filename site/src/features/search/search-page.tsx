@@ -12,7 +12,7 @@ import { SearchChips } from './search-chips';
 import { SearchForm } from './search-form';
 import { searchAddress, type SearchFound } from './search-loader';
 
-const CARD_SIZES = '(width >= 80rem) 300px, (width >= 48rem) 40vw, 92vw';
+const CARD_SIZES = '(width >= 80rem) 300px, (width >= 40rem) 40vw, 38vw';
 
 /** Search results: what narrows them at the left, the garments at the right. */
 export function SearchPage() {
@@ -93,9 +93,17 @@ function ProblemSummary({ problems }: { readonly problems: readonly BoxProblem[]
   const summary = useRef<HTMLDivElement>(null);
   useEffect(() => summary.current?.focus(), [problems]);
   return (
-    <div ref={summary} tabIndex={-1} className="problem-summary" role="group" aria-labelledby="problems-title">
+    <div
+      ref={summary}
+      tabIndex={-1}
+      className="problem-summary"
+      role="group"
+      aria-labelledby="problems-title"
+    >
       <h2 id="problems-title" className="font-semibold">
-        {problems.length === 1 ? 'One figure could not be read' : `${problems.length} figures could not be read`}
+        {problems.length === 1
+          ? 'One figure could not be read'
+          : `${problems.length} figures could not be read`}
       </h2>
       <ul>
         {problems.map(({ field, sentence }) => (

@@ -18,7 +18,11 @@ interface TapeScale {
 const byTens = (step: number): TapeScale => ({ step, toFigure: 10 });
 const metric = [1, 2, 5, 10, 20, 50, 100, 200, 500].map(byTens);
 /** An inch is halved and quartered before it is counted in tens. */
-const inches: readonly TapeScale[] = [{ step: 1, toFigure: 4 }, { step: 2, toFigure: 4 }, ...[4, 8, 20, 40, 80].map(byTens)];
+const inches: readonly TapeScale[] = [
+  { step: 1, toFigure: 4 },
+  { step: 2, toFigure: 4 },
+  ...[4, 8, 20, 40, 80].map(byTens),
+];
 
 const LEAST_GAP_PX = 3.4;
 const QUARTER_INCH_MM = 6.35;
