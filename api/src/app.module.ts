@@ -10,6 +10,7 @@ import { HealthModule } from './health/health.module';
 import { MailModule } from './mail/mail.module';
 import { MeasuringModule } from './measuring/measuring.module';
 import { MediaModule } from './media/media.module';
+import { OpenApiModule } from './openapi/openapi.module';
 import { PagesModule } from './pages/pages.module';
 import { PublishingModule } from './publishing/publishing.module';
 import { UsersModule } from './users/users.module';
@@ -30,6 +31,7 @@ import { UsersModule } from './users/users.module';
     MediaModule,
     PublishingModule,
     CatalogueModule,
+    OpenApiModule,
     PagesModule,
   ],
 })

@@ -13,6 +13,8 @@ import { Lifecycle } from './common/lifecycle';
 import { ProblemFilter } from './common/problem.filter';
 import { VersionTagInterceptor } from './common/version-tag.interceptor';
 import type { Environment } from './config/environment';
+import { requestLog } from './config/logging';
+import { OpenApi } from './openapi/openapi.service';
 import { securityHeaders } from './security-headers';
 
 /** Whatever is not part of the API keeps its address as its controller writes it. */
@@ -52,6 +54,7 @@ export function furnish(application: NestExpressApplication): void {
   application.disable('x-powered-by');
   if (environment.trustProxy) application.set('trust proxy', environment.trustProxy);
   application.set('query parser', 'simple');
+  application.use(requestLog(environment.logLevel));
   application.use(securityHeaders(application));
   application.use(closingWhenEnding(application.get(Lifecycle)));
   application.use(compression({ brotli: { params: { [constants.BROTLI_PARAM_QUALITY]: 4 } } }));
@@ -61,6 +64,7 @@ export function furnish(application: NestExpressApplication): void {
     exclude: outsideTheApi.map((path) => ({ path, method: RequestMethod.ALL })),
   });
   furnishAnswers(application);
+  application.get(OpenApi).describes(application);
 }
 
 function furnishAnswers(application: INestApplication): void {

@@ -38,14 +38,25 @@ const titles: Readonly<Record<number, string>> = {
 const passing =
   /ECONNREFUSED|PROTOCOL_CONNECTION_LOST|ECONNRESET|ER_CON_COUNT_ERROR|POOL_CLOSED|Queue limit reached|ETIMEDOUT/;
 
+interface FaultLog {
+  error(text: string): void;
+}
+
+/** The request's own log names the request with each line. */
+interface LoggedRequest {
+  readonly log?: FaultLog;
+}
+
 /** The only place that speaks of errors. What was not expected is logged and told without detail. */
 @Catch()
 export class ProblemFilter implements ExceptionFilter {
-  private readonly log = new Logger('problem');
-
   catch(fault: unknown, host: ArgumentsHost): void {
-    const response = host.switchToHttp().getResponse<Response>();
-    const { problem, headers } = this.describe(fault);
+    const http = host.switchToHttp();
+    const response = http.getResponse<Response>();
+    const { problem, headers } = this.describe(
+      fault,
+      http.getRequest<LoggedRequest>().log ?? new Logger('problem'),
+    );
     if (response.headersSent) {
       response.destroy();
       return;
@@ -54,7 +65,10 @@ export class ProblemFilter implements ExceptionFilter {
     response.type('application/problem+json').send(JSON.stringify(problem));
   }
 
-  private describe(fault: unknown): { problem: ProblemDocument; headers: Record<string, string> } {
+  private describe(
+    fault: unknown,
+    log: FaultLog,
+  ): { problem: ProblemDocument; headers: Record<string, string> } {
     if (fault instanceof Refusal) {
       const problem = { ...fault.facts, ...document(fault.status, fault.code, fault.message, fault.errors) };
       return { problem, headers: { ...fault.headers } };
@@ -76,11 +90,14 @@ export class ProblemFilter implements ExceptionFilter {
       const status = fault.getStatus();
       return { problem: document(status, `http.${status}`, fault.message), headers: {} };
     }
-    return this.surprise(fault);
+    return this.surprise(fault, log);
   }
 
-  private surprise(fault: unknown): { problem: ProblemDocument; headers: Record<string, string> } {
-    this.log.error(withoutValues(fault instanceof Error ? (fault.stack ?? fault.message) : String(fault)));
+  private surprise(
+    fault: unknown,
+    log: FaultLog,
+  ): { problem: ProblemDocument; headers: Record<string, string> } {
+    log.error(withoutValues(fault instanceof Error ? (fault.stack ?? fault.message) : String(fault)));
     const text =
       fault instanceof Error ? `${fault.message} ${'code' in fault ? String(fault.code) : ''}` : '';
     if (passing.test(text)) {

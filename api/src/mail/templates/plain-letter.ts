@@ -1,3 +1,5 @@
+import { escapeMarkup } from '../../common/escape-markup';
+
 /** What a letter says; both its forms are made of this, so that they cannot differ. */
 export interface LetterParts {
   readonly greeting: string;
@@ -5,18 +7,6 @@ export interface LetterParts {
   readonly action: { readonly label: string; readonly href: string };
   readonly after: readonly string[];
   readonly sender: string;
-}
-
-/** Text that stands in markup as it was written. */
-export function escapeMarkup(text: string): string {
-  const named: Readonly<Record<string, string>> = {
-    '&': '&amp;',
-    '<': '&lt;',
-    '>': '&gt;',
-    '"': '&quot;',
-    "'": '&#39;',
-  };
-  return text.replaceAll(/[&<>"']/g, (letter) => named[letter] ?? letter);
 }
 
 export function asText({ greeting, paragraphs, action, after, sender }: LetterParts): string {
