@@ -1,0 +1,122 @@
+import { runChecks } from '@ellwand/shared/checks/registry';
+import { protocolFor } from '@ellwand/shared/protocols/standard-protocols';
+import { derivedViews, toReading } from '@ellwand/shared/records/measured';
+import { FindingAnswer, type NewReading, NewReadings, NewSheet, type Sheet, SheetFacts, type SheetFindings, type StoredReading } from '@ellwand/shared/records/sheet';
+import { findMeasuringPoint } from '@ellwand/shared/points/measuring-points';
+import { wholeValue } from '@ellwand/shared/readings/whole-value';
+import { mm, toMmString } from '@ellwand/shared/units/length';
+import { fromTyped } from '@ellwand/shared/units/parse-length';
+import type { House } from './house.js';
+import { Refusal, read } from './refuse.js';
+import { json, matched, type Routes } from './router.js';
+import { sheetFor, summaryOf } from './sheets.js';
+
+const known = (house: House, id: string): Sheet => {
+  const sheet = house.sheet(id);
+  if (!sheet) throw new Refusal(404, 'sheet.unknown');
+  return sheet;
+};
+
+function stored(house: House, sheet: Sheet, reading: NewReading): StoredReading {
+  const { id, pointId, round, replaces, note, readBy, device, keyedAt } = reading;
+  const base = { id, pointId, round, replaces, note, readBy, device, keyedAt, stands: true, recordedBy: house.signedIn!.id, receivedAt: new Date().toISOString() };
+  if (reading.state === 'not-taken') {
+    return { ...base, state: 'not-taken', valueMm: null, typed: null, unit: null, tapeCount: 0, tapeLengthMm: null, levelFoundBy: null, reason: reading.reason };
+  }
+  const parsed = fromTyped({ text: reading.typed, unit: reading.unit });
+  if (!parsed.ok) throw new Refusal(422, 'reading.unreadable');
+  const how = findMeasuringPoint(pointId)?.how ?? 'straight';
+  const { tapeLengthMm, tapeZeroMm } = sheet.facts;
+  const value = wholeValue({ read: parsed.value.length, how, tapeCount: reading.tapeCount, tapeLength: mm(tapeLengthMm), tapeZero: mm(tapeZeroMm) });
+  return { ...base, state: 'taken', valueMm: toMmString(value), typed: reading.typed, unit: reading.unit, tapeCount: reading.tapeCount, tapeLengthMm: reading.tapeCount > 0 ? tapeLengthMm : null, levelFoundBy: reading.levelFoundBy, reason: null };
+}
+
+function keep(house: House, sheet: Sheet, reading: NewReading) {
+  const before = sheet.readings.find(({ id }) => id === reading.id);
+  if (before) return { id: reading.id, outcome: 'already-kept', reading: before };
+  const standing = sheet.readings.find(({ pointId, round, stands }) => stands && pointId === reading.pointId && round === reading.round);
+  if ((standing?.id ?? null) !== reading.replaces) {
+    return { id: reading.id, outcome: 'conflict', detail: 'Another reading stands at this point.', standing };
+  }
+  if (standing) standing.stands = false;
+  const fresh = stored(house, sheet, reading);
+  sheet.readings.push(fresh);
+  sheet.version += 1;
+  return { id: reading.id, outcome: 'kept', reading: fresh };
+}
+
+export function findingsOf(house: House, sheet: Sheet): SheetFindings {
+  const protocol = protocolFor(sheet.kind);
+  const found = runChecks({ kind: sheet.kind, protocol, readings: sheet.readings.map(toReading) });
+  return {
+    findings: found.map(({ checkId, severity, sentence, pointIds }) => {
+      const key = `${checkId}:${pointIds.join(',')}`;
+      return { key, checkId, severity, sentence, pointIds: [...pointIds], answer: house.answers.get(`${sheet.id} ${key}`) ?? null };
+    }),
+    derived: derivedViews(sheet.kind, sheet.readings),
+  };
+}
+
+function refreshSummaries(house: House, sheet: Sheet): void {
+  const part = house.garment(sheet.garmentId)?.parts.find(({ id }) => id === sheet.partId);
+  if (part) part.sheets = [...part.sheets.filter(({ id }) => id !== sheet.id), summaryOf(sheet)];
+}
+
+/** Sheets, readings and findings, over the same checks and derivations that the API runs. */
+export const measuringRoutes: Routes = {
+  'POST /workroom/parts/:id/sheets': ({ house, params, body }) => {
+    const { id, facts } = read(NewSheet, body);
+    const again = id === undefined ? undefined : house.sheet(id);
+    if (again) return json(again, 201);
+    const garment = house.garments.find(({ parts }) => parts.some((part) => part.id === params.id));
+    if (!garment) throw new Refusal(404, 'part.unknown');
+    const sheet = sheetFor(garment, garment.parts.findIndex((part) => part.id === params.id), id ?? house.newId());
+    house.sheets.push(sheet);
+    setFacts(house, sheet, facts);
+    refreshSummaries(house, sheet);
+    return json(sheet, 201);
+  },
+  'GET /workroom/sheets/:id': ({ house, params }) => json(known(house, params.id)),
+  'PUT /workroom/sheets/:id/facts': ({ house, params, body, version }) => {
+    const sheet = known(house, params.id);
+    matched(sheet.version, version);
+    setFacts(house, sheet, read(SheetFacts, body));
+    sheet.version += 1;
+    return json(sheet);
+  },
+  'POST /workroom/sheets/:id/readings': ({ house, params, body }) => {
+    const sheet = known(house, params.id);
+    const { readings } = read(NewReadings, body);
+    const results = readings.map((reading) => keep(house, sheet, reading));
+    refreshSummaries(house, sheet);
+    return json({ sheetVersion: sheet.version, results });
+  },
+  'GET /workroom/sheets/:id/findings': ({ house, params }) => json(findingsOf(house, known(house, params.id))),
+  'POST /workroom/sheets/:id/findings/answers': ({ house, params, body }) => {
+    const { key, reason } = read(FindingAnswer, body);
+    house.answers.set(`${params.id} ${key}`, { reason, by: house.signedIn!.name, at: new Date().toISOString() });
+    return json(findingsOf(house, known(house, params.id)));
+  },
+  'POST /workroom/sheets/:id/complete': ({ house, params, version }) => {
+    const sheet = known(house, params.id);
+    matched(sheet.version, version);
+    const { findings } = findingsOf(house, sheet);
+    const stops = findings.filter(({ severity, answer }) => severity === 'stop' && !answer);
+    if (stops.length > 0) throw new Refusal(409, 'sheet.open-stops', { findings: stops }, 'A stop is not answered yet.');
+    sheet.state = 'complete';
+    sheet.version += 1;
+    refreshSummaries(house, sheet);
+    return json(sheet);
+  },
+  'POST /workroom/sheets/:id/reopen': ({ house, params }) => {
+    const sheet = known(house, params.id);
+    sheet.state = 'open';
+    sheet.version += 1;
+    return json(sheet);
+  },
+};
+
+function setFacts(house: House, sheet: Sheet, { people, ...facts }: ReturnType<typeof SheetFacts.parse>): void {
+  const nameOf = (userId: string) => house.people.find(({ id }) => id === userId)?.name ?? '';
+  sheet.facts = { ...facts, people: people.map((one) => ({ ...one, name: nameOf(one.userId) })) };
+}

@@ -1,0 +1,75 @@
+import { measuringPoint, type PointId } from '@ellwand/shared/points/measuring-points';
+import { acceptedValues } from '@ellwand/shared/readings/accepted-value';
+import { type Garment, rightsStatements } from '@ellwand/shared/records/garment';
+import { derivedViews, toReading } from '@ellwand/shared/records/measured';
+import type { PublishedDocument, PublishedPart } from '@ellwand/shared/records/published-garment';
+import type { Review } from '@ellwand/shared/records/publishing';
+import { toMmString } from '@ellwand/shared/units/length';
+import type { House } from './house.js';
+
+/** What a curator is shown beside the record. */
+export function reviewOf(house: House, garment: Garment): Review {
+  const open = house.sheets.filter(({ garmentId, state }) => garmentId === garment.id && state === 'open');
+  return {
+    garmentId: garment.id,
+    version: garment.version,
+    nextVersion: (garment.publishedVersion ?? (garment.publicNumber ? 3 : 0)) + 1,
+    changes: house.changes,
+    readiness: open.map((sheet) => ({ blocks: 'submit', sentence: `The sheet of the ${sheet.garment.partName.toLowerCase()} is not complete.`, href: `/workroom/sheets/${sheet.id}` })),
+    mayNotApprove: house.mayNotApprove,
+    people: [
+      { name: 'Wren Aldous', did: 'read the tape and edited the record' },
+      { name: 'Imogen Sallow', did: 'held the tape' },
+    ],
+  };
+}
+
+function publishedPart(house: House, garment: Garment, part: Garment['parts'][number]): PublishedPart {
+  const sheet = house.sheets.find(({ partId }) => partId === part.id);
+  const readings = sheet?.readings ?? [];
+  const values = [...acceptedValues(readings.map(toReading)).values()];
+  return {
+    number: garment.record.ownNumber + part.suffix,
+    kind: part.kind,
+    name: part.name,
+    measuredOn: sheet?.facts.measuredOn ?? null,
+    support: sheet ? 'Flat on the table' : null,
+    tape: sheet?.facts.tape ?? null,
+    fasteningPair: null,
+    measuredBy: [],
+    peopleCount: 2,
+    measurements: values.map(({ pointId, value, n }) => ({
+      pointId,
+      label: measuringPoint(pointId as PointId).name,
+      valueMm: toMmString(value),
+      uncertaintyMm: '2.1',
+      rounds: n,
+      spreadMm: '0',
+      levelFoundBy: null,
+      tapeLengths: null,
+      halfMm: null,
+      imageId: null,
+    })),
+    notTaken: readings.flatMap(({ pointId, reason }) => (reason ? [{ pointId, label: measuringPoint(pointId as PointId).name, reason }] : [])),
+    derived: sheet ? derivedViews(sheet.kind, readings) : [],
+  };
+}
+
+/** The public copy, near enough to look at: what is private is left out here too. */
+export function publishedOf(house: House, garment: Garment): PublishedDocument {
+  const { ownNumber, title, kind, wornBy, description, date, maker, label, place, materials, techniques, colours, fastenings } = garment.record;
+  const { lining, alterations, condition, wearer, references, otherNumbers, creditLine, rights, hazards, showHazards } = garment.record;
+  return {
+    number: garment.publicNumber ?? ownNumber.toLowerCase().replaceAll('.', '-'),
+    version: (garment.publishedVersion ?? 0) + 1,
+    ownNumber, title, kind, wornBy, description, maker, label, place, materials, techniques, colours, fastenings,
+    lining, alterations, condition, wearer, references, otherNumbers, creditLine,
+    date: { edtf: date, display: date.endsWith('~') ? `about ${date.slice(0, -1)}` : date.replace('/', '–'), fromYear: 1880, toYear: 1890 },
+    hazards: showHazards ? hazards : [],
+    rights: { uri: rights, label: rightsStatements[rights] },
+    parts: garment.parts.map((part) => publishedPart(house, garment, part)),
+    images: garment.images.filter(({ hidden, state }) => !hidden && state === 'ready').map(({ id, view, alt, caption, credit, widths }) => ({ id, view, alt, caption, credit, widths, widthPx: 2100, heightPx: 2800 })),
+    museum: 'Larkmoor House Museum of Dress',
+    publishedAt: '2026-12-01T12:00:00.000Z',
+  };
+}
