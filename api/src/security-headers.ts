@@ -17,7 +17,7 @@ export function securityHeaders(application: INestApplication) {
       useDefaults: false,
       directives: {
         defaultSrc: ["'self'"],
-        scriptSrc: ["'self'", () => contentSecurity.scriptSources],
+        scriptSrc: [() => contentSecurity.scriptSources],
         styleSrc: ["'self'"],
         imgSrc: ["'self'", 'data:'],
         objectSrc: ["'none'"],

@@ -6,7 +6,7 @@ import { Injectable } from '@nestjs/common';
  */
 @Injectable()
 export class ContentSecurity {
-  private readonly hashes = new Set<string>();
+  private readonly sources = new Set(["'self'"]);
 
   /** @param hashes as they stand in a policy, `sha256-…` in base64, without quotes */
   allowScripts(hashes: readonly string[]): void {
@@ -14,12 +14,12 @@ export class ContentSecurity {
       if (!/^sha(256|384|512)-[A-Za-z0-9+/]+={0,2}$/.test(hash)) {
         throw new Error(`Expected the hash of a script, sha256-…, got ${hash}`);
       }
-      this.hashes.add(`'${hash}'`);
+      this.sources.add(`'${hash}'`);
     }
   }
 
-  /** Sources of `script-src` beside 'self'. */
+  /** What stands behind `script-src`. */
   get scriptSources(): string {
-    return [...this.hashes].join(' ');
+    return [...this.sources].join(' ');
   }
 }
