@@ -1,3 +1,6 @@
 import { defineConfig } from 'vitest/config';
 
-export default defineConfig({ test: { include: ['src/**/*.spec.ts'], testTimeout: 60_000 } });
+export default defineConfig({
+  resolve: { conditions: ['source'] },
+  test: { include: ['src/**/*.spec.ts'], testTimeout: 60_000 },
+});

@@ -1,0 +1,106 @@
+/** The demonstration's records as they lie in `demonstration/`, and their readings as the checks take them. */
+import { readdirSync, readFileSync } from 'node:fs';
+import { type CheckSheet } from '@ellwand/shared/checks/sheet-view';
+import { type GarmentKind } from '@ellwand/shared/points/kinds';
+import { findMeasuringPoint } from '@ellwand/shared/points/measuring-points';
+import { protocolFor } from '@ellwand/shared/protocols/standard-protocols';
+import { type LevelFoundBy, type NotTakenReason, type Reading } from '@ellwand/shared/readings/reading';
+import { wholeValue } from '@ellwand/shared/readings/whole-value';
+import { type GarmentRecordInput } from '@ellwand/shared/records/garment';
+import { type Role } from '@ellwand/shared/records/roles';
+import { mm } from '@ellwand/shared/units/length';
+
+/** Whole millimetres as keyed; or with tapes, level and further rounds; or why there is none. */
+export type ReadingEntry =
+  | string
+  | {
+      typed: string;
+      tapeCount?: number;
+      levelFoundBy?: LevelFoundBy;
+      rounds?: string[];
+      note?: string;
+    }
+  | { notTaken: NotTakenReason };
+
+export interface SheetEntry {
+  read: string;
+  held: string | null;
+  wrote: string;
+  aloneBecause?: string;
+  complete?: boolean;
+  readings: Record<string, ReadingEntry>;
+  answers?: { checkId: string; reason: string }[];
+}
+
+export interface PartEntry {
+  kind: GarmentKind;
+  name: string;
+  suffix: string;
+  sheet: SheetEntry;
+}
+
+export interface GarmentEntry {
+  record: GarmentRecordInput;
+  madeBy: string;
+  approvedBy: string;
+  parts: PartEntry[];
+  stage: string;
+  returnReason?: string;
+  withdrawal?: { notice: string; innerReason: string };
+  draftBeside?: Partial<GarmentRecordInput>;
+}
+
+export interface House {
+  museum: string;
+  people: { key: string; name: string; email: string; roles: Role[] }[];
+}
+
+const folder = new URL('../../demonstration/', import.meta.url);
+
+const contentOf = (path: string): unknown => JSON.parse(readFileSync(new URL(path, folder), 'utf8'));
+
+export const house = contentOf('house.json') as House;
+
+export const garments: readonly GarmentEntry[] = readdirSync(new URL('garments/', folder))
+  .filter((file) => file.endsWith('.json'))
+  .sort()
+  .map((file) => contentOf(`garments/${file}`) as GarmentEntry);
+
+/** The tape of every sheet, as the loader tells the API. */
+const TAPE = mm(1500);
+
+/** The readings of one point, worked out to whole values as the API does. */
+function readingsOf(pointId: string, entry: ReadingEntry): Reading[] {
+  if (typeof entry === 'object' && 'notTaken' in entry) {
+    return [{ id: pointId, pointId, round: 1, state: 'not-taken', notTakenReason: entry.notTaken }];
+  }
+  const { typed, tapeCount = 0, rounds = [] } = typeof entry === 'string' ? { typed: entry } : entry;
+  const how = findMeasuringPoint(pointId)?.how ?? 'curve';
+  return [typed, ...rounds].map((keyed, index) => {
+    const read = mm(keyed);
+    return {
+      id: `${pointId}-${index + 1}`,
+      pointId,
+      round: index + 1,
+      state: 'taken',
+      typed: keyed,
+      unit: 'mm',
+      length: wholeValue({ read, how, tapeCount, tapeLength: TAPE }),
+      ...(tapeCount > 0 ? { tapeLengths: { count: tapeCount, tape: TAPE, rest: read } } : {}),
+    };
+  });
+}
+
+const allReadings = ({ sheet }: PartEntry): Reading[] =>
+  Object.entries(sheet.readings).flatMap(([pointId, entry]) => readingsOf(pointId, entry));
+
+/** A part's sheet with those of the other parts of its garment, as the checks want it. */
+export function checkSheetOf(garment: GarmentEntry, part: PartEntry): CheckSheet {
+  const others = garment.parts.filter((other) => other !== part);
+  return {
+    kind: part.kind,
+    protocol: protocolFor(part.kind),
+    readings: allReadings(part),
+    otherPartsOfGarment: others.map((other) => ({ kind: other.kind, readings: allReadings(other) })),
+  };
+}
