@@ -107,6 +107,15 @@ describe('npm start', () => {
     await expect.poll(() => processesOf(house.folder), { timeout: 15_000 }).toEqual([]);
   });
 
+  it('closes when the npm that started it is stopped', async () => {
+    const started = house.start({ byNpm: true });
+    await started.opened();
+    started.child.kill('SIGTERM');
+    await expect.poll(() => started.output(), { timeout: 10_000 }).toContain('Ellwand is closed.');
+    await started.ended();
+    expect(processesOf(house.folder)).toEqual([]);
+  });
+
   it('refuses a second start from the same folder', async () => {
     const started = house.start();
     await started.opened();

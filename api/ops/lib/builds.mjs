@@ -2,7 +2,7 @@
 import fs from 'node:fs';
 import path from 'node:path';
 import { PlainFailure } from './plain-failure.mjs';
-import { run } from './programs.mjs';
+import { plainEnvironment, run } from './programs.mjs';
 import { hashSources } from './source-hash.mjs';
 import { runTasks } from './tasks.mjs';
 
@@ -83,6 +83,9 @@ function sourcesOf(root, workspace) {
  * @param {string} workspace
  */
 async function buildWorkspace(root, workspace) {
-  const { code, output } = await run('npm', ['run', '--silent', 'build', '-w', workspace], { cwd: root });
+  const { code, output } = await run('npm', ['run', '--silent', 'build', '-w', workspace], {
+    cwd: root,
+    env: plainEnvironment(),
+  });
   if (code !== 0) throw new PlainFailure(`Building ${workspace} failed.`, { detail: output.slice(-4000) });
 }

@@ -2,7 +2,7 @@
 import path from 'node:path';
 import { PlainFailure } from './plain-failure.mjs';
 import { readJsonIfThere } from './private-files.mjs';
-import { run } from './programs.mjs';
+import { plainEnvironment, run } from './programs.mjs';
 
 /**
  * @typedef {{ version?: string, link?: boolean, optional?: boolean, devOptional?: boolean }} LockEntry
@@ -19,7 +19,7 @@ export async function installNpmPackages(root, step) {
   const installed = lockPackages(path.join(root, 'node_modules', '.package-lock.json'));
   if (isInstalled(wanted, installed)) return;
   const { code, output } = await step('Installing npm packages', () =>
-    run('npm', ['ci', '--no-audit', '--no-fund'], { cwd: root }),
+    run('npm', ['ci', '--no-audit', '--no-fund'], { cwd: root, env: plainEnvironment() }),
   );
   if (code !== 0) {
     throw new PlainFailure('npm ci failed: its last words are above.', { detail: output.slice(-3000) });

@@ -14,6 +14,7 @@ import { readSettings } from './settings.mjs';
 
 /** Files made from here on, by this process and its services, are their owner's alone. */
 const PRIVATE_UMASK = 0o077;
+const PARENT_WATCH_MS = 300;
 
 /**
  * Opens Ellwand and keeps it open until a signal comes or a service can no longer be kept running; the
@@ -89,12 +90,27 @@ function stopSignal() {
     return step(label, work);
   };
   for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP']) process.on(signal, onSignal);
+  if (process.env['npm_lifecycle_event'] !== undefined) whenParentIsGone(onSignal);
   return {
     called,
     fail,
     isCalled: () => isCalled,
     stepUnlessCalled,
   };
+}
+
+/**
+ * npm hands a SIGTERM to its shell, and the shell does not hand it on: the script would live on unseen.
+ * @param {() => void} close
+ */
+function whenParentIsGone(close) {
+  const parent = process.ppid;
+  const watch = setInterval(() => {
+    if (process.ppid === parent) return;
+    clearInterval(watch);
+    close();
+  }, PARENT_WATCH_MS);
+  watch.unref();
 }
 
 /** @param {Omit<import('./house-lock.mjs').Running, 'pid' | 'ready'>} addresses */

@@ -32,6 +32,16 @@ function isExecutable(file) {
   }
 }
 
+/**
+ * This process's environment for tools whose output is kept and shown again: without the colours of a terminal.
+ * @param {NodeJS.ProcessEnv} [more]
+ * @returns {NodeJS.ProcessEnv}
+ */
+export function plainEnvironment(more = {}) {
+  const kept = Object.entries(process.env).filter(([name]) => name !== 'FORCE_COLOR');
+  return { ...Object.fromEntries(kept), NO_COLOR: '1', ...more };
+}
+
 /** @type {Set<import('node:child_process').ChildProcess>} */
 const runningPrograms = new Set();
 

@@ -4,7 +4,7 @@ import { PlainFailure } from './plain-failure.mjs';
 import { parsePort } from './ports.mjs';
 
 /**
- * What a person may choose when opening Ellwand; the environment variables are listed in docs/operations.
+ * What a person may choose when opening Ellwand, by environment variables and one option.
  * @typedef {object} Settings
  * @property {number} port of site, Workroom and API
  * @property {string} dataFolder absolute

@@ -43,8 +43,8 @@ export interface StandInHouse {
   readonly folder: string;
   readonly data: string;
   readonly port: number;
-  /** Runs `start.mjs` until it ends or is stopped. */
-  start(options?: { args?: string[]; env?: NodeJS.ProcessEnv }): StartedHouse;
+  /** Runs `start.mjs`, by itself or as `npm start`, until it ends or is stopped. */
+  start(options?: { args?: string[]; env?: NodeJS.ProcessEnv; byNpm?: boolean }): StartedHouse;
   /** Lines that the stand-ins have left, in order. */
   told(): string[];
   /** Ends what still runs and removes the folder. */
@@ -73,8 +73,11 @@ export async function makeStandInHouse(): Promise<StandInHouse> {
     folder,
     data,
     port,
-    start: ({ args = [], env = {} } = {}) => {
-      const house = startIn(folder, args, { ELLWAND_PORT: String(port), ...env });
+    start: ({ args = [], env = {}, byNpm = false } = {}) => {
+      const command = byNpm
+        ? ['npm', 'start', '--', ...args]
+        : [process.execPath, 'api/ops/start.mjs', ...args];
+      const house = startIn(folder, command, { ELLWAND_PORT: String(port), ...env });
       started.push(house);
       return house;
     },
@@ -91,7 +94,16 @@ export async function makeStandInHouse(): Promise<StandInHouse> {
 
 function writeWorkspaces(folder: string): void {
   const workspaces = ['shared', 'api', 'site', 'admin'];
-  write(folder, 'package.json', JSON.stringify({ name: 'stand-in', private: true, workspaces }));
+  write(
+    folder,
+    'package.json',
+    JSON.stringify({
+      name: 'stand-in',
+      private: true,
+      workspaces,
+      scripts: { start: 'node api/ops/start.mjs' },
+    }),
+  );
   for (const name of workspaces) {
     const build = name === 'api' ? 'cp -r src dist' : 'mkdir dist && cp package.json dist';
     write(folder, `${name}/package.json`, JSON.stringify({ name, version: '0.0.0', scripts: { build } }));
@@ -105,8 +117,8 @@ function write(folder: string, name: string, text: string): void {
   fs.writeFileSync(file, text);
 }
 
-function startIn(folder: string, args: string[], env: NodeJS.ProcessEnv): StartedHouse {
-  const child = spawn(process.execPath, ['api/ops/start.mjs', ...args], {
+function startIn(folder: string, [program = '', ...args]: string[], env: NodeJS.ProcessEnv): StartedHouse {
+  const child = spawn(program, args, {
     cwd: folder,
     env: { ...withoutSettings(process.env), ...env },
   });
@@ -133,7 +145,7 @@ function startIn(folder: string, args: string[], env: NodeJS.ProcessEnv): Starte
 
 /** The tests' own settings, as those of `npm test`, do not reach the house. */
 function withoutSettings(env: NodeJS.ProcessEnv): NodeJS.ProcessEnv {
-  return Object.fromEntries(Object.entries(env).filter(([name]) => !name.startsWith('ELLWAND_')));
+  return Object.fromEntries(Object.entries(env).filter(([name]) => !/^(ELLWAND_|npm_)/.test(name)));
 }
 
 function linesOf(file: string): string[] {

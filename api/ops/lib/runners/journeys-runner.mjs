@@ -3,7 +3,7 @@ import path from 'node:path';
 import { CHROMIUM } from '../debian-packages.mjs';
 import { PlainFailure } from '../plain-failure.mjs';
 import { readJsonIfThere } from '../private-files.mjs';
-import { findProgram, run } from '../programs.mjs';
+import { findProgram, plainEnvironment, run } from '../programs.mjs';
 import { closeTestHouses, openTestHouse } from '../test-house.mjs';
 import { lastOf } from './outcome.mjs';
 import { countPlaywrightReport, isPlaywrightReport } from './playwright-report.mjs';
@@ -50,12 +50,11 @@ export function journeysRunner(root, folder, after) {
 async function walk(root, report, houses) {
   const chromium = findProgram(CHROMIUM.program);
   if (!chromium) throw new PlainFailure(`chromium is missing. Run: sudo apt-get install ${CHROMIUM.package}`);
-  const env = {
-    ...process.env,
+  const env = plainEnvironment({
     ...houses,
     ELLWAND_E2E_CHROMIUM: chromium,
     PLAYWRIGHT_JSON_OUTPUT_NAME: report,
-  };
+  });
   const ended = await run(
     path.join(root, 'node_modules', '.bin', 'playwright'),
     ['test', '--reporter=json'],

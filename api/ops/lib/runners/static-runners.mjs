@@ -1,6 +1,6 @@
 // @ts-check
 import path from 'node:path';
-import { run } from '../programs.mjs';
+import { plainEnvironment, run } from '../programs.mjs';
 import { oneTest } from './outcome.mjs';
 
 /** @typedef {import('./outcome.mjs').Runner} Runner */
@@ -59,6 +59,6 @@ export function lintRunners(root) {
  * @param {readonly string[]} args
  */
 function runTool(root, name, args) {
-  const env = { ...process.env, NODE_OPTIONS: LINT_HEAP };
+  const env = plainEnvironment({ NODE_OPTIONS: LINT_HEAP });
   return run(path.join(root, 'node_modules', '.bin', name), args, { cwd: root, env });
 }

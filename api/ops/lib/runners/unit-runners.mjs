@@ -2,7 +2,7 @@
 import os from 'node:os';
 import path from 'node:path';
 import { readJsonIfThere } from '../private-files.mjs';
-import { run } from '../programs.mjs';
+import { plainEnvironment, run } from '../programs.mjs';
 import { countJestReport, isJestReport } from './jest-report.mjs';
 import { lastOf } from './outcome.mjs';
 
@@ -28,7 +28,7 @@ export function vitestRunners(root, reports) {
     work: () => {
       const report = path.join(reports, `vitest-${folder.replace('/', '-')}.json`);
       const args = ['run', '--reporter=json', `--outputFile=${report}`, `--maxWorkers=${WORKERS}`];
-      return runAndCount(root, folder, 'vitest', args, report, process.env);
+      return runAndCount(root, folder, 'vitest', args, report, {});
     },
   }));
 }
@@ -47,7 +47,7 @@ export function jestRunner(root, reports, { name, after, env, args = [] }) {
     async work() {
       const report = path.join(reports, 'jest.json');
       const all = ['--ci', '--json', `--outputFile=${report}`, ...args];
-      return runAndCount(root, 'api', 'jest', all, report, { ...process.env, ...(await env()) });
+      return runAndCount(root, 'api', 'jest', all, report, await env());
     },
   };
 }
@@ -62,7 +62,11 @@ export function jestRunner(root, reports, { name, after, env, args = [] }) {
  */
 async function runAndCount(root, folder, tool, args, report, env) {
   const program = path.join(root, 'node_modules', '.bin', tool);
-  const ended = await run(program, args, { cwd: path.join(root, folder), env, timeoutMs: LONGEST_MS });
+  const ended = await run(program, args, {
+    cwd: path.join(root, folder),
+    env: plainEnvironment(env),
+    timeoutMs: LONGEST_MS,
+  });
   const written = readJsonIfThere(report);
   if (isJestReport(written)) return countJestReport(written, ended, root);
   const message = lastOf(ended.output) || `ended with code ${ended.code}`;
