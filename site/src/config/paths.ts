@@ -6,6 +6,9 @@ export const paths = {
   garment: (number: string) => `/g/${encodeURIComponent(number)}`,
   version: (number: string, version: number) => `/g/${encodeURIComponent(number)}/v/${version}`,
   howWeMeasure: () => '/how-we-measure',
+  /** The bodice stands first, at the address without a kind. */
+  kindMeasured: (kind: string) =>
+    kind === 'bodice' ? '/how-we-measure' : `/how-we-measure?kind=${encodeURIComponent(kind)}`,
   point: (pointId: string) => `/how-we-measure/${encodeURIComponent(pointId)}`,
   picture: (imageId: string, width: number, format: 'avif' | 'jpg') => `/media/${imageId}/${width}.${format}`,
 } as const;

@@ -1,6 +1,7 @@
 import { type ViewName } from '@ellwand/shared/drawings/diagram/model';
 import { paintDiagram } from '@ellwand/shared/drawings/diagram/paint-diagram';
 import { type GarmentKind } from '@ellwand/shared/points/kinds';
+import { remembering } from '../../lib/remember';
 import { SceneDrawing } from './scene-drawing';
 import { sheetScale } from './sheet-scale';
 
@@ -17,10 +18,19 @@ export interface MeasuringSheetProps {
   readonly tape?: boolean;
 }
 
+/** Placing letters is the costly part of a page; most pages ask for the drawings of a few kinds. */
+const sceneFor = remembering(
+  ({ kind, points, letters, views, widthPx, idPrefix }: MeasuringSheetProps) =>
+    [kind, points, points.map((point) => letters.get(point)), views, widthPx, idPrefix].join('|'),
+  ({ kind, points, letters, views, widthPx, idPrefix }: MeasuringSheetProps) =>
+    paintDiagram({ kind, points, letters, widthPx, idPrefix, ...(views ? { views } : {}) }),
+  200,
+);
+
 /** A kind's measuring diagram on a sheet of one width; nothing for a kind that is not drawn. */
-export default function MeasuringSheet({ tape = false, ...request }: MeasuringSheetProps) {
-  const scene = paintDiagram(request);
+export default function MeasuringSheet(props: MeasuringSheetProps) {
+  const scene = sceneFor(props);
   if (!scene) return null;
-  const scale = tape ? sheetScale(request.kind, request.views, request.widthPx) : null;
+  const scale = props.tape ? sheetScale(props.kind, props.views, props.widthPx) : null;
   return <SceneDrawing scene={scene} tapeMmPerPx={scale === null ? null : 1 / scale} />;
 }

@@ -17,6 +17,8 @@ export interface DrawnSubject {
   readonly kind: GarmentKind;
   /** The front, and whatever else the lines lie on. */
   readonly views: readonly ViewName[];
+  /** Where there is room for less. */
+  readonly viewsWithLines: readonly ViewName[];
   readonly measures: readonly DrawnMeasure[];
   readonly card: Pick<CatalogueCard, 'number' | 'title' | 'dateDisplay'> | null;
 }
@@ -46,8 +48,9 @@ export function chooseSubject(newest: readonly CatalogueCard[]): DrawnSubject {
 function subject(kind: GarmentKind, measures: readonly Figure[], card: DrawnSubject['card']): DrawnSubject {
   const lines = diagramFor(kind)?.lines ?? [];
   const lainOn = lines.filter((line) => measures.some(({ pointId }) => pointId === line.pointId));
-  const views = new Set<ViewName>(['front', ...lainOn.map(({ view }) => view)]);
-  return { kind, views: [...views], measures: measures.map(lettered), card };
+  const viewsWithLines = [...new Set(lainOn.map(({ view }) => view))];
+  const views = [...new Set<ViewName>(['front', ...viewsWithLines])];
+  return { kind, views, viewsWithLines, measures: measures.map(lettered), card };
 }
 
 type Figure = Omit<DrawnMeasure, 'letter'>;

@@ -1,3 +1,4 @@
+import { type ViewName } from '@ellwand/shared/drawings/diagram/model';
 import { LitDrawing } from '../../components/diagram/lit-drawing';
 import { type LitPoints, useLitPoints } from '../../components/diagram/lit-points';
 import { SiteLink } from '../../components/ui/site-link';
@@ -12,17 +13,17 @@ const NARROW_PX = 324;
 
 /** A garment of the catalogue with the lines it was measured along: pointing at a figure lights its line. */
 export function LivingDrawing({ subject }: { readonly subject: DrawnSubject }) {
-  const { kind, views, measures, card } = subject;
+  const { kind, views, viewsWithLines, measures, card } = subject;
   const lit = useLitPoints((pointId) => `${PREFIX}-${pointId}`);
   const letters = new Map(measures.map(({ pointId, letter }) => [pointId, letter]));
   const points = measures.map(({ pointId }) => pointId);
-  const sheet = (widthPx: number) => {
-    return { kind, views, points, letters, widthPx, idPrefix: `${PREFIX}-${widthPx}`, tape: true };
+  const sheet = (widthPx: number, shown: readonly ViewName[]) => {
+    return { kind, views: shown, points, letters, widthPx, idPrefix: `${PREFIX}-${widthPx}`, tape: true };
   };
   return (
     <figure className="living">
-      <LitDrawing sheet={sheet(WIDE_PX)} lit={lit} className="living-sheet only-wide" />
-      <LitDrawing sheet={sheet(NARROW_PX)} lit={lit} className="living-sheet only-narrow" />
+      <LitDrawing sheet={sheet(WIDE_PX, views)} lit={lit} className="living-sheet only-wide" />
+      <LitDrawing sheet={sheet(NARROW_PX, viewsWithLines)} lit={lit} className="living-sheet only-narrow" />
       <figcaption>
         <ol className="living-measures">
           {measures.map((measure) => (

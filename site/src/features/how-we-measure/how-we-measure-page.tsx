@@ -1,15 +1,21 @@
 import { measuringPoints } from '@ellwand/shared/points/measuring-points';
 import { groups } from '@ellwand/shared/points/groups';
 import { kindIds } from '@ellwand/shared/points/kinds';
+import { useSearchParams } from 'react-router-dom';
 import { Outline } from '../../components/diagram/outline';
+import { SiteLink } from '../../components/ui/site-link';
+import { paths } from '../../config/paths';
 import { kindsName } from '../../lib/words';
+import { kindOf } from './kind-of';
 import { KindPoints } from './kind-points';
 import { PointEntry } from './point-entry';
 
 const SCALE = 0.05;
 
-/** The measuring points by kind of part, then every one of them in full. */
+/** One kind of part with its diagram and points, the way to all others, then every point in full. */
 export function HowWeMeasurePage() {
+  const [params] = useSearchParams();
+  const shown = kindOf(params);
   return (
     <div className="wide">
       <header className="how-heading">
@@ -33,17 +39,15 @@ export function HowWeMeasurePage() {
         <ul>
           {kindIds.map((kind) => (
             <li key={kind}>
-              <a href={`#kind-${kind}`}>
+              <SiteLink to={paths.kindMeasured(kind)} aria-current={kind === shown ? 'page' : undefined}>
                 <Outline kind={kind} pxPerMm={SCALE} />
                 <span>{kindsName(kind)}</span>
-              </a>
+              </SiteLink>
             </li>
           ))}
         </ul>
       </nav>
-      {kindIds.map((kind) => (
-        <KindPoints key={kind} kind={kind} />
-      ))}
+      <KindPoints key={shown} kind={shown} />
       <section className="how-points" aria-labelledby="every-point">
         <h2 id="every-point">Every measuring point</h2>
         {groups.map(({ id, label }) => (

@@ -1,6 +1,7 @@
 import { type SearchAnswer } from '@ellwand/shared/records/published-garment';
 import { type SearchQuery } from '@ellwand/shared/records/search-query';
 import { listFilters } from '../../lib/search-address';
+import { capitalised } from '../../lib/words';
 
 interface FacetsProps {
   readonly query: SearchQuery;
@@ -72,7 +73,7 @@ function FacetBox({ name, value, label, count, ticked, onTick }: FacetBoxProps) 
         defaultChecked={ticked}
         onChange={onTick}
       />
-      <span>{label}</span>
+      <span>{capitalised(label)}</span>
       <span className="facet-count figures">{count}</span>
     </label>
   );

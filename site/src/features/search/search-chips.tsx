@@ -93,7 +93,8 @@ function yearsText(from: number | undefined, to: number | undefined): string {
 
 /** "560 mm to 620 mm", "from 560 mm", "up to 620 mm". */
 export function rangeText({ minMm, maxMm }: MeasureFilter, unit: LengthUnit): string {
-  const write = (mm: string) => formatLength(fromMmString(mm), unit);
+  // As finely as the boxes show it, so that chip and box say the same.
+  const write = (mm: string) => formatLength(fromMmString(mm), unit, { denominator: 16 });
   if (minMm !== null && maxMm !== null) return `${write(minMm)} to ${write(maxMm)}`;
   return minMm !== null ? `from ${write(minMm)}` : `up to ${write(maxMm ?? '0')}`;
 }

@@ -68,7 +68,7 @@ export function SearchForm({ query, view, answer, problems }: SearchFound) {
           ))}
         </select>
       </div>
-      <details className="filters" open>
+      <details className="filters" open={problems.length > 0}>
         <summary>Narrow the search</summary>
         <RangeFields query={query} ranges={answer.ranges} problems={problems} />
         <button type="submit" className="button-quiet button-small">
