@@ -3,16 +3,14 @@ import { NestFactory, Reflector } from '@nestjs/core';
 import type { NestExpressApplication } from '@nestjs/platform-express';
 import compression from 'compression';
 import cookieParser from 'cookie-parser';
-import type { NextFunction, Request, Response } from 'express';
 import { Logger } from 'nestjs-pino';
 import { constants } from 'node:zlib';
 import { ZodSerializerInterceptor, ZodValidationPipe } from 'nestjs-zod';
 import { AppModule } from './app.module';
 import { ENVIRONMENT } from './common/environment.token';
-import { Lifecycle } from './common/lifecycle';
 import { ProblemFilter } from './common/problem.filter';
 import { VersionTagInterceptor } from './common/version-tag.interceptor';
-import type { Environment } from './config/environment';
+import { type Environment, readEnvironment } from './config/environment';
 import { requestLog } from './config/logging';
 import { OpenApi } from './openapi/openapi.service';
 import { securityHeaders } from './security-headers';
@@ -40,8 +38,13 @@ const outsideTheApi = [
 /** Bodies are read by `furnish`, with our own limits. */
 export const applicationOptions = { bodyParser: false, abortOnError: false, bufferLogs: true } as const;
 
-/** Builds the whole application, not yet listening. */
+/**
+ * Builds the whole application, not yet listening.
+ * @throws Error with one readable message, where the environment is wrong
+ */
 export async function createApplication(): Promise<NestExpressApplication> {
+  // Looked at here first: out of a provider the same message would come with a page of Nest's own.
+  readEnvironment(process.env);
   const application = await NestFactory.create<NestExpressApplication>(AppModule, applicationOptions);
   furnish(application);
   return application;
@@ -56,7 +59,6 @@ export function furnish(application: NestExpressApplication): void {
   application.set('query parser', 'simple');
   application.use(requestLog(environment.logLevel));
   application.use(securityHeaders(application));
-  application.use(closingWhenEnding(application.get(Lifecycle)));
   application.use(compression({ brotli: { params: { [constants.BROTLI_PARAM_QUALITY]: 4 } } }));
   application.use(cookieParser());
   application.useBodyParser('json', { limit: '1mb' });
@@ -74,12 +76,4 @@ function furnishAnswers(application: INestApplication): void {
     new ZodSerializerInterceptor(application.get(Reflector)),
   );
   application.useGlobalFilters(new ProblemFilter());
-}
-
-/** Tells clients to come back on another connection, and so perhaps to another process. */
-function closingWhenEnding(lifecycle: Lifecycle) {
-  return (_: Request, response: Response, next: NextFunction): void => {
-    if (lifecycle.isEnding) response.setHeader('Connection', 'close');
-    next();
-  };
 }

@@ -7,7 +7,7 @@ import { createApplication } from './application';
 import { ENVIRONMENT } from './common/environment.token';
 import { Lifecycle } from './common/lifecycle';
 import type { Environment } from './config/environment';
-import { drain } from './drain';
+import { Drain } from './drain';
 import { refuseUnlessDurable } from './health/durability';
 
 /** After the signal to stop: answers under way get this long, and the process is gone at the latest by the second. */
@@ -23,6 +23,7 @@ async function main(): Promise<void> {
   await refuseUnlessDurable(application.get<DataSource>(getDataSourceToken()));
   const { host, port, publicUrl } = application.get<Environment>(ENVIRONMENT);
   const server: Server = application.getHttpServer();
+  const drain = new Drain(server);
   server.headersTimeout = headersWithinMs;
   server.keepAliveTimeout = idleMs;
   await application.listen(port, host);
@@ -30,21 +31,29 @@ async function main(): Promise<void> {
   let stopping = false;
   for (const signal of ['SIGTERM', 'SIGINT'] as const) {
     process.on(signal, () => {
-      if (!stopping) void stop(application, server);
+      if (!stopping) void stop(application, drain);
       stopping = true;
     });
   }
 }
 
-async function stop(application: NestExpressApplication, server: Server): Promise<void> {
+async function stop(application: NestExpressApplication, drain: Drain): Promise<void> {
   setTimeout(() => process.exit(1), goneAfterMs).unref();
   application.get(Lifecycle).end();
-  await drain(server, forceAfterMs);
+  await drain.finish(forceAfterMs);
   await application.close();
   process.exit(0);
 }
 
 main().catch((fault: unknown) => {
-  process.stderr.write(`${fault instanceof Error ? fault.message : String(fault)}\n`);
+  process.stderr.write(`${sentence(fault)}\n`);
   process.exit(1);
 });
+
+function sentence(fault: unknown): string {
+  if (!(fault instanceof Error)) return String(fault);
+  if ('code' in fault && fault.code === 'EADDRINUSE' && 'port' in fault) {
+    return `Port ${String(fault.port)} is taken: stop what listens there, or set ELLWAND_PORT to another.`;
+  }
+  return fault.message;
+}

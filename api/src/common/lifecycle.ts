@@ -5,7 +5,7 @@ import { Injectable } from '@nestjs/common';
 export class Lifecycle {
   private ending = false;
 
-  /** From the first signal to stop: not ready any more, and each answer closes its connection. */
+  /** From the first signal to stop: not ready any more, so that balancers look elsewhere. */
   get isEnding(): boolean {
     return this.ending;
   }

@@ -1,14 +1,17 @@
-import type { DataSource } from 'typeorm';
+/** What is asked of a connection: a TypeORM data source is one. */
+interface Asked {
+  query(statement: string): Promise<unknown>;
+}
 
 /**
  * Every commit must reach the disk before it is acknowledged: at 2 a power cut loses up to a second of what people
  * typed, at 0 even the end of the database process does.
  * @throws Error with one sentence, where the server is set otherwise
  */
-export async function refuseUnlessDurable(source: DataSource): Promise<void> {
-  const rows: { setting: number | string }[] = await source.query(
-    'SELECT @@GLOBAL.innodb_flush_log_at_trx_commit AS setting',
-  );
+export async function refuseUnlessDurable(source: Asked): Promise<void> {
+  const rows = (await source.query('SELECT @@GLOBAL.innodb_flush_log_at_trx_commit AS setting')) as {
+    setting: number | string;
+  }[];
   const setting = Number(rows[0]?.setting);
   if (setting !== 1) {
     throw new Error(

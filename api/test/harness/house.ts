@@ -109,7 +109,10 @@ export class House {
 /** Opens a house for the specs of one file; `close()` it in afterAll. */
 export async function openHouse(options: HouseOptions = {}): Promise<House> {
   const mail = new MailSink();
-  const environment = await testEnvironment(await mail.open(), options.variables);
+  const environment = readEnvironment({
+    ...(await houseVariables(await mail.open())),
+    ...options.variables,
+  });
   const owner = await Owner.open(environment);
   await owner.empty();
   const clock = new SettableClock();
@@ -129,9 +132,10 @@ export async function openHouse(options: HouseOptions = {}): Promise<House> {
   return new House(app, environment, clock, mail, owner);
 }
 
-async function testEnvironment(smtpPort: number, variables: HouseOptions['variables']): Promise<Environment> {
+/** The variables of a house of its own, for `readEnvironment` or for a process. */
+export async function houseVariables(smtpPort: number): Promise<Record<string, string>> {
   const { port, accounts } = testDatabase();
-  return readEnvironment({
+  return {
     ELLWAND_PORT: String(await freePort()),
     ELLWAND_DATA: await mkdtemp(join(tmpdir(), 'ellwand-house-')),
     ELLWAND_DB_PORT: String(port),
@@ -145,11 +149,10 @@ async function testEnvironment(smtpPort: number, variables: HouseOptions['variab
     ELLWAND_SMTP_URL: `smtp://127.0.0.1:${smtpPort}`,
     ELLWAND_LOG: 'silent',
     ELLWAND_DISK_FLOOR: '0',
-    ...variables,
-  });
+  };
 }
 
-async function freePort(): Promise<number> {
+export async function freePort(): Promise<number> {
   const server = createServer();
   await new Promise<void>((resolve) => server.listen(0, '127.0.0.1', resolve));
   const { port } = server.address() as AddressInfo;
