@@ -2,12 +2,11 @@ import { Injectable } from '@nestjs/common';
 import { DataSource } from 'typeorm';
 import { z } from 'zod';
 import { InjectCatalogue } from '../common/catalogue-connection';
+import { fromJson } from './json-column';
 
-const Widths = z.array(z.number());
 const Row = z.object({
   state: z.enum(['visible', 'withdrawn']),
-  // MariaDB's JSON is text.
-  widths: z.string().transform((json) => Widths.parse(JSON.parse(json))),
+  widths: z.preprocess(fromJson, z.array(z.number())),
 });
 export type PublishedPicture = z.output<typeof Row>;
 

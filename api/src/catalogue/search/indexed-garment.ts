@@ -1,0 +1,36 @@
+import type { PublishedImage } from '@ellwand/shared/records/published-garment';
+import type { Length } from '@ellwand/shared/units/length';
+
+/** The facets that a search may name, in the order in which they are shown. */
+export const facetLabels = {
+  kind: 'Kind',
+  decade: 'Decade',
+  maker: 'Maker',
+  place: 'Place',
+  material: 'Material',
+  colour: 'Colour',
+} as const;
+export type FacetName = keyof typeof facetLabels;
+export const facetNames = Object.keys(facetLabels) as FacetName[];
+
+export interface IndexedMeasurement {
+  readonly pointId: string;
+  readonly partName: string;
+  readonly value: Length;
+}
+
+/** What the search knows of one published garment. */
+export interface IndexedGarment {
+  readonly number: string;
+  readonly title: string;
+  readonly kind: string;
+  readonly dateDisplay: string;
+  readonly fromYear: number;
+  readonly toYear: number;
+  /** Milliseconds since 1970. */
+  readonly publishedAt: number;
+  readonly image: PublishedImage | null;
+  readonly facets: readonly { readonly facet: string; readonly value: string; readonly label: string }[];
+  readonly measurements: readonly IndexedMeasurement[];
+  readonly text: string;
+}

@@ -1,0 +1,91 @@
+import { groups } from '@ellwand/shared/points/groups';
+import type { MeasuredRange } from '@ellwand/shared/records/published-garment';
+import type { SearchQuery } from '@ellwand/shared/records/search-query';
+import { type Length, lengthOf, toMmString, UNITS_PER_MM } from '@ellwand/shared/units/length';
+import { TypedFastBitSet } from 'typedfastbitset';
+import type { z } from 'zod';
+import type { CatalogueIndex } from './catalogue-index';
+import { measureKey, pointLabel } from './filters';
+import type { Narrowed } from './narrowed';
+
+type RangeAnswer = z.output<typeof MeasuredRange>;
+
+export const mostBins = 24;
+/** Offered without being asked for, in this order: what people look for first. */
+const offered = [
+  'bust',
+  'waist',
+  'hip',
+  'hem',
+  'back-length',
+  'skirt-length',
+  'sleeve',
+] as const satisfies readonly (typeof groups)[number]['id'][];
+const mostOffered = 4;
+
+/** The ranges searched by, then those that say most about what was found. */
+export function measuredRanges(index: CatalogueIndex, query: SearchQuery, narrowed: Narrowed): RangeAnswer[] {
+  const asked = [...new Set(query.measure.map(({ point }) => point))];
+  const more = offered
+    .filter((group) => !asked.includes(group) && index.column(group)?.holders.intersects(narrowed.found))
+    .slice(0, mostOffered);
+  return [...asked, ...more].map((point) => measuredRange(index, query, narrowed, point));
+}
+
+function measuredRange(
+  index: CatalogueIndex,
+  query: SearchQuery,
+  narrowed: Narrowed,
+  point: string,
+): RangeAnswer {
+  const candidates = narrowed.without(measureKey(point));
+  const column = index.column(point);
+  const filter = query.measure.find((measure) => measure.point === point);
+  const entries = column ? [...column.of(candidates)] : [];
+  return {
+    point,
+    label: pointLabel(point),
+    minMm: filter?.minMm ?? null,
+    maxMm: filter?.maxMm ?? null,
+    missing: candidates.size() - (column?.holders.intersection_size(candidates) ?? 0),
+    bins: binned(entries),
+  };
+}
+
+interface Entry {
+  readonly value: Length;
+  readonly place: number;
+}
+
+/**
+ * Garments counted in bins of one round width. A bin holds what is as long as its beginning or longer and
+ * shorter than its end; a garment with two values in one bin counts once.
+ * @param entries shortest first
+ */
+export function binned(entries: readonly Entry[]): RangeAnswer['bins'] {
+  const first = entries[0];
+  const last = entries.at(-1);
+  if (!first || !last) return [];
+  const width = roundWidth(first.value, last.value);
+  const start = Math.floor(first.value / width);
+  const holders = Array.from(
+    { length: Math.floor(last.value / width) - start + 1 },
+    () => new TypedFastBitSet(),
+  );
+  for (const { value, place } of entries) holders[Math.floor(value / width) - start]?.add(place);
+  return holders.map((holding, at) => ({
+    fromMm: toMmString(lengthOf((start + at) * width)),
+    toMm: toMmString(lengthOf((start + at + 1) * width)),
+    count: holding.size(),
+  }));
+}
+
+/** The smallest of 1, 2, 5, 10, 20, 50… mm that needs no more than `mostBins` bins, in units of a Length. */
+function roundWidth(least: Length, most: Length): number {
+  for (let decade = UNITS_PER_MM; ; decade *= 10) {
+    for (const step of [1, 2, 5]) {
+      const width = step * decade;
+      if (Math.floor(most / width) - Math.floor(least / width) < mostBins) return width;
+    }
+  }
+}
