@@ -1,3 +1,5 @@
+// First of all: schemas look at this when they are made.
+import './lib/plain-schemas.js';
 import { StrictMode } from 'react';
 import { createRoot } from 'react-dom/client';
 import { RouterProvider } from 'react-router-dom';

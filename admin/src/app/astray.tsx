@@ -1,7 +1,7 @@
 import { useRouteError } from 'react-router-dom';
 import { Button, ButtonLink } from '../components/ui/button.js';
 import { Page } from '../components/ui/page.js';
-import { errorSentence } from '../components/ui/states.js';
+import { errorSentence, Waiting } from '../components/ui/states.js';
 import { paths } from '../config/paths.js';
 
 export function Astray() {
@@ -25,6 +25,16 @@ export function Broken() {
       <Button tone="action" onClick={() => window.location.reload()}>
         Load the page again
       </Button>
+    </main>
+  );
+}
+
+/** While the first page's own code is on its way. */
+export function Opening() {
+  return (
+    <main className="mx-auto max-w-page p-6">
+      <h1 className="sr-only">Ellwand Workroom</h1>
+      <Waiting label="Opening the Workroom" />
     </main>
   );
 }

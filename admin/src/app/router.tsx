@@ -1,7 +1,7 @@
 import { createBrowserRouter, type RouteObject } from 'react-router-dom';
 import { Door } from './door.js';
 import { Shell } from './shell.js';
-import { Astray, Broken } from './astray.js';
+import { Astray, Broken, Opening } from './astray.js';
 import { FirstAdministratorPage } from '../features/sign-in/components/first-administrator-page.js';
 import { InvitationPage } from '../features/sign-in/components/invitation-page.js';
 import { SignInPage } from '../features/sign-in/components/sign-in-page.js';
@@ -10,6 +10,7 @@ import { SignInPage } from '../features/sign-in/components/sign-in-page.js';
 export const routes: RouteObject[] = [
   {
     errorElement: <Broken />,
+    hydrateFallbackElement: <Opening />,
     children: [
       { path: '/sign-in', element: <SignInPage /> },
       { path: '/invitation', element: <InvitationPage /> },

@@ -6,7 +6,7 @@ import { sessionQuery, signOut } from '../features/sign-in/api/session.js';
 import { useMay, useSession } from '../lib/session.js';
 
 const linkLook = ({ isActive }: { isActive: boolean }) =>
-  `inline-flex min-h-10 items-center border-b-2 text-table ${isActive ? 'border-indigo font-medium text-ink' : 'border-transparent text-ink-2 hover:text-ink'}`;
+  `inline-flex min-h-12 items-center border-b-2 whitespace-nowrap text-table ${isActive ? 'border-indigo font-medium text-ink' : 'border-transparent text-ink-2 hover:text-ink'}`;
 
 /** The office's frame. The measuring sheet has its own, for nothing there may distract. */
 export function Shell() {

@@ -10,9 +10,9 @@ export function OtherNumberFields() {
   const numbers = useFieldArray({ control, name: 'otherNumbers' });
   return (
     <div>
-      <h4 className="text-table font-medium">
+      <p className="text-table font-medium">
         Other numbers <span className="font-normal text-ink-3">(optional)</span>
-      </h4>
+      </p>
       <p className="text-label text-ink-3">Former, loan and temporary numbers.</p>
       <ul className="mt-2 space-y-3">
         {numbers.fields.map((field, index) => (

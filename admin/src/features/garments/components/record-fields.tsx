@@ -21,7 +21,7 @@ export function useBox(name: FieldPath<RecordTyped>) {
 export function Fieldset({ legend, hint, children }: { readonly legend: string; readonly hint?: string; readonly children: ReactNode }) {
   return (
     <fieldset className="min-w-0 border-t border-hair pt-5">
-      <legend className="title float-left w-full text-title-25">{legend}</legend>
+      <legend className="title float-left mb-4 w-full text-title-25">{legend}</legend>
       <div className="clear-both space-y-5">
         {hint && <p className="max-w-text text-label text-ink-3">{hint}</p>}
         {children}
@@ -30,7 +30,7 @@ export function Fieldset({ legend, hint, children }: { readonly legend: string; 
   );
 }
 
-const Pair = ({ children }: { readonly children: ReactNode }) => <div className="grid gap-5 sm:grid-cols-2">{children}</div>;
+const Pair = ({ children }: { readonly children: ReactNode }) => <div className="grid items-end gap-5 sm:grid-cols-2">{children}</div>;
 
 const notPublic = <span className="ml-2 rounded-sm bg-weld-tint px-1.5 py-0.5 text-label font-medium text-weld-text">never public</span>;
 

@@ -34,15 +34,15 @@ export function DiagramPanel({ kind, points, current, onChoose }: DiagramPanelPr
     [kind, view, current.id, points],
   );
   return (
-    <section aria-label="Diagram" className="flex h-full flex-col gap-4 bg-sheet p-4">
+    <section aria-label="Diagram" className="grid gap-4 bg-sheet p-4 max-md:grid-cols-[10rem_minmax(0,1fr)] max-md:gap-3 max-md:p-3 md:h-full md:content-start">
       {scene && (
         <div className="mx-auto w-full max-w-md shrink-0">
-          <SceneDrawing key={`${view ?? ''}`} scene={scene} current={current.id} onChoose={onChoose} className="max-h-[26rem] w-full max-md:max-h-56" />
+          <SceneDrawing key={`${view ?? ''}`} scene={scene} current={current.id} onChoose={onChoose} className="max-h-[26rem] w-full max-md:max-h-44" />
         </div>
       )}
       {diagram && diagram.views.length > 1 && (
-        <div role="group" aria-label="View" className="flex justify-center gap-2">
-          {diagram.views.map(({ name, caption }) => (
+        <div role="group" aria-label="View" className="flex flex-wrap justify-center gap-2 max-md:order-last max-md:col-span-2">
+          {diagram.views.map(({ name }) => (
             <button
               key={name}
               type="button"
@@ -50,7 +50,7 @@ export function DiagramPanel({ kind, points, current, onChoose }: DiagramPanelPr
               onClick={() => setLooking({ view: name, at: current.id })}
               className="min-h-11 rounded-sm border border-rule px-3 text-label aria-pressed:border-ink aria-pressed:bg-ink aria-pressed:text-paper"
             >
-              {caption}
+              {viewWords[name]}
             </button>
           ))}
         </div>
@@ -60,19 +60,21 @@ export function DiagramPanel({ kind, points, current, onChoose }: DiagramPanelPr
   );
 }
 
+const viewWords: Readonly<Record<ViewName, string>> = { front: 'Front', back: 'Back', inside: 'Inside', side: 'Side', below: 'Below' };
+
 function Instruction({ current }: { readonly current: SheetPoint }) {
   const { point, letter } = current;
   return (
-    <div aria-live="polite">
+    <div aria-live="polite" className="max-md:text-label">
       <h2 className="flex items-center gap-2 text-body font-semibold">
         <span className="letter letter-lit" aria-hidden="true">{letter}</span>
         {point.name}
       </h2>
-      <p className="mt-2 text-table text-ink">{point.definition}</p>
+      <p className="mt-2 text-table text-ink max-md:hidden">{point.definition}</p>
       <p className="mt-1 text-table text-ink-2">
         From {point.from} to {point.to}. {mannerOf(current)}
       </p>
-      <p className="mt-1 text-table text-ink-2">{point.watchFor}</p>
+      <p className="mt-1 text-table text-ink-2 max-md:hidden">{point.watchFor}</p>
     </div>
   );
 }

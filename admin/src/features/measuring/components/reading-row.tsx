@@ -45,11 +45,11 @@ export function ReadingRow({ desk, row }: { readonly desk: SheetDesk; readonly r
       onFocus={() => !current && desk.enter(row.key)}
       className={`border-b border-l-4 border-b-hair px-3 py-1.5 ${current ? 'border-l-weld bg-weld-tint' : 'border-l-transparent'}`}
     >
-      <div className="grid min-h-[3.125rem] grid-cols-[1.625rem_minmax(0,1fr)_auto_auto] items-center gap-x-3 xl:grid-cols-[1.625rem_minmax(0,1fr)_auto_7rem_auto]">
-        <span className={`letter ${current ? 'letter-lit' : ''}`} aria-hidden="true">
+      <div className="grid min-h-[3.125rem] grid-cols-[1.625rem_minmax(0,1fr)_auto_auto] items-center gap-x-3 xl:grid-cols-[1.625rem_minmax(0,1fr)_auto_auto_7rem_auto]">
+        <span className={`letter max-xl:row-span-2 ${current ? 'letter-lit' : ''}`} aria-hidden="true">
           {row.point.letter}
         </span>
-        <div className="min-w-0">
+        <div className="min-w-0 max-xl:self-end">
           <label htmlFor={id.rest} className="block text-body font-medium leading-5">
             {rowLabel(row)}
             <span className="sr-only">, {unitLabels[desk.draftOf(row).unit]}</span>
@@ -58,11 +58,11 @@ export function ReadingRow({ desk, row }: { readonly desk: SheetDesk; readonly r
             {says(row, state)}
           </p>
         </div>
+        {row.point.point.levelRecorded && !row.covered ? <LevelBox desk={desk} row={row} id={id.level} /> : <span className="max-xl:hidden" />}
         <Boxes desk={desk} row={row} id={id} mistake={mistake} />
-        <span className={`rounded-sm px-2 py-1 text-center text-label font-medium max-xl:col-start-2 max-xl:row-start-2 max-xl:w-fit ${tones[state.tone]}`}>{state.word}</span>
-        <div className="max-xl:col-start-4 max-xl:row-start-1">{!desk.locked && <RowMenu desk={desk} row={row} />}</div>
+        <span className={`rounded-sm px-2 py-1 text-center text-label font-medium max-xl:col-start-2 max-xl:row-start-2 max-xl:w-fit max-xl:self-start max-xl:py-0 ${tones[state.tone]}`}>{state.word}</span>
+        <div className="max-xl:col-start-4 max-xl:row-span-2 max-xl:row-start-1">{!desk.locked && <RowMenu desk={desk} row={row} />}</div>
       </div>
-      {row.point.point.levelRecorded && !row.covered && <LevelBox desk={desk} row={row} id={id.level} />}
       {mistake && <FieldError id={id.error}>{mistake}</FieldError>}
       {row.decision && <DecisionCard desk={desk} row={row} entry={row.decision} />}
     </li>
@@ -161,7 +161,7 @@ function TapeSum({ desk, row }: { readonly desk: SheetDesk; readonly row: SheetR
 function LevelBox({ desk, row, id }: { readonly desk: SheetDesk; readonly row: SheetRow; readonly id: string }) {
   const { level } = desk.draftOf(row);
   return (
-    <div className="flex flex-wrap items-center gap-x-3 pb-1 pl-[2.375rem]">
+    <div className="flex flex-wrap items-center gap-x-3 max-xl:col-span-3 max-xl:col-start-2 max-xl:row-start-4 max-xl:mt-1">
       <label htmlFor={id} className="text-label text-ink-2">
         Level found<span className="sr-only"> for {rowLabel(row)}</span>
       </label>

@@ -11,18 +11,18 @@ export function SheetHeader({ desk }: { readonly desk: SheetDesk }) {
   return (
     <header className="flex flex-wrap items-center gap-x-5 gap-y-2 border-b border-hair bg-sheet px-4 py-2">
       {garment.firstImageId && <img src={staffPicture(garment.firstImageId, 320)} alt="" className="h-14 w-11 rounded-sm bg-well object-cover object-top max-sm:hidden" />}
-      <div className="min-w-0">
-        <Link to={paths.garment(garmentId)} className="figures text-label text-indigo underline underline-offset-2">
-          {number}
-          <span className="sr-only">, back to the garment</span>
-        </Link>
-        <PageTitle title={`${garment.partName}, ${garment.title}`} className="text-title-25! max-w-xl truncate leading-7!">
-          {garment.partName}
-          <span className="ml-3 align-middle font-sans text-table font-normal text-ink-2">
-            {[garment.title, garment.date, garment.maker].filter(Boolean).join(', ')}
-          </span>
-        </PageTitle>
-        <p className="text-label text-ink-2">{people.length > 0 ? people.join('. ') : 'Nobody is named yet'}</p>
+      <div className="min-w-0 max-w-xl">
+        <div className="flex items-baseline gap-3">
+          <PageTitle title={`${garment.partName}, ${number}`} className="text-title-25! leading-7!">
+            {garment.partName}
+          </PageTitle>
+          <Link to={paths.garment(garmentId)} className="figures inline-flex min-h-8 items-center text-table text-indigo underline underline-offset-2">
+            {number}
+            <span className="sr-only">, back to the garment</span>
+          </Link>
+        </div>
+        <p className="truncate text-table text-ink-2">{[garment.title, garment.date, garment.maker].filter(Boolean).join(', ')}</p>
+        <p className="truncate text-label text-ink-2">{people.length > 0 ? people.join('. ') : 'Nobody is named yet'}</p>
       </div>
       <div className="ml-auto flex flex-wrap items-center gap-3">
         {desk.reader.readers.length > 1 && <ReaderChoice desk={desk} />}

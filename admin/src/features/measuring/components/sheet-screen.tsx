@@ -35,11 +35,11 @@ export function SheetScreen({ sheet }: { readonly sheet: Sheet }) {
   return (
     <div className="flex min-h-dvh flex-col md:h-dvh">
       <SheetHeader desk={desk} />
-      <main className="grid min-h-0 grow md:grid-cols-[20rem_minmax(0,1fr)] lg:grid-cols-[25rem_minmax(0,1fr)]">
-        <div className="min-h-0 overflow-y-auto border-r border-hair">
+      <main className="grid min-h-0 grow grid-cols-[minmax(0,1fr)] max-md:content-start md:grid-cols-[20rem_minmax(0,1fr)] lg:grid-cols-[25rem_minmax(0,1fr)]">
+        <div className="min-h-0 border-hair max-md:border-b md:overflow-y-auto md:border-r">
           <DiagramPanel kind={sheet.kind} points={desk.points} current={desk.current.point} onChoose={chooseRow} />
         </div>
-        <div className="flex min-h-0 flex-col">
+        <div className="flex min-h-0 min-w-0 flex-col">
           <TabGroup selectedIndex={shown} onChange={(index) => show(tabs[index] ?? 'readings')} className="flex min-h-0 grow flex-col">
             <SheetTabs desk={desk} />
             <TabPanels className="min-h-0 grow overflow-y-auto">
