@@ -20,6 +20,7 @@ import { SessionController } from './session.controller';
 import { Sessions } from './sessions.service';
 import { SignInService } from './sign-in.service';
 import { SlowDown } from './slow-down.service';
+import { Sweep } from './sweep.service';
 
 /** Signing in, sessions, and the guards at every route, in the order in which they look. */
 @Global()
@@ -34,6 +35,7 @@ import { SlowDown } from './slow-down.service';
     AccessStrategy,
     Passwords,
     SlowDown,
+    Sweep,
     SignInService,
     RefreshService,
     SessionEndService,

@@ -1,5 +1,4 @@
 import { Injectable } from '@nestjs/common';
-import { LessThan } from 'typeorm';
 import { Clock } from '../common/clock';
 import { Refusal } from '../common/refusal';
 import { type Tx, Work } from '../common/work';
@@ -44,11 +43,6 @@ export class SlowDown {
       await tx.delete(SignInSlowdown, { keyHash: accountKey });
       await tx.decrement(SignInSlowdown, { keyHash: addressKey }, 'failures', 1);
     });
-  }
-
-  async sweep(): Promise<void> {
-    const before = new Date(this.clock.now().getTime() - forgottenAfterMs);
-    await this.work.reader.delete(SignInSlowdown, { lastFailedAt: LessThan(before) });
   }
 
   private async countOne(tx: Tx, kind: SlowDownKind, keyHash: string): Promise<void> {

@@ -27,7 +27,7 @@ export function docsPage(document: OpenAPIObject): string {
     '<!doctype html><html lang="en"><head><meta charset="utf-8"><title>Ellwand API</title>',
     '<meta name="viewport" content="width=device-width"><link rel="stylesheet" href="/api/docs.css"></head><body>',
     '<main><h1>Ellwand API</h1>',
-    `<p>${escapeMarkup(document.info.description ?? '')} The same as <a href="/api/openapi.json">OpenAPI 3.1</a>.</p>`,
+    `<p>${withCode(document.info.description ?? '')} The same as <a href="/api/openapi.json">OpenAPI 3.1</a>.</p>`,
     '<p>Refusals are problem details (RFC 9457) with a stable <code>code</code>. Changes of records carry ',
     '<code>If-Match: "version"</code>.</p>',
     ...sections,
@@ -72,6 +72,9 @@ const answers = ({ responses }: Operation): string =>
 const nameIn = (part: string): string =>
   (/#\/components\/schemas\/(\w+)/.exec(part)?.[1] ?? '').replace(/(Dto)?(_Output)?$/, '');
 
+/** Escaped, with what stands in backticks as code. */
+const withCode = (text: string): string => escapeMarkup(text).replaceAll(/`([^`]+)`/g, '<code>$1</code>');
+
 /** Colours of `shared/look/tokens.css`; the page stands by itself. */
 export const docsStyle = `
 :root { color-scheme: light; }
@@ -81,9 +84,11 @@ h1 { font: 2.625rem/1.15 'Cormorant Ellwand', 'Times New Roman', serif; margin: 
 h2 { font: 1.75rem/1.2 'Cormorant Ellwand', 'Times New Roman', serif; margin: 3rem 0 0.75rem; }
 p { max-width: 44rem; }
 a { color: #26418f; }
-table { width: 100%; border-collapse: collapse; background: #fff; border: 1px solid #d3d9d3; font-size: 0.9375rem; }
+table { width: 100%; table-layout: fixed; border-collapse: collapse; background: #fff; border: 1px solid #d3d9d3; font-size: 0.9375rem; }
 th, td { padding: 0.5rem 0.75rem; border-bottom: 1px solid #d3d9d3; text-align: left; vertical-align: top; }
 th { color: #5a6670; font-size: 0.8125rem; font-weight: 500; }
+th:first-child { width: 52%; }
+th:nth-child(2) { width: 14%; }
 b { display: inline-block; min-width: 4.5em; font-weight: 600; font-size: 0.8125rem; }
 code { font-size: 0.875rem; overflow-wrap: anywhere; }
 @media (max-width: 640px) { td:nth-child(3), th:nth-child(3) { display: none; } }

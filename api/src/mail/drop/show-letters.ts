@@ -28,6 +28,7 @@ function answer(inbox: Inbox, url: string, response: ServerResponse): void {
   if (url === '/') return send(response, 200, 'text/html', inboxPage(inbox.all));
   if (url === '/style.css') return send(response, 200, 'text/css', inboxStyle);
   if (url === '/letters.json') return send(response, 200, 'application/json', JSON.stringify(inbox.all));
+  if (url === '/favicon.ico') return void response.writeHead(204).end();
   const letter = inbox.find(/^\/letters\/([\w-]+)$/.exec(url)?.[1] ?? '');
   if (!letter) return send(response, 404, 'text/html', noLetterPage());
   send(response, 200, 'text/html', letterPage(letter));

@@ -31,7 +31,7 @@ export function invitationLetter(facts: InvitationFacts): Letter {
   };
   return {
     to: facts.to,
-    subject: `Your invitation to the Workroom of ${facts.museum}`,
+    subject: `Your invitation to the Workroom: ${facts.museum}`,
     text: asText(parts),
     html: asMarkup(parts),
   };
