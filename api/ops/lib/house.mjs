@@ -63,8 +63,9 @@ export class House {
     requireSameKind(kind, empty, dataFolder);
     this.#env.ELLWAND_SECRET ??= signingSecret(dataFolder);
     if (ownDatabase) await this.#startDatabase(kind?.filled === false);
-    await this.#runScript('Bringing the database up to date', 'database/migrate.js');
+    // Before the migrations: they read the same environment, whole, and it names the mail drop.
     const inboxUrl = await this.#startMailDrop();
+    await this.#runScript('Bringing the database up to date', 'database/migrate.js');
     const opened = kind?.opened ?? (empty ? 'empty' : 'demonstration');
     if (kind?.filled !== true) await this.#fill(opened);
     await this.step('Starting Ellwand', () => this.#startApi());

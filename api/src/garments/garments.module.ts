@@ -8,6 +8,6 @@ import { GarmentsService } from './garments.service';
 @Module({
   controllers: [GarmentsController],
   providers: [GarmentEdits, GarmentView, GarmentsService, GarmentListService],
-  exports: [GarmentEdits, GarmentView],
+  exports: [GarmentEdits, GarmentView, GarmentsService],
 })
 export class GarmentsModule {}

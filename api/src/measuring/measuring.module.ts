@@ -11,6 +11,6 @@ import { SheetsService } from './sheets/sheets.service';
   imports: [GarmentsModule],
   controllers: [MeasuringController],
   providers: [SheetEdits, SheetView, SheetsService, ReadingsService, FindingsService],
-  exports: [FindingsService],
+  exports: [SheetsService, ReadingsService, FindingsService],
 })
 export class MeasuringModule {}
