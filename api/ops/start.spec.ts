@@ -49,7 +49,7 @@ describe('npm start', () => {
     expect(started.output()).toContain(`http://127.0.0.1:${house.port}/workroom/`);
     expect(started.output()).toContain(path.join(house.data, 'demonstration.json'));
     expect(started.output()).toMatch(/Mail inbox +http:\/\/127\.0\.0\.1:\d+\//);
-    expect(house.told()).toEqual(['migrate as ellwand_owner', 'mail up', 'load', 'api up']);
+    expect(house.told()).toEqual(['mail up', 'migrate as ellwand_owner', 'load', 'api up']);
     expect(await close(started)).toBe(0);
   });
 

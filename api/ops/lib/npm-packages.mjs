@@ -9,6 +9,9 @@ import { plainEnvironment, run } from './programs.mjs';
  * @typedef {Record<string, LockEntry>} LockPackages
  */
 
+/** npm gives its reason first and explains all its options after it. */
+const NPM_REASON = 1_000;
+
 /**
  * Brings node_modules to what the lock file says; does nothing where it is so already.
  * @param {string} root
@@ -22,7 +25,7 @@ export async function installNpmPackages(root, step) {
     run('npm', ['ci', '--no-audit', '--no-fund'], { cwd: root, env: plainEnvironment() }),
   );
   if (code !== 0) {
-    throw new PlainFailure('npm ci failed: its last words are above.', { detail: output.slice(-3000) });
+    throw new PlainFailure('npm ci failed: its reason is above.', { detail: output.slice(0, NPM_REASON) });
   }
 }
 
