@@ -23,15 +23,9 @@ const outsideTheApi = [
   'health/live',
   'health/ready',
   'media/:imageId/:form',
-  '/',
-  'search',
-  'g/:number',
-  'g/:number/v/:version',
-  'how-we-measure',
-  'how-we-measure/:pointId',
+  // Written so that they mean the catch-all routes themselves, not every route that these would catch.
   'workroom',
   'workroom/\\{\\*path\\}',
-  // Written so that it means the catch-all route itself, not every route that it would catch.
   '\\{\\*page\\}',
 ];
 

@@ -12,6 +12,9 @@ export const doors: Readonly<Record<string, Door>> = {
   'GET /api/docs': 'public',
   'GET /api/docs.css': 'public',
   'GET /media/:imageId/:form': 'public',
+  'GET /workroom': 'public',
+  'GET /workroom/{*path}': 'public',
+  'GET /{*page}': 'public',
 
   'POST /api/v1/session': 'public',
   'GET /api/v1/session': 'signed-in',
