@@ -3,13 +3,11 @@ import { type ReactNode } from 'react';
 import { describe, expect, it } from 'vitest';
 import { Length, Uncertainty } from './length';
 
-const written = (node: ReactNode) =>
-  Object.fromEntries(
-    [...renderToStaticMarkup(node).matchAll(/data-unit="(\w+)"[^>]*>([^<]*)</g)].map(([, unit, text]) => [
-      unit,
-      text,
-    ]),
-  );
+/** The words of each unit, as they stand in the page. */
+function written(node: ReactNode): Record<string, string> {
+  const spans = renderToStaticMarkup(node).matchAll(/data-unit="(\w+)"[^>]*>([^<]*)</g);
+  return Object.fromEntries([...spans].map(([, unit = '', text = '']) => [unit, text]));
+}
 
 describe('a length in the page', () => {
   it('is there in all three units', () => {

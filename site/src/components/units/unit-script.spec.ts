@@ -24,6 +24,6 @@ it.each([
   ['?unit=cm', 'in', 'cm', 'the address asks for centimetres and inches were chosen before'],
   ['?unit=ell', null, 'mm', 'the address asks for a unit there is not'],
   ['', '<b>', 'mm', 'the memory holds something else'],
-])('at %j with %j remembered the page is in %s, since %s', (search, remembered, unit) => {
+])('at %j with %j remembered the page is in %s, since %s', (search, remembered, unit, _why) => {
   expect(unitAfter(search, remembered)).toBe(unit);
 });
