@@ -16,6 +16,7 @@ import { RevisionRow } from '../publishing/revision.entity';
 import { InvitationRow } from '../users/invitation.entity';
 import { SettingRow } from '../users/setting.entity';
 import { UserRow } from '../users/user.entity';
+import { guardedDriver } from './guarded-pool';
 import { AuditTrail1764550000001 } from './migrations/1764550000001-audit-trail';
 import { Catalogue1764550000002 } from './migrations/1764550000002-catalogue';
 import { Workroom1764550000000 } from './migrations/1764550000000-workroom';
@@ -42,9 +43,8 @@ const entities = [
 /** In the order in which they run. */
 export const migrations = [Workroom1764550000000, AuditTrail1764550000001, Catalogue1764550000002];
 
-/** A statement that runs longer is ended, a caller who waits longer for a connection is told 503. */
-const statementSeconds = 15;
-const connectionWaitMs = 5_000;
+/** For the handshake; how long somebody waits for a free connection is the pool's own affair. */
+const connectWithinMs = 5_000;
 
 function mariadb(account: Environment['workroom'], database: string, connections: number) {
   return {
@@ -59,12 +59,12 @@ function mariadb(account: Environment['workroom'], database: string, connections
     synchronize: false,
     supportBigNumbers: true,
     bigNumberStrings: true,
-    connectTimeout: connectionWaitMs,
+    connectTimeout: connectWithinMs,
     poolSize: connections,
     extra: {
       waitForConnections: true,
       queueLimit: 200,
-      // Sent with the handshake's first query: strict types and an end to runaway statements.
+      // The count of rows that a statement has changed, not of those that it found.
       flags: ['-FOUND_ROWS'],
     },
   } as const;
@@ -72,12 +72,14 @@ function mariadb(account: Environment['workroom'], database: string, connections
 
 export const workroomConnection = (environment: Environment): DataSourceOptions => ({
   ...mariadb(environment.workroom, 'ellwand', 10),
+  driver: guardedDriver,
   entities,
 });
 
 /** Reads published tables only. The name must be in the result too, or Nest cannot close the connection. */
 export const catalogueConnection = (environment: Environment) => ({
   ...mariadb(environment.catalogue, 'ellwand_catalogue', 10),
+  driver: guardedDriver,
   name: 'catalogue',
   entities: [],
 });
@@ -94,5 +96,3 @@ export function ownerConnection(environment: Environment): DataSourceOptions {
     migrationsTransactionMode: 'none',
   };
 }
-
-export { statementSeconds };
