@@ -16,6 +16,7 @@ import { ENVIRONMENT } from '../../src/common/environment.token';
 import { type Limits, LIMITS } from '../../src/common/limits';
 import { Work } from '../../src/common/work';
 import { type Environment, readEnvironment } from '../../src/config/environment';
+import { BUILT_FOLDERS, type BuiltFolders } from '../../src/pages/built-folders';
 import { MailDispatcher } from '../../src/mail/dispatcher.service';
 import { type Letter, MailSink } from './mail-sink';
 import { Owner } from './owner';
@@ -34,6 +35,8 @@ export interface HouseOptions {
   readonly limits?: Limits;
   /** Further environment variables, such as ELLWAND_PUBLIC_URL. */
   readonly variables?: Readonly<Record<string, string>>;
+  /** The two built applications; as before anything is built unless given. */
+  readonly built?: BuiltFolders;
 }
 
 /** The whole application on a free port of loopback, with a real database, a clock to set, and its letters caught. */
@@ -125,12 +128,20 @@ export async function openHouse(options: HouseOptions = {}): Promise<House> {
     .useValue(testCost)
     .overrideProvider(LIMITS)
     .useValue(options.limits ?? unlimited)
+    .overrideProvider(BUILT_FOLDERS)
+    .useValue(options.built ?? notBuilt(environment))
     .compile();
   const app = room.createNestApplication<NestExpressApplication>(applicationOptions);
   furnish(app);
   await app.listen(environment.port, '127.0.0.1');
   return new House(app, environment, clock, mail, owner);
 }
+
+/** As in a house where nothing has been built yet. */
+const notBuilt = ({ dataFolder }: Environment): BuiltFolders => ({
+  site: join(dataFolder, 'site-not-built'),
+  workroom: join(dataFolder, 'workroom-not-built'),
+});
 
 /** The variables of a house of its own, for `readEnvironment` or for a process. */
 export async function houseVariables(smtpPort: number): Promise<Record<string, string>> {
