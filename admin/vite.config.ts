@@ -1,12 +1,13 @@
 import tailwindcss from '@tailwindcss/vite';
 import react from '@vitejs/plugin-react';
 import { defineConfig } from 'vite';
+import { sharedSource } from './shared-source.js';
 
 export default defineConfig({
   // The service worker's scope and every built address follow from this one line.
   base: '/workroom/',
   plugins: [react(), tailwindcss()],
-  resolve: { conditions: ['source', 'module', 'browser', 'development|production'] },
+  resolve: { alias: sharedSource },
   build: {
     outDir: 'dist',
     manifest: true,

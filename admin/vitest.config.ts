@@ -1,10 +1,10 @@
 import react from '@vitejs/plugin-react';
 import { defineConfig } from 'vitest/config';
+import { sharedSource } from './shared-source.js';
 
 export default defineConfig({
   plugins: [react()],
-  resolve: { conditions: ['source'] },
-  ssr: { resolve: { conditions: ['source'] } },
+  resolve: { alias: sharedSource },
   test: {
     environment: 'jsdom',
     include: ['src/**/*.spec.{ts,tsx}'],

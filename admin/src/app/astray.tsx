@@ -7,7 +7,9 @@ import { paths } from '../config/paths.js';
 export function Astray() {
   return (
     <Page title="There is nothing at this address">
-      <p className="mb-4 text-table">It may have been copied in part, or the thing it named is no longer here.</p>
+      <p className="mb-4 text-table">
+        It may have been copied in part, or the thing it named is no longer here.
+      </p>
       <ButtonLink tone="action" to={paths.garments()}>
         Go to the garments
       </ButtonLink>
@@ -21,7 +23,9 @@ export function Broken() {
   return (
     <main className="mx-auto max-w-page p-6">
       <h1 className="title text-title-34">This page broke</h1>
-      <p className="my-4 text-table">{errorSentence(error)} Readings that were kept on this device are still there.</p>
+      <p className="my-4 text-table">
+        {errorSentence(error)} Readings that were kept on this device are still there.
+      </p>
       <Button tone="action" onClick={() => window.location.reload()}>
         Load the page again
       </Button>

@@ -21,18 +21,60 @@ export const routes: RouteObject[] = [
           {
             element: <Shell />,
             children: [
-              { index: true, lazy: async () => ({ Component: (await import('../features/garments/components/garment-list-page.js')).GarmentListPage }) },
-              { path: '/garments/new', lazy: async () => ({ Component: (await import('../features/garments/components/new-garment-page.js')).NewGarmentPage }) },
-              { path: '/garments/:garmentId', lazy: async () => ({ Component: (await import('./routes/garment-page.js')).GarmentPage }) },
-              { path: '/garments/:garmentId/parts/:partId/sheets/new', lazy: async () => ({ Component: (await import('../features/measuring/components/new-sheet-page.js')).NewSheetPage }) },
-              { path: '/review', lazy: async () => ({ Component: (await import('./routes/review-page.js')).ReviewPage }) },
-              { path: '/garments/:garmentId/review', lazy: async () => ({ Component: (await import('./routes/review-page.js')).ReviewPage }) },
-              { path: '/people', lazy: async () => ({ Component: (await import('../features/people/components/people-page.js')).PeoplePage }) },
-              { path: '/audit', lazy: async () => ({ Component: (await import('../features/audit/components/audit-page.js')).AuditPage }) },
+              {
+                index: true,
+                lazy: async () => ({
+                  Component: (await import('../features/garments/components/garment-list-page.js'))
+                    .GarmentListPage,
+                }),
+              },
+              {
+                path: '/garments/new',
+                lazy: async () => ({
+                  Component: (await import('../features/garments/components/new-garment-page.js'))
+                    .NewGarmentPage,
+                }),
+              },
+              {
+                path: '/garments/:garmentId',
+                lazy: async () => ({ Component: (await import('./routes/garment-page.js')).GarmentPage }),
+              },
+              {
+                path: '/garments/:garmentId/parts/:partId/sheets/new',
+                lazy: async () => ({
+                  Component: (await import('../features/measuring/components/new-sheet-page.js'))
+                    .NewSheetPage,
+                }),
+              },
+              {
+                path: '/review',
+                lazy: async () => ({ Component: (await import('./routes/review-page.js')).ReviewPage }),
+              },
+              {
+                path: '/garments/:garmentId/review',
+                lazy: async () => ({ Component: (await import('./routes/review-page.js')).ReviewPage }),
+              },
+              {
+                path: '/people',
+                lazy: async () => ({
+                  Component: (await import('../features/people/components/people-page.js')).PeoplePage,
+                }),
+              },
+              {
+                path: '/audit',
+                lazy: async () => ({
+                  Component: (await import('../features/audit/components/audit-page.js')).AuditPage,
+                }),
+              },
               { path: '*', element: <Astray /> },
             ],
           },
-          { path: '/sheets/:sheetId', lazy: async () => ({ Component: (await import('../features/measuring/components/sheet-page.js')).SheetPage }) },
+          {
+            path: '/sheets/:sheetId',
+            lazy: async () => ({
+              Component: (await import('../features/measuring/components/sheet-page.js')).SheetPage,
+            }),
+          },
         ],
       },
     ],

@@ -16,7 +16,10 @@ export function Shell() {
   const audits = useMay('audit:read');
   return (
     <>
-      <a href="#main" className="sr-only focus:not-sr-only focus:absolute focus:left-4 focus:top-2 focus:z-30 focus:bg-sheet focus:px-3 focus:py-2">
+      <a
+        href="#main"
+        className="sr-only focus:not-sr-only focus:absolute focus:left-4 focus:top-2 focus:z-30 focus:bg-sheet focus:px-3 focus:py-2"
+      >
         Skip to the content
       </a>
       <header className="border-b border-hair bg-sheet">

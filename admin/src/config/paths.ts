@@ -1,6 +1,7 @@
 /** Every address inside the Workroom, relative to its base `/workroom`. Links are made here and nowhere else. */
 export const paths = {
-  signIn: (next?: string) => (next && next !== '/' ? `/sign-in?next=${encodeURIComponent(next)}` : '/sign-in'),
+  signIn: (next?: string) =>
+    next && next !== '/' ? `/sign-in?next=${encodeURIComponent(next)}` : '/sign-in',
   garments: () => '/',
   newGarment: () => '/garments/new',
   garment: (id: string) => `/garments/${id}`,

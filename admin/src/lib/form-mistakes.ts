@@ -37,6 +37,9 @@ export function showProblem<T extends FieldValues>(
     setError(target as Path<T>, { type: 'server', message: detail });
   }
   if (errors.length === 0) {
-    setError('root.server', { type: 'server', message: error instanceof Error ? error.message : 'Not saved.' });
+    setError('root.server', {
+      type: 'server',
+      message: error instanceof Error ? error.message : 'Not saved.',
+    });
   }
 }

@@ -9,7 +9,8 @@ import { fakeApi } from './fake-api/fake-api.js';
 import { House } from './fake-api/house.js';
 import { staff } from './fake-api/people.js';
 
-const [port = '4391', role = 'recorder', built = join(import.meta.dirname, '../../dist')] = process.argv.slice(2);
+const [port = '4391', role = 'recorder', built = join(import.meta.dirname, '../../dist')] =
+  process.argv.slice(2);
 const types: Readonly<Record<string, string>> = {
   '.html': 'text/html; charset=utf-8',
   '.js': 'text/javascript',
@@ -28,9 +29,17 @@ let house = newHouse();
 async function asRequest(incoming: IncomingMessage): Promise<Request> {
   const chunks: Buffer[] = [];
   for await (const chunk of incoming) chunks.push(chunk as Buffer);
-  const headers = new Headers(Object.entries(incoming.headers).flatMap(([name, value]) => (typeof value === 'string' ? [[name, value] as [string, string]] : [])));
+  const headers = new Headers(
+    Object.entries(incoming.headers).flatMap(([name, value]) =>
+      typeof value === 'string' ? [[name, value] as [string, string]] : [],
+    ),
+  );
   const hasBody = chunks.length > 0 && incoming.method !== 'GET';
-  return new Request(`http://127.0.0.1:${port}${incoming.url ?? '/'}`, { method: incoming.method, headers, ...(hasBody ? { body: Buffer.concat(chunks) } : {}) });
+  return new Request(`http://127.0.0.1:${port}${incoming.url ?? '/'}`, {
+    method: incoming.method,
+    headers,
+    ...(hasBody ? { body: Buffer.concat(chunks) } : {}),
+  });
 }
 
 /** Cloth in place of a photograph, so that the screens have something of the right shape to show. */
@@ -50,14 +59,20 @@ async function answer(incoming: IncomingMessage, outgoing: ServerResponse): Prom
   }
   if (path.startsWith('/api/')) {
     const response = await fakeApi(house)(await asRequest(incoming));
-    outgoing.writeHead(response.status, Object.fromEntries(response.headers)).end(Buffer.from(await response.arrayBuffer()));
+    outgoing
+      .writeHead(response.status, Object.fromEntries(response.headers))
+      .end(Buffer.from(await response.arrayBuffer()));
     return;
   }
   const wanted = join(built, normalize(path.replace(/^\/workroom/, '')));
-  const file = extname(wanted) !== '' && wanted.startsWith(built) && existsSync(wanted) ? wanted : join(built, 'index.html');
+  const file =
+    extname(wanted) !== '' && wanted.startsWith(built) && existsSync(wanted)
+      ? wanted
+      : join(built, 'index.html');
   outgoing.writeHead(200, {
     'Content-Type': types[extname(file)] ?? 'application/octet-stream',
-    'Content-Security-Policy': "default-src 'self'; style-src 'self'; img-src 'self' data:; object-src 'none'; base-uri 'none'",
+    'Content-Security-Policy':
+      "default-src 'self'; style-src 'self'; img-src 'self' data:; object-src 'none'; base-uri 'none'",
   });
   createReadStream(file).pipe(outgoing);
 }

@@ -1,10 +1,13 @@
 import '@testing-library/jest-dom/vitest';
-import { cleanup } from '@testing-library/react';
+import { cleanup, configure } from '@testing-library/react';
 import { afterEach, vi } from 'vitest';
+
+// Finding by role walks a whole form; on two busy cores one look can take a second.
+configure({ asyncUtilTimeout: 8000 });
 
 // jsdom lacks these; the screens ask only whether they exist or call them without needing an answer.
 Element.prototype.scrollIntoView = () => undefined;
-Element.prototype.getAnimations ??= () => [];
+Object.defineProperty(Element.prototype, 'getAnimations', { configurable: true, value: () => [] });
 class NoResizes {
   observe() {}
   unobserve() {}

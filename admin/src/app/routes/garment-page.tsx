@@ -30,7 +30,11 @@ export function GarmentPage() {
   }
   if (garment.isError) {
     return (
-      <Page title={isProblem(garment.error) && garment.error.status === 404 ? 'There is no such garment' : 'Garment'}>
+      <Page
+        title={
+          isProblem(garment.error) && garment.error.status === 404 ? 'There is no such garment' : 'Garment'
+        }
+      >
         <Failed error={garment.error} onRetry={() => void garment.refetch()} />
       </Page>
     );
@@ -50,7 +54,8 @@ function GarmentDesk({ garment }: { readonly garment: Garment }) {
           <StageMark stage={garment.stage} isPublic={garment.isPublic} />
           {garment.publicNumber && garment.publishedVersion !== null && (
             <span>
-              public number <span className="figures">{garment.publicNumber}</span>, version {garment.publishedVersion}
+              public number <span className="figures">{garment.publicNumber}</span>, version{' '}
+              {garment.publishedVersion}
             </span>
           )}
         </span>
@@ -71,7 +76,9 @@ function GarmentDesk({ garment }: { readonly garment: Garment }) {
           <PicturesPanel garmentId={garment.id} />
         </div>
         <section id="record" aria-labelledby="record-title">
-          <h2 id="record-title" className="title mb-2 text-title-28">Record</h2>
+          <h2 id="record-title" className="title mb-2 text-title-28">
+            Record
+          </h2>
           {locked ? (
             <>
               <p className="mb-4 rounded-sm bg-well p-4 text-table">{locked}</p>

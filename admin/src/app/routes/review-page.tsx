@@ -28,7 +28,9 @@ export function ReviewPage() {
       <Page title="Review">
         <div className="grid gap-8 xl:grid-cols-[15rem_minmax(0,1fr)] xl:items-start">
           {queue}
-          <Empty title="Choose a record">What you choose is shown as the public would see it, with what it changes.</Empty>
+          <Empty title="Choose a record">
+            What you choose is shown as the public would see it, with what it changes.
+          </Empty>
         </div>
       </Page>
     );
@@ -47,7 +49,9 @@ function ReviewOf({ garmentId, queue }: { readonly garmentId: string; readonly q
       lead={garment.data && <span className="figures">{garment.data.record.ownNumber}</span>}
       aside={<ButtonLink to={paths.garment(garmentId)}>Open the record</ButtonLink>}
     >
-      <div className={`grid gap-8 lg:grid-cols-[minmax(0,1fr)_20rem] lg:items-start ${queue ? 'xl:grid-cols-[13rem_minmax(0,1fr)_20rem]' : ''}`}>
+      <div
+        className={`grid gap-8 lg:grid-cols-[minmax(0,1fr)_20rem] lg:items-start ${queue ? 'xl:grid-cols-[13rem_minmax(0,1fr)_20rem]' : ''}`}
+      >
         {queue && <div className="max-xl:order-last lg:max-xl:col-span-2">{queue}</div>}
         <div className="min-w-0">
           {preview.isPending && <Waiting label="Drawing up the public page" rows={10} />}

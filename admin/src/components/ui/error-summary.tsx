@@ -37,7 +37,11 @@ export function ErrorSummary({
         {mistakes.map(({ fieldId, message }) => (
           <li key={`${fieldId ?? ''} ${message}`}>
             {fieldId ? (
-              <a href={`#${fieldId}`} className="text-madder underline" onClick={(event) => goTo(event, fieldId)}>
+              <a
+                href={`#${fieldId}`}
+                className="text-madder underline"
+                onClick={(event) => goTo(event, fieldId)}
+              >
                 {message}
               </a>
             ) : (

@@ -91,12 +91,7 @@ export function Select(props: FieldProps & SelectHTMLAttributes<HTMLSelectElemen
 }
 
 /** A box to tick, with its words beside it. */
-export function Tick({
-  id,
-  label,
-  hint,
-  ...box
-}: FieldProps & InputHTMLAttributes<HTMLInputElement>) {
+export function Tick({ id, label, hint, ...box }: FieldProps & InputHTMLAttributes<HTMLInputElement>) {
   return (
     <div className="flex items-start gap-3">
       <input

@@ -8,13 +8,25 @@ const FIRST_PLACE = 'default';
  * The page's one `h1`. On a change of route it takes the focus and names the window, so that whoever does not see
  * the page hears where they are; on the first load the browser's own start stands.
  */
-export function PageTitle({ title, className = '', children }: { readonly title: string; readonly className?: string; readonly children?: ReactNode }) {
+export function PageTitle({
+  title,
+  className = '',
+  children,
+}: {
+  readonly title: string;
+  readonly className?: string;
+  readonly children?: ReactNode;
+}) {
   const heading = useRef<HTMLHeadingElement>(null);
   const { key, pathname } = useLocation();
-  const first = key === FIRST_PLACE;
+  const shownAt = useRef<string | null>(null);
   useEffect(() => {
-    if (!first) heading.current?.focus();
-  }, [first, pathname]);
+    // Another search on the same page is no change of place: it must not take the focus from where one works.
+    if (shownAt.current === pathname) return;
+    const opened = shownAt.current === null && key === FIRST_PLACE;
+    shownAt.current = pathname;
+    if (!opened) heading.current?.focus();
+  }, [key, pathname]);
   useEffect(() => {
     document.title = `${title} · Ellwand Workroom`;
   }, [title]);

@@ -9,9 +9,17 @@ const looks: Readonly<Record<RecordStage, string>> = {
 };
 
 /** Where a record stands, in a word; the colour only repeats it. */
-export function StageMark({ stage, isPublic = false }: { readonly stage: RecordStage; readonly isPublic?: boolean }) {
+export function StageMark({
+  stage,
+  isPublic = false,
+}: {
+  readonly stage: RecordStage;
+  readonly isPublic?: boolean;
+}) {
   return (
-    <span className={`inline-block whitespace-nowrap rounded-sm px-2 py-0.5 text-label font-medium ${looks[stage]}`}>
+    <span
+      className={`inline-block whitespace-nowrap rounded-sm px-2 py-0.5 text-label font-medium ${looks[stage]}`}
+    >
       {stageLabels[stage]}
       {isPublic && stage !== 'published' ? ', a version is public' : ''}
     </span>

@@ -19,7 +19,8 @@ export function Waiting({ label, rows = 6 }: { readonly label: string; readonly 
 /** What an error says to a person, in one sentence. */
 export function errorSentence(error: unknown): string {
   if (error instanceof NoAnswer) return error.message;
-  if (isProblem(error, 'permission.refused')) return 'Your role does not include this. An administrator can change that.';
+  if (isProblem(error, 'permission.refused'))
+    return 'Your role does not include this. An administrator can change that.';
   return error instanceof Error ? error.message : 'Something went wrong.';
 }
 
@@ -42,7 +43,10 @@ export function Failed({ error, onRetry }: { readonly error: unknown; readonly o
 export function Refused({ error }: { readonly error: unknown }) {
   if (!error) return null;
   return (
-    <p role="alert" className="rounded-sm border border-madder bg-madder-tint px-3 py-2 text-table text-madder">
+    <p
+      role="alert"
+      className="rounded-sm border border-madder bg-madder-tint px-3 py-2 text-table text-madder"
+    >
       <span className="font-medium">Not done: </span>
       <span className="text-ink">{errorSentence(error)}</span>
     </p>
@@ -50,7 +54,15 @@ export function Refused({ error }: { readonly error: unknown }) {
 }
 
 /** Nothing here: says why, and gives one next step. */
-export function Empty({ title, children, step }: { readonly title: string; readonly children?: ReactNode; readonly step?: ReactNode }) {
+export function Empty({
+  title,
+  children,
+  step,
+}: {
+  readonly title: string;
+  readonly children?: ReactNode;
+  readonly step?: ReactNode;
+}) {
   return (
     <div className="rounded-sm border border-dashed border-rule p-8 text-center">
       <p className="title text-title-25">{title}</p>

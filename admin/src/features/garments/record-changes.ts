@@ -15,7 +15,8 @@ function said(box: keyof RecordTyped, typed: RecordTyped): string {
   const value = typed[box];
   if (typeof value === 'boolean') return value ? 'yes' : 'no';
   if (typeof value === 'string') return value.replaceAll('\n', ', ') || 'nothing';
-  if (Array.isArray(value)) return value.map(({ kind, number }) => `${kind} ${number}`).join(', ') || 'nothing';
+  if (Array.isArray(value))
+    return value.map(({ kind, number }) => `${kind} ${number}`).join(', ') || 'nothing';
   if ('where' in value) return [value.transcription, value.where].filter(Boolean).join(', ') || 'nothing';
   const hazards = hazardIds.filter((id) => value[id].standing !== '');
   return hazards.map((id) => `${hazardLabels[id]}: ${value[id].standing}`).join('; ') || 'none';

@@ -1,4 +1,9 @@
-import { type GarmentRecord as Rec, GarmentRecord, hazardIds, OtherNumber } from '@ellwand/shared/records/garment';
+import {
+  type GarmentRecord as Rec,
+  GarmentRecord,
+  hazardIds,
+  OtherNumber,
+} from '@ellwand/shared/records/garment';
 import { z } from 'zod';
 import type { HazardId } from '../../lib/words/hazard-words.js';
 

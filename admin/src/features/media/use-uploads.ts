@@ -29,7 +29,8 @@ export function refusedAtOnce(file: Pick<File, 'type' | 'size' | 'name'>): strin
 }
 
 function refusalSentence(error: unknown): string {
-  if (isProblem(error) && error.status === 413) return 'Larger than 60 MB. Save it smaller, up to 100 megapixels.';
+  if (isProblem(error) && error.status === 413)
+    return 'Larger than 60 MB. Save it smaller, up to 100 megapixels.';
   return error instanceof Error ? error.message : 'Not received.';
 }
 
@@ -59,7 +60,13 @@ export function useUploads(garmentId: string) {
 
   const add = useCallback(
     (files: readonly File[]) => {
-      const fresh = files.map((file) => ({ id: newId(), fileName: file.name, sent: 0, refusal: refusedAtOnce(file), file }));
+      const fresh = files.map((file) => ({
+        id: newId(),
+        fileName: file.name,
+        sent: 0,
+        refusal: refusedAtOnce(file),
+        file,
+      }));
       setUploads((all) => [...all, ...fresh]);
       fresh
         .filter(({ refusal }) => refusal === null)

@@ -15,7 +15,10 @@ export function changesSentence({ changes, nextVersion }: Pick<Review, 'changes'
   if (changes.length === 0) return 'Nothing differs from the version that is public now.';
   const verbs = { changed: 'Changes', added: 'Adds', removed: 'Removes' } as const;
   return (['changed', 'added', 'removed'] as const)
-    .map((kind) => ({ kind, labels: changes.filter((change) => change.kind === kind).map(({ label }) => label) }))
+    .map((kind) => ({
+      kind,
+      labels: changes.filter((change) => change.kind === kind).map(({ label }) => label),
+    }))
     .filter(({ labels }) => labels.length > 0)
     .map(({ kind, labels }) => `${verbs[kind]} ${joined(labels)}.`)
     .join(' ');

@@ -6,4 +6,5 @@ import { peopleRoutes } from './people-routes.js';
 import { makeHandler } from './router.js';
 
 /** A stand-in for the API over a house in memory: the same contract, checked with the same schemas. */
-export const fakeApi = (house: House) => makeHandler(house, { ...peopleRoutes, ...garmentRoutes, ...imageRoutes, ...measuringRoutes });
+export const fakeApi = (house: House) =>
+  makeHandler(house, { ...peopleRoutes, ...garmentRoutes, ...imageRoutes, ...measuringRoutes });

@@ -26,7 +26,8 @@ const sketches: readonly Sketch[] = [
       wornBy: 'woman',
       maker: 'Mesdames Orrin & Pell',
       place: 'Larkmoor',
-      description: 'A promenade dress in two parts. The skirt is drawn back over a deep shelf; one panel is striped. Brass buttons close the front in a single row.',
+      description:
+        'A promenade dress in two parts. The skirt is drawn back over a deep shelf; one panel is striped. Brass buttons close the front in a single row.',
       label: { transcription: 'Orrin & Pell\nRobes', where: 'woven waist tape, centre back' },
       materials: ['silk faille', 'silk velvet', 'cotton lining'],
       techniques: ['machine stitched', 'hand finished'],
@@ -42,12 +43,48 @@ const sketches: readonly Sketch[] = [
       otherNumbers: [{ kind: 'former', number: 'B 214' }],
     },
   },
-  { number: 'LH.1958.6', title: 'Bodice of dark red wool', kind: 'bodice', date: '1881/1883', stage: 'in-review' },
-  { number: 'LH.1980.40', title: 'Tailored jacket of brown tweed', kind: 'jacket', date: '1894/1896', stage: 'approved' },
-  { number: 'LH.1954.17', title: 'Dress of white muslin with whitework', kind: 'dress', date: '1810/1815', stage: 'published' },
-  { number: 'LH.1969.12', title: 'Cape of black wool with beads', kind: 'cape', date: '1890/1895', stage: 'withdrawn' },
-  { number: 'LH.1944.1', title: 'Tailcoat of dark blue broadcloth', kind: 'coat', date: '1825/1830', stage: 'published' },
-  { number: 'LH.1987.19', title: 'Corset of rust sateen, flossed', kind: 'corset', date: '1880/1885', stage: 'published' },
+  {
+    number: 'LH.1958.6',
+    title: 'Bodice of dark red wool',
+    kind: 'bodice',
+    date: '1881/1883',
+    stage: 'in-review',
+  },
+  {
+    number: 'LH.1980.40',
+    title: 'Tailored jacket of brown tweed',
+    kind: 'jacket',
+    date: '1894/1896',
+    stage: 'approved',
+  },
+  {
+    number: 'LH.1954.17',
+    title: 'Dress of white muslin with whitework',
+    kind: 'dress',
+    date: '1810/1815',
+    stage: 'published',
+  },
+  {
+    number: 'LH.1969.12',
+    title: 'Cape of black wool with beads',
+    kind: 'cape',
+    date: '1890/1895',
+    stage: 'withdrawn',
+  },
+  {
+    number: 'LH.1944.1',
+    title: 'Tailcoat of dark blue broadcloth',
+    kind: 'coat',
+    date: '1825/1830',
+    stage: 'published',
+  },
+  {
+    number: 'LH.1987.19',
+    title: 'Corset of rust sateen, flossed',
+    kind: 'corset',
+    date: '1880/1885',
+    stage: 'published',
+  },
 ];
 
 const made = '2026-11-20T10:00:00.000Z';
@@ -97,7 +134,10 @@ export function sampleGarments(): Garment[] {
   return sketches.map(({ number, title, kind, date, stage, parts = [kind], more = {} }, index): Garment => {
     const id = idOf(100 + index);
     const isPublic = stage === 'published';
-    const pictures = index < 4 ? [image(500 + index * 10, id, 0, { alt: `${title}, front`, caption: 'Rendered; invented garment' })] : [];
+    const pictures =
+      index < 4
+        ? [image(500 + index * 10, id, 0, { alt: `${title}, front`, caption: 'Rendered; invented garment' })]
+        : [];
     return {
       id,
       version: 3,
@@ -105,7 +145,14 @@ export function sampleGarments(): Garment[] {
       publicNumber: isPublic || stage === 'withdrawn' ? number.toLowerCase().replaceAll('.', '-') : null,
       publishedVersion: isPublic ? 1 : null,
       isPublic,
-      record: GarmentRecord.parse({ ownNumber: number, title, kind, date, creditLine: 'Given by the Sallow family', ...more }),
+      record: GarmentRecord.parse({
+        ownNumber: number,
+        title,
+        kind,
+        date,
+        creditLine: 'Given by the Sallow family',
+        ...more,
+      }),
       parts: parts.map((one, place) => part(index, one, place, parts.length)),
       images: pictures,
       returned: null,

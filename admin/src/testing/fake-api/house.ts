@@ -17,11 +17,20 @@ export class House {
   readonly invitations: z.infer<typeof Invitation>[] = [{ ...invitation }];
   readonly answers = new Map<string, NonNullable<FindingView['answer']>>();
   readonly changes: Change[] = [
-    { kind: 'changed', area: 'record', label: 'Title', before: 'Red bodice', after: 'Bodice of dark red wool' },
+    {
+      kind: 'changed',
+      area: 'record',
+      label: 'Title',
+      before: 'Red bodice',
+      after: 'Bodice of dark red wool',
+    },
     { kind: 'added', area: 'measurement', label: 'Waist (bodice)', before: null, after: '612 mm' },
     { kind: 'removed', area: 'picture', label: 'Picture, side', before: 'picture-7.jpg', after: null },
   ];
-  readonly audit: string[] = ['Wren Aldous opened a sheet for LH.1966.30.1', 'Imogen Sallow published LH.1954.17, version 1'];
+  readonly audit: string[] = [
+    'Wren Aldous opened a sheet for LH.1966.30.1',
+    'Imogen Sallow published LH.1954.17, version 1',
+  ];
   /** Who is signed in; null when the session has ended. */
   signedIn: PersonShown | null;
   /** Whether a refresh is granted while nobody is signed in by an access token. */

@@ -27,10 +27,17 @@ export const imageRoutes: Routes = {
   'POST /workroom/garments/:id/images': ({ house, params, form }) => {
     const file = form?.get('file');
     const garment = house.garment(params.id);
-    if (!garment || !(file instanceof File)) throw new Refusal(400, 'image.missing');
-    if (file.name.endsWith('.svg')) throw new Refusal(415, 'image.type', {}, 'SVG is not kept. JPEG, PNG, WebP and TIFF are.');
-    if (file.name.startsWith('broken')) throw new Refusal(422, 'image.refused', {}, 'The picture ends in the middle: it was not copied whole.');
-    const fresh = image(garment.images.length + 700 + garment.images.length, garment.id, garment.images.length, { fileName: file.name, state: 'received', formsMade: 0, id: house.newId() });
+    if (!garment || !file || typeof file === 'string') throw new Refusal(400, 'image.missing');
+    if (file.name.endsWith('.svg'))
+      throw new Refusal(415, 'image.type', {}, 'SVG is not kept. JPEG, PNG, WebP and TIFF are.');
+    if (file.name.startsWith('broken'))
+      throw new Refusal(422, 'image.refused', {}, 'The picture ends in the middle: it was not copied whole.');
+    const fresh = image(
+      garment.images.length + 700 + garment.images.length,
+      garment.id,
+      garment.images.length,
+      { fileName: file.name, state: 'received', formsMade: 0, id: house.newId() },
+    );
     garment.images.push(fresh);
     return json(fresh, 201);
   },

@@ -1,7 +1,16 @@
 import { runChecks } from '@ellwand/shared/checks/registry';
 import { protocolFor } from '@ellwand/shared/protocols/standard-protocols';
 import { derivedViews, toReading } from '@ellwand/shared/records/measured';
-import { FindingAnswer, type NewReading, NewReadings, NewSheet, type Sheet, SheetFacts, type SheetFindings, type StoredReading } from '@ellwand/shared/records/sheet';
+import {
+  FindingAnswer,
+  type NewReading,
+  NewReadings,
+  NewSheet,
+  type Sheet,
+  SheetFacts,
+  type SheetFindings,
+  type StoredReading,
+} from '@ellwand/shared/records/sheet';
 import { findMeasuringPoint } from '@ellwand/shared/points/measuring-points';
 import { wholeValue } from '@ellwand/shared/readings/whole-value';
 import { mm, toMmString } from '@ellwand/shared/units/length';
@@ -19,22 +28,62 @@ const known = (house: House, id: string): Sheet => {
 
 function stored(house: House, sheet: Sheet, reading: NewReading): StoredReading {
   const { id, pointId, round, replaces, note, readBy, device, keyedAt } = reading;
-  const base = { id, pointId, round, replaces, note, readBy, device, keyedAt, stands: true, recordedBy: house.signedIn!.id, receivedAt: new Date().toISOString() };
+  const base = {
+    id,
+    pointId,
+    round,
+    replaces,
+    note,
+    readBy,
+    device,
+    keyedAt,
+    stands: true,
+    recordedBy: house.signedIn!.id,
+    receivedAt: new Date().toISOString(),
+  };
   if (reading.state === 'not-taken') {
-    return { ...base, state: 'not-taken', valueMm: null, typed: null, unit: null, tapeCount: 0, tapeLengthMm: null, levelFoundBy: null, reason: reading.reason };
+    return {
+      ...base,
+      state: 'not-taken',
+      valueMm: null,
+      typed: null,
+      unit: null,
+      tapeCount: 0,
+      tapeLengthMm: null,
+      levelFoundBy: null,
+      reason: reading.reason,
+    };
   }
   const parsed = fromTyped({ text: reading.typed, unit: reading.unit });
   if (!parsed.ok) throw new Refusal(422, 'reading.unreadable');
   const how = findMeasuringPoint(pointId)?.how ?? 'straight';
   const { tapeLengthMm, tapeZeroMm } = sheet.facts;
-  const value = wholeValue({ read: parsed.value.length, how, tapeCount: reading.tapeCount, tapeLength: mm(tapeLengthMm), tapeZero: mm(tapeZeroMm) });
-  return { ...base, state: 'taken', valueMm: toMmString(value), typed: reading.typed, unit: reading.unit, tapeCount: reading.tapeCount, tapeLengthMm: reading.tapeCount > 0 ? tapeLengthMm : null, levelFoundBy: reading.levelFoundBy, reason: null };
+  const value = wholeValue({
+    read: parsed.value.length,
+    how,
+    tapeCount: reading.tapeCount,
+    tapeLength: mm(tapeLengthMm),
+    tapeZero: mm(tapeZeroMm),
+  });
+  return {
+    ...base,
+    state: 'taken',
+    valueMm: toMmString(value),
+    typed: reading.typed,
+    unit: reading.unit,
+    tapeCount: reading.tapeCount,
+    tapeLengthMm: reading.tapeCount > 0 ? tapeLengthMm : null,
+    levelFoundBy: reading.levelFoundBy,
+    reason: null,
+  };
 }
 
 function keep(house: House, sheet: Sheet, reading: NewReading) {
   const before = sheet.readings.find(({ id }) => id === reading.id);
   if (before) return { id: reading.id, outcome: 'already-kept', reading: before };
-  const standing = sheet.readings.find(({ pointId, round, stands }) => stands && pointId === reading.pointId && round === reading.round);
+  const standing = sheet.readings.find(
+    ({ pointId, round, stands }) => stands && pointId === reading.pointId && round === reading.round,
+  );
   if ((standing?.id ?? null) !== reading.replaces) {
     return { id: reading.id, outcome: 'conflict', detail: 'Another reading stands at this point.', standing };
   }
@@ -51,7 +100,14 @@ export function findingsOf(house: House, sheet: Sheet): SheetFindings {
   return {
     findings: found.map(({ checkId, severity, sentence, pointIds }) => {
       const key = `${checkId}:${pointIds.join(',')}`;
-      return { key, checkId, severity, sentence, pointIds: [...pointIds], answer: house.answers.get(`${sheet.id} ${key}`) ?? null };
+      return {
+        key,
+        checkId,
+        severity,
+        sentence,
+        pointIds: [...pointIds],
+        answer: house.answers.get(`${sheet.id} ${key}`) ?? null,
+      };
     }),
     derived: derivedViews(sheet.kind, sheet.readings),
   };
@@ -70,7 +126,11 @@ export const measuringRoutes: Routes = {
     if (again) return json(again, 201);
     const garment = house.garments.find(({ parts }) => parts.some((part) => part.id === params.id));
     if (!garment) throw new Refusal(404, 'part.unknown');
-    const sheet = sheetFor(garment, garment.parts.findIndex((part) => part.id === params.id), id ?? house.newId());
+    const sheet = sheetFor(
+      garment,
+      garment.parts.findIndex((part) => part.id === params.id),
+      id ?? house.newId(),
+    );
     house.sheets.push(sheet);
     setFacts(house, sheet, facts);
     refreshSummaries(house, sheet);
@@ -91,10 +151,15 @@ export const measuringRoutes: Routes = {
     refreshSummaries(house, sheet);
     return json({ sheetVersion: sheet.version, results });
   },
-  'GET /workroom/sheets/:id/findings': ({ house, params }) => json(findingsOf(house, known(house, params.id))),
+  'GET /workroom/sheets/:id/findings': ({ house, params }) =>
+    json(findingsOf(house, known(house, params.id))),
   'POST /workroom/sheets/:id/findings/answers': ({ house, params, body }) => {
     const { key, reason } = read(FindingAnswer, body);
-    house.answers.set(`${params.id} ${key}`, { reason, by: house.signedIn!.name, at: new Date().toISOString() });
+    house.answers.set(`${params.id} ${key}`, {
+      reason,
+      by: house.signedIn!.name,
+      at: new Date().toISOString(),
+    });
     return json(findingsOf(house, known(house, params.id)));
   },
   'POST /workroom/sheets/:id/complete': ({ house, params, version }) => {
@@ -102,7 +167,8 @@ export const measuringRoutes: Routes = {
     matched(sheet.version, version);
     const { findings } = findingsOf(house, sheet);
     const stops = findings.filter(({ severity, answer }) => severity === 'stop' && !answer);
-    if (stops.length > 0) throw new Refusal(409, 'sheet.open-stops', { findings: stops }, 'A stop is not answered yet.');
+    if (stops.length > 0)
+      throw new Refusal(409, 'sheet.open-stops', { findings: stops }, 'A stop is not answered yet.');
     sheet.state = 'complete';
     sheet.version += 1;
     refreshSummaries(house, sheet);
@@ -116,7 +182,11 @@ export const measuringRoutes: Routes = {
   },
 };
 
-function setFacts(house: House, sheet: Sheet, { people, ...facts }: ReturnType<typeof SheetFacts.parse>): void {
+function setFacts(
+  house: House,
+  sheet: Sheet,
+  { people, ...facts }: ReturnType<typeof SheetFacts.parse>,
+): void {
   const nameOf = (userId: string) => house.people.find(({ id }) => id === userId)?.name ?? '';
   sheet.facts = { ...facts, people: people.map((one) => ({ ...one, name: nameOf(one.userId) })) };
 }

@@ -1,4 +1,12 @@
-import { AcceptInvitation, FirstAdministrator, InvitationToken, NewInvitation, type Person, PersonChange, SignIn } from '@ellwand/shared/records/session';
+import {
+  AcceptInvitation,
+  FirstAdministrator,
+  InvitationToken,
+  NewInvitation,
+  type Person,
+  PersonChange,
+  SignIn,
+} from '@ellwand/shared/records/session';
 import type { z } from 'zod';
 import type { House } from './house.js';
 import { INVITATION_TOKEN, PASSWORD, staff } from './people.js';
@@ -40,7 +48,9 @@ export const peopleRoutes: Routes = {
   'POST /invitations/accept': ({ house, body }) => {
     const { name, password } = read(AcceptInvitation, body);
     if (password === 'password1234') {
-      throw new Refusal(422, 'password.common', { errors: [{ pointer: '/password', detail: 'Many people use this password. Choose another' }] });
+      throw new Refusal(422, 'password.common', {
+        errors: [{ pointer: '/password', detail: 'Many people use this password. Choose another' }],
+      });
     }
     const person = { ...staff.recorder, id: house.newId(), name, email: 'odette.farrow@larkmoor.example' };
     house.people.push(person);
@@ -54,7 +64,16 @@ export const peopleRoutes: Routes = {
   'POST /workroom/invitations': ({ house, body }) => {
     const { email, name, roles } = read(NewInvitation, body);
     const now = Date.now();
-    const invitation = { id: house.newId(), email, name, roles, invitedBy: house.signedIn!.name, createdAt: new Date(now).toISOString(), expiresAt: new Date(now + 7 * 86_400_000).toISOString(), state: 'open' as const };
+    const invitation = {
+      id: house.newId(),
+      email,
+      name,
+      roles,
+      invitedBy: house.signedIn!.name,
+      createdAt: new Date(now).toISOString(),
+      expiresAt: new Date(now + 7 * 86_400_000).toISOString(),
+      state: 'open' as const,
+    };
     house.invitations.push(invitation);
     return json(invitation, 201);
   },
@@ -63,7 +82,8 @@ export const peopleRoutes: Routes = {
     if (place >= 0) house.invitations.splice(place, 1);
     return nothing();
   },
-  'GET /workroom/users': ({ house }) => json({ total: house.people.length, page: 1, size: 50, items: house.people }),
+  'GET /workroom/users': ({ house }) =>
+    json({ total: house.people.length, page: 1, size: 50, items: house.people }),
   'PATCH /workroom/users/:id': ({ house, params, body, version }) => {
     const person = house.people.find(({ id }) => id === params.id);
     if (!person) throw new Refusal(404, 'user.unknown');
@@ -71,9 +91,18 @@ export const peopleRoutes: Routes = {
     Object.assign(person, read(PersonChange, body), { version: person.version + 1 });
     return json(person);
   },
-  'GET /workroom/colleagues': ({ house }) => json({ items: house.people.filter(({ active }) => active).map(({ id, name }) => ({ id, name })) }),
+  'GET /workroom/colleagues': ({ house }) =>
+    json({ items: house.people.filter(({ active }) => active).map(({ id, name }) => ({ id, name })) }),
   'GET /workroom/audit': ({ house, query }) => {
-    const items = house.audit.map((summary, index) => ({ id: house.newId(), at: '2026-12-01T09:10:00.000Z', actor: summary.split(' ').slice(0, 2).join(' '), verb: 'done', subjectKind: 'garment', subjectId: house.garments[index]?.id ?? null, summary }));
+    const items = house.audit.map((summary, index) => ({
+      id: house.newId(),
+      at: '2026-12-01T09:10:00.000Z',
+      actor: summary.split(' ').slice(0, 2).join(' '),
+      verb: 'done',
+      subjectKind: 'garment',
+      subjectId: house.garments[index]?.id ?? null,
+      summary,
+    }));
     return json({ total: items.length, page: Number(query.get('page') ?? 1), size: 50, items });
   },
 };

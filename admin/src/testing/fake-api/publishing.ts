@@ -15,7 +15,11 @@ export function reviewOf(house: House, garment: Garment): Review {
     version: garment.version,
     nextVersion: (garment.publishedVersion ?? (garment.publicNumber ? 3 : 0)) + 1,
     changes: house.changes,
-    readiness: open.map((sheet) => ({ blocks: 'submit', sentence: `The sheet of the ${sheet.garment.partName.toLowerCase()} is not complete.`, href: `/workroom/sheets/${sheet.id}` })),
+    readiness: open.map((sheet) => ({
+      blocks: 'submit',
+      sentence: `The sheet of the ${sheet.garment.partName.toLowerCase()} is not complete.`,
+      href: `/workroom/sheets/${sheet.id}`,
+    })),
     mayNotApprove: house.mayNotApprove,
     people: [
       { name: 'Wren Aldous', did: 'read the tape and edited the record' },
@@ -50,25 +54,85 @@ function publishedPart(house: House, garment: Garment, part: Garment['parts'][nu
       halfMm: null,
       imageId: null,
     })),
-    notTaken: readings.flatMap(({ pointId, reason }) => (reason ? [{ pointId, label: measuringPoint(pointId as PointId).name, reason }] : [])),
+    notTaken: readings.flatMap(({ pointId, reason }) =>
+      reason ? [{ pointId, label: measuringPoint(pointId as PointId).name, reason }] : [],
+    ),
     derived: sheet ? derivedViews(sheet.kind, readings) : [],
   };
 }
 
 /** The public copy, near enough to look at: what is private is left out here too. */
 export function publishedOf(house: House, garment: Garment): PublishedDocument {
-  const { ownNumber, title, kind, wornBy, description, date, maker, label, place, materials, techniques, colours, fastenings } = garment.record;
-  const { lining, alterations, condition, wearer, references, otherNumbers, creditLine, rights, hazards, showHazards } = garment.record;
+  const {
+    ownNumber,
+    title,
+    kind,
+    wornBy,
+    description,
+    date,
+    maker,
+    label,
+    place,
+    materials,
+    techniques,
+    colours,
+    fastenings,
+  } = garment.record;
+  const {
+    lining,
+    alterations,
+    condition,
+    wearer,
+    references,
+    otherNumbers,
+    creditLine,
+    rights,
+    hazards,
+    showHazards,
+  } = garment.record;
   return {
     number: garment.publicNumber ?? ownNumber.toLowerCase().replaceAll('.', '-'),
     version: (garment.publishedVersion ?? 0) + 1,
-    ownNumber, title, kind, wornBy, description, maker, label, place, materials, techniques, colours, fastenings,
-    lining, alterations, condition, wearer, references, otherNumbers, creditLine,
-    date: { edtf: date, display: date.endsWith('~') ? `about ${date.slice(0, -1)}` : date.replace('/', '–'), fromYear: 1880, toYear: 1890 },
+    ownNumber,
+    title,
+    kind,
+    wornBy,
+    description,
+    maker,
+    label,
+    place,
+    materials,
+    techniques,
+    colours,
+    fastenings,
+    lining,
+    alterations,
+    condition,
+    wearer,
+    references,
+    otherNumbers,
+    creditLine,
+    date: {
+      edtf: date,
+      display: date.endsWith('~') ? `about ${date.slice(0, -1)}` : date.replace('/', '–'),
+      fromYear: 1880,
+      toYear: 1890,
+    },
     hazards: showHazards ? hazards : [],
     rights: { uri: rights, label: rightsStatements[rights] },
     parts: garment.parts.map((part) => publishedPart(house, garment, part)),
-    images: garment.images.filter(({ hidden, state }) => !hidden && state === 'ready').map(({ id, view, alt, caption, credit, widths }) => ({ id, view, alt, caption, credit, widths, widthPx: 2100, heightPx: 2800 })),
+    images: garment.images
+      .filter(({ hidden, state }) => !hidden && state === 'ready')
+      .map(({ id, view, alt, caption, credit, widths }) => ({
+        id,
+        view,
+        alt,
+        caption,
+        credit,
+        widths,
+        widthPx: 2100,
+        heightPx: 2800,
+      })),
     museum: 'Larkmoor House Museum of Dress',
     publishedAt: '2026-12-01T12:00:00.000Z',
   };

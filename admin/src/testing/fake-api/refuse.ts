@@ -13,10 +13,13 @@ export class Refusal extends Error {
 
   answer(): Response {
     const { status, code, message, more } = this;
-    return new Response(JSON.stringify({ type: `urn:ellwand:${code}`, title: message, status, code, ...more }), {
-      status,
-      headers: { 'Content-Type': 'application/problem+json' },
-    });
+    return new Response(
+      JSON.stringify({ type: `urn:ellwand:${code}`, title: message, status, code, ...more }),
+      {
+        status,
+        headers: { 'Content-Type': 'application/problem+json' },
+      },
+    );
   }
 }
 
@@ -24,6 +27,9 @@ export class Refusal extends Error {
 export function read<T extends z.ZodType>(schema: T, body: unknown): z.output<T> {
   const parsed = schema.safeParse(body);
   if (parsed.success) return parsed.data;
-  const errors = parsed.error.issues.map(({ path, message }) => ({ pointer: `/${path.join('/')}`, detail: message }));
+  const errors = parsed.error.issues.map(({ path, message }) => ({
+    pointer: `/${path.join('/')}`,
+    detail: message,
+  }));
   throw new Refusal(422, 'body.invalid', { errors }, 'The request does not fit.');
 }

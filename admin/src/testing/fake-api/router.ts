@@ -10,7 +10,9 @@ export interface Call {
   /** From If-Match. */
   readonly version: number | null;
 }
-export type Route = (call: Call & { readonly params: { readonly id: string } }) => Response | Promise<Response>;
+export type Route = (
+  call: Call & { readonly params: { readonly id: string } },
+) => Response | Promise<Response>;
 /** "VERB /path/:id" to what answers it. */
 export type Routes = Readonly<Record<string, Route>>;
 
@@ -22,12 +24,23 @@ export const nothing = (): Response => new Response(null, { status: 204 });
 export function matched(current: number, sent: number | null, changedBy = 'Imogen Sallow'): void {
   if (sent === null) throw new Refusal(428, 'version.required');
   if (sent !== current) {
-    throw new Refusal(412, 'version.stale', { current, changedBy, changedAt: '2026-12-01T14:32:00.000Z' }, 'Somebody saved in between.');
+    throw new Refusal(
+      412,
+      'version.stale',
+      { current, changedBy, changedAt: '2026-12-01T14:32:00.000Z' },
+      'Somebody saved in between.',
+    );
   }
 }
 
 /** Routes that need nobody signed in. */
-const open = ['POST /session', 'POST /session/refresh', 'POST /invitations/', 'POST /first-administrator', 'DELETE /session'];
+const open = [
+  'POST /session',
+  'POST /session/refresh',
+  'POST /invitations/',
+  'POST /first-administrator',
+  'DELETE /session',
+];
 
 function paramsOf(pattern: string, path: string): Record<string, string> | null {
   const names: string[] = [];
@@ -52,12 +65,18 @@ export function makeHandler(house: House, routes: Routes) {
     const url = new URL(request.url);
     const call = `${request.method} ${url.pathname.replace('/api/v1', '')}`;
     try {
-      if (!house.signedIn && !open.some((one) => call.startsWith(one))) throw new Refusal(401, 'session.ended');
+      if (!house.signedIn && !open.some((one) => call.startsWith(one)))
+        throw new Refusal(401, 'session.ended');
       for (const [pattern, route] of Object.entries(routes)) {
         const params = paramsOf(pattern, call);
         if (!params) continue;
         const version = /"(\d+)"/.exec(request.headers.get('If-Match') ?? '')?.[1];
-        const asked = { house, params: { id: '', ...params }, query: url.searchParams, version: version === undefined ? null : Number(version) };
+        const asked = {
+          house,
+          params: { id: '', ...params },
+          query: url.searchParams,
+          version: version === undefined ? null : Number(version),
+        };
         return await route({ ...asked, ...(await bodyOf(request)) });
       }
       throw new Refusal(404, 'route.unknown', {}, `No route for ${call}`);

@@ -6,7 +6,12 @@ import { idOf, staff } from './people.js';
 
 const at = '2026-12-01T09:12:00.000Z';
 
-export function reading(number: number, pointId: string, valueMm: string, more: Partial<StoredReading> = {}): StoredReading {
+export function reading(
+  number: number,
+  pointId: string,
+  valueMm: string,
+  more: Partial<StoredReading> = {},
+): StoredReading {
   return {
     id: idOf(number),
     pointId,
@@ -70,7 +75,17 @@ export function sheetFor(garment: Garment, partIndex: number, id: string): Sheet
       fasteningPair: 'Waist tape, first hook to its eye',
       note: '',
     },
-    garment: { ownNumber, title, date, maker, partName: part.name, partSuffix: part.suffix, firstImageId: garment.images[0]?.id ?? null, handling, hazards },
+    garment: {
+      ownNumber,
+      title,
+      date,
+      maker,
+      partName: part.name,
+      partSuffix: part.suffix,
+      firstImageId: garment.images[0]?.id ?? null,
+      handling,
+      hazards,
+    },
     readings: [],
   };
 }
@@ -84,7 +99,13 @@ export function sampleSheets([first]: readonly Garment[]): Sheet[] {
       reading(3002, 'waist', '612', { levelFoundBy: 'seam' }),
       reading(3003, 'inner-waist-band', '631'),
       reading(3004, 'neck', '372'),
-      reading(3005, 'side-seam', '0', { state: 'not-taken', valueMm: null, typed: null, unit: null, reason: 'too-fragile' }),
+      reading(3005, 'side-seam', '0', {
+        state: 'not-taken',
+        valueMm: null,
+        typed: null,
+        unit: null,
+        reason: 'too-fragile',
+      }),
     ],
   };
   return [bodice, sheetFor(first!, 1, idOf(2002))];

@@ -5,7 +5,11 @@ import { api, queryString } from '../../../lib/api-client.js';
 
 const AuditPage = pageOf(AuditEntry);
 
-export const auditQuery = (asked: { readonly page: number; readonly size: number; readonly subjectId?: string }) =>
+export const auditQuery = (asked: {
+  readonly page: number;
+  readonly size: number;
+  readonly subjectId?: string;
+}) =>
   queryOptions({
     queryKey: ['audit', asked],
     placeholderData: keepPreviousData,

@@ -15,5 +15,6 @@ export const garmentListQuery = (asked: GarmentListAsked) =>
   queryOptions({
     queryKey: ['garments', asked],
     placeholderData: keepPreviousData,
-    queryFn: ({ signal }) => api.get(`/workroom/garments${queryString({ ...asked })}`, GarmentPage, { signal }),
+    queryFn: ({ signal }) =>
+      api.get(`/workroom/garments${queryString({ ...asked })}`, GarmentPage, { signal }),
   });

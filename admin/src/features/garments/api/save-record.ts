@@ -6,7 +6,11 @@ import type { ProblemError } from '../../../lib/problem-error.js';
 export const saveRecord = (id: string, version: number, body: GarmentRecord) =>
   api.put(`/workroom/garments/${id}/record`, Garment, { body, version });
 
-const Stale = z.object({ current: z.number().int(), changedBy: z.string().nullish(), changedAt: z.string().nullish() });
+const Stale = z.object({
+  current: z.number().int(),
+  changedBy: z.string().nullish(),
+  changedAt: z.string().nullish(),
+});
 
 /** What a 412 says of the version that came in between; the screen asks for the record itself. */
 export function staleOf(error: ProblemError): z.infer<typeof Stale> | null {

@@ -33,9 +33,7 @@ export function GarmentListPage() {
   return (
     <Page
       title="Garments"
-      lead={
-        <span role="status">{list.data ? count(list.data.total, searched) : ''}</span>
-      }
+      lead={<span role="status">{list.data ? count(list.data.total, searched) : ''}</span>}
       aside={
         mayWrite && (
           <ButtonLink tone="action" to={paths.newGarment()}>
@@ -62,7 +60,9 @@ export function GarmentListPage() {
             )
           }
         >
-          {searched ? 'Numbers, titles and makers are searched. Try fewer letters.' : 'A garment is recorded once; its measurements and pictures follow.'}
+          {searched
+            ? 'Numbers, titles and makers are searched. Try fewer letters.'
+            : 'A garment is recorded once; its measurements and pictures follow.'}
         </Empty>
       )}
       {list.data && list.data.total > 0 && (
@@ -112,7 +112,12 @@ function SearchBar({ asked, onSearch, height, onHeight }: SearchBarProps) {
         <label htmlFor="stage" className="text-label font-medium text-ink-2">
           Stage
         </label>
-        <select id="stage" value={asked.stage ?? ''} onChange={(event) => onSearch({ stage: event.target.value })} className="box mt-1">
+        <select
+          id="stage"
+          value={asked.stage ?? ''}
+          onChange={(event) => onSearch({ stage: event.target.value })}
+          className="box mt-1"
+        >
           <option value="">All stages</option>
           {recordStages.map((stage) => (
             <option key={stage} value={stage}>

@@ -12,7 +12,13 @@ const heights: Readonly<Record<RowHeight, string>> = { '36': 'h-9', '44': 'h-11'
 const thumbs: Readonly<Record<RowHeight, string>> = { '36': 'h-8 w-6', '44': 'h-10 w-8', '56': 'h-12 w-10' };
 
 /** The list as a table; on a phone the same rows stand as blocks. */
-export function GarmentTable({ garments, height }: { readonly garments: readonly GarmentSummary[]; readonly height: RowHeight }) {
+export function GarmentTable({
+  garments,
+  height,
+}: {
+  readonly garments: readonly GarmentSummary[];
+  readonly height: RowHeight;
+}) {
   return (
     <table className="w-full border-collapse bg-sheet text-table max-md:block">
       <caption className="sr-only">Garments, with number, title, date, stage and what is open</caption>
@@ -21,13 +27,27 @@ export function GarmentTable({ garments, height }: { readonly garments: readonly
           <th scope="col" className="w-14 px-3 py-2 font-medium">
             <span className="sr-only">Picture</span>
           </th>
-          <th scope="col" className="px-3 py-2 font-medium">Number</th>
-          <th scope="col" className="px-3 py-2 font-medium">Title</th>
-          <th scope="col" className="px-3 py-2 font-medium">Kind</th>
-          <th scope="col" className="px-3 py-2 font-medium">Date</th>
-          <th scope="col" className="px-3 py-2 text-right font-medium">Pictures</th>
-          <th scope="col" className="px-3 py-2 font-medium">Stage</th>
-          <th scope="col" className="px-3 py-2 font-medium max-lg:hidden">Changed</th>
+          <th scope="col" className="px-3 py-2 font-medium">
+            Number
+          </th>
+          <th scope="col" className="px-3 py-2 font-medium">
+            Title
+          </th>
+          <th scope="col" className="px-3 py-2 font-medium">
+            Kind
+          </th>
+          <th scope="col" className="px-3 py-2 font-medium">
+            Date
+          </th>
+          <th scope="col" className="px-3 py-2 text-right font-medium">
+            Pictures
+          </th>
+          <th scope="col" className="px-3 py-2 font-medium">
+            Stage
+          </th>
+          <th scope="col" className="px-3 py-2 font-medium max-lg:hidden">
+            Changed
+          </th>
         </tr>
       </thead>
       <tbody className="max-md:block">
@@ -47,20 +67,30 @@ function GarmentRow({ garment, height }: { readonly garment: GarmentSummary; rea
       <td className="px-3 max-md:row-span-4 max-md:px-2">
         <Thumbnail garment={garment} className={`${thumbs[height]} max-md:h-20 max-md:w-14`} />
       </td>
-      <td className="figures whitespace-nowrap px-3 text-ink-2 max-md:px-2 max-md:text-label">{garment.ownNumber}</td>
+      <td className="figures whitespace-nowrap px-3 text-ink-2 max-md:px-2 max-md:text-label">
+        {garment.ownNumber}
+      </td>
       <th scope="row" className="px-3 text-left font-medium max-md:px-2">
         <Link to={paths.garment(garment.id)} className="hover:underline after:absolute after:inset-0">
           {garment.title}
         </Link>
       </th>
       <td className="px-3 text-ink-2 max-md:hidden">{kindWord(garment.kind)}</td>
-      <td className="figures whitespace-nowrap px-3 text-ink-2 max-md:px-2 max-md:text-label">{garment.date}</td>
+      <td className="figures whitespace-nowrap px-3 text-ink-2 max-md:px-2 max-md:text-label">
+        {garment.date}
+      </td>
       <td className="figures px-3 text-right text-ink-2 max-md:hidden">{garment.pictures}</td>
       <td className="px-3 max-md:px-2">
         <StageMark stage={garment.stage} isPublic={garment.isPublic} />
-        {garment.openSheets > 0 && <span className="ml-2 whitespace-nowrap text-label text-ink-2">{openSheets(garment.openSheets)}</span>}
+        {garment.openSheets > 0 && (
+          <span className="ml-2 whitespace-nowrap text-label text-ink-2">
+            {openSheets(garment.openSheets)}
+          </span>
+        )}
       </td>
-      <td className="figures whitespace-nowrap px-3 text-ink-3 max-lg:hidden">{dayText(garment.updatedAt)}</td>
+      <td className="figures whitespace-nowrap px-3 text-ink-3 max-lg:hidden">
+        {dayText(garment.updatedAt)}
+      </td>
     </tr>
   );
 }
@@ -68,7 +98,15 @@ function GarmentRow({ garment, height }: { readonly garment: GarmentSummary; rea
 const openSheets = (sheets: number) => (sheets === 1 ? '1 sheet open' : `${sheets} sheets open`);
 
 function Thumbnail({ garment, className }: { readonly garment: GarmentSummary; readonly className: string }) {
-  if (!garment.firstImageId) return <div className={`${className} rounded-sm border border-dashed border-rule`} aria-hidden="true" />;
+  if (!garment.firstImageId)
+    return <div className={`${className} rounded-sm border border-dashed border-rule`} aria-hidden="true" />;
   // The row's link names the garment; the thumbnail says nothing more.
-  return <img src={staffPicture(garment.firstImageId, 320)} alt="" loading="lazy" className={`${className} rounded-sm bg-well object-cover object-top`} />;
+  return (
+    <img
+      src={staffPicture(garment.firstImageId, 320)}
+      alt=""
+      loading="lazy"
+      className={`${className} rounded-sm bg-well object-cover object-top`}
+    />
+  );
 }

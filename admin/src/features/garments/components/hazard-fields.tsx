@@ -1,7 +1,12 @@
 import { hazardIds } from '@ellwand/shared/records/garment';
 import { useFormContext, useWatch } from 'react-hook-form';
 import { TextField } from '../../../components/ui/field.js';
-import { hazardCautions, type HazardId, hazardLabels, standingLabels } from '../../../lib/words/hazard-words.js';
+import {
+  hazardCautions,
+  type HazardId,
+  hazardLabels,
+  standingLabels,
+} from '../../../lib/words/hazard-words.js';
 import type { RecordTyped } from '../record-form.js';
 import { Fieldset, useBox } from './record-fields.js';
 

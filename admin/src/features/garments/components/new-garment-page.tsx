@@ -41,7 +41,11 @@ export function NewGarmentPage() {
   const [division, setDivision] = useState<Division>('whole');
   // Made once for this page: a repeated request, after a lost answer, makes one garment.
   const [id] = useState(newId);
-  const form = useForm<RecordTyped, unknown, GarmentRecord>({ resolver: zodResolver(RecordForm), defaultValues: emptyRecord(), shouldFocusError: false });
+  const form = useForm<RecordTyped, unknown, GarmentRecord>({
+    resolver: zodResolver(RecordForm),
+    defaultValues: emptyRecord(),
+    shouldFocusError: false,
+  });
   const { errors, isSubmitting, submitCount } = form.formState;
   const save = form.handleSubmit(async (record) => {
     try {
@@ -50,7 +54,10 @@ export function NewGarmentPage() {
       void queries.invalidateQueries({ queryKey: ['garments'] });
       void navigate(paths.garment(garment.id));
     } catch (error) {
-      showProblem(error, form.setError, { prefix: '/record', known: (name) => (name.split('.')[0] ?? '') in boxLabels });
+      showProblem(error, form.setError, {
+        prefix: '/record',
+        known: (name) => (name.split('.')[0] ?? '') in boxLabels,
+      });
     }
   });
   return (
@@ -58,11 +65,20 @@ export function NewGarmentPage() {
       <FormProvider {...form}>
         <form noValidate onSubmit={(event) => void save(event)} className="max-w-3xl space-y-8">
           <ErrorSummary mistakes={mistakesOf(errors)} attempt={isSubmitting ? 0 : submitCount} />
-          <Fieldset legend="Parts" hint="A part is what is measured by itself and has its own sheet. Parts can be added later.">
+          <Fieldset
+            legend="Parts"
+            hint="A part is what is measured by itself and has its own sheet. Parts can be added later."
+          >
             <div className="flex flex-wrap gap-x-8 gap-y-3">
               {divisions.map(({ id: value, label }) => (
                 <label key={value} className="flex min-h-8 items-center gap-3 text-table">
-                  <input type="radio" name="division" className="size-6 accent-indigo" checked={division === value} onChange={() => setDivision(value)} />
+                  <input
+                    type="radio"
+                    name="division"
+                    className="size-6 accent-indigo"
+                    checked={division === value}
+                    onChange={() => setDivision(value)}
+                  />
                   {label}
                 </label>
               ))}

@@ -19,7 +19,7 @@ export function OtherNumberFields() {
           <li key={field.id} className="flex flex-wrap items-end gap-3">
             <NumberRow index={index} />
             <Button onClick={() => numbers.remove(index)}>
-              Remove<span className="sr-only"> other number {index + 1}</span>
+              Remove <span className="sr-only">other number {index + 1}</span>
             </Button>
           </li>
         ))}

@@ -21,7 +21,9 @@ export function PartsPanel({ garment, locked }: { readonly garment: Garment; rea
   const [adding, setAdding] = useState(false);
   return (
     <section id="parts" aria-labelledby="parts-title">
-      <h2 id="parts-title" className="title text-title-28">Parts and sheets</h2>
+      <h2 id="parts-title" className="title text-title-28">
+        Parts and sheets
+      </h2>
       <ul className="mt-2 space-y-3">
         {garment.parts.map((part) => (
           <PartCard key={part.id} garment={garment} part={part} locked={locked} />
@@ -37,7 +39,15 @@ export function PartsPanel({ garment, locked }: { readonly garment: Garment; rea
   );
 }
 
-function PartCard({ garment, part, locked }: { readonly garment: Garment; readonly part: Part; readonly locked: boolean }) {
+function PartCard({
+  garment,
+  part,
+  locked,
+}: {
+  readonly garment: Garment;
+  readonly part: Part;
+  readonly locked: boolean;
+}) {
   const mayMeasure = useMay('sheet:write');
   const queries = useQueryClient();
   const remove = useMutation({
@@ -57,11 +67,15 @@ function PartCard({ garment, part, locked }: { readonly garment: Garment; readon
       <ul className="mt-1">
         {part.sheets.map((sheet) => (
           <li key={sheet.id} className="border-t border-hair py-2 first:border-t-0">
-            <Link to={paths.sheet(sheet.id)} className="text-table font-medium text-indigo underline underline-offset-4">
+            <Link
+              to={paths.sheet(sheet.id)}
+              className="text-table font-medium text-indigo underline underline-offset-4"
+            >
               Sheet of {dayText(sheet.measuredOn)}
             </Link>
             <p className="figures text-label text-ink-2">
-              {sheet.state === 'complete' ? 'Complete' : 'Open'}, {sheet.pointsDone} of {sheet.pointsWanted} points
+              {sheet.state === 'complete' ? 'Complete' : 'Open'}, {sheet.pointsDone} of {sheet.pointsWanted}{' '}
+              points
             </p>
           </li>
         ))}
@@ -69,12 +83,12 @@ function PartCard({ garment, part, locked }: { readonly garment: Garment; readon
       <div className="mt-2 flex flex-wrap gap-2">
         {mayMeasure && !locked && (
           <ButtonLink height="dense" to={paths.newSheet(garment.id, part.id)}>
-            New measuring sheet<span className="sr-only"> for {part.name}</span>
+            New measuring sheet <span className="sr-only">for {part.name}</span>
           </ButtonLink>
         )}
         {!locked && part.sheets.length === 0 && garment.parts.length > 1 && (
           <Button height="dense" tone="quiet" disabled={remove.isPending} onClick={() => remove.mutate()}>
-            Remove<span className="sr-only"> {part.name}</span>
+            Remove <span className="sr-only">{part.name}</span>
           </Button>
         )}
       </div>
@@ -98,7 +112,11 @@ function AddPart({ garment, onDone }: { readonly garment: Garment; readonly onDo
     },
   });
   return (
-    <form noValidate className="mt-3 space-y-4 rounded-sm border border-hair bg-sheet p-4" onSubmit={(event) => void form.handleSubmit((part) => add.mutate(part))(event)}>
+    <form
+      noValidate
+      className="mt-3 space-y-4 rounded-sm border border-hair bg-sheet p-4"
+      onSubmit={(event) => void form.handleSubmit((part) => add.mutate(part))(event)}
+    >
       <Select id="part-kind" label="Kind of part" {...form.register('kind')}>
         {kindIds.map((kind) => (
           <option key={kind} value={kind}>
@@ -106,8 +124,21 @@ function AddPart({ garment, onDone }: { readonly garment: Garment; readonly onDo
           </option>
         ))}
       </Select>
-      <TextField id="part-name" label="Name" hint="As it is called on its sheet: “Day bodice”." error={errors.name?.message} {...form.register('name')} />
-      <TextField id="part-suffix" optional label="Added to the number" hint=".1 or a" error={errors.suffix?.message} {...form.register('suffix')} />
+      <TextField
+        id="part-name"
+        label="Name"
+        hint="As it is called on its sheet: “Day bodice”."
+        error={errors.name?.message}
+        {...form.register('name')}
+      />
+      <TextField
+        id="part-suffix"
+        optional
+        label="Added to the number"
+        hint=".1 or a"
+        error={errors.suffix?.message}
+        {...form.register('suffix')}
+      />
       <Refused error={add.error} />
       <div className="flex gap-2">
         <Button type="submit" tone="action" disabled={add.isPending}>

@@ -47,9 +47,12 @@ export function RecordEditor({ garment }: { readonly garment: Garment }) {
 
 function useRecordEditing(garment: Garment) {
   const queries = useQueryClient();
-  const [opened, setOpened] = useState(() => ({ typed: typedRecord(garment.record), version: garment.version }));
+  const [opened, setOpened] = useState(() => ({
+    typed: typedRecord(garment.record),
+    version: garment.version,
+  }));
   const [meanwhile, setMeanwhile] = useState<Meanwhile | null>(null);
-  const [savedAt, setSavedAt] = useState<number | null>(null);
+  const [savedAt, setSavedAt] = useState<string | null>(null);
   const form = useForm<RecordTyped, unknown, GarmentRecord>({
     resolver: zodResolver(RecordForm),
     defaultValues: opened.typed,
@@ -66,7 +69,7 @@ function useRecordEditing(garment: Garment) {
     const typed = typedRecord(saved.record);
     setOpened({ typed, version: saved.version });
     setMeanwhile(null);
-    setSavedAt(Date.now());
+    setSavedAt(saved.updatedAt);
     form.reset(typed);
   };
 
@@ -75,11 +78,17 @@ function useRecordEditing(garment: Garment) {
     const mine = form.getValues();
     const typed = typedRecord(theirs.record);
     const stale = staleOf(error);
-    setMeanwhile({ by: stale?.changedBy ?? null, at: stale?.changedAt ?? theirs.updatedAt, changes: changesBehind(opened.typed, typed, mine), typed });
+    setMeanwhile({
+      by: stale?.changedBy ?? null,
+      at: stale?.changedAt ?? theirs.updatedAt,
+      changes: changesBehind(opened.typed, typed, mine),
+      typed,
+    });
     const merged = mergedUnder(opened.typed, typed, mine);
     setOpened({ typed, version: theirs.version });
     form.reset(typed);
-    for (const box of Object.keys(boxLabels) as (keyof RecordTyped)[]) form.setValue(box, merged[box], { shouldDirty: true });
+    for (const box of Object.keys(boxLabels) as (keyof RecordTyped)[])
+      form.setValue(box, merged[box], { shouldDirty: true });
   };
 
   const save = form.handleSubmit(async (record) => {

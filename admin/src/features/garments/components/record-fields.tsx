@@ -14,11 +14,24 @@ export function useBox(name: FieldPath<RecordTyped>) {
   const { register, getFieldState, formState } = useFormContext<RecordTyped>();
   const { error } = getFieldState(name, formState);
   // A list typed in one box has its mistake on one of its lines.
-  const lineError = error && !error.message ? Object.values(error).find((one): one is { message: string } => typeof one === 'object' && one !== null && 'message' in one) : undefined;
+  const lineError =
+    error && !error.message
+      ? Object.values(error).find(
+          (one): one is { message: string } => typeof one === 'object' && one !== null && 'message' in one,
+        )
+      : undefined;
   return { id: fieldId(name), error: error?.message ?? lineError?.message, ...register(name) };
 }
 
-export function Fieldset({ legend, hint, children }: { readonly legend: string; readonly hint?: string; readonly children: ReactNode }) {
+export function Fieldset({
+  legend,
+  hint,
+  children,
+}: {
+  readonly legend: string;
+  readonly hint?: string;
+  readonly children: ReactNode;
+}) {
   return (
     <fieldset className="min-w-0 border-t border-hair pt-5">
       <legend className="title float-left mb-4 w-full text-title-25">{legend}</legend>
@@ -30,17 +43,32 @@ export function Fieldset({ legend, hint, children }: { readonly legend: string; 
   );
 }
 
-const Pair = ({ children }: { readonly children: ReactNode }) => <div className="grid items-end gap-5 sm:grid-cols-2">{children}</div>;
+const Pair = ({ children }: { readonly children: ReactNode }) => (
+  <div className="grid items-end gap-5 sm:grid-cols-2">{children}</div>
+);
 
-const notPublic = <span className="ml-2 rounded-sm bg-weld-tint px-1.5 py-0.5 text-label font-medium text-weld-text">never public</span>;
+const notPublic = (
+  <span className="ml-2 rounded-sm bg-weld-tint px-1.5 py-0.5 text-label font-medium text-weld-text">
+    never public
+  </span>
+);
 
-const madeFor: Readonly<Record<(typeof wornByValues)[number], string>> = { woman: 'A woman', man: 'A man', child: 'A child', unknown: 'Not known' };
+const madeFor: Readonly<Record<(typeof wornByValues)[number], string>> = {
+  woman: 'A woman',
+  man: 'A man',
+  child: 'A child',
+  unknown: 'Not known',
+};
 
 function Identity() {
   return (
     <Fieldset legend="What it is">
       <Pair>
-        <TextField label="Own number" hint="The museum’s number for the whole garment. Parts add theirs: .1, .2." {...useBox('ownNumber')} />
+        <TextField
+          label="Own number"
+          hint="The museum’s number for the whole garment. Parts add theirs: .1, .2."
+          {...useBox('ownNumber')}
+        />
         <Select label="Kind of garment" {...useBox('kind')}>
           {kindIds.map((kind) => (
             <option key={kind} value={kind}>
@@ -50,9 +78,17 @@ function Identity() {
           <option value="set">Set of several garments</option>
         </Select>
       </Pair>
-      <TextField label="Title" hint="What it is in a few words: “Dress of teal silk with a shelf bustle”." {...useBox('title')} />
+      <TextField
+        label="Title"
+        hint="What it is in a few words: “Dress of teal silk with a shelf bustle”."
+        {...useBox('title')}
+      />
       <Pair>
-        <TextField label="Date" hint="A year or a span: 1885, 1885~ for about 1885, 1858/1861." {...useBox('date')} />
+        <TextField
+          label="Date"
+          hint="A year or a span: 1885, 1885~ for about 1885, 1858/1861."
+          {...useBox('date')}
+        />
         <Select label="Made for" {...useBox('wornBy')}>
           {wornByValues.map((value) => (
             <option key={value} value={value}>
@@ -61,7 +97,13 @@ function Identity() {
           ))}
         </Select>
       </Pair>
-      <TextArea rows={6} optional label="Public description" hint="Plain text. What a visitor should notice." {...useBox('description')} />
+      <TextArea
+        rows={6}
+        optional
+        label="Public description"
+        hint="Plain text. What a visitor should notice."
+        {...useBox('description')}
+      />
     </Fieldset>
   );
 }
@@ -74,8 +116,18 @@ function Making() {
         <TextField optional label="Place" hint="Where it was made." {...useBox('place')} />
       </Pair>
       <Pair>
-        <TextArea optional label="What the label says" hint="Letter for letter, line by line." {...useBox('label.transcription')} />
-        <TextField optional label="Where the label sits" hint="For example: woven, inside the waistband at the back." {...useBox('label.where')} />
+        <TextArea
+          optional
+          label="What the label says"
+          hint="Letter for letter, line by line."
+          {...useBox('label.transcription')}
+        />
+        <TextField
+          optional
+          label="Where the label sits"
+          hint="For example: woven, inside the waistband at the back."
+          {...useBox('label.where')}
+        />
       </Pair>
       <Pair>
         <TextArea optional label="Materials" hint="One to a line." {...useBox('materials')} />
@@ -87,7 +139,12 @@ function Making() {
       </Pair>
       <Pair>
         <TextArea optional label="Lining" {...useBox('lining')} />
-        <TextArea optional label="Alterations" hint="What was let out, taken in or replaced, and how it shows." {...useBox('alterations')} />
+        <TextArea
+          optional
+          label="Alterations"
+          hint="What was let out, taken in or replaced, and how it shows."
+          {...useBox('alterations')}
+        />
       </Pair>
     </Fieldset>
   );
@@ -97,7 +154,13 @@ function History() {
   return (
     <Fieldset legend="History">
       <TextArea optional label="Wearer and occasion" hint="Public." {...useBox('wearer')} />
-      <TextArea optional label="Provenance" remark={notPublic} hint="From whom, when, how." {...useBox('provenance')} />
+      <TextArea
+        optional
+        label="Provenance"
+        remark={notPublic}
+        hint="From whom, when, how."
+        {...useBox('provenance')}
+      />
       <TextArea optional label="References and exhibitions" hint="One to a line." {...useBox('references')} />
       <OtherNumberFields />
     </Fieldset>
@@ -108,8 +171,20 @@ function Care() {
   return (
     <Fieldset legend="Condition and handling">
       <TextArea optional label="Condition" {...useBox('condition')} />
-      <TextArea optional label="Handling notes" remark={notPublic} hint="Shown before every measuring sheet opens." {...useBox('handling')} />
-      <TextField optional label="Store location" remark={notPublic} hint="Room, bay, shelf or box." {...useBox('storeLocation')} />
+      <TextArea
+        optional
+        label="Handling notes"
+        remark={notPublic}
+        hint="Shown before every measuring sheet opens."
+        {...useBox('handling')}
+      />
+      <TextField
+        optional
+        label="Store location"
+        remark={notPublic}
+        hint="Room, bay, shelf or box."
+        {...useBox('storeLocation')}
+      />
     </Fieldset>
   );
 }
@@ -117,7 +192,11 @@ function Care() {
 function Public() {
   return (
     <Fieldset legend="What the public may see">
-      <TextField label="Credit line" hint="As the giver or the museum wishes to be named." {...useBox('creditLine')} />
+      <TextField
+        label="Credit line"
+        hint="As the giver or the museum wishes to be named."
+        {...useBox('creditLine')}
+      />
       <Select label="Rights statement" {...useBox('rights')}>
         {Object.entries(rightsStatements).map(([uri, label]) => (
           <option key={uri} value={uri}>
@@ -125,8 +204,16 @@ function Public() {
           </option>
         ))}
       </Select>
-      <Tick label="Name the people who measured" hint="Otherwise only their number is told." {...useBox('showPeople')} />
-      <Tick label="Tell the public of the hazards" hint="Staff always see them before a sheet opens." {...useBox('showHazards')} />
+      <Tick
+        label="Name the people who measured"
+        hint="Otherwise only their number is told."
+        {...useBox('showPeople')}
+      />
+      <Tick
+        label="Tell the public of the hazards"
+        hint="Staff always see them before a sheet opens."
+        {...useBox('showHazards')}
+      />
     </Fieldset>
   );
 }

@@ -19,7 +19,15 @@ export function RecordShown({ record }: { readonly record: GarmentRecord }) {
     ['Lining', record.lining],
     ['Alterations', record.alterations],
     ['Condition', record.condition],
-    ['Hazards', record.hazards.map(({ id, standing, note }) => `${hazardLabels[id]}: ${standingLabels[standing]}${note && `. ${note}`}`).join('\n')],
+    [
+      'Hazards',
+      record.hazards
+        .map(
+          ({ id, standing, note }) =>
+            `${hazardLabels[id]}: ${standingLabels[standing]}${note && `. ${note}`}`,
+        )
+        .join('\n'),
+    ],
     ['Handling notes (never public)', record.handling],
     ['Wearer and occasion', record.wearer],
     ['Provenance (never public)', record.provenance],
@@ -33,7 +41,10 @@ export function RecordShown({ record }: { readonly record: GarmentRecord }) {
       {rows
         .filter(([, value]) => value)
         .map(([label, value]) => (
-          <div key={label} className="grid gap-x-6 border-b border-hair py-2 sm:grid-cols-[13rem_minmax(0,1fr)]">
+          <div
+            key={label}
+            className="grid gap-x-6 border-b border-hair py-2 sm:grid-cols-[13rem_minmax(0,1fr)]"
+          >
             <dt className="text-ink-3">{label}</dt>
             <dd className="max-w-text whitespace-pre-line break-words">{value}</dd>
           </div>

@@ -9,7 +9,12 @@ export const sheetQuery = (id: string) =>
   });
 
 /** Lays readings that the API has kept into the sheet at hand, and strikes those they replace. */
-export function layIn(queries: QueryClient, sheetId: string, kept: readonly StoredReading[], version: number): void {
+export function layIn(
+  queries: QueryClient,
+  sheetId: string,
+  kept: readonly StoredReading[],
+  version: number,
+): void {
   queries.setQueryData(sheetQuery(sheetId).queryKey, (sheet) => {
     if (!sheet) return sheet;
     const ids = new Set(kept.map(({ id }) => id));
@@ -19,7 +24,9 @@ export function layIn(queries: QueryClient, sheetId: string, kept: readonly Stor
       .map((reading) => (replaced.has(reading.id) ? { ...reading, stands: false } : reading));
     // A reading may come back after the one that replaced it: what is struck stays struck.
     const struck = new Set(others.map(({ replaces }) => replaces));
-    const fresh = kept.map((reading) => (replaced.has(reading.id) || struck.has(reading.id) ? { ...reading, stands: false } : reading));
+    const fresh = kept.map((reading) =>
+      replaced.has(reading.id) || struck.has(reading.id) ? { ...reading, stands: false } : reading,
+    );
     return { ...sheet, version: Math.max(sheet.version, version), readings: [...others, ...fresh] };
   });
 }

@@ -7,12 +7,28 @@ import { rowLabel } from './reading-row.js';
 import { TapeProgress } from './tape-progress.js';
 
 /** Within reach of a thumb: back, not taken, how far along the tape one is, and the next point. */
-export function BottomBar({ desk, onReadings }: { readonly desk: SheetDesk; readonly onReadings: () => void }) {
+export function BottomBar({
+  desk,
+  onReadings,
+}: {
+  readonly desk: SheetDesk;
+  readonly onReadings: () => void;
+}) {
   const [asking, setAsking] = useState(false);
   if (desk.locked) return <LockedBar desk={desk} />;
   return (
-    <div role="region" aria-label="Measuring" className="sticky bottom-0 z-10 flex flex-wrap items-end gap-3 border-t border-hair bg-sheet px-4 py-2 max-sm:gap-2 max-sm:px-2">
-      <Button height="table" onClick={() => { onReadings(); desk.step(-1); }}>
+    <div
+      role="region"
+      aria-label="Measuring"
+      className="sticky bottom-0 z-10 flex flex-wrap items-end gap-3 border-t border-hair bg-sheet px-4 py-2 max-sm:gap-2 max-sm:px-2"
+    >
+      <Button
+        height="table"
+        onClick={() => {
+          onReadings();
+          desk.step(-1);
+        }}
+      >
         Back
       </Button>
       <Button height="table" onClick={() => setAsking(true)}>
@@ -21,15 +37,33 @@ export function BottomBar({ desk, onReadings }: { readonly desk: SheetDesk; read
       <div className="min-w-0 grow max-sm:order-first max-sm:w-full">
         <TapeProgress done={desk.done} wanted={desk.points.length} />
       </div>
-      <Button height="table" aria-pressed={desk.keypad} onClick={() => desk.setKeypad(!desk.keypad)} className="aria-pressed:bg-well max-sm:hidden">
+      <Button
+        height="table"
+        aria-pressed={desk.keypad}
+        onClick={() => desk.setKeypad(!desk.keypad)}
+        className="aria-pressed:bg-well max-sm:hidden"
+      >
         Keypad
       </Button>
       {canReadAloud() && (
-        <Button height="table" aria-pressed={desk.aloud} onClick={() => desk.setAloud(!desk.aloud)} className="aria-pressed:bg-well max-lg:hidden">
+        <Button
+          height="table"
+          aria-pressed={desk.aloud}
+          onClick={() => desk.setAloud(!desk.aloud)}
+          className="aria-pressed:bg-well max-lg:hidden"
+        >
           Read aloud
         </Button>
       )}
-      <Button tone="action" height="table" className="max-sm:ml-auto" onClick={() => { onReadings(); desk.next(); }}>
+      <Button
+        tone="action"
+        height="table"
+        className="max-sm:ml-auto"
+        onClick={() => {
+          onReadings();
+          desk.next();
+        }}
+      >
         Next point
       </Button>
       <NotTakenQuestion
@@ -48,11 +82,17 @@ export function BottomBar({ desk, onReadings }: { readonly desk: SheetDesk; read
 
 function LockedBar({ desk }: { readonly desk: SheetDesk }) {
   return (
-    <div role="region" aria-label="Measuring" className="sticky bottom-0 flex flex-wrap items-end gap-4 border-t border-hair bg-sheet px-4 py-2">
+    <div
+      role="region"
+      aria-label="Measuring"
+      className="sticky bottom-0 flex flex-wrap items-end gap-4 border-t border-hair bg-sheet px-4 py-2"
+    >
       <div className="grow">
         <TapeProgress done={desk.done} wanted={desk.points.length} />
       </div>
-      <p className="text-table text-ink-2">This sheet is complete. Reopen it under “Before the box” to change a reading.</p>
+      <p className="text-table text-ink-2">
+        This sheet is complete. Reopen it under “Box list” to change a reading.
+      </p>
     </div>
   );
 }

@@ -29,8 +29,20 @@ export function BoxList({ desk, onPoint, onFindings }: BoxListProps) {
   return (
     <div className="space-y-6 p-4">
       <h2 className="title text-title-25">Before it goes back in its box</h2>
-      <TaskList title="Needed" tasks={musts} none="Nothing more is needed." onPoint={onPoint} onFindings={onFindings} />
-      <TaskList title="Worth doing while it is out" tasks={tasks.filter(({ must }) => !must)} none="Nothing more." onPoint={onPoint} onFindings={onFindings} />
+      <TaskList
+        title="Needed"
+        tasks={musts}
+        none="Nothing more is needed."
+        onPoint={onPoint}
+        onFindings={onFindings}
+      />
+      <TaskList
+        title="Worth doing while it is out"
+        tasks={tasks.filter(({ must }) => !must)}
+        none="Nothing more."
+        onPoint={onPoint}
+        onFindings={onFindings}
+      />
       <Closing desk={desk} unsent={desk.view.entries.length} />
     </div>
   );
@@ -74,7 +86,8 @@ function Closing({ desk, unsent }: { readonly desk: SheetDesk; readonly unsent: 
   const { sheet } = desk;
   const queries = useQueryClient();
   const close = useMutation({
-    mutationFn: () => (desk.locked ? reopenSheet(sheet.id, sheet.version) : completeSheet(sheet.id, sheet.version)),
+    mutationFn: () =>
+      desk.locked ? reopenSheet(sheet.id, sheet.version) : completeSheet(sheet.id, sheet.version),
     onSuccess: (next) => {
       queries.setQueryData(sheetQuery(sheet.id).queryKey, next);
       void queries.invalidateQueries({ queryKey: ['garment', sheet.garmentId] });
@@ -89,8 +102,15 @@ function Closing({ desk, unsent }: { readonly desk: SheetDesk; readonly unsent: 
   });
   return (
     <div className="space-y-3 border-t border-hair pt-4">
-      {unsent > 0 && <p className="text-table text-ink-2">The sheet can be completed when all readings are sent.</p>}
-      <Button tone={desk.locked ? 'plain' : 'action'} height="table" disabled={close.isPending || unsent > 0} onClick={() => close.mutate()}>
+      {unsent > 0 && (
+        <p className="text-table text-ink-2">The sheet can be completed when all readings are sent.</p>
+      )}
+      <Button
+        tone={desk.locked ? 'plain' : 'action'}
+        height="table"
+        disabled={close.isPending || unsent > 0}
+        onClick={() => close.mutate()}
+      >
         {desk.locked ? 'Reopen the sheet' : 'Complete the sheet'}
       </Button>
       <Refused error={close.error} />

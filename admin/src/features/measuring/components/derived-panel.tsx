@@ -5,15 +5,33 @@ import { Empty, Failed, Waiting } from '../../../components/ui/states.js';
 import { findingsQuery } from '../api/findings.js';
 
 /** What follows from the readings, with its formula and the figures that were put in. Never typed. */
-export function DerivedPanel({ sheetId, onPoint }: { readonly sheetId: string; readonly onPoint: (pointId: string) => void }) {
+export function DerivedPanel({
+  sheetId,
+  onPoint,
+}: {
+  readonly sheetId: string;
+  readonly onPoint: (pointId: string) => void;
+}) {
   const findings = useQuery(findingsQuery(sheetId));
-  if (findings.isPending) return <div className="p-4"><Waiting label="Working it out" rows={3} /></div>;
-  if (findings.isError) return <div className="p-4"><Failed error={findings.error} onRetry={() => void findings.refetch()} /></div>;
+  if (findings.isPending)
+    return (
+      <div className="p-4">
+        <Waiting label="Working it out" rows={3} />
+      </div>
+    );
+  if (findings.isError)
+    return (
+      <div className="p-4">
+        <Failed error={findings.error} onRetry={() => void findings.refetch()} />
+      </div>
+    );
   const { derived } = findings.data;
   return (
     <div className="p-4">
       <h2 className="title mb-3 text-title-25">Worked out from the readings</h2>
-      {derived.length === 0 && <Empty title="Nothing follows yet">Neck to waist, for one, needs neck to hem and waist to hem.</Empty>}
+      {derived.length === 0 && (
+        <Empty title="Nothing follows yet">Neck to waist, for one, needs neck to hem and waist to hem.</Empty>
+      )}
       <ul className="divide-y divide-hair">
         {derived.map((value) => (
           <li key={value.id} className="grid gap-x-6 gap-y-1 py-3 sm:grid-cols-[minmax(0,1fr)_auto]">
@@ -24,7 +42,11 @@ export function DerivedPanel({ sheetId, onPoint }: { readonly sheetId: string; r
               <ul className="mt-1 flex flex-wrap gap-x-4">
                 {value.trace.map(({ pointId, label, valueMm }) => (
                   <li key={pointId}>
-                    <button type="button" onClick={() => onPoint(pointId)} className="figures min-h-11 text-table text-indigo underline underline-offset-4">
+                    <button
+                      type="button"
+                      onClick={() => onPoint(pointId)}
+                      className="figures min-h-11 text-table text-indigo underline underline-offset-4"
+                    >
                       {label}: {formatLength(mm(valueMm), 'mm')}
                     </button>
                   </li>
@@ -33,7 +55,9 @@ export function DerivedPanel({ sheetId, onPoint }: { readonly sheetId: string; r
             </div>
             <p className="figures text-value sm:text-right">
               {value.valueMm === null ? value.ratio : formatBoth(mm(value.valueMm))}
-              {value.uncertaintyMm !== null && <span className="block text-label text-ink-3">± {value.uncertaintyMm} mm</span>}
+              {value.uncertaintyMm !== null && (
+                <span className="block text-label text-ink-3">± {value.uncertaintyMm} mm</span>
+              )}
             </p>
           </li>
         ))}

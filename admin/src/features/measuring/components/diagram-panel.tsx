@@ -34,14 +34,27 @@ export function DiagramPanel({ kind, points, current, onChoose }: DiagramPanelPr
     [kind, view, current.id, points],
   );
   return (
-    <section aria-label="Diagram" className="grid gap-4 bg-sheet p-4 max-md:grid-cols-[10rem_minmax(0,1fr)] max-md:gap-3 max-md:p-3 md:h-full md:content-start">
+    <section
+      aria-label="Diagram"
+      className="grid gap-4 bg-sheet p-4 max-md:grid-cols-[10rem_minmax(0,1fr)] max-md:gap-3 max-md:p-3 md:h-full md:content-start"
+    >
       {scene && (
         <div className="mx-auto w-full max-w-md shrink-0">
-          <SceneDrawing key={`${view ?? ''}`} scene={scene} current={current.id} onChoose={onChoose} className="max-h-[26rem] w-full max-md:max-h-44" />
+          <SceneDrawing
+            key={`${view ?? ''}`}
+            scene={scene}
+            current={current.id}
+            onChoose={onChoose}
+            className="max-h-[26rem] w-full max-md:max-h-44"
+          />
         </div>
       )}
       {diagram && diagram.views.length > 1 && (
-        <div role="group" aria-label="View" className="flex flex-wrap justify-center gap-2 max-md:order-last max-md:col-span-2">
+        <div
+          role="group"
+          aria-label="View"
+          className="flex flex-wrap justify-center gap-2 max-md:order-last max-md:col-span-2"
+        >
           {diagram.views.map(({ name }) => (
             <button
               key={name}
@@ -60,14 +73,22 @@ export function DiagramPanel({ kind, points, current, onChoose }: DiagramPanelPr
   );
 }
 
-const viewWords: Readonly<Record<ViewName, string>> = { front: 'Front', back: 'Back', inside: 'Inside', side: 'Side', below: 'Below' };
+const viewWords: Readonly<Record<ViewName, string>> = {
+  front: 'Front',
+  back: 'Back',
+  inside: 'Inside',
+  side: 'Side',
+  below: 'Below',
+};
 
 function Instruction({ current }: { readonly current: SheetPoint }) {
   const { point, letter } = current;
   return (
     <div aria-live="polite" className="max-md:text-label">
       <h2 className="flex items-center gap-2 text-body font-semibold">
-        <span className="letter letter-lit" aria-hidden="true">{letter}</span>
+        <span className="letter letter-lit" aria-hidden="true">
+          {letter}
+        </span>
         {point.name}
       </h2>
       <p className="mt-2 text-table text-ink max-md:hidden">{point.definition}</p>

@@ -21,7 +21,11 @@ interface FactsFormProps {
 /** Who, when, where, on what, with which tape. */
 export function FactsForm({ facts, verb, onSave, aside }: FactsFormProps) {
   const colleagues = useQuery(colleaguesQuery);
-  const form = useForm<SheetFactsInput, unknown, SheetFacts>({ resolver: zodResolver(SheetFacts), defaultValues: facts, shouldFocusError: false });
+  const form = useForm<SheetFactsInput, unknown, SheetFacts>({
+    resolver: zodResolver(SheetFacts),
+    defaultValues: facts,
+    shouldFocusError: false,
+  });
   const { errors, isSubmitting, submitCount, isSubmitSuccessful, isDirty } = form.formState;
   const submit = form.handleSubmit(async (values) => {
     try {
@@ -32,24 +36,52 @@ export function FactsForm({ facts, verb, onSave, aside }: FactsFormProps) {
     }
   });
   if (colleagues.isPending) return <Waiting label="Fetching the colleagues" />;
-  if (colleagues.isError) return <Failed error={colleagues.error} onRetry={() => void colleagues.refetch()} />;
-  const box = (name: 'place' | 'tape' | 'tapeLengthMm' | 'tapeZeroMm' | 'fasteningPair' | 'note' | 'aloneBecause' | 'measuredOn' | 'support') => ({
+  if (colleagues.isError)
+    return <Failed error={colleagues.error} onRetry={() => void colleagues.refetch()} />;
+  const box = (
+    name:
+      | 'place'
+      | 'tape'
+      | 'tapeLengthMm'
+      | 'tapeZeroMm'
+      | 'fasteningPair'
+      | 'note'
+      | 'aloneBecause'
+      | 'measuredOn'
+      | 'support',
+  ) => ({
     id: name,
     error: errors[name]?.message,
     ...form.register(name),
   });
   return (
-    <form noValidate onSubmit={(event) => void submit(event)} className="max-w-text space-y-6" aria-label="Sheet facts">
+    <form
+      noValidate
+      onSubmit={(event) => void submit(event)}
+      className="max-w-text space-y-6"
+      aria-label="Sheet facts"
+    >
       <ErrorSummary mistakes={mistakesOf(errors)} attempt={isSubmitting ? 0 : submitCount} />
       <Controller
         control={form.control}
         name="people"
         render={({ field, fieldState }) => (
-          <PeopleChoice id="people" colleagues={colleagues.data} people={field.value} onChange={field.onChange} error={fieldState.error?.message ?? errors.people?.root?.message} />
+          <PeopleChoice
+            id="people"
+            colleagues={colleagues.data}
+            people={field.value}
+            onChange={field.onChange}
+            error={fieldState.error?.message ?? errors.people?.root?.message}
+          />
         )}
       />
-      <TextField optional label="Why one person measured alone" hint="Needed where nobody held the other end." {...box('aloneBecause')} />
-      <div className="grid gap-5 sm:grid-cols-2">
+      <TextField
+        optional
+        label="Why one person measured alone"
+        hint="Needed where nobody held the other end."
+        {...box('aloneBecause')}
+      />
+      <div className="grid items-end gap-5 sm:grid-cols-2">
         <TextField type="date" label="Measured on" {...box('measuredOn')} />
         <TextField label="Place" hint="Room and table." {...box('place')} />
       </div>
@@ -60,12 +92,29 @@ export function FactsForm({ facts, verb, onSave, aside }: FactsFormProps) {
           </option>
         ))}
       </Select>
-      <div className="grid gap-5 sm:grid-cols-3 sm:items-end">
-        <TextField label="Tape" hint="Which one." {...box('tape')} />
-        <TextField label="Tape length, mm" hint="For whole tapes." inputMode="decimal" {...box('tapeLengthMm')} className="figures text-right" />
-        <TextField label="Tape at nothing, mm" hint="Taken off every reading." inputMode="decimal" {...box('tapeZeroMm')} className="figures text-right" />
+      <TextField label="Tape" hint="Which one." {...box('tape')} />
+      <div className="grid items-end gap-5 sm:grid-cols-2">
+        <TextField
+          label="Tape length, mm"
+          hint="For whole tapes."
+          inputMode="decimal"
+          {...box('tapeLengthMm')}
+          className="figures text-right"
+        />
+        <TextField
+          label="Tape at nothing, mm"
+          hint="Taken off every reading."
+          inputMode="decimal"
+          {...box('tapeZeroMm')}
+          className="figures text-right"
+        />
       </div>
-      <TextField optional label="Fastening pair" hint="From which hook to which eye the rounds were read." {...box('fasteningPair')} />
+      <TextField
+        optional
+        label="Fastening pair"
+        hint="From which hook to which eye the rounds were read."
+        {...box('fasteningPair')}
+      />
       <TextArea optional label="Note" {...box('note')} />
       <div className="flex flex-wrap items-center gap-3">
         <Button type="submit" tone="action" height="table" disabled={isSubmitting}>

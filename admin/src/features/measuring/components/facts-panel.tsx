@@ -22,10 +22,14 @@ export function FactsPanel({ sheet }: { readonly sheet: Sheet }) {
         verb="Save the facts"
         onSave={async (facts) => {
           try {
-            queries.setQueryData(sheetQuery(sheet.id).queryKey, await saveFacts(sheet.id, sheet.version, facts));
+            queries.setQueryData(
+              sheetQuery(sheet.id).queryKey,
+              await saveFacts(sheet.id, sheet.version, facts),
+            );
           } catch (error) {
             // The sheet has moved on under this form; what was typed stays, and the next save meets the new version.
-            if (isProblem(error) && error.status === 412) await queries.invalidateQueries({ queryKey: sheetQuery(sheet.id).queryKey });
+            if (isProblem(error) && error.status === 412)
+              await queries.invalidateQueries({ queryKey: sheetQuery(sheet.id).queryKey });
             throw error;
           }
         }}
@@ -51,7 +55,10 @@ function FactsShown({ sheet: { facts } }: { readonly sheet: Sheet }) {
       {rows
         .filter(([, value]) => value !== '')
         .map(([label, value]) => (
-          <div key={`${label} ${value}`} className="grid gap-x-6 border-b border-hair py-2 sm:grid-cols-[16rem_minmax(0,1fr)]">
+          <div
+            key={`${label} ${value}`}
+            className="grid gap-x-6 border-b border-hair py-2 sm:grid-cols-[16rem_minmax(0,1fr)]"
+          >
             <dt className="text-ink-3">{label}</dt>
             <dd className="whitespace-pre-line">{value}</dd>
           </div>

@@ -17,11 +17,29 @@ const looks = {
 const order = { stop: 0, question: 1, note: 2 } as const;
 
 /** What the checks have to say, in sentences. Stops and questions are answered by reading again or by a reason. */
-export function FindingsPanel({ desk, onPoint }: { readonly desk: SheetDesk; readonly onPoint: (pointId: string) => void }) {
+export function FindingsPanel({
+  desk,
+  onPoint,
+}: {
+  readonly desk: SheetDesk;
+  readonly onPoint: (pointId: string) => void;
+}) {
   const findings = useQuery(findingsQuery(desk.sheet.id));
-  if (findings.isPending) return <div className="p-4"><Waiting label="Checking the sheet" rows={3} /></div>;
-  if (findings.isError) return <div className="p-4"><Failed error={findings.error} onRetry={() => void findings.refetch()} /></div>;
-  const sorted = findings.data.findings.toSorted((first, second) => order[first.severity] - order[second.severity]);
+  if (findings.isPending)
+    return (
+      <div className="p-4">
+        <Waiting label="Checking the sheet" rows={3} />
+      </div>
+    );
+  if (findings.isError)
+    return (
+      <div className="p-4">
+        <Failed error={findings.error} onRetry={() => void findings.refetch()} />
+      </div>
+    );
+  const sorted = findings.data.findings.toSorted(
+    (first, second) => order[first.severity] - order[second.severity],
+  );
   return (
     <div className="p-4">
       <h2 className="title mb-3 text-title-25">Findings</h2>
@@ -46,10 +64,16 @@ interface FindingCardProps {
 
 function FindingCard({ finding, desk, onPoint }: FindingCardProps) {
   const { severity, sentence, pointIds, answer } = finding;
+  const unread = (id: string) => !desk.rows.some(({ point, reading }) => point.id === id && reading !== null);
+  // What was never read is mended by reading it, or by saying at its row why it cannot be taken.
+  const answerable =
+    severity !== 'note' && !answer && !desk.locked && !(pointIds.length > 0 && pointIds.every(unread));
   const nameOf = (id: string) => desk.points.find((point) => point.id === id)?.point.name ?? id;
   return (
     <li className={`rounded-sm border border-l-4 border-hair bg-sheet p-3 ${looks[severity]}`}>
-      <p className="text-label font-semibold text-ink-2">{answer ? `${severityWords[severity]}, answered` : severityWords[severity]}</p>
+      <p className="text-label font-semibold text-ink-2">
+        {answer ? `${severityWords[severity]}, answered` : severityWords[severity]}
+      </p>
       <p className="text-body">{sentence}</p>
       {answer && (
         <p className="mt-1 text-table text-ink-2">
@@ -60,12 +84,13 @@ function FindingCard({ finding, desk, onPoint }: FindingCardProps) {
         <div className="mt-2 flex flex-wrap gap-2">
           {pointIds.map((id) => (
             <Button key={id} className="min-h-11" onClick={() => onPoint(id)}>
-              Read {nameOf(id)} again
+              Read {nameOf(id)}
+              {unread(id) ? '' : ' again'}
             </Button>
           ))}
         </div>
       )}
-      {severity !== 'note' && !answer && !desk.locked && <AnswerForm finding={finding} sheetId={desk.sheet.id} />}
+      {answerable && <AnswerForm finding={finding} sheetId={desk.sheet.id} />}
     </li>
   );
 }
@@ -94,7 +119,15 @@ function AnswerForm({ finding, sheetId }: { readonly finding: FindingView; reado
         Or say why it is right
       </label>
       <div className="mt-1 flex flex-wrap gap-2">
-        <input id={id} value={reason} maxLength={500} onChange={(event) => setReason(event.target.value)} aria-invalid={missing || undefined} aria-describedby={missing ? `${id}-error` : undefined} className="box min-h-11 w-auto min-w-48 grow" />
+        <input
+          id={id}
+          value={reason}
+          maxLength={500}
+          onChange={(event) => setReason(event.target.value)}
+          aria-invalid={missing || undefined}
+          aria-describedby={missing ? `${id}-error` : undefined}
+          className="box min-h-11 w-auto min-w-48 grow"
+        />
         <Button type="submit" className="min-h-11" disabled={answer.isPending}>
           Keep the reason
         </Button>

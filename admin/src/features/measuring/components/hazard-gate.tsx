@@ -18,7 +18,10 @@ export function HazardGate({ sheet, children }: { readonly sheet: Sheet; readonl
   if (read || nothingToSay || sheet.state === 'complete') return children;
   return (
     <main>
-      <Page title="Before you open the box" lead={`${sheet.garment.ownNumber}${sheet.garment.partSuffix}, ${sheet.garment.title}`}>
+      <Page
+        title="Before you open the box"
+        lead={`${sheet.garment.ownNumber}${sheet.garment.partSuffix}, ${sheet.garment.title}`}
+      >
         <div className="max-w-text space-y-6">
           {hazards.map((hazard) => (
             <HazardCaution key={hazard.id} {...hazard} />
@@ -51,11 +54,21 @@ export function HazardGate({ sheet, children }: { readonly sheet: Sheet; readonl
   );
 }
 
-function HazardCaution({ id, standing, note }: { readonly id: string; readonly standing: string; readonly note: string }) {
+function HazardCaution({
+  id,
+  standing,
+  note,
+}: {
+  readonly id: string;
+  readonly standing: string;
+  readonly note: string;
+}) {
   return (
     <section className="border-l-4 border-madder bg-madder-tint p-4">
       <h2 className="text-body font-semibold text-madder">{isHazardId(id) ? hazardLabels[id] : id}</h2>
-      <p className="text-label text-ink-2">{standing in standingLabels ? standingLabels[standing as keyof typeof standingLabels] : standing}</p>
+      <p className="text-label text-ink-2">
+        {standing in standingLabels ? standingLabels[standing as keyof typeof standingLabels] : standing}
+      </p>
       {isHazardId(id) && <p className="mt-2 text-body">{hazardCautions[id]}</p>}
       {note && <p className="mt-1 whitespace-pre-line text-table">{note}</p>}
     </section>

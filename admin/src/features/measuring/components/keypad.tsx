@@ -13,24 +13,45 @@ export function Keypad({ desk }: { readonly desk: SheetDesk }) {
   const value = draft[field];
   const stay = (event: { preventDefault(): void }) => event.preventDefault();
   return (
-    <div role="group" aria-label="Keypad" className="grid grid-cols-4 gap-2 border-t border-hair bg-well p-3" onPointerDown={stay} onMouseDown={stay}>
+    <div
+      role="group"
+      aria-label="Keypad"
+      className="grid grid-cols-4 gap-2 border-t border-hair bg-well p-3"
+      onPointerDown={stay}
+      onMouseDown={stay}
+    >
       <div className="col-span-3 grid grid-cols-3 gap-2">
         {keys.map((key) => (
           <button key={key} type="button" className={look} onClick={() => put(value + key)}>
             {key}
           </button>
         ))}
-        <button type="button" aria-label="Delete the last figure" className={`${look} text-table`} onClick={() => put(value.slice(0, -1))}>
+        <button
+          type="button"
+          aria-label="Delete the last figure"
+          className={`${look} text-table`}
+          onClick={() => put(value.slice(0, -1))}
+        >
           Delete
         </button>
       </div>
       <div className="grid gap-2">
         {draft.unit === 'in' && field === 'text' ? (
           <>
-            <button type="button" aria-label="Space" className={`${look} text-table`} onClick={() => put(`${value} `)}>
+            <button
+              type="button"
+              aria-label="Space"
+              className={`${look} text-table`}
+              onClick={() => put(`${value} `)}
+            >
               Space
             </button>
-            <button type="button" aria-label="Fraction stroke" className={look} onClick={() => put(`${value}/`)}>
+            <button
+              type="button"
+              aria-label="Fraction stroke"
+              className={look}
+              onClick={() => put(`${value}/`)}
+            >
               /
             </button>
           </>

@@ -44,7 +44,13 @@ export function NewSheetPage() {
   const garment = useQuery(garmentQuery(garmentId));
   const part = garment.data?.parts.find((one) => one.id === partId);
   return (
-    <Page title="New measuring sheet" lead={part && `${garment.data?.record.ownNumber ?? ''}${part.suffix} ${part.name}, ${garment.data?.record.title ?? ''}`}>
+    <Page
+      title="New measuring sheet"
+      lead={
+        part &&
+        `${garment.data?.record.ownNumber ?? ''}${part.suffix} ${part.name}, ${garment.data?.record.title ?? ''}`
+      }
+    >
       {garment.isPending && <Waiting label="Fetching the garment" />}
       {garment.isError && <Failed error={garment.error} onRetry={() => void garment.refetch()} />}
       {garment.data && !part && <p className="text-table">The garment has no such part.</p>}

@@ -41,13 +41,27 @@ export function NotTakenQuestion({ open, label, onClose, onSaid }: NotTakenQuest
         <legend className="sr-only">Reason</legend>
         {notTakenReasonIds.map((id) => (
           <label key={id} className="flex min-h-11 items-center gap-3">
-            <input type="radio" name="not-taken" value={id} checked={reason === id} onChange={() => setReason(id)} className="size-6 accent-indigo" />
+            <input
+              type="radio"
+              name="not-taken"
+              value={id}
+              checked={reason === id}
+              onChange={() => setReason(id)}
+              className="size-6 accent-indigo"
+            />
             {notTakenReasons[id]}
           </label>
         ))}
         {asked && !reason && <FieldError id="reason-missing">Choose the reason that fits best.</FieldError>}
       </fieldset>
-      <TextField id="not-taken-note" optional label="Note" value={note} maxLength={500} onChange={(event) => setNote(event.target.value)} />
+      <TextField
+        id="not-taken-note"
+        optional
+        label="Note"
+        value={note}
+        maxLength={500}
+        onChange={(event) => setNote(event.target.value)}
+      />
     </Question>
   );
 }

@@ -24,7 +24,10 @@ export function ReadingList({ desk }: { readonly desk: SheetDesk }) {
         if (own.length === 0) return null;
         return (
           <section key={step} aria-labelledby={`step-${step}`}>
-            <h3 id={`step-${step}`} className="border-b border-ink px-3 pb-1 pt-4 text-label font-semibold text-ink-2">
+            <h3
+              id={`step-${step}`}
+              className="border-b border-ink px-3 pb-1 pt-4 text-label font-semibold text-ink-2"
+            >
               {handlingStepLabels[step]}
             </h3>
             <ul>

@@ -11,10 +11,18 @@ import { RowMenu } from './row-menu.js';
 
 const ids = (row: SheetRow) => {
   const base = row.key.replace(':', '-');
-  return { row: `row-${base}`, count: `count-${base}`, rest: `reading-${base}`, level: `level-${base}`, error: `error-${base}`, says: `says-${base}` };
+  return {
+    row: `row-${base}`,
+    count: `count-${base}`,
+    rest: `reading-${base}`,
+    level: `level-${base}`,
+    error: `error-${base}`,
+    says: `says-${base}`,
+  };
 };
 /** The box that takes the focus when a row's turn comes. */
-export const firstBoxId = (row: SheetRow) => (row.point.point.takesTapeLengths ? ids(row).count : ids(row).rest);
+export const firstBoxId = (row: SheetRow) =>
+  row.point.point.takesTapeLengths ? ids(row).count : ids(row).rest;
 
 const tones: Readonly<Record<RowState['tone'], string>> = {
   open: 'bg-well text-ink-2',
@@ -58,10 +66,20 @@ export function ReadingRow({ desk, row }: { readonly desk: SheetDesk; readonly r
             {says(row, state)}
           </p>
         </div>
-        {row.point.point.levelRecorded && !row.covered ? <LevelBox desk={desk} row={row} id={id.level} /> : <span className="max-xl:hidden" />}
+        {row.point.point.levelRecorded && !row.covered ? (
+          <LevelBox desk={desk} row={row} id={id.level} />
+        ) : (
+          <span className="max-xl:hidden" />
+        )}
         <Boxes desk={desk} row={row} id={id} mistake={mistake} />
-        <span className={`rounded-sm px-2 py-1 text-center text-label font-medium max-xl:col-start-2 max-xl:row-start-2 max-xl:w-fit max-xl:self-start max-xl:py-0 ${tones[state.tone]}`}>{state.word}</span>
-        <div className="max-xl:col-start-4 max-xl:row-span-2 max-xl:row-start-1">{!desk.locked && <RowMenu desk={desk} row={row} />}</div>
+        <span
+          className={`rounded-sm px-2 py-1 text-center text-label font-medium max-xl:col-start-2 max-xl:row-start-2 max-xl:w-fit max-xl:self-start max-xl:py-0 ${tones[state.tone]}`}
+        >
+          {state.word}
+        </span>
+        <div className="max-xl:col-start-4 max-xl:row-span-2 max-xl:row-start-1">
+          {!desk.locked && <RowMenu desk={desk} row={row} />}
+        </div>
       </div>
       {mistake && <FieldError id={id.error}>{mistake}</FieldError>}
       {row.decision && <DecisionCard desk={desk} row={row} entry={row.decision} />}
@@ -73,7 +91,10 @@ function says(row: SheetRow, state: RowState): string {
   const { reading } = row;
   if (state.sentence) return state.sentence;
   if (reading?.reason) return notTakenReasons[reading.reason];
-  if (reading?.value != null && (reading.unit !== 'mm' || reading.tapeCount > 0 || row.point.point.how === 'flat-doubled')) {
+  if (
+    reading && reading.value !== null &&
+    (reading.unit !== 'mm' || reading.tapeCount > 0 || row.point.point.how === 'flat-doubled')
+  ) {
     const doubled = row.point.point.how === 'flat-doubled' ? 'doubled, ' : '';
     return `${doubled}${formatLength(reading.value, 'mm')}`;
   }
@@ -89,7 +110,8 @@ interface BoxesProps {
 }
 
 function Boxes({ desk, row, id, mistake }: BoxesProps) {
-  if (row.covered) return <span className="h-12 w-36 rounded-sm border border-hair bg-well" aria-hidden="true" />;
+  if (row.covered)
+    return <span className="h-12 w-36 rounded-sm border border-hair bg-well" aria-hidden="true" />;
   const draft = desk.draftOf(row);
   const takesTapes = row.point.point.takesTapeLengths;
   const onKeyDown = (event: KeyboardEvent<HTMLInputElement>) => {
@@ -112,7 +134,9 @@ function Boxes({ desk, row, id, mistake }: BoxesProps) {
     'aria-describedby': mistake ? `${id.says} ${id.error}` : id.says,
   };
   return (
-    <div className={`flex items-center gap-2 ${takesTapes ? 'max-xl:col-span-2 max-xl:col-start-2 max-xl:row-start-3 max-xl:mt-1' : 'max-xl:col-start-3 max-xl:row-span-2 max-xl:row-start-1'}`}>
+    <div
+      className={`flex items-center gap-2 ${takesTapes ? 'max-xl:col-span-2 max-xl:col-start-2 max-xl:row-start-3 max-xl:mt-1' : 'max-xl:col-start-3 max-xl:row-span-2 max-xl:row-start-1'}`}
+    >
       {takesTapes && (
         <>
           <input
@@ -125,7 +149,9 @@ function Boxes({ desk, row, id, mistake }: BoxesProps) {
             onChange={(event) => desk.type(row, { count: event.target.value })}
             className="box reading-box w-12 text-center"
           />
-          <span className="figures whitespace-nowrap text-table text-ink-2">× {formatLength(desk.tape.length, 'mm')} +</span>
+          <span className="figures whitespace-nowrap text-table text-ink-2">
+            × {formatLength(desk.tape.length, 'mm')} +
+          </span>
         </>
       )}
       <div className="flex">
@@ -141,7 +167,10 @@ function Boxes({ desk, row, id, mistake }: BoxesProps) {
           onChange={(event) => desk.type(row, { text: event.target.value })}
           className="box reading-box w-24 rounded-r-none border-r-0 text-right"
         />
-        <span className="grid h-12 w-11 place-items-center rounded-r-sm border border-rule bg-well text-table text-ink-2" aria-hidden="true">
+        <span
+          className="grid h-12 w-11 place-items-center rounded-r-sm border border-rule bg-well text-table text-ink-2"
+          aria-hidden="true"
+        >
           {draft.unit}
         </span>
       </div>
@@ -155,21 +184,35 @@ function TapeSum({ desk, row }: { readonly desk: SheetDesk; readonly row: SheetR
   const { text, unit, count } = desk.draftOf(row);
   const value = valueOf(text || '0', unit, Number(count) || 0, row.point.point.how, desk.tape);
   if (value === null || !(Number(count) > 0)) return null;
-  return <output className="figures whitespace-nowrap text-table font-medium max-sm:sr-only">= {formatLength(value, 'mm')}</output>;
+  return (
+    <output className="figures whitespace-nowrap text-table font-medium max-sm:sr-only">
+      = {formatLength(value, 'mm')}
+    </output>
+  );
 }
 
-function LevelBox({ desk, row, id }: { readonly desk: SheetDesk; readonly row: SheetRow; readonly id: string }) {
+function LevelBox({
+  desk,
+  row,
+  id,
+}: {
+  readonly desk: SheetDesk;
+  readonly row: SheetRow;
+  readonly id: string;
+}) {
   const { level } = desk.draftOf(row);
   return (
     <div className="flex flex-wrap items-center gap-x-3 max-xl:col-span-3 max-xl:col-start-2 max-xl:row-start-4 max-xl:mt-1">
       <label htmlFor={id} className="text-label text-ink-2">
-        Level found<span className="sr-only"> for {rowLabel(row)}</span>
+        Level found <span className="sr-only">for {rowLabel(row)}</span>
       </label>
       <select
         id={id}
         value={level ?? ''}
         disabled={desk.locked}
-        onChange={(event) => desk.type(row, { level: LevelFoundBy.options.find((one) => one === event.target.value) ?? null })}
+        onChange={(event) =>
+          desk.type(row, { level: LevelFoundBy.options.find((one) => one === event.target.value) ?? null })
+        }
         className="box min-h-11 w-auto py-1 text-table"
       >
         <option value="">not said yet</option>

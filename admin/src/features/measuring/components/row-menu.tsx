@@ -23,9 +23,16 @@ export function RowMenu({ desk, row }: { readonly desk: SheetDesk; readonly row:
             <circle cx="16" cy="10" r="1.6" />
           </svg>
         </MenuButton>
-        <MenuItems anchor="bottom end" className="z-20 rounded-sm border border-rule bg-sheet py-1 shadow-dialog focus:outline-none">
+        <MenuItems
+          anchor="bottom end"
+          className="z-20 rounded-sm border border-rule bg-sheet py-1 shadow-dialog focus:outline-none"
+        >
           <MenuItem>
-            <button type="button" onClick={() => setAsking(true)} className="block min-h-12 w-full px-4 text-left text-table data-focus:bg-indigo-tint">
+            <button
+              type="button"
+              onClick={() => setAsking(true)}
+              className="block min-h-12 w-full px-4 text-left text-table data-focus:bg-indigo-tint"
+            >
               Cannot be taken
             </button>
           </MenuItem>

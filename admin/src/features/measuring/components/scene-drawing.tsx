@@ -6,9 +6,18 @@ interface Choosing {
 }
 
 /** Paints a scene. Its colours are classes, so that light and dark are the style sheet's; the table is its text. */
-export function SceneDrawing({ scene, className = '', ...choosing }: { readonly scene: Scene; readonly className?: string } & Choosing) {
+export function SceneDrawing({
+  scene,
+  className = '',
+  ...choosing
+}: { readonly scene: Scene; readonly className?: string } & Choosing) {
   return (
-    <svg viewBox={`0 0 ${scene.width} ${scene.height}`} role="img" aria-label={scene.title} className={`drawing ${className}`}>
+    <svg
+      viewBox={`0 0 ${scene.width} ${scene.height}`}
+      role="img"
+      aria-label={scene.title}
+      className={`drawing ${className}`}
+    >
       <title>{scene.title}</title>
       <defs>
         {scene.clips.map(({ id, paths }) => (
@@ -53,7 +62,17 @@ function Mark({ mark }: { readonly mark: SceneMark }) {
     );
   }
   const strokeWidth = mark.strokeWidth || undefined;
-  if (mark.type === 'circle') return <circle className={className} cx={mark.cx} cy={mark.cy} r={mark.r} strokeWidth={strokeWidth} />;
+  if (mark.type === 'circle')
+    return <circle className={className} cx={mark.cx} cy={mark.cy} r={mark.r} strokeWidth={strokeWidth} />;
   const clipPath = mark.clip && `url(#${mark.clip})`;
-  return <path className={className} d={mark.d} strokeWidth={strokeWidth} strokeDasharray={mark.dash} clipPath={clipPath} pathLength={mark.role === 'line-current' && !mark.dash ? 1 : undefined} />;
+  return (
+    <path
+      className={className}
+      d={mark.d}
+      strokeWidth={strokeWidth}
+      strokeDasharray={mark.dash}
+      clipPath={clipPath}
+      pathLength={mark.role === 'line-current' && !mark.dash ? 1 : undefined}
+    />
+  );
 }

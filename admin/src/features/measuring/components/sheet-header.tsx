@@ -7,22 +7,37 @@ import { sheetUnits, type SheetDesk } from '../model/use-sheet-desk.js';
 export function SheetHeader({ desk }: { readonly desk: SheetDesk }) {
   const { garment, garmentId, facts } = desk.sheet;
   const number = `${garment.ownNumber}${garment.partSuffix}`;
-  const people = facts.people.map(({ name, duty }) => `${duty === 'read' ? 'Reads' : duty === 'held' ? 'Holds' : 'Writes'}: ${name}`);
+  const people = facts.people.map(
+    ({ name, duty }) => `${duty === 'read' ? 'Reads' : duty === 'held' ? 'Holds' : 'Writes'}: ${name}`,
+  );
   return (
     <header className="flex flex-wrap items-center gap-x-5 gap-y-2 border-b border-hair bg-sheet px-4 py-2">
-      {garment.firstImageId && <img src={staffPicture(garment.firstImageId, 320)} alt="" className="h-14 w-11 rounded-sm bg-well object-cover object-top max-sm:hidden" />}
+      {garment.firstImageId && (
+        <img
+          src={staffPicture(garment.firstImageId, 320)}
+          alt=""
+          className="h-14 w-11 rounded-sm bg-well object-cover object-top max-sm:hidden"
+        />
+      )}
       <div className="min-w-0 max-w-xl">
         <div className="flex items-baseline gap-3">
           <PageTitle title={`${garment.partName}, ${number}`} className="text-title-25! leading-7!">
             {garment.partName}
           </PageTitle>
-          <Link to={paths.garment(garmentId)} className="figures inline-flex min-h-8 items-center text-table text-indigo underline underline-offset-2">
+          <Link
+            to={paths.garment(garmentId)}
+            className="figures inline-flex min-h-8 items-center text-table text-indigo underline underline-offset-2"
+          >
             {number}
             <span className="sr-only">, back to the garment</span>
           </Link>
         </div>
-        <p className="truncate text-table text-ink-2">{[garment.title, garment.date, garment.maker].filter(Boolean).join(', ')}</p>
-        <p className="truncate text-label text-ink-2">{people.length > 0 ? people.join('. ') : 'Nobody is named yet'}</p>
+        <p className="truncate text-table text-ink-2">
+          {[garment.title, garment.date, garment.maker].filter(Boolean).join(', ')}
+        </p>
+        <p className="truncate text-label text-ink-2">
+          {people.length > 0 ? people.join('. ') : 'Nobody is named yet'}
+        </p>
       </div>
       <div className="ml-auto flex flex-wrap items-center gap-3">
         {desk.reader.readers.length > 1 && <ReaderChoice desk={desk} />}
@@ -38,7 +53,11 @@ function ReaderChoice({ desk }: { readonly desk: SheetDesk }) {
   return (
     <label className="flex items-center gap-2 text-label text-ink-2">
       Reading now
-      <select value={readBy} onChange={(event) => setReadBy(event.target.value)} className="box min-h-11 w-auto py-1 text-table">
+      <select
+        value={readBy}
+        onChange={(event) => setReadBy(event.target.value)}
+        className="box min-h-11 w-auto py-1 text-table"
+      >
         {readers.map(({ userId, name }) => (
           <option key={userId} value={userId}>
             {name}
@@ -70,9 +89,16 @@ function UnitChoice({ desk }: { readonly desk: SheetDesk }) {
 function SendStatus({ desk }: { readonly desk: SheetDesk }) {
   const decide = desk.status.includes('decision');
   const sent = desk.status.startsWith('All');
-  const look = decide ? 'bg-madder-tint text-madder' : sent ? 'bg-verdigris-tint text-verdigris' : 'bg-weld-tint text-weld-text';
+  const look = decide
+    ? 'bg-madder-tint text-madder'
+    : sent
+      ? 'bg-verdigris-tint text-verdigris'
+      : 'bg-weld-tint text-weld-text';
   return (
-    <p role="status" className={`figures rounded-sm text-table font-medium ${desk.status ? `px-3 py-2 ${look}` : ''}`}>
+    <p
+      role="status"
+      className={`figures rounded-sm text-table font-medium ${desk.status ? `px-3 py-2 ${look}` : ''}`}
+    >
       {desk.status}
     </p>
   );

@@ -15,7 +15,11 @@ export function SheetPage() {
   return (
     <main>
       <Page title="Measuring sheet">
-        {sheet.isError ? <Failed error={sheet.error} onRetry={() => void sheet.refetch()} /> : <Waiting label="Fetching the sheet" rows={8} />}
+        {sheet.isError ? (
+          <Failed error={sheet.error} onRetry={() => void sheet.refetch()} />
+        ) : (
+          <Waiting label="Fetching the sheet" rows={8} />
+        )}
       </Page>
     </main>
   );

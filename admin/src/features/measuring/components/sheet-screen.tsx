@@ -26,10 +26,14 @@ export function SheetScreen({ sheet }: { readonly sheet: Sheet }) {
   const desk = useSheetDesk(sheet);
   const [search, setSearch] = useSearchParams();
   const shown = Math.max(0, tabs.indexOf((search.get('show') ?? 'readings') as TabName));
-  const show = (tab: TabName) => setSearch(tab === 'readings' ? {} : { show: tab }, { replace: true });
+  const show = (tab: TabName) => {
+    if (tab !== tabs[shown]) setSearch(tab === 'readings' ? {} : { show: tab }, { replace: true });
+  };
   const chooseRow = (pointId: string) => {
     show('readings');
-    const row = desk.rows.find(({ point, reading }) => point.id === pointId && !reading) ?? desk.rows.find(({ point }) => point.id === pointId);
+    const row =
+      desk.rows.find(({ point, reading }) => point.id === pointId && !reading) ??
+      desk.rows.find(({ point }) => point.id === pointId);
     if (row) desk.go(row.key);
   };
   return (
@@ -37,17 +41,36 @@ export function SheetScreen({ sheet }: { readonly sheet: Sheet }) {
       <SheetHeader desk={desk} />
       <main className="grid min-h-0 grow grid-cols-[minmax(0,1fr)] max-md:content-start md:grid-cols-[20rem_minmax(0,1fr)] lg:grid-cols-[25rem_minmax(0,1fr)]">
         <div className="min-h-0 border-hair max-md:border-b md:overflow-y-auto md:border-r">
-          <DiagramPanel kind={sheet.kind} points={desk.points} current={desk.current.point} onChoose={chooseRow} />
+          <DiagramPanel
+            kind={sheet.kind}
+            points={desk.points}
+            current={desk.current.point}
+            onChoose={chooseRow}
+          />
         </div>
         <div className="flex min-h-0 min-w-0 flex-col">
-          <TabGroup selectedIndex={shown} onChange={(index) => show(tabs[index] ?? 'readings')} className="flex min-h-0 grow flex-col">
+          <TabGroup
+            selectedIndex={shown}
+            onChange={(index) => show(tabs[index] ?? 'readings')}
+            className="flex min-h-0 grow flex-col"
+          >
             <SheetTabs desk={desk} />
             <TabPanels className="min-h-0 grow overflow-y-auto">
-              <Panel><ReadingList desk={desk} /></Panel>
-              <Panel><FindingsPanel desk={desk} onPoint={chooseRow} /></Panel>
-              <Panel><DerivedPanel sheetId={sheet.id} onPoint={chooseRow} /></Panel>
-              <Panel><BoxList desk={desk} onPoint={chooseRow} onFindings={() => show('findings')} /></Panel>
-              <Panel><FactsPanel sheet={sheet} /></Panel>
+              <Panel>
+                <ReadingList desk={desk} />
+              </Panel>
+              <Panel>
+                <FindingsPanel desk={desk} onPoint={chooseRow} />
+              </Panel>
+              <Panel>
+                <DerivedPanel sheetId={sheet.id} onPoint={chooseRow} />
+              </Panel>
+              <Panel>
+                <BoxList desk={desk} onPoint={chooseRow} onFindings={() => show('findings')} />
+              </Panel>
+              <Panel>
+                <FactsPanel sheet={sheet} />
+              </Panel>
             </TabPanels>
           </TabGroup>
           {desk.keypad && !desk.locked && shown === 0 && <Keypad desk={desk} />}
@@ -59,12 +82,16 @@ export function SheetScreen({ sheet }: { readonly sheet: Sheet }) {
   );
 }
 
-const Panel = ({ children }: { readonly children: ReactNode }) => <TabPanel className="pb-8 focus:outline-none">{children}</TabPanel>;
+const Panel = ({ children }: { readonly children: ReactNode }) => (
+  <TabPanel className="pb-8 focus:outline-none">{children}</TabPanel>
+);
 
 function SheetTabs({ desk }: { readonly desk: SheetDesk }) {
   const findings = useQuery(findingsQuery(desk.sheet.id));
-  const open = findings.data?.findings.filter(({ severity, answer }) => severity !== 'note' && answer === null).length ?? 0;
-  const labels = ['Readings', open > 0 ? `Findings, ${open} open` : 'Findings', 'Worked out', 'Before the box', 'Sheet facts'];
+  const open =
+    findings.data?.findings.filter(({ severity, answer }) => severity !== 'note' && answer === null).length ??
+    0;
+  const labels = ['Readings', 'Findings', 'Worked out', 'Box list', 'Facts'];
   return (
     <TabList className="flex shrink-0 gap-1 overflow-x-auto border-b border-hair bg-sheet px-2">
       {labels.map((label, index) => (
@@ -73,6 +100,11 @@ function SheetTabs({ desk }: { readonly desk: SheetDesk }) {
           className="min-h-11 whitespace-nowrap border-b-2 border-transparent px-3 text-table text-ink-2 focus-visible:-outline-offset-3 data-selected:border-indigo data-selected:font-medium data-selected:text-ink"
         >
           {label}
+          {label === 'Findings' && open > 0 && (
+            <span className="figures ml-2 rounded-full bg-madder-tint px-2 text-label font-medium text-madder">
+              {open} <span className="sr-only">open</span>
+            </span>
+          )}
         </Tab>
       ))}
     </TabList>

@@ -24,24 +24,49 @@ export function boxTasks({ rows, entries, findings, views }: BoxAsked): readonly
   const toTake = rows
     .filter(({ reading }) => reading === null)
     .map(({ point, round }): BoxTask => ({
-      sentence: round === 1 ? `Take ${point.point.name}, or say why not` : `Read ${point.point.name} again, blind`,
+      sentence:
+        round === 1
+          ? `${point.point.name}: take it, or say why not`
+          : `${point.point.name}: read it again, blind`,
       must: point.required || round > 1,
       pointId: point.id,
     }));
   const toDecide = entries
     .filter(({ state }) => state === 'decision')
-    .map(({ reading }): BoxTask => ({ sentence: `Decide between two readings: ${nameIn(rows, reading.pointId)}`, must: true, pointId: reading.pointId }));
+    .map(({ reading }): BoxTask => ({
+      sentence: `${nameIn(rows, reading.pointId)}: decide which reading stands`,
+      must: true,
+      pointId: reading.pointId,
+    }));
   const firstRounds = rows.filter(({ round }) => round === 1);
   const toReread = firstRounds.flatMap(({ point }): BoxTask[] => {
     const spread = spreadOf(rows, point.id);
     if (!spread || spread.within) return [];
-    return [{ sentence: `Read ${point.point.name} once more: ${formatLength(spread.apart, 'mm')} apart`, must: false, pointId: point.id }];
+    return [
+      {
+        sentence: `${point.point.name}: ${formatLength(spread.apart, 'mm')} apart, read it once more`,
+        must: false,
+        pointId: point.id,
+      },
+    ];
   });
   const noLevel = firstRounds
-    .filter(({ point, reading }) => point.point.levelRecorded && reading?.value != null && reading.level === null)
-    .map(({ point }): BoxTask => ({ sentence: `Say how the level of ${point.point.name} was found`, must: false, pointId: point.id }));
+    .filter(
+      ({ point, reading }) => point.point.levelRecorded && reading !== null && reading.value !== null && reading.level === null,
+    )
+    .map(({ point }): BoxTask => ({
+      sentence: `${point.point.name}: say how the level was found`,
+      must: false,
+      pointId: point.id,
+    }));
   const toAnswer = findings
     .filter(({ severity, answer }) => severity !== 'note' && answer === null)
+    // That a point is missing is on the list already.
+    .filter(
+      ({ pointIds }) =>
+        pointIds.length === 0 ||
+        pointIds.some((id) => firstRounds.some(({ point, reading }) => point.id === id && reading !== null)),
+    )
     .map(({ sentence, severity }): BoxTask => ({ sentence, must: severity === 'stop', finding: true }));
   return [...toDecide, ...toTake, ...toAnswer, ...toReread, ...noLevel, ...toPhotograph(views)];
 }

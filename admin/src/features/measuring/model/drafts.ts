@@ -36,7 +36,7 @@ export class Drafts {
 
   clear(row: string): void {
     if (!(row in this.kept)) return;
-    const { [row]: _gone, ...others } = this.kept;
+    const others = Object.fromEntries(Object.entries(this.kept).filter(([key]) => key !== row));
     this.change(others);
   }
 

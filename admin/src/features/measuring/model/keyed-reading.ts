@@ -5,7 +5,8 @@ import type { Draft } from './drafts.js';
 import { deviceName } from './shelf.js';
 import type { SheetRow } from './rows.js';
 
-export type Keyed = { readonly ok: true; readonly reading: NewReading } | { readonly ok: false; readonly sentence: string };
+export type Keyed =
+  { readonly ok: true; readonly reading: NewReading } | { readonly ok: false; readonly sentence: string };
 
 export interface Keying {
   readonly row: SheetRow;
@@ -48,7 +49,10 @@ export function keyedReading(keying: Keying, draft: Draft): Keyed {
   return { ok: true, reading };
 }
 
-export function notTakenReading(keying: Keying, reason: Extract<NewReading, { state: 'not-taken' }>['reason']): NewReading {
+export function notTakenReading(
+  keying: Keying,
+  reason: Extract<NewReading, { state: 'not-taken' }>['reason'],
+): NewReading {
   return { ...base(keying), state: 'not-taken', reason };
 }
 
@@ -58,6 +62,9 @@ export function saysSomethingNew(draft: Draft, row: SheetRow): boolean {
   const count = Number(draft.count || 0);
   if (!reading || reading.reason !== null) return draft.text.trim() !== '' || count > 0;
   return (
-    draft.text.trim() !== reading.typed || draft.unit !== reading.unit || count !== reading.tapeCount || draft.level !== reading.level
+    draft.text.trim() !== reading.typed ||
+    draft.unit !== reading.unit ||
+    count !== reading.tapeCount ||
+    draft.level !== reading.level
   );
 }

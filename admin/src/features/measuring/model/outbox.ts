@@ -23,7 +23,9 @@ export interface OutboxView {
 
 export interface OutboxWays {
   readonly shelf: Shelf<readonly OutboxEntry[]>;
-  readonly deliver: (readings: readonly NewReading[]) => Promise<{ sheetVersion: number; results: readonly ReadingResult[] }>;
+  readonly deliver: (
+    readings: readonly NewReading[],
+  ) => Promise<{ sheetVersion: number; results: readonly ReadingResult[] }>;
   /** Told before the kept readings leave the outbox, so that they are never nowhere. */
   readonly onKept: (results: readonly ReadingResult[], sheetVersion: number) => void;
   /** Runs the work while no other tab sends from this outbox. */
@@ -77,31 +79,36 @@ export class Outbox {
   /** Sends all that waits. Never throws: what could not be sent stays where it is. */
   send(): Promise<void> {
     this.askedAgain = true;
-    this.running ??= this.ways.alone(() => this.sendWhileAsked()).finally(() => {
-      this.running = null;
-      this.show({ sending: 0 });
-    });
+    this.running ??= this.ways
+      .alone(() => this.sendWhileAsked())
+      .finally(() => {
+        this.running = null;
+        this.show({ sending: 0 });
+      });
     return this.running;
   }
 
   private async sendWhileAsked(): Promise<void> {
+    // Whoever asks while a sending is about to fail (the network has just come back) gets one of their own.
     while (this.askedAgain) {
       this.askedAgain = false;
-      if (!(await this.sendAll())) return;
+      await this.sendAll();
     }
   }
 
-  /** False when the API could not be reached and it is better to wait. */
-  private async sendAll(): Promise<boolean> {
+  /** Returns when nothing waits any more, or when the API cannot be reached and it is better to wait. */
+  private async sendAll(): Promise<void> {
     let batch = LARGEST_BATCH;
     for (;;) {
-      const waiting = this.entries().filter(({ state }) => state === 'waiting').slice(0, batch);
-      if (waiting.length === 0) return true;
+      const waiting = this.entries()
+        .filter(({ state }) => state === 'waiting')
+        .slice(0, batch);
+      if (waiting.length === 0) return;
       this.show({ sending: waiting.length });
       try {
         this.settle(await this.ways.deliver(waiting.map(({ reading }) => reading)));
       } catch (error) {
-        if (!isFinal(error)) return false;
+        if (!isFinal(error)) return;
         // One that cannot be read must not hold up the others: they are sent singly, and it shows itself.
         if (waiting.length > 1) batch = 1;
         else this.mark(waiting[0]?.reading.id, error instanceof Error ? error.message : 'Refused');
@@ -109,7 +116,13 @@ export class Outbox {
     }
   }
 
-  private settle({ sheetVersion, results }: { sheetVersion: number; results: readonly ReadingResult[] }): void {
+  private settle({
+    sheetVersion,
+    results,
+  }: {
+    sheetVersion: number;
+    results: readonly ReadingResult[];
+  }): void {
     const byId = new Map(results.map((result) => [result.id, result]));
     const kept = results.filter(({ outcome }) => outcome === 'kept' || outcome === 'already-kept');
     if (kept.length > 0) this.ways.onKept(kept, sheetVersion);
@@ -119,14 +132,18 @@ export class Outbox {
         if (!result) return [entry];
         if (result.outcome === 'kept' || result.outcome === 'already-kept') return [];
         const why = result.detail ?? 'Another reading stands at this point.';
-        return [{ ...entry, state: 'decision', why, ...(result.standing ? { standing: result.standing } : {}) }];
+        return [
+          { ...entry, state: 'decision', why, ...(result.standing ? { standing: result.standing } : {}) },
+        ];
       }),
     );
     if (kept.length > 0) this.show({ sentAt: Date.now() });
   }
 
   private mark(id: string | undefined, why: string): void {
-    this.change((entries) => entries.map((entry) => (entry.reading.id === id ? { ...entry, state: 'decision', why } : entry)));
+    this.change((entries) =>
+      entries.map((entry) => (entry.reading.id === id ? { ...entry, state: 'decision', why } : entry)),
+    );
   }
 
   /** The shelf is the truth, for another tab may have written to it since. */
@@ -148,5 +165,10 @@ export class Outbox {
 
 /** A refusal that the same request would meet again; silence, overload and a fault of the server may pass. */
 function isFinal(error: unknown): boolean {
-  return isProblem(error) && error.status >= 400 && error.status < 500 && ![401, 408, 425, 429].includes(error.status);
+  return (
+    isProblem(error) &&
+    error.status >= 400 &&
+    error.status < 500 &&
+    ![401, 408, 425, 429].includes(error.status)
+  );
 }

@@ -13,7 +13,8 @@ export function useReadAloud(): readonly [boolean, (on: boolean) => void] {
 /** "Hem, 3 tapes and 742 millimetres". */
 export function readingAloud(point: string, reading: NewReading): string {
   if (reading.state === 'not-taken') return `${point}, not taken`;
-  const tapes = reading.tapeCount > 0 ? `${reading.tapeCount} ${reading.tapeCount === 1 ? 'tape' : 'tapes'} and ` : '';
+  const tapes =
+    reading.tapeCount > 0 ? `${reading.tapeCount} ${reading.tapeCount === 1 ? 'tape' : 'tapes'} and ` : '';
   return `${point}, ${tapes}${reading.typed} ${unitLabels[reading.unit]}`;
 }
 

@@ -22,13 +22,21 @@ export function rowState(row: SheetRow, rows: readonly SheetRow[], kind: Garment
   if (spread && row.round > 1) {
     const word = `${formatLength(spread.apart, 'mm')} apart`;
     if (spread.within) return { word, tone: 'good' };
-    return { word, tone: 'look', sentence: `Readings ${word}; ${formatLength(spread.allowed, 'mm')} is usual. Read it once more.` };
+    return {
+      word,
+      tone: 'look',
+      sentence: `Readings ${word}; ${formatLength(spread.allowed, 'mm')} is usual. Read it once more.`,
+    };
   }
   const range = softRangeFor(point.point, kind);
   const value = reading.value;
   if (value !== null && (isLonger(range.from, value) || isLonger(value, range.to))) {
     const usual = `${formatLength(range.from, 'mm')} to ${formatLength(range.to, 'mm')}`;
-    return { word: 'look again', tone: 'look', sentence: `${formatLength(value, 'mm')}; usual here is ${usual}. Look again while it lies open.` };
+    return {
+      word: 'look again',
+      tone: 'look',
+      sentence: `${formatLength(value, 'mm')}; usual here is ${usual}. Look again while it lies open.`,
+    };
   }
   return { word: reading.sent ? 'taken' : 'kept here', tone: 'good' };
 }

@@ -40,10 +40,22 @@ export interface SheetRow {
 export const rowKey = (pointId: string, round: number): string => `${pointId}:${round}`;
 
 /** The whole value of what was typed; null where it cannot be read. */
-export function valueOf(typed: string, unit: RowReading['unit'], tapeCount: number, how: MeasuringHow, tape: Tape): Length | null {
+export function valueOf(
+  typed: string,
+  unit: RowReading['unit'],
+  tapeCount: number,
+  how: MeasuringHow,
+  tape: Tape,
+): Length | null {
   const parsed = fromTyped({ text: typed, unit });
   if (!parsed.ok) return null;
-  return wholeValue({ read: parsed.value.length, how, tapeCount, tapeLength: tape.length, tapeZero: tape.zero });
+  return wholeValue({
+    read: parsed.value.length,
+    how,
+    tapeCount,
+    tapeLength: tape.length,
+    tapeZero: tape.zero,
+  });
 }
 
 function fromStored(reading: StoredReading): RowReading {
@@ -63,7 +75,17 @@ function fromStored(reading: StoredReading): RowReading {
 function fromOutbox(reading: NewReading, how: MeasuringHow, tape: Tape): RowReading {
   const { id, note } = reading;
   if (reading.state === 'not-taken') {
-    return { id, value: null, typed: '', unit: 'mm', tapeCount: 0, level: null, reason: reading.reason, note, sent: false };
+    return {
+      id,
+      value: null,
+      typed: '',
+      unit: 'mm',
+      tapeCount: 0,
+      level: null,
+      reason: reading.reason,
+      note,
+      sent: false,
+    };
   }
   const { typed, unit, tapeCount, levelFoundBy } = reading;
   const value = valueOf(typed, unit, tapeCount, how, tape);
@@ -71,14 +93,20 @@ function fromOutbox(reading: NewReading, how: MeasuringHow, tape: Tape): RowRead
 }
 
 /** What stands at each point and round: the API's readings, and over them what still waits here, in order. */
-function standing(points: readonly SheetPoint[], stored: readonly StoredReading[], entries: readonly OutboxEntry[], tape: Tape) {
+function standing(
+  points: readonly SheetPoint[],
+  stored: readonly StoredReading[],
+  entries: readonly OutboxEntry[],
+  tape: Tape,
+) {
   const found = new Map<string, RowReading>();
   for (const reading of stored) {
     if (reading.stands) found.set(rowKey(reading.pointId, reading.round), fromStored(reading));
   }
   for (const { reading, state } of entries) {
     const how = points.find(({ id }) => id === reading.pointId)?.point.how ?? 'straight';
-    if (state === 'waiting') found.set(rowKey(reading.pointId, reading.round), fromOutbox(reading, how, tape));
+    if (state === 'waiting')
+      found.set(rowKey(reading.pointId, reading.round), fromOutbox(reading, how, tape));
   }
   return found;
 }
@@ -96,22 +124,36 @@ export interface RowsAsked {
 export function sheetRows({ points, stored, entries, tape, rounds }: RowsAsked): readonly SheetRow[] {
   const found = standing(points, stored, entries, tape);
   return points.flatMap((point) => {
-    const taken = [...stored, ...entries.map(({ reading }) => reading)].filter(({ pointId }) => pointId === point.id);
+    const taken = [...stored, ...entries.map(({ reading }) => reading)].filter(
+      ({ pointId }) => pointId === point.id,
+    );
     const last = Math.max(1, rounds[point.id] ?? 1, ...taken.map(({ round }) => round));
     const blind = last > 1 && !found.has(rowKey(point.id, last));
     return Array.from({ length: last }, (_, index): SheetRow => {
       const round = index + 1;
       const key = rowKey(point.id, round);
-      const decision = entries.find(({ reading, state }) => state === 'decision' && rowKey(reading.pointId, reading.round) === key);
-      return { key, point, round, reading: found.get(key) ?? null, decision: decision ?? null, covered: blind && round < last };
+      const decision = entries.find(
+        ({ reading, state }) => state === 'decision' && rowKey(reading.pointId, reading.round) === key,
+      );
+      return {
+        key,
+        point,
+        round,
+        reading: found.get(key) ?? null,
+        decision: decision ?? null,
+        covered: blind && round < last,
+      };
     });
   });
 }
 
 /** How far a point's rounds lie apart and whether that is allowed; null with fewer than two. */
-export function spreadOf(rows: readonly SheetRow[], pointId: string): { readonly apart: Length; readonly allowed: Length; readonly within: boolean } | null {
+export function spreadOf(
+  rows: readonly SheetRow[],
+  pointId: string,
+): { readonly apart: Length; readonly allowed: Length; readonly within: boolean } | null {
   const own = rows.filter(({ point }) => point.id === pointId);
-  const values = own.flatMap(({ reading }) => (reading?.value == null ? [] : [reading.value]));
+  const values = own.flatMap(({ reading }) => (reading === null || reading.value === null ? [] : [reading.value]));
   const [first, ...others] = values;
   if (first === undefined || others.length === 0) return null;
   const apart = subtract(longestOf(first, ...others), shortestOf(first, ...others));

@@ -9,7 +9,8 @@ export function sendStatus(view: OutboxView, drafts: number, lastReceived: strin
   const waiting = view.entries.length - decisions;
   if (waiting > 0 && view.sending > 0) return `Sending ${readings(view.sending)}`;
   if (waiting > 0) return 'Kept on this tablet';
-  if (decisions > 0) return decisions === 1 ? '1 reading needs your decision' : `${decisions} readings need your decision`;
+  if (decisions > 0)
+    return decisions === 1 ? '1 reading needs your decision' : `${decisions} readings need your decision`;
   if (drafts > 0) return 'Kept on this tablet';
   const sent = view.sentAt ?? lastReceived;
   return sent === null ? '' : `All readings sent, ${timeText(sent)}`;

@@ -32,7 +32,8 @@ export function mannerOf({ point }: SheetPoint): string {
 export const stepWords: Readonly<Record<HandlingStep, { readonly title: string; readonly words: string }>> = {
   'opened-inside': {
     title: 'Opened, inside: two people',
-    words: 'Undo only what opens without strain and lay the garment open. One reads, the other holds the end of the tape and steadies the cloth.',
+    words:
+      'Undo only what opens without strain and lay the garment open. One reads, the other holds the end of the tape and steadies the cloth.',
   },
   'front-up': {
     title: 'Front up: two people',

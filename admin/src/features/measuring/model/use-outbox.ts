@@ -10,7 +10,8 @@ import { deviceShelf, draftsKey, outboxKey } from './shelf.js';
 const EVERY_MS = 30_000;
 
 const isEntries = (value: unknown): value is readonly OutboxEntry[] =>
-  Array.isArray(value) && value.every((entry: unknown) => typeof entry === 'object' && entry !== null && 'reading' in entry);
+  Array.isArray(value) &&
+  value.every((entry: unknown) => typeof entry === 'object' && entry !== null && 'reading' in entry);
 const isDrafts = (value: unknown): value is DraftsKept => DraftsKept.safeParse(value).success;
 
 const alone = (sheetId: string) => async (work: () => Promise<void>) => {
@@ -30,7 +31,8 @@ export function useOutbox(sheetId: string): Outbox {
         onKept: (results, version) => {
           const kept = results.flatMap(({ reading }) => (reading ? [reading] : []));
           layIn(queries, sheetId, kept, version);
-          if (kept.length < results.length) void queries.invalidateQueries({ queryKey: sheetQuery(sheetId).queryKey });
+          if (kept.length < results.length)
+            void queries.invalidateQueries({ queryKey: sheetQuery(sheetId).queryKey });
           void queries.invalidateQueries({ queryKey: findingsQuery(sheetId).queryKey });
         },
       }),

@@ -1,9 +1,11 @@
 import type { HandlingStep } from '@ellwand/shared/points/point';
 import type { NewReading, Sheet } from '@ellwand/shared/records/sheet';
 import { mm } from '@ellwand/shared/units/length';
+import { useQueryClient } from '@tanstack/react-query';
 import { useCallback, useMemo, useState } from 'react';
 import { useRemembered } from '../../../lib/remembered.js';
 import { useSession } from '../../../lib/session.js';
+import { sheetQuery } from '../api/sheet.js';
 import type { Draft } from './drafts.js';
 import { keyedReading, notTakenReading, saysSomethingNew } from './keyed-reading.js';
 import { isDone, sheetRows, type SheetRow } from './rows.js';
@@ -18,9 +20,14 @@ export const sheetUnits = ['mm', 'cm', 'in'] as const;
 export type NotTakenReason = Extract<NewReading, { state: 'not-taken' }>['reason'];
 
 /** Everything a person does at the table, over what the sheet, the outbox and the typed boxes hold. */
-export function useSheetDesk(sheet: Sheet) {
+export function useSheetDesk(shown: Sheet) {
+  // What was just kept is in the cache before this screen is told of it; read there, it is never nowhere.
+  const sheet = useQueryClient().getQueryData(sheetQuery(shown.id).queryKey) ?? shown;
   const points = useMemo(() => sheetPoints(sheet.kind), [sheet.kind]);
-  const tape = useMemo(() => ({ length: mm(sheet.facts.tapeLengthMm), zero: mm(sheet.facts.tapeZeroMm) }), [sheet.facts]);
+  const tape = useMemo(
+    () => ({ length: mm(sheet.facts.tapeLengthMm), zero: mm(sheet.facts.tapeZeroMm) }),
+    [sheet.facts],
+  );
   const outbox = useOutbox(sheet.id);
   const view = useOutboxView(outbox);
   const [drafts, typed] = useDrafts(sheet.id);
@@ -47,7 +54,9 @@ export function useSheetDesk(sheet: Sheet) {
     [typed, unit],
   );
   const say = (key: string, sentence: string | null) =>
-    setMistakes(({ [key]: _old, ...others }) => (sentence === null ? others : { ...others, [key]: sentence }));
+    setMistakes(({ [key]: _old, ...others }) =>
+      sentence === null ? others : { ...others, [key]: sentence },
+    );
 
   const type = (row: SheetRow, part: Partial<Draft>) => {
     say(row.key, null);
@@ -95,11 +104,33 @@ export function useSheetDesk(sheet: Sheet) {
     place.go(`${pointId}:${last + 1}`);
   };
 
-  const received = sheet.readings.map(({ receivedAt }) => receivedAt).toSorted().at(-1) ?? null;
+  const received =
+    sheet.readings
+      .map(({ receivedAt }) => receivedAt)
+      .toSorted()
+      .at(-1) ?? null;
   const done = points.filter(({ id }) => rows.some((row) => row.point.id === id && isDone(row))).length;
   return {
-    sheet, points, rows, tape, unit, setUnit, aloud, setAloud, reader, outbox, view, mistakes, done,
-    draftOf, type, commit, next, step, setAside, readAgain,
+    sheet,
+    points,
+    rows,
+    tape,
+    unit,
+    setUnit,
+    aloud,
+    setAloud,
+    reader,
+    outbox,
+    view,
+    mistakes,
+    done,
+    draftOf,
+    type,
+    commit,
+    next,
+    step,
+    setAside,
+    readAgain,
     ...place,
     ...keypad,
     locked: sheet.state === 'complete',
@@ -112,7 +143,10 @@ export type SheetDesk = ReturnType<typeof useSheetDesk>;
 function useReader(sheet: Sheet) {
   const { user } = useSession();
   const named = sheet.facts.people.filter(({ duty }) => duty === 'read');
-  const readers = named.length > 0 ? named.map(({ userId, name }) => ({ userId, name })) : [{ userId: user.id, name: user.name }];
+  const readers =
+    named.length > 0
+      ? named.map(({ userId, name }) => ({ userId, name }))
+      : [{ userId: user.id, name: user.name }];
   const [chosen, setReadBy] = useState<string | null>(null);
   const readBy = readers.find(({ userId }) => userId === chosen)?.userId ?? readers[0]!.userId;
   return { readers, readBy, setReadBy };
@@ -125,7 +159,8 @@ function usePlace(sheetId: string, rows: readonly SheetRow[]) {
   const current = rows.find((row) => row.key === key) ?? rows[0]!;
   const turning = useTurning(sheetId);
   const stepOf = (rowKey: string): HandlingStep | undefined =>
-    rows.find((row) => row.key === rowKey)?.point.step ?? rows.find((row) => rowKey.startsWith(`${row.point.id}:`))?.point.step;
+    rows.find((row) => row.key === rowKey)?.point.step ??
+    rows.find((row) => rowKey.startsWith(`${row.point.id}:`))?.point.step;
 
   /** Makes a row the current one; where the garment must be turned first, that is said, once. */
   const enter = (to: string): boolean => {

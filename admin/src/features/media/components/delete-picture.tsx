@@ -37,7 +37,8 @@ export function DeletePicture({ image, name }: { readonly image: Image; readonly
         }
       >
         <p>
-          {image.fileName} and its smaller forms will be gone, also the original. If it should only not be shown, hide it instead: that can be undone.
+          {image.fileName} and its smaller forms will be gone, also the original. If it should only not be
+          shown, hide it instead: that can be undone.
         </p>
         <Refused error={remove.error} />
       </Question>

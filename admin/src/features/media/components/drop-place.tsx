@@ -21,7 +21,9 @@ export function DropPlace({ onFiles }: { readonly onFiles: (files: readonly File
       onDrop={drop}
       className={`mt-2 rounded-sm border border-dashed p-4 text-table ${over ? 'border-indigo bg-indigo-tint' : 'border-rule bg-sheet'}`}
     >
-      <p className="mb-2 text-ink-2">Drop pictures here, several at once. JPEG, PNG, WebP or TIFF, up to 60 MB each.</p>
+      <p className="mb-2 text-ink-2">
+        Drop pictures here, several at once. JPEG, PNG, WebP or TIFF, up to 60 MB each.
+      </p>
       <input
         ref={picker}
         type="file"

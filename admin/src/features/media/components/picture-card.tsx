@@ -32,10 +32,18 @@ export function PictureCard({ image, place, images, editable }: PictureCardProps
         <div className="min-w-0 grow text-table">
           <p className="font-medium">
             {imageViewLabels[image.view]}
-            {image.hidden && <span className="ml-2 rounded-sm bg-well px-1.5 py-0.5 text-label text-ink-2">hidden from the public</span>}
+            {image.hidden && (
+              <span className="ml-2 rounded-sm bg-well px-1.5 py-0.5 text-label text-ink-2">
+                hidden from the public
+              </span>
+            )}
           </p>
           <p className="truncate text-label text-ink-3">{image.fileName}</p>
-          {image.state === 'ready' && <p className="text-label text-ink-2">{image.alt || 'No description yet: people who cannot see it need one.'}</p>}
+          {image.state === 'ready' && (
+            <p className="text-label text-ink-2">
+              {image.alt || 'No description yet: people who cannot see it need one.'}
+            </p>
+          )}
           <Making image={image} />
         </div>
       </div>
@@ -44,13 +52,25 @@ export function PictureCard({ image, place, images, editable }: PictureCardProps
           <Button height="dense" onClick={() => setEditing(true)}>
             Describe<span className="sr-only">: {name}</span>
           </Button>
-          <Button height="dense" disabled={place === 0 || change.isPending} onClick={() => change.mutate({ position: images[place - 1]?.position ?? 0 })}>
+          <Button
+            height="dense"
+            disabled={place === 0 || change.isPending}
+            onClick={() => change.mutate({ position: images[place - 1]?.position ?? 0 })}
+          >
             Earlier<span className="sr-only">: {name}</span>
           </Button>
-          <Button height="dense" disabled={place === images.length - 1 || change.isPending} onClick={() => change.mutate({ position: images[place + 1]?.position ?? place + 1 })}>
+          <Button
+            height="dense"
+            disabled={place === images.length - 1 || change.isPending}
+            onClick={() => change.mutate({ position: images[place + 1]?.position ?? place + 1 })}
+          >
             Later<span className="sr-only">: {name}</span>
           </Button>
-          <Button height="dense" disabled={change.isPending} onClick={() => change.mutate({ hidden: !image.hidden })}>
+          <Button
+            height="dense"
+            disabled={change.isPending}
+            onClick={() => change.mutate({ hidden: !image.hidden })}
+          >
             {image.hidden ? 'Show' : 'Hide'}
             <span className="sr-only">: {name}</span>
           </Button>
@@ -66,17 +86,32 @@ export function PictureCard({ image, place, images, editable }: PictureCardProps
 function Thumb({ image }: { readonly image: Image }) {
   const box = 'h-24 w-20 shrink-0 rounded-sm bg-well';
   if (image.state !== 'ready') return <div className={box} aria-hidden="true" />;
-  return <img src={staffPicture(image.id, image.widths[0] ?? 320)} alt={image.alt} loading="lazy" className={`${box} object-cover object-top ${image.hidden ? 'opacity-50' : ''}`} />;
+  return (
+    <img
+      src={staffPicture(image.id, image.widths[0] ?? 320)}
+      alt={image.alt}
+      loading="lazy"
+      className={`${box} object-cover object-top ${image.hidden ? 'opacity-50' : ''}`}
+    />
+  );
 }
 
 /** What is happening to a picture that has arrived: a true fraction, or the sentence of refusal. */
 function Making({ image }: { readonly image: Image }) {
-  if (image.state === 'refused') return <p className="text-label font-medium text-madder">Refused: {image.refusal}</p>;
+  if (image.state === 'refused')
+    return <p className="text-label font-medium text-madder">Refused: {image.refusal}</p>;
   if (image.state === 'ready') return null;
   return (
     <div role="status" className="text-label text-ink-2">
-      <progress aria-label={`Making smaller forms of ${image.fileName}`} value={image.formsMade} max={Math.max(1, image.formsWanted)} className="progress w-full" />
-      {image.state === 'received' ? 'Received; waiting its turn' : `Making smaller forms, ${image.formsMade} of ${image.formsWanted}`}
+      <progress
+        aria-label={`Making smaller forms of ${image.fileName}`}
+        value={image.formsMade}
+        max={Math.max(1, image.formsWanted)}
+        className="progress w-full"
+      />
+      {image.state === 'received'
+        ? 'Received; waiting its turn'
+        : `Making smaller forms, ${image.formsMade} of ${image.formsWanted}`}
     </div>
   );
 }

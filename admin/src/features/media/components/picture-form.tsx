@@ -24,7 +24,11 @@ export function PictureForm({ image, onDone }: { readonly image: Image; readonly
   });
   const id = (name: string) => `${name}-${image.id}`;
   return (
-    <form noValidate className="mt-3 space-y-4 border-t border-hair pt-3" onSubmit={(event) => void form.handleSubmit((change) => save.mutate(change))(event)}>
+    <form
+      noValidate
+      className="mt-3 space-y-4 border-t border-hair pt-3"
+      onSubmit={(event) => void form.handleSubmit((change) => save.mutate(change))(event)}
+    >
       <Select id={id('view')} label="View" {...form.register('view')}>
         {Object.entries(imageViewLabels).map(([view, label]) => (
           <option key={view} value={view}>
@@ -32,9 +36,27 @@ export function PictureForm({ image, onDone }: { readonly image: Image; readonly
           </option>
         ))}
       </Select>
-      <TextArea id={id('alt')} label="Description in words" hint="What the picture shows, for people who cannot see it." error={errors.alt?.message} {...form.register('alt')} />
-      <TextField id={id('caption')} optional label="Caption" error={errors.caption?.message} {...form.register('caption')} />
-      <TextField id={id('credit')} optional label="Credit" error={errors.credit?.message} {...form.register('credit')} />
+      <TextArea
+        id={id('alt')}
+        label="Description in words"
+        hint="What the picture shows, for people who cannot see it."
+        error={errors.alt?.message}
+        {...form.register('alt')}
+      />
+      <TextField
+        id={id('caption')}
+        optional
+        label="Caption"
+        error={errors.caption?.message}
+        {...form.register('caption')}
+      />
+      <TextField
+        id={id('credit')}
+        optional
+        label="Credit"
+        error={errors.credit?.message}
+        {...form.register('credit')}
+      />
       <Refused error={save.error} />
       <div className="flex gap-2">
         <Button type="submit" tone="action" disabled={save.isPending}>

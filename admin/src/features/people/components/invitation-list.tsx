@@ -16,10 +16,14 @@ export function InvitationList() {
   const open = invitations.data?.filter(({ state }) => state === 'open' || state === 'expired') ?? [];
   return (
     <section aria-labelledby="invitations-title">
-      <h2 id="invitations-title" className="title text-title-25">Open invitations</h2>
+      <h2 id="invitations-title" className="title text-title-25">
+        Open invitations
+      </h2>
       {invitations.isPending && <Waiting label="Fetching the invitations" rows={2} />}
       {invitations.isError && <Failed error={invitations.error} onRetry={() => void invitations.refetch()} />}
-      {invitations.data && open.length === 0 && <p className="mt-1 text-table text-ink-2">Everybody who was invited has come in.</p>}
+      {invitations.data && open.length === 0 && (
+        <p className="mt-1 text-table text-ink-2">Everybody who was invited has come in.</p>
+      )}
       <ul className="mt-1 divide-y divide-hair">
         {open.map(({ id, name, email, roles, state, expiresAt }) => (
           <li key={id} className="flex flex-wrap items-center justify-between gap-3 py-2 text-table">
@@ -31,7 +35,7 @@ export function InvitationList() {
               </p>
             </div>
             <Button height="dense" disabled={withdraw.isPending} onClick={() => withdraw.mutate(id)}>
-              Take back<span className="sr-only"> the invitation of {name}</span>
+              Take back <span className="sr-only">the invitation of {name}</span>
             </Button>
           </li>
         ))}

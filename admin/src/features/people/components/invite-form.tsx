@@ -17,7 +17,11 @@ const nobody: Inviting = { email: '', name: '', roles: [] };
 export function InviteForm() {
   const queries = useQueryClient();
   const [sentTo, setSentTo] = useState<string | null>(null);
-  const form = useForm<Inviting>({ resolver: zodResolver(NewInvitation), defaultValues: nobody, shouldFocusError: false });
+  const form = useForm<Inviting>({
+    resolver: zodResolver(NewInvitation),
+    defaultValues: nobody,
+    shouldFocusError: false,
+  });
   const { errors, isSubmitting, submitCount } = form.formState;
   const submit = form.handleSubmit(async (values) => {
     try {
@@ -30,15 +34,42 @@ export function InviteForm() {
     }
   });
   return (
-    <form noValidate onSubmit={(event) => void submit(event)} className="space-y-5 rounded-sm border border-hair bg-sheet p-5" aria-labelledby="invite-title">
-      <h2 id="invite-title" className="title text-title-25">Invite a colleague</h2>
+    <form
+      noValidate
+      onSubmit={(event) => void submit(event)}
+      className="space-y-5 rounded-sm border border-hair bg-sheet p-5"
+      aria-labelledby="invite-title"
+    >
+      <h2 id="invite-title" className="title text-title-25">
+        Invite a colleague
+      </h2>
       <ErrorSummary mistakes={mistakesOf(errors)} attempt={isSubmitting ? 0 : submitCount} />
-      <TextField id="name" label="Name" autoComplete="off" error={errors.name?.message} {...form.register('name')} />
-      <TextField id="email" label="E-mail address" inputMode="email" autoComplete="off" error={errors.email?.message} {...form.register('email')} />
+      <TextField
+        id="name"
+        label="Name"
+        autoComplete="off"
+        error={errors.name?.message}
+        {...form.register('name')}
+      />
+      <TextField
+        id="email"
+        label="E-mail address"
+        inputMode="email"
+        autoComplete="off"
+        error={errors.email?.message}
+        {...form.register('email')}
+      />
       <Controller
         control={form.control}
         name="roles"
-        render={({ field, fieldState }) => <RoleTicks id="roles" chosen={field.value} onChange={field.onChange} error={fieldState.error?.message} />}
+        render={({ field, fieldState }) => (
+          <RoleTicks
+            id="roles"
+            chosen={field.value}
+            onChange={field.onChange}
+            error={fieldState.error?.message}
+          />
+        )}
       />
       <Button type="submit" tone="action" disabled={isSubmitting}>
         Send the invitation

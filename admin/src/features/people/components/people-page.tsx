@@ -25,11 +25,21 @@ export function PeoplePage() {
                 <caption className="sr-only">Everybody who has been let into the Workroom</caption>
                 <thead className="border-b border-ink text-left text-label text-ink-2 max-md:sr-only">
                   <tr>
-                    <th scope="col" className="py-2 pr-3 font-medium">Name</th>
-                    <th scope="col" className="py-2 pr-3 font-medium">Roles</th>
-                    <th scope="col" className="py-2 pr-3 font-medium">Last signed in</th>
-                    <th scope="col" className="py-2 pr-3 font-medium">Access</th>
-                    <th scope="col"><span className="sr-only">Change</span></th>
+                    <th scope="col" className="py-2 pr-3 font-medium">
+                      Name
+                    </th>
+                    <th scope="col" className="py-2 pr-3 font-medium">
+                      Roles
+                    </th>
+                    <th scope="col" className="py-2 pr-3 font-medium">
+                      Last signed in
+                    </th>
+                    <th scope="col" className="py-2 pr-3 font-medium">
+                      Access
+                    </th>
+                    <th scope="col">
+                      <span className="sr-only">Change</span>
+                    </th>
                   </tr>
                 </thead>
                 <tbody className="max-md:block">

@@ -35,12 +35,16 @@ export function PersonRow({ person }: { readonly person: z.infer<typeof Person> 
       <td className="py-2 text-right max-md:text-left">
         <div className="flex flex-wrap gap-2 md:justify-end">
           <Button height="dense" onClick={() => setChoosing(person.roles)}>
-            Change roles<span className="sr-only"> of {person.name}</span>
+            Change roles <span className="sr-only">of {person.name}</span>
           </Button>
           {person.id !== user.id && (
-            <Button height="dense" disabled={change.isPending} onClick={() => change.mutate({ active: !person.active })}>
-              {person.active ? 'Close access' : 'Open access'}
-              <span className="sr-only"> of {person.name}</span>
+            <Button
+              height="dense"
+              disabled={change.isPending}
+              onClick={() => change.mutate({ active: !person.active })}
+            >
+              {person.active ? 'Close access' : 'Open access'}{' '}
+              <span className="sr-only">of {person.name}</span>
             </Button>
           )}
         </div>
@@ -51,14 +55,23 @@ export function PersonRow({ person }: { readonly person: z.infer<typeof Person> 
           title={`Roles of ${person.name}`}
           actions={
             <>
-              <Button tone="action" disabled={change.isPending} onClick={() => change.mutate({ roles: [...(choosing ?? [])] })}>
+              <Button
+                tone="action"
+                disabled={change.isPending}
+                onClick={() => change.mutate({ roles: [...(choosing ?? [])] })}
+              >
                 Save the roles
               </Button>
               <Button onClick={() => setChoosing(null)}>Leave them</Button>
             </>
           }
         >
-          <RoleTicks id={`roles-${person.id}`} chosen={choosing ?? []} onChange={setChoosing} error={choosing?.length === 0 ? 'Choose at least one role' : undefined} />
+          <RoleTicks
+            id={`roles-${person.id}`}
+            chosen={choosing ?? []}
+            onChange={setChoosing}
+            error={choosing?.length === 0 ? 'Choose at least one role' : undefined}
+          />
           <Refused error={change.error} />
         </Question>
       </td>

@@ -25,7 +25,9 @@ export function RoleTicks({ id, chosen, onChange, error }: RoleTicksProps) {
             type="checkbox"
             className="size-6 accent-indigo"
             checked={chosen.includes(role)}
-            onChange={() => onChange(roles.filter((one) => (one === role ? !chosen.includes(one) : chosen.includes(one))))}
+            onChange={() =>
+              onChange(roles.filter((one) => (one === role ? !chosen.includes(one) : chosen.includes(one))))
+            }
           />
           <span>
             {roleLabels[role]}, <span className="text-ink-3">{roleWork[role]}</span>

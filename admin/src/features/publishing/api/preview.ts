@@ -6,5 +6,6 @@ import { api } from '../../../lib/api-client.js';
 export const previewQuery = (garmentId: string) =>
   queryOptions({
     queryKey: ['preview', garmentId],
-    queryFn: ({ signal }) => api.get(`/workroom/garments/${garmentId}/preview`, PublishedDocument, { signal }),
+    queryFn: ({ signal }) =>
+      api.get(`/workroom/garments/${garmentId}/preview`, PublishedDocument, { signal }),
   });

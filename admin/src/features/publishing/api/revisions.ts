@@ -5,5 +5,6 @@ import { api } from '../../../lib/api-client.js';
 export const revisionsQuery = (garmentId: string) =>
   queryOptions({
     queryKey: ['revisions', garmentId],
-    queryFn: async ({ signal }) => (await api.get(`/workroom/garments/${garmentId}/revisions`, Revisions, { signal })).items,
+    queryFn: async ({ signal }) =>
+      (await api.get(`/workroom/garments/${garmentId}/revisions`, Revisions, { signal })).items,
   });

@@ -43,7 +43,11 @@ export function Decisions({ garment, review }: { readonly garment: Garment; read
           </Button>
         )}
         {stage === 'in-review' && mayReview && review.mayNotApprove === null && (
-          <Button tone="action" disabled={isPending || stopsApproval} onClick={() => decide(() => approveGarment(id, version))}>
+          <Button
+            tone="action"
+            disabled={isPending || stopsApproval}
+            onClick={() => decide(() => approveGarment(id, version))}
+          >
             Approve
           </Button>
         )}
@@ -52,18 +56,41 @@ export function Decisions({ garment, review }: { readonly garment: Garment; read
             Publish version {review.nextVersion}
           </Button>
         )}
-        {(stage === 'in-review' || stage === 'approved') && mayReview && <Button onClick={() => setAsking('return')}>Return with a reason</Button>}
+        {(stage === 'in-review' || stage === 'approved') && mayReview && (
+          <Button onClick={() => setAsking('return')}>Return with a reason</Button>
+        )}
         {garment.isPublic && mayWithdraw && (
           <Button tone="danger" onClick={() => setAsking('withdraw')}>
             Withdraw
           </Button>
         )}
       </div>
-      {stopsApproval && stage === 'in-review' && <p className="text-label text-ink-3">It can be approved when what keeps it is answered; see “Still open”.</p>}
+      {stopsApproval && stage === 'in-review' && (
+        <p className="text-label text-ink-3">
+          It can be approved when what keeps it is answered; see “Still open”.
+        </p>
+      )}
       {asking === null && <Refused error={error} />}
-      <ReturnQuestion open={asking === 'return'} onClose={close} error={error} onSay={(body) => decide(() => returnGarment(id, version, body))} />
-      <PublishQuestion open={asking === 'publish'} onClose={close} review={review} error={error} pending={isPending} onPublish={() => decide(() => publishGarment(id, version))} />
-      <WithdrawQuestion open={asking === 'withdraw'} onClose={close} error={error} onWithdraw={(body) => decide(() => withdrawGarment(id, version, body))} />
+      <ReturnQuestion
+        open={asking === 'return'}
+        onClose={close}
+        error={error}
+        onSay={(body) => decide(() => returnGarment(id, version, body))}
+      />
+      <PublishQuestion
+        open={asking === 'publish'}
+        onClose={close}
+        review={review}
+        error={error}
+        pending={isPending}
+        onPublish={() => decide(() => publishGarment(id, version))}
+      />
+      <WithdrawQuestion
+        open={asking === 'withdraw'}
+        onClose={close}
+        error={error}
+        onWithdraw={(body) => decide(() => withdrawGarment(id, version, body))}
+      />
     </section>
   );
 }
@@ -72,7 +99,11 @@ export function Decisions({ garment, review }: { readonly garment: Garment; read
 function useDecision(garment: Garment, onDone: () => void) {
   const queries = useQueryClient();
   const askAgain = () =>
-    Promise.all(['garment', 'review', 'preview', 'revisions', 'garments'].map((key) => queries.invalidateQueries({ queryKey: [key] })));
+    Promise.all(
+      ['garment', 'review', 'preview', 'revisions', 'garments'].map((key) =>
+        queries.invalidateQueries({ queryKey: [key] }),
+      ),
+    );
   const decision = useMutation({
     mutationFn: (act: () => Promise<Garment>) => act(),
     onSuccess: async (next) => {
@@ -84,5 +115,9 @@ function useDecision(garment: Garment, onDone: () => void) {
       if (isProblem(error)) void askAgain();
     },
   });
-  return { decide: (act: () => Promise<Garment>) => decision.mutate(act), error: decision.error, isPending: decision.isPending };
+  return {
+    decide: (act: () => Promise<Garment>) => decision.mutate(act),
+    error: decision.error,
+    isPending: decision.isPending,
+  };
 }

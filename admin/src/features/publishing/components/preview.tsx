@@ -33,12 +33,19 @@ export function Preview({ garment }: { readonly garment: PublishedDocument }) {
       <p className="text-label text-ink-3">As the public will see it</p>
       <h2 className="title mt-1 text-title-34">{garment.title}</h2>
       <p className="title text-title-25 italic text-ink-2">{garment.date.display}</p>
-      {garment.description && <p className="mt-4 max-w-text whitespace-pre-line text-body">{garment.description}</p>}
+      {garment.description && (
+        <p className="mt-4 max-w-text whitespace-pre-line text-body">{garment.description}</p>
+      )}
       {garment.images.length > 0 && (
         <ul className="mt-5 grid grid-cols-3 gap-3 sm:grid-cols-4">
           {garment.images.map(({ id, alt, caption, widths }) => (
             <li key={id}>
-              <img src={staffPicture(id, widths[0] ?? 320)} alt={alt} loading="lazy" className="aspect-4/5 w-full bg-well object-cover object-top" />
+              <img
+                src={staffPicture(id, widths[0] ?? 320)}
+                alt={alt}
+                loading="lazy"
+                className="aspect-4/5 w-full bg-well object-cover object-top"
+              />
               <p className="mt-1 line-clamp-2 text-label text-ink-3">{caption}</p>
             </li>
           ))}
@@ -48,7 +55,10 @@ export function Preview({ garment }: { readonly garment: PublishedDocument }) {
         {facts
           .filter(([, value]) => value)
           .map(([label, value]) => (
-            <div key={label} className="grid gap-x-4 border-b border-hair py-1.5 sm:grid-cols-[10rem_minmax(0,1fr)]">
+            <div
+              key={label}
+              className="grid gap-x-4 border-b border-hair py-1.5 sm:grid-cols-[10rem_minmax(0,1fr)]"
+            >
               <dt className="text-ink-3">{label}</dt>
               <dd className="whitespace-pre-line break-words">{value}</dd>
             </div>
@@ -64,7 +74,9 @@ export function Preview({ garment }: { readonly garment: PublishedDocument }) {
 function PreviewPart({ part }: { readonly part: PublishedPart }) {
   const measured = [
     part.measuredOn && `Measured ${dayText(part.measuredOn)}`,
-    part.measuredBy.length > 0 ? `by ${part.measuredBy.join(' and ')}` : `by ${part.peopleCount} ${part.peopleCount === 1 ? 'person' : 'people'}`,
+    part.measuredBy.length > 0
+      ? `by ${part.measuredBy.join(' and ')}`
+      : `by ${part.peopleCount} ${part.peopleCount === 1 ? 'person' : 'people'}`,
   ];
   return (
     <section className="mt-6">
@@ -74,16 +86,26 @@ function PreviewPart({ part }: { readonly part: PublishedPart }) {
         <caption className="sr-only">Measurements of {part.name}</caption>
         <thead className="border-b border-ink text-left text-label text-ink-2">
           <tr>
-            <th scope="col" className="py-1 font-medium">Point</th>
-            <th scope="col" className="py-1 text-right font-medium">mm</th>
-            <th scope="col" className="py-1 text-right font-medium">± mm</th>
-            <th scope="col" className="py-1 text-right font-medium">in</th>
+            <th scope="col" className="py-1 font-medium">
+              Point
+            </th>
+            <th scope="col" className="py-1 text-right font-medium">
+              mm
+            </th>
+            <th scope="col" className="py-1 text-right font-medium">
+              ± mm
+            </th>
+            <th scope="col" className="py-1 text-right font-medium">
+              in
+            </th>
           </tr>
         </thead>
         <tbody className="figures">
           {part.measurements.map(({ pointId, label, valueMm, uncertaintyMm }) => (
             <tr key={pointId} className="border-b border-hair">
-              <th scope="row" className="py-1 text-left font-normal">{label}</th>
+              <th scope="row" className="py-1 text-left font-normal">
+                {label}
+              </th>
               <td className="py-1 text-right">{formatLength(mm(valueMm), 'mm').replace(' mm', '')}</td>
               <td className="py-1 text-right text-ink-3">{uncertaintyMm}</td>
               <td className="py-1 text-right">{formatLength(mm(valueMm), 'in').replace(' in', '')}</td>
@@ -93,7 +115,11 @@ function PreviewPart({ part }: { readonly part: PublishedPart }) {
       </table>
       {part.notTaken.length > 0 && (
         <p className="mt-2 text-label text-ink-3">
-          Not taken: {part.notTaken.map(({ label, reason }) => `${label} (${notTakenReasons[reason].toLowerCase()})`).join('; ')}.
+          Not taken:{' '}
+          {part.notTaken
+            .map(({ label, reason }) => `${label} (${notTakenReasons[reason].toLowerCase()})`)
+            .join('; ')}
+          .
         </p>
       )}
     </section>

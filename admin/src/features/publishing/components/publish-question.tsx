@@ -30,7 +30,9 @@ export function PublishQuestion({ open, onClose, review, error, pending, onPubli
       }
     >
       <p>{changesSentence(review)}</p>
-      <p className="text-ink-2">The public sees it at once. It can be withdrawn, but somebody may have read it by then.</p>
+      <p className="text-ink-2">
+        The public sees it at once. It can be withdrawn, but somebody may have read it by then.
+      </p>
       <Refused error={error} />
     </Question>
   );

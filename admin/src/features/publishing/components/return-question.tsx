@@ -34,7 +34,13 @@ export function ReturnQuestion({ open, onClose, error, onSay }: ReturnQuestionPr
         </>
       }
     >
-      <TextArea id="return-reason" label="What should be done" hint="Shown to whoever works on it next." error={form.formState.errors.reason?.message} {...form.register('reason')} />
+      <TextArea
+        id="return-reason"
+        label="What should be done"
+        hint="Shown to whoever works on it next."
+        error={form.formState.errors.reason?.message}
+        {...form.register('reason')}
+      />
       <Refused error={error} />
     </Question>
   );

@@ -23,7 +23,8 @@ export function ReviewPanel({ garment, review }: { readonly garment: Garment; re
               <li key={sentence} className="border-l-4 border-madder bg-sheet px-3 py-2 text-table">
                 <p>{sentence}</p>
                 <p className="text-label text-ink-3">
-                  Keeps it from being {blocks === 'submit' ? 'sent to review' : blocks === 'approve' ? 'approved' : 'published'}.{' '}
+                  Keeps it from being{' '}
+                  {blocks === 'submit' ? 'sent to review' : blocks === 'approve' ? 'approved' : 'published'}.{' '}
                   {href && (
                     <Link to={withinWorkroom(href)} className="text-indigo underline">
                       Mend it<span className="sr-only">: {sentence}</span>
@@ -39,7 +40,9 @@ export function ReviewPanel({ garment, review }: { readonly garment: Garment; re
         <h2 className="text-body font-semibold">
           {review.nextVersion === 1 ? 'New to the public' : `What version ${review.nextVersion} changes`}
         </h2>
-        {review.changes.length === 0 && <p className="text-table text-ink-2">Nothing differs from the public version.</p>}
+        {review.changes.length === 0 && (
+          <p className="text-table text-ink-2">Nothing differs from the public version.</p>
+        )}
         <ul className="mt-1 divide-y divide-hair">
           {review.changes.map((change) => (
             <ChangeRow key={`${change.area} ${change.label}`} change={change} />
@@ -73,7 +76,9 @@ function ChangeRow({ change }: { readonly change: Change }) {
   return (
     <li className="py-2 text-table">
       <p>
-        <span className={`mr-2 rounded-sm px-1.5 py-0.5 text-label font-medium ${changeLooks[kind]}`}>{changeWords[kind]}</span>
+        <span className={`mr-2 rounded-sm px-1.5 py-0.5 text-label font-medium ${changeLooks[kind]}`}>
+          {changeWords[kind]}
+        </span>
         <span className="font-medium">{label}</span>
       </p>
       {before !== null && (
@@ -92,7 +97,13 @@ function ChangeRow({ change }: { readonly change: Change }) {
   );
 }
 
-const outcomes = { 'in-review': 'in review', returned: 'returned', approved: 'approved', published: 'published', 'set-aside': 'set aside' } as const;
+const outcomes = {
+  'in-review': 'in review',
+  returned: 'returned',
+  approved: 'approved',
+  published: 'published',
+  'set-aside': 'set aside',
+} as const;
 
 function History({ garmentId }: { readonly garmentId: string }) {
   const revisions = useQuery(revisionsQuery(garmentId));
@@ -102,19 +113,21 @@ function History({ garmentId }: { readonly garmentId: string }) {
     <section>
       <h2 className="text-body font-semibold">Earlier submissions</h2>
       <ul className="mt-1 divide-y divide-hair text-table">
-        {revisions.data.map(({ id, number, outcome, submittedBy, submittedAt, decidedBy, reason, publishedVersion }) => (
-          <li key={id} className="py-2">
-            <p>
-              No. {number}, {outcomes[outcome]}
-              {publishedVersion !== null && ` as version ${publishedVersion}`}
-            </p>
-            <p className="text-label text-ink-3">
-              Sent by {submittedBy}, {momentText(submittedAt)}
-              {decidedBy && `; decided by ${decidedBy}`}
-            </p>
-            {reason && <p className="text-ink-2">“{reason}”</p>}
-          </li>
-        ))}
+        {revisions.data.map(
+          ({ id, number, outcome, submittedBy, submittedAt, decidedBy, reason, publishedVersion }) => (
+            <li key={id} className="py-2">
+              <p>
+                No. {number}, {outcomes[outcome]}
+                {publishedVersion !== null && ` as version ${publishedVersion}`}
+              </p>
+              <p className="text-label text-ink-3">
+                Sent by {submittedBy}, {momentText(submittedAt)}
+                {decidedBy && `; decided by ${decidedBy}`}
+              </p>
+              {reason && <p className="text-ink-2">“{reason}”</p>}
+            </li>
+          ),
+        )}
       </ul>
     </section>
   );

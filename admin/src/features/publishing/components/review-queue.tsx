@@ -22,7 +22,9 @@ export function ReviewQueue() {
         <li key={id}>
           <NavLink
             to={paths.review(id)}
-            className={({ isActive }) => `block border-l-4 px-3 py-2 text-table hover:bg-well ${isActive ? 'border-indigo bg-sheet font-medium' : 'border-transparent'}`}
+            className={({ isActive }) =>
+              `block border-l-4 px-3 py-2 text-table hover:bg-well ${isActive ? 'border-indigo bg-sheet font-medium' : 'border-transparent'}`
+            }
           >
             <span className="figures block text-label text-ink-2">{ownNumber}</span>
             <span className="block">{title}</span>

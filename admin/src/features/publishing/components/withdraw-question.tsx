@@ -37,8 +37,21 @@ export function WithdrawQuestion({ open, onClose, error, onWithdraw }: WithdrawQ
       }
     >
       <p>Its address, every version and every picture answer at once that the garment was withdrawn.</p>
-      <TextArea id="withdraw-notice" label="What the public reads" hint="One or two sentences on the withdrawal notice." error={errors.notice?.message} {...form.register('notice')} />
-      <TextArea id="withdraw-inner" optional label="Inner reason" hint="Stays in the Workroom." error={errors.innerReason?.message} {...form.register('innerReason')} />
+      <TextArea
+        id="withdraw-notice"
+        label="What the public reads"
+        hint="One or two sentences on the withdrawal notice."
+        error={errors.notice?.message}
+        {...form.register('notice')}
+      />
+      <TextArea
+        id="withdraw-inner"
+        optional
+        label="Inner reason"
+        hint="Stays in the Workroom."
+        error={errors.innerReason?.message}
+        {...form.register('innerReason')}
+      />
       <Refused error={error} />
     </Question>
   );

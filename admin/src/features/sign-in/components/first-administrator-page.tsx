@@ -35,15 +35,33 @@ export function FirstAdministratorPage() {
   });
   const { token: tokenError, ...shown } = errors;
   const mistakes = [
-    ...(tokenError ? [{ message: 'The address is not complete. Copy the whole line that was printed at the start.' }] : []),
+    ...(tokenError
+      ? [{ message: 'The address is not complete. Copy the whole line that was printed at the start.' }]
+      : []),
     ...mistakesOf(shown),
   ];
   return (
-    <Doorway title="The first administrator" lead="The house is empty. Whoever opens it invites everybody else.">
+    <Doorway
+      title="The first administrator"
+      lead="The house is empty. Whoever opens it invites everybody else."
+    >
       <form noValidate onSubmit={(event) => void submit(event)} className="space-y-5">
         <ErrorSummary mistakes={mistakes} attempt={isSubmitting ? 0 : submitCount} />
-        <TextField id="name" label="Your name" autoComplete="name" error={errors.name?.message} {...form.register('name')} />
-        <TextField id="email" label="E-mail address" inputMode="email" autoComplete="username" error={errors.email?.message} {...form.register('email')} />
+        <TextField
+          id="name"
+          label="Your name"
+          autoComplete="name"
+          error={errors.name?.message}
+          {...form.register('name')}
+        />
+        <TextField
+          id="email"
+          label="E-mail address"
+          inputMode="email"
+          autoComplete="username"
+          error={errors.email?.message}
+          {...form.register('email')}
+        />
         <TextField
           id="password"
           label="New password"

@@ -50,7 +50,8 @@ function InvitationClosed() {
   return (
     <Doorway title="This invitation cannot be used">
       <p className="text-table">
-        The link has been used, has run out, or was not copied whole. Ask the administrator who invited you for a new one.
+        The link has been used, has run out, or was not copied whole. Ask the administrator who invited you
+        for a new one.
       </p>
       <p className="mt-4 text-table">
         <Link className="text-indigo underline" to={paths.signIn()}>
@@ -82,7 +83,14 @@ function AcceptForm({ token, name }: { readonly token: string; readonly name: st
   return (
     <form noValidate onSubmit={(event) => void submit(event)} className="space-y-5">
       <ErrorSummary mistakes={mistakesOf(errors)} attempt={isSubmitting ? 0 : submitCount} />
-      <TextField id="name" label="Your name" hint="As it should stand on measuring sheets." autoComplete="name" error={errors.name?.message} {...form.register('name')} />
+      <TextField
+        id="name"
+        label="Your name"
+        hint="As it should stand on measuring sheets."
+        autoComplete="name"
+        error={errors.name?.message}
+        {...form.register('name')}
+      />
       <TextField
         id="password"
         label="New password"

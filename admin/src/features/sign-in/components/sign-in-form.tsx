@@ -10,8 +10,18 @@ import { signIn } from '../api/session.js';
 import { signInSentence } from '../sign-in-sentence.js';
 
 /** Address and password. Pasting and password managers are welcome. */
-export function SignInForm({ email = '', onSignedIn }: { readonly email?: string; readonly onSignedIn: (session: SessionShown) => void }) {
-  const form = useForm({ resolver: zodResolver(SignIn), defaultValues: { email, password: '' }, shouldFocusError: false });
+export function SignInForm({
+  email = '',
+  onSignedIn,
+}: {
+  readonly email?: string;
+  readonly onSignedIn: (session: SessionShown) => void;
+}) {
+  const form = useForm({
+    resolver: zodResolver(SignIn),
+    defaultValues: { email, password: '' },
+    shouldFocusError: false,
+  });
   const { errors, isSubmitting, submitCount } = form.formState;
   const submit = form.handleSubmit(async (values) => {
     try {

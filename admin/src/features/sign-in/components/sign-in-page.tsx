@@ -10,7 +10,10 @@ export function SignInPage() {
   const navigate = useNavigate();
   const [search] = useSearchParams();
   return (
-    <Doorway title="Sign in" lead="For the museum’s staff. An administrator invites new colleagues by e-mail.">
+    <Doorway
+      title="Sign in"
+      lead="For the museum’s staff. An administrator invites new colleagues by e-mail."
+    >
       <SignInForm
         onSignedIn={(session) => {
           queries.setQueryData(sessionQuery.queryKey, session);
