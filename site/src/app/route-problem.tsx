@@ -1,10 +1,10 @@
-import { useRevalidator } from 'react-router-dom';
+import { useLocation } from 'react-router-dom';
 import { SiteLink } from '../components/ui/site-link';
 import { paths } from '../config/paths';
 
-/** Stands in the place of a page that could not be fetched or drawn. */
+/** Stands in the place of a page that could not be fetched or drawn. Asking again is a link: it needs no script. */
 export function RouteProblem() {
-  const revalidator = useRevalidator();
+  const { pathname, search } = useLocation();
   return (
     <div className="wide notice">
       <h1 className="notice-title">This page could not be fetched</h1>
@@ -13,9 +13,9 @@ export function RouteProblem() {
         moment.
       </p>
       <p className="notice-actions">
-        <button type="button" className="button" onClick={() => void revalidator.revalidate()}>
-          {revalidator.state === 'loading' ? 'Asking again' : 'Ask again'}
-        </button>
+        <a href={pathname + search} className="button">
+          Ask again
+        </a>
         <SiteLink to={paths.home()} className="button-quiet">
           Go to the first page
         </SiteLink>

@@ -1,7 +1,7 @@
 import { renderToStaticMarkup } from 'react-dom/server';
 import { type ReactNode } from 'react';
 import { describe, expect, it } from 'vitest';
-import { Length, Uncertainty } from './length';
+import { Length, Spread, Uncertainty } from './length';
 
 /** The words of each unit, as they stand in the page. */
 function written(node: ReactNode): Record<string, string> {
@@ -36,5 +36,13 @@ describe('an uncertainty in the page', () => {
 
   it('is never nothing in inches', () => {
     expect(written(<Uncertainty mm="0.3" />).in).toBe('1/16');
+  });
+});
+
+describe('the spread of readings in the page', () => {
+  it('is not called nothing because a fraction is too coarse', () => {
+    expect(written(<Spread mm="1" />)).toEqual({ mm: '1 mm', cm: '0.1 cm', in: '1/16 in' });
+    expect(written(<Spread mm="0.5" />).in).toBe('under 1/16 in');
+    expect(written(<Spread mm="0" />).in).toBe('0 in');
   });
 });

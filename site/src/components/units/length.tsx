@@ -43,6 +43,20 @@ export function Uncertainty({ mm }: { readonly mm: string }) {
   );
 }
 
+/** How far apart readings lay: in inches by sixteenths, since eighths would call 1 mm nothing. */
+export function Spread({ mm }: { readonly mm: string }) {
+  if (!isMmString(mm)) return <>{mm}</>;
+  const length = fromMmString(mm);
+  return (
+    <InEachUnit
+      write={(unit) => {
+        const text = formatLength(length, unit, { denominator: 16, places: placesOf(length, unit) });
+        return text === '0 in' && length !== 0 ? 'under 1/16 in' : text;
+      }}
+    />
+  );
+}
+
 /** The name of the unit shown, for headings: "mm". */
 export function UnitName() {
   return <InEachUnit write={(unit) => unit} />;

@@ -43,7 +43,7 @@ describe('a garment’s page', () => {
     const { document } = await askPage('/g/lh-1966-30');
     const words = document.querySelector('article')?.textContent ?? '';
     expect(words).toContain('half 146 mm');
-    expect(words).toContain('1 × 1500');
+    expect(words).toContain('1 × 1500 mm + 1242 mm');
     expect(words).toContain('level at the seam');
     expect(words).toContain('one reading');
     expect(words).toContain('498 mm − 100 mm = 398 mm');

@@ -1,7 +1,7 @@
 import { type PublishedMeasurement, type PublishedPart } from '@ellwand/shared/records/published-garment';
 import { type LitPoints } from '../../components/diagram/lit-points';
 import { SiteLink } from '../../components/ui/site-link';
-import { Length, Uncertainty, UnitName } from '../../components/units/length';
+import { Length, Spread, Uncertainty, UnitName } from '../../components/units/length';
 import { paths } from '../../config/paths';
 import { howHeld, levelText, roundsText } from './measuring-words';
 
@@ -97,7 +97,10 @@ function MeasurementRow({ measurement, letter, lit, id }: MeasurementRowProps) {
   );
 }
 
-/** The small print of a row. A half and whole tapes are told, so that the figure can be followed. */
+/**
+ * The small print of a row. A half and whole tapes are told, so that the figure can be followed;
+ * tapes are counted in the millimetres they are marked in.
+ */
 function HowMeasured({ measurement }: { readonly measurement: PublishedMeasurement }) {
   const { pointId, halfMm, tapeLengths, rounds, spreadMm } = measurement;
   const words = [howHeld(pointId), levelText(measurement)].filter((text) => text !== null).join('; ');
@@ -116,9 +119,10 @@ function HowMeasured({ measurement }: { readonly measurement: PublishedMeasureme
         </>
       )}
       {roundsText(measurement)}
-      {rounds > 1 && (
+      {rounds > 1 && Number(spreadMm) === 0 && ', the same'}
+      {rounds > 1 && Number(spreadMm) > 0 && (
         <>
-          , <Length mm={spreadMm} /> apart
+          , <Spread mm={spreadMm} /> apart
         </>
       )}
     </span>

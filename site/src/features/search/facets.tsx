@@ -1,5 +1,6 @@
 import { type SearchAnswer } from '@ellwand/shared/records/published-garment';
 import { type SearchQuery } from '@ellwand/shared/records/search-query';
+import { useFollowingTick } from '../../components/ui/use-following';
 import { listFilters } from '../../lib/search-address';
 import { capitalised } from '../../lib/words';
 
@@ -63,16 +64,10 @@ interface FacetBoxProps {
 }
 
 function FacetBox({ name, value, label, count, ticked, onTick }: FacetBoxProps) {
+  const box = useFollowingTick(ticked);
   return (
     <label className="facet-value">
-      <input
-        key={String(ticked)}
-        type="checkbox"
-        name={name}
-        value={value}
-        defaultChecked={ticked}
-        onChange={onTick}
-      />
+      <input ref={box} type="checkbox" name={name} value={value} defaultChecked={ticked} onChange={onTick} />
       <span>{capitalised(label)}</span>
       <span className="facet-count figures">{count}</span>
     </label>

@@ -5,6 +5,7 @@ import { type LengthUnit } from '@ellwand/shared/units/format-length';
 import { fromMmString, toMm } from '@ellwand/shared/units/length';
 import { groups } from '@ellwand/shared/points/groups';
 import { useUnit } from '../../components/units/use-unit';
+import { useFollowing } from '../../components/ui/use-following';
 import { type BoxProblem, boxText } from '../../lib/range-boxes';
 import { counted } from '../../lib/words';
 import { RangeChart } from './range-chart';
@@ -105,14 +106,15 @@ export function LengthBox({ name, label, of, bound, unit, problems }: LengthBoxP
   const problem = problems.find(({ field }) => field === name);
   const text = problem?.typed ?? boxText(bound ?? null, unit);
   const id = `box-${name.replace('.', '-')}`;
+  const field = useFollowing<HTMLInputElement>(text);
   return (
     <div>
       <label htmlFor={id} className="label">
-        {label} <span className="sr-only">, {of},</span> ({unit})
+        <span className="sr-only">{of}: </span>
+        {label} ({unit})
       </label>
       <input
-        // A new bound or another unit is another value: what was in the box before must not stay in it.
-        key={text}
+        ref={field}
         id={id}
         name={name}
         type="text"

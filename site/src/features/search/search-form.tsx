@@ -1,6 +1,6 @@
 import { useRef, useSyncExternalStore } from 'react';
-import { Form, useSubmit } from 'react-router-dom';
-import { useSearchParams } from 'react-router-dom';
+import { Form, useSearchParams, useSubmit } from 'react-router-dom';
+import { useFollowing } from '../../components/ui/use-following';
 import { paths } from '../../config/paths';
 import { isUnit } from '../../lib/range-boxes';
 import { PAGE_SIZE, sortLabels } from '../../lib/search-address';
@@ -14,6 +14,8 @@ import { type SearchFound } from './search-loader';
  */
 export function SearchForm({ query, view, answer, problems }: SearchFound) {
   const form = useRef<HTMLFormElement>(null);
+  const words = useFollowing<HTMLInputElement>(query.q);
+  const sort = useFollowing<HTMLSelectElement>(query.sort);
   const submit = useSubmit();
   const scripted = useScripted();
   const [params] = useSearchParams();
@@ -38,7 +40,7 @@ export function SearchForm({ query, view, answer, problems }: SearchFound) {
         <div className="search-row">
           <input
             id="search-words"
-            key={query.q}
+            ref={words}
             name="q"
             type="search"
             defaultValue={query.q}
@@ -56,7 +58,7 @@ export function SearchForm({ query, view, answer, problems }: SearchFound) {
         <select
           id="search-sort"
           name="sort"
-          key={query.sort}
+          ref={sort}
           defaultValue={query.sort}
           className="input"
           onChange={send}
@@ -85,32 +87,43 @@ export function SearchForm({ query, view, answer, problems }: SearchFound) {
 }
 
 function Years({ from, to }: { readonly from: number | undefined; readonly to: number | undefined }) {
-  const box = (name: 'from' | 'to', label: string, year: number | undefined) => (
+  return (
+    <fieldset className="facet">
+      <legend>Years</legend>
+      <div className="range-boxes">
+        <YearBox name="from" label="From the year" year={from} />
+        <YearBox name="to" label="To the year" year={to} />
+      </div>
+    </fieldset>
+  );
+}
+
+interface YearBoxProps {
+  readonly name: 'from' | 'to';
+  readonly label: string;
+  readonly year: number | undefined;
+}
+
+function YearBox({ name, label, year }: YearBoxProps) {
+  const text = year === undefined ? '' : String(year);
+  const field = useFollowing<HTMLInputElement>(text);
+  return (
     <div>
       <label htmlFor={`search-${name}`} className="label">
         {label}
       </label>
       <input
+        ref={field}
         id={`search-${name}`}
-        key={year}
         name={name}
         type="text"
         inputMode="numeric"
         autoComplete="off"
         maxLength={4}
-        defaultValue={year}
+        defaultValue={text}
         className="input input-small input-figure"
       />
     </div>
-  );
-  return (
-    <fieldset className="facet">
-      <legend>Years</legend>
-      <div className="range-boxes">
-        {box('from', 'From the year', from)}
-        {box('to', 'To the year', to)}
-      </div>
-    </fieldset>
   );
 }
 
