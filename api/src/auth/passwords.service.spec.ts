@@ -1,5 +1,5 @@
 import { compare } from 'bcrypt';
-import { Passwords } from './passwords.service';
+import { passwordCost, Passwords } from './passwords.service';
 
 const lowestCost = 4;
 const passwords = new Passwords(lowestCost);
@@ -29,5 +29,9 @@ describe('kept passwords', () => {
 
   it('fit nobody who does not exist', async () => {
     expect(await passwords.fits('seven brass hooks and eyes', null)).toBe(false);
+  });
+
+  it('cost a guess 2¹² rounds in a real house', async () => {
+    expect(await new Passwords(passwordCost).keep('seven brass hooks and eyes')).toMatch(/^\$2b\$12\$/);
   });
 });
