@@ -61,14 +61,14 @@ const bodice: Readonly<Record<string, Keyed>> = {
   Cuff: '228',
   'Neck to hem, front': '458',
   'Waist to hem, front': '118',
-  'Point depth': '62',
+  'Depth of the point': '62',
   'Shoulder seam': '104',
-  'Across front': '322',
-  'Sleeve, outer': '588',
-  'Sleeve, under': '438',
-  'Sleeve at widest': '186',
+  'Across the front': '322',
+  'Sleeve, outer length': '588',
+  'Sleeve, under length': '438',
+  'Sleeve at its widest': '186',
   Elbow: { notTaken: 'Too fragile to handle' },
-  'Across back': '404',
+  'Across the back': '404',
   'Underarm to underarm, back': '392',
   'Neck to hem, back': '498',
   'Waist to hem, back': '112',
@@ -111,7 +111,7 @@ test('a dress goes from the invitation of its measurers to the public, and is wi
   await addPictures(odile);
   await measure(odile, 'Bodice', bodice);
   await expectWorkedOut(odile.page, 'Neck to waist, front', '458 mm − 118 mm = 340 mm');
-  await answerFinding(odile.page, /across back/i, 'Dropped shoulders: the seams sit far down the arms.');
+  await answerFinding(odile.page, /across the back/i, 'Dropped shoulders: the seams sit far down the arms.');
   await completeSheet(odile.page);
   await backToTheGarment(odile.page);
   await measure(odile, 'Skirt', skirt);

@@ -21,7 +21,7 @@ export async function keySheet(page: Page, keyed: Readonly<Record<string, Keyed>
 }
 
 async function keyPoint(page: Page, point: string, value: Keyed): Promise<void> {
-  const box = page.getByRole('textbox', { name: new RegExp(`^${point}, millimetres`) });
+  const box = page.getByRole('textbox', { name: new RegExp(`^${point}\\s*, millimetres`) });
   if (typeof value === 'string') {
     await box.fill(value);
     await box.press('Enter');
@@ -55,7 +55,7 @@ export async function answerFinding(page: Page, says: RegExp, reason: string): P
 }
 
 export async function completeSheet(page: Page): Promise<void> {
-  await showTab(page, 'Before the box');
+  await showTab(page, 'Box list');
   await page.getByRole('button', { name: 'Complete the sheet' }).click();
   await expect(page.getByRole('button', { name: 'Reopen the sheet' })).toBeVisible();
 }

@@ -12,7 +12,9 @@ export interface UploadSeen {
 export function fakeUploads(answer: (request: Request) => Promise<Response>): UploadSeen[] {
   const seen: UploadSeen[] = [];
   class FakeXhr {
-    upload: { onprogress: ((event: { lengthComputable: boolean; loaded: number; total: number }) => void) | null } = { onprogress: null };
+    upload: {
+      onprogress: ((event: { lengthComputable: boolean; loaded: number; total: number }) => void) | null;
+    } = { onprogress: null };
     onload: (() => void) | null = null;
     onerror: (() => void) | null = null;
     status = 0;
@@ -46,5 +48,9 @@ export function fakeUploads(answer: (request: Request) => Promise<Response>): Up
 function asRequest(address: string, file: File): Request {
   const boundary = 'thread';
   const body = `--${boundary}\r\nContent-Disposition: form-data; name="file"; filename="${file.name}"\r\nContent-Type: ${file.type}\r\n\r\ncloth\r\n--${boundary}--\r\n`;
-  return new Request(new URL(address, 'http://127.0.0.1:4310'), { method: 'POST', headers: { 'Content-Type': `multipart/form-data; boundary=${boundary}` }, body });
+  return new Request(new URL(address, 'http://127.0.0.1:4310'), {
+    method: 'POST',
+    headers: { 'Content-Type': `multipart/form-data; boundary=${boundary}` },
+    body,
+  });
 }

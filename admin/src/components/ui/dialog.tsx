@@ -19,12 +19,7 @@ export function Question({
   readonly first?: RefObject<HTMLElement | null>;
 }) {
   return (
-    <Dialog
-      open={open}
-      onClose={onClose}
-      initialFocus={first}
-      className="relative z-40"
-    >
+    <Dialog open={open} onClose={onClose} initialFocus={first} className="relative z-40">
       <DialogBackdrop className="fixed inset-0 bg-ink/40" />
       <div className="fixed inset-0 overflow-y-auto p-4">
         <div className="flex min-h-full items-center justify-center">

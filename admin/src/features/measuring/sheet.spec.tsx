@@ -7,7 +7,10 @@ import { bodiceSheetId, reading, skirtSheetId } from '../../testing/fake-api/she
 import { type Interception, renderWorkroom } from '../../testing/render-workroom.js';
 
 /** Opens a sheet as the table does: cautions read, the garment laid open. */
-async function openSheet(id: string, { house = new House(), intercept }: { house?: House; intercept?: Interception } = {}) {
+async function openSheet(
+  id: string,
+  { house = new House(), intercept }: { house?: House; intercept?: Interception } = {},
+) {
   const opened = renderWorkroom(`/sheets/${id}`, { house, intercept });
   const { user } = opened;
   await user.click(await screen.findByRole('button', { name: /We have read this/ }));
@@ -47,7 +50,14 @@ describe('entry by keyboard alone', () => {
     await waitFor(() => expect(screen.getByLabelText(/^Waistband,/)).toHaveFocus());
     await user.keyboard('612{Enter}');
     await waitFor(() => expect(screen.getByLabelText(/^Hip,/)).toHaveFocus());
-    await waitFor(() => expect(standing(house, skirtSheetId, 'waistband')[0]).toMatchObject({ valueMm: '612', typed: '612', unit: 'mm', readBy: staff.recorder.id }));
+    await waitFor(() =>
+      expect(standing(house, skirtSheetId, 'waistband')[0]).toMatchObject({
+        valueMm: '612',
+        typed: '612',
+        unit: 'mm',
+        readBy: staff.recorder.id,
+      }),
+    );
     expect(await screen.findByText(/^All readings sent, \d\d:\d\d$/)).toBeVisible();
   });
 
@@ -57,7 +67,14 @@ describe('entry by keyboard alone', () => {
     await user.keyboard('3{Enter}742');
     expect(rowOf(/^Hem, millimetres/)).toHaveTextContent('= 5242 mm');
     await user.keyboard('{Enter}');
-    await waitFor(() => expect(standing(house, skirtSheetId, 'hem')[0]).toMatchObject({ valueMm: '5242', typed: '742', tapeCount: 3, tapeLengthMm: '1500' }));
+    await waitFor(() =>
+      expect(standing(house, skirtSheetId, 'hem')[0]).toMatchObject({
+        valueMm: '5242',
+        typed: '742',
+        tapeCount: 3,
+        tapeLengthMm: '1500',
+      }),
+    );
   });
 
   it('says why a point is not taken, from the row’s own menu', async () => {
@@ -74,7 +91,13 @@ describe('entry by keyboard alone', () => {
     await user.keyboard(' ');
     within(question).getByRole('button', { name: 'Keep the reason' }).focus();
     await user.keyboard('{Enter}');
-    await waitFor(() => expect(standing(house, skirtSheetId, 'hip')[0]).toMatchObject({ state: 'not-taken', reason: 'not-applicable', valueMm: null }));
+    await waitFor(() =>
+      expect(standing(house, skirtSheetId, 'hip')[0]).toMatchObject({
+        state: 'not-taken',
+        reason: 'not-applicable',
+        valueMm: null,
+      }),
+    );
     expect(rowOf(/^Hip,/)).toHaveTextContent('not taken');
   });
 
@@ -83,7 +106,12 @@ describe('entry by keyboard alone', () => {
     const waist = screen.getByLabelText(/^Waist, m/);
     waist.focus();
     await user.keyboard('{Control>}a{/Control}618{Enter}');
-    await waitFor(() => expect(standing(house, bodiceSheetId, 'waist')[0]).toMatchObject({ valueMm: '618', replaces: idOf(3002) }));
+    await waitFor(() =>
+      expect(standing(house, bodiceSheetId, 'waist')[0]).toMatchObject({
+        valueMm: '618',
+        replaces: idOf(3002),
+      }),
+    );
     const readings = house.sheet(bodiceSheetId)!.readings.filter(({ pointId }) => pointId === 'waist');
     expect(readings).toHaveLength(2);
     // The level that was found still holds for the corrected reading.
@@ -95,7 +123,13 @@ describe('entry by keyboard alone', () => {
     await user.click(screen.getByRole('button', { name: 'in' }));
     screen.getByLabelText(/^Waistband,/).focus();
     await user.keyboard('24 3/8{Enter}');
-    await waitFor(() => expect(standing(house, skirtSheetId, 'waistband')[0]).toMatchObject({ typed: '24 3/8', unit: 'in', valueMm: '619.125' }));
+    await waitFor(() =>
+      expect(standing(house, skirtSheetId, 'waistband')[0]).toMatchObject({
+        typed: '24 3/8',
+        unit: 'in',
+        valueMm: '619.125',
+      }),
+    );
     expect(screen.getByLabelText(/^Waistband, inches/)).toHaveValue('24 3/8');
   });
 
@@ -142,7 +176,11 @@ describe('a second reading', () => {
     await waitFor(() => expect(second).toHaveFocus());
     expect(screen.queryByDisplayValue('612')).toBeNull();
     await user.keyboard('614{Enter}');
-    await waitFor(() => expect(house.sheet(bodiceSheetId)!.readings.some(({ pointId, round }) => pointId === 'waist' && round === 2)).toBe(true));
+    await waitFor(() =>
+      expect(
+        house.sheet(bodiceSheetId)!.readings.some(({ pointId, round }) => pointId === 'waist' && round === 2),
+      ).toBe(true),
+    );
     expect(await screen.findByDisplayValue('612')).toBeVisible();
     expect(rowOf(/^Waist, reading 2/)).toHaveTextContent('2 mm apart');
   });
@@ -178,7 +216,12 @@ describe('nothing typed is lost', () => {
     expect(row).toHaveTextContent('612 mm');
     expect(row).toHaveTextContent('615 mm');
     await user.click(within(row).getByRole('button', { name: 'Keep the one keyed here' }));
-    await waitFor(() => expect(standing(house, skirtSheetId, 'waistband')[0]).toMatchObject({ valueMm: '612', replaces: idOf(3900) }));
+    await waitFor(() =>
+      expect(standing(house, skirtSheetId, 'waistband')[0]).toMatchObject({
+        valueMm: '612',
+        replaces: idOf(3900),
+      }),
+    );
   });
 });
 
@@ -186,7 +229,9 @@ describe('the diagram', () => {
   it('lights the line of the row at hand, and leads from a line to its row', async () => {
     const { user, container } = await openSheet(bodiceSheetId);
     screen.getByLabelText(/^Waist, m/).focus();
-    await waitFor(() => expect(container.querySelector('.drawing-point-current')).toHaveAttribute('data-point', 'waist'));
+    await waitFor(() =>
+      expect(container.querySelector('.drawing-point-current')).toHaveAttribute('data-point', 'waist'),
+    );
     await user.click(container.querySelector('[data-point="neck"] circle')!);
     await waitFor(() => expect(screen.getByLabelText(/^Neck, m/)).toHaveFocus());
   });
@@ -196,8 +241,15 @@ describe('findings and the box list', () => {
   const finished = () => {
     const house = new House();
     const sheet = house.sheet(skirtSheetId)!;
-    const values = { waistband: '640', hem: '600', 'waist-to-hem-front': '1020', 'waist-to-hem-back': '1030' };
-    sheet.readings = Object.entries(values).map(([pointId, value], index) => reading(4000 + index, pointId, value));
+    const values = {
+      waistband: '640',
+      hem: '600',
+      'waist-to-hem-front': '1020',
+      'waist-to-hem-back': '1030',
+    };
+    sheet.readings = Object.entries(values).map(([pointId, value], index) =>
+      reading(4000 + index, pointId, value),
+    );
     return house;
   };
 
@@ -206,7 +258,9 @@ describe('findings and the box list', () => {
     const { user } = await openSheet(skirtSheetId, { house });
     await user.click(screen.getByRole('tab', { name: /Findings/ }));
     const panel = await screen.findByRole('tabpanel', { name: /Findings/ });
-    const finding = within(panel).getAllByRole('listitem').find((item) => /hem/i.test(item.textContent ?? '') && within(item).queryByRole('textbox'))!;
+    const finding = within(panel)
+      .getAllByRole('listitem')
+      .find((item) => /hem/i.test(item.textContent ?? '') && within(item).queryByRole('textbox'))!;
     await user.click(within(finding).getByRole('button', { name: 'Keep the reason' }));
     expect(finding).toHaveTextContent('Write the reason, or read the point again.');
     await user.type(within(finding).getByRole('textbox'), 'Read twice; it is so');
@@ -229,8 +283,15 @@ describe('findings and the box list', () => {
     await user.click(screen.getByRole('button', { name: 'Complete the sheet' }));
     expect(await screen.findByText(/A stop is not answered yet/)).toBeVisible();
 
-    const values = { waistband: '640', hem: '3100', 'waist-to-hem-front': '1020', 'waist-to-hem-back': '1030' };
-    house.sheet(skirtSheetId)!.readings = Object.entries(values).map(([pointId, value], index) => reading(4000 + index, pointId, value));
+    const values = {
+      waistband: '640',
+      hem: '3100',
+      'waist-to-hem-front': '1020',
+      'waist-to-hem-back': '1030',
+    };
+    house.sheet(skirtSheetId)!.readings = Object.entries(values).map(([pointId, value], index) =>
+      reading(4000 + index, pointId, value),
+    );
     await user.click(screen.getByRole('button', { name: 'Complete the sheet' }));
     expect(await screen.findByText(/This sheet is complete/)).toBeVisible();
     await user.click(screen.getByRole('button', { name: 'Reopen the sheet' }));
@@ -244,7 +305,9 @@ describe('opening a sheet', () => {
     await user.type(await screen.findByLabelText('Place'), 'Textile room');
     await user.type(screen.getByLabelText('Tape'), 'White tape');
     await user.click(screen.getByRole('button', { name: 'Open the sheet' }));
-    expect(await screen.findByRole('link', { name: 'Say who held the tape, or why one person measured alone' })).toBeVisible();
+    expect(
+      await screen.findByRole('link', { name: 'Say who held the tape, or why one person measured alone' }),
+    ).toBeVisible();
     await user.click(screen.getByLabelText('Imogen Sallow: Held the tape and steadied the garment'));
     await user.click(screen.getByRole('button', { name: 'Open the sheet' }));
     await waitFor(() => expect(router.state.location.pathname).toMatch(/^\/sheets\//));

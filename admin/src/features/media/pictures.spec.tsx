@@ -28,9 +28,13 @@ describe('pictures on their way', () => {
     expect(screen.getByRole('progressbar', { name: 'Sending back.jpg' })).toHaveAttribute('value', '0');
     await act(() => uploads[0]!.finish());
     await waitFor(() => expect(uploads).toHaveLength(3));
-    expect(await screen.findByText('Making smaller forms, 3 of 8', undefined, { timeout: 5000 })).toBeVisible();
+    expect(
+      await screen.findByText('Making smaller forms, 3 of 8', undefined, { timeout: 5000 }),
+    ).toBeVisible();
     await waitFor(() => expect(house.garment(dress)?.images.at(-1)?.state).toBe('ready'), { timeout: 8000 });
-    expect(await screen.findByAltText('', { selector: `img[src*="${house.garment(dress)?.images.at(-1)?.id}"]` })).toBeInTheDocument();
+    expect(
+      await screen.findByAltText('', { selector: `img[src*="${house.garment(dress)?.images.at(-1)?.id}"]` }),
+    ).toBeInTheDocument();
   });
 
   it('keep the sentence of a refusal beside the file, and can be left out', async () => {
@@ -61,7 +65,9 @@ describe('pictures on their way', () => {
   });
 
   it('are not sent at all where they cannot be kept', () => {
-    expect(refusedAtOnce({ name: 'a.svg', type: 'image/svg+xml', size: 10 })).toMatch(/JPEG, PNG, WebP and TIFF/);
+    expect(refusedAtOnce({ name: 'a.svg', type: 'image/svg+xml', size: 10 })).toMatch(
+      /JPEG, PNG, WebP and TIFF/,
+    );
     expect(refusedAtOnce({ name: 'a.jpg', type: 'image/jpeg', size: 61 * 1024 * 1024 })).toMatch(/60 MB/);
     expect(refusedAtOnce({ name: 'a.tif', type: '', size: 10 })).toBeNull();
   });
@@ -75,7 +81,9 @@ describe('a picture', () => {
     await user.clear(screen.getByLabelText('Description in words'));
     await user.type(screen.getByLabelText('Description in words'), 'The back, draped');
     await user.click(screen.getByRole('button', { name: 'Save' }));
-    await waitFor(() => expect(house.garment(dress)?.images[0]).toMatchObject({ view: 'back', alt: 'The back, draped' }));
+    await waitFor(() =>
+      expect(house.garment(dress)?.images[0]).toMatchObject({ view: 'back', alt: 'The back, draped' }),
+    );
     await user.click(await screen.findByRole('button', { name: /^Hide/ }));
     expect(await screen.findByText('hidden from the public')).toBeVisible();
   });

@@ -17,13 +17,17 @@ describe('people', () => {
     await user.click(screen.getByLabelText(/^Curator/));
     await user.click(screen.getByRole('button', { name: 'Send the invitation' }));
     expect(await screen.findByText(/on its way to lowell.finch@larkmoor.example/)).toBeVisible();
-    expect(await screen.findByRole('button', { name: 'Take back the invitation of Lowell Finch' })).toBeVisible();
+    expect(
+      await screen.findByRole('button', { name: 'Take back the invitation of Lowell Finch' }),
+    ).toBeVisible();
     expect(house.invitations.at(-1)?.roles).toEqual(['curator']);
   });
 
   it('takes an invitation back', async () => {
     const { user, house } = renderWorkroom('/people', { house: administratorIn() });
-    await user.click(await screen.findByRole('button', { name: 'Take back the invitation of Odette Farrow' }));
+    await user.click(
+      await screen.findByRole('button', { name: 'Take back the invitation of Odette Farrow' }),
+    );
     expect(await screen.findByText('Everybody who was invited has come in.')).toBeVisible();
     expect(house.invitations).toEqual([]);
   });
@@ -49,7 +53,10 @@ describe('the audit trail', () => {
   });
 
   it('says that it failed', async () => {
-    renderWorkroom('/audit', { house: administratorIn(), intercept: ({ url }) => (url.includes('/audit') ? new Response('gone', { status: 500 }) : undefined) });
+    renderWorkroom('/audit', {
+      house: administratorIn(),
+      intercept: ({ url }) => (url.includes('/audit') ? new Response('gone', { status: 500 }) : undefined),
+    });
     expect(await screen.findByRole('alert')).toHaveTextContent('answered 500');
   });
 });

@@ -17,7 +17,10 @@ describe('the review', () => {
     expect(within(page).getByRole('heading', { name: 'Bodice of dark red wool' })).toBeVisible();
     expect(await screen.findByText('Waist (bodice)')).toBeVisible();
     const queue = screen.getByRole('complementary', { name: 'Review queue' });
-    expect(await within(queue).findByRole('link', { name: /Tailored jacket/ })).toHaveAttribute('href', approved);
+    expect(await within(queue).findByRole('link', { name: /Tailored jacket/ })).toHaveAttribute(
+      'href',
+      approved,
+    );
     const change = screen.getByText('Title').closest('li');
     expect(change).toHaveTextContent('ChangedTitlebefore: Red bodicenow: Bodice of dark red wool');
   });
@@ -46,10 +49,17 @@ describe('the review', () => {
     const { user } = renderWorkroom(inReview, { house });
     await user.click(await screen.findByRole('button', { name: 'Return with a reason' }));
     await user.click(await screen.findByRole('button', { name: 'Return it' }));
-    expect(await screen.findByLabelText('What should be done')).toHaveAccessibleDescription(/Write something here/);
+    expect(await screen.findByLabelText('What should be done')).toHaveAccessibleDescription(
+      /Write something here/,
+    );
     await user.type(screen.getByLabelText('What should be done'), 'Name the maker');
     await user.click(screen.getByRole('button', { name: 'Return it' }));
-    await waitFor(() => expect(house.garment(idOf(101))).toMatchObject({ stage: 'draft', returned: { reason: 'Name the maker' } }));
+    await waitFor(() =>
+      expect(house.garment(idOf(101))).toMatchObject({
+        stage: 'draft',
+        returned: { reason: 'Name the maker' },
+      }),
+    );
   });
 
   it('approves, then publishes after a question that names what changes', async () => {
@@ -63,8 +73,12 @@ describe('the review', () => {
     await user.click(within(question).getByRole('button', { name: 'Not yet' }));
     expect(house.garment(idOf(101))?.stage).toBe('approved');
     await user.click(screen.getByRole('button', { name: 'Publish version 4' }));
-    await user.click(within(await screen.findByRole('dialog')).getByRole('button', { name: 'Publish version 4' }));
-    await waitFor(() => expect(house.garment(idOf(101))).toMatchObject({ stage: 'published', publishedVersion: 4 }));
+    await user.click(
+      within(await screen.findByRole('dialog')).getByRole('button', { name: 'Publish version 4' }),
+    );
+    await waitFor(() =>
+      expect(house.garment(idOf(101))).toMatchObject({ stage: 'published', publishedVersion: 4 }),
+    );
   });
 
   it('withdraws with a public wording, and not without', async () => {
@@ -72,8 +86,13 @@ describe('the review', () => {
     const { user } = renderWorkroom(published, { house });
     await user.click(await screen.findByRole('button', { name: 'Withdraw' }));
     await user.click(await screen.findByRole('button', { name: 'Withdraw every version' }));
-    expect(await screen.findByLabelText('What the public reads')).toHaveAccessibleDescription(/Write something here/);
-    await user.type(screen.getByLabelText('What the public reads'), 'Withdrawn while its history is looked into.');
+    expect(await screen.findByLabelText('What the public reads')).toHaveAccessibleDescription(
+      /Write something here/,
+    );
+    await user.type(
+      screen.getByLabelText('What the public reads'),
+      'Withdrawn while its history is looked into.',
+    );
     await user.click(screen.getByRole('button', { name: 'Withdraw every version' }));
     await waitFor(() => expect(house.garment(idOf(103))?.stage).toBe('withdrawn'));
   });
@@ -87,14 +106,23 @@ describe('the review', () => {
 });
 
 describe('what a publication changes, in a sentence', () => {
-  const change = (kind: 'added' | 'removed' | 'changed', label: string) => ({ kind, label, area: 'record' as const, before: null, after: null });
+  const change = (kind: 'added' | 'removed' | 'changed', label: string) => ({
+    kind,
+    label,
+    area: 'record' as const,
+    before: null,
+    after: null,
+  });
 
   it('is the first time, nothing, or the things by name', () => {
     expect(changesSentence({ nextVersion: 1, changes: [] })).toMatch(/first time/);
     expect(changesSentence({ nextVersion: 2, changes: [] })).toMatch(/Nothing differs/);
-    expect(changesSentence({ nextVersion: 2, changes: [change('changed', 'Title'), change('changed', 'Maker'), change('added', 'Picture, back')] })).toBe(
-      'Changes Title, Maker. Adds Picture, back.',
-    );
+    expect(
+      changesSentence({
+        nextVersion: 2,
+        changes: [change('changed', 'Title'), change('changed', 'Maker'), change('added', 'Picture, back')],
+      }),
+    ).toBe('Changes Title, Maker. Adds Picture, back.');
   });
 
   it('names eight at most and counts the rest', () => {

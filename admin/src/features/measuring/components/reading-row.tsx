@@ -92,7 +92,8 @@ function says(row: SheetRow, state: RowState): string {
   if (state.sentence) return state.sentence;
   if (reading?.reason) return notTakenReasons[reading.reason];
   if (
-    reading && reading.value !== null &&
+    reading &&
+    reading.value !== null &&
     (reading.unit !== 'mm' || reading.tapeCount > 0 || row.point.point.how === 'flat-doubled')
   ) {
     const doubled = row.point.point.how === 'flat-doubled' ? 'doubled, ' : '';

@@ -52,7 +52,8 @@ export function boxTasks({ rows, entries, findings, views }: BoxAsked): readonly
   });
   const noLevel = firstRounds
     .filter(
-      ({ point, reading }) => point.point.levelRecorded && reading !== null && reading.value !== null && reading.level === null,
+      ({ point, reading }) =>
+        point.point.levelRecorded && reading !== null && reading.value !== null && reading.level === null,
     )
     .map(({ point }): BoxTask => ({
       sentence: `${point.point.name}: say how the level was found`,

@@ -10,7 +10,22 @@ import { sendStatus } from './send-status.js';
 import { deviceShelf, type Shelf } from './shelf.js';
 
 const keyed = (pointId: string, typed: string, more: Partial<NewReading> = {}): NewReading =>
-  ({ id: newId(), pointId, round: 1, replaces: null, note: '', readBy: newId(), device: 'Tablet 1', keyedAt: '2026-12-01T09:00:00.000Z', state: 'taken', typed, unit: 'mm', tapeCount: 0, levelFoundBy: null, ...more }) as NewReading;
+  ({
+    id: newId(),
+    pointId,
+    round: 1,
+    replaces: null,
+    note: '',
+    readBy: newId(),
+    device: 'Tablet 1',
+    keyedAt: '2026-12-01T09:00:00.000Z',
+    state: 'taken',
+    typed,
+    unit: 'mm',
+    tapeCount: 0,
+    levelFoundBy: null,
+    ...more,
+  }) as NewReading;
 
 const refused = (status: number, code: string) => new ProblemError({ type: 'x', title: code, status, code });
 
@@ -32,7 +47,11 @@ class FarSide {
         this.kept.set(reading.id, reading);
         this.order.push(reading.id);
       }
-      return { id: reading.id, outcome: before ? 'already-kept' : 'kept', reading: storedReading(1, reading.pointId, '1', { id: reading.id }) };
+      return {
+        id: reading.id,
+        outcome: before ? 'already-kept' : 'kept',
+        reading: storedReading(1, reading.pointId, '1', { id: reading.id }),
+      };
     });
     if (today === 'lost-answer') return Promise.reject(new NoAnswer('the answer was lost'));
     return Promise.resolve({ sheetVersion: 1, results });
@@ -48,7 +67,12 @@ describe('the outbox', () => {
   beforeEach(() => localStorage.clear());
 
   it('loses nothing and doubles nothing, whatever the network does and whenever the page is loaded again', async () => {
-    const weather = fc.constantFrom('fair' as const, 'lost-request' as const, 'lost-answer' as const, 'overload' as const);
+    const weather = fc.constantFrom(
+      'fair' as const,
+      'lost-request' as const,
+      'lost-answer' as const,
+      'overload' as const,
+    );
     const step = fc.oneof(
       { weight: 5, arbitrary: fc.record({ does: fc.constant('key' as const), weather }) },
       { weight: 2, arbitrary: fc.record({ does: fc.constant('load-again' as const), weather }) },
@@ -133,12 +157,17 @@ describe('the outbox', () => {
       deliver: (readings) => {
         if (!conflict) return far.deliver(readings);
         conflict = false;
-        return Promise.resolve({ sheetVersion: 1, results: [{ id: mine.id, outcome: 'conflict', detail: 'Another reading stands.', standing }] });
+        return Promise.resolve({
+          sheetVersion: 1,
+          results: [{ id: mine.id, outcome: 'conflict', detail: 'Another reading stands.', standing }],
+        });
       },
     });
     outbox.add(mine);
     await outbox.send();
-    expect(outbox.snapshot().entries).toEqual([{ reading: mine, state: 'decision', why: 'Another reading stands.', standing }]);
+    expect(outbox.snapshot().entries).toEqual([
+      { reading: mine, state: 'decision', why: 'Another reading stands.', standing },
+    ]);
     const again = { ...mine, id: newId(), replaces: standing.id };
     outbox.decide(mine.id, again);
     await outbox.send();

@@ -153,7 +153,9 @@ export function spreadOf(
   pointId: string,
 ): { readonly apart: Length; readonly allowed: Length; readonly within: boolean } | null {
   const own = rows.filter(({ point }) => point.id === pointId);
-  const values = own.flatMap(({ reading }) => (reading === null || reading.value === null ? [] : [reading.value]));
+  const values = own.flatMap(({ reading }) =>
+    reading === null || reading.value === null ? [] : [reading.value],
+  );
   const [first, ...others] = values;
   if (first === undefined || others.length === 0) return null;
   const apart = subtract(longestOf(first, ...others), shortestOf(first, ...others));
