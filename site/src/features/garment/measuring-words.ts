@@ -1,6 +1,6 @@
 import { type PublishedMeasurement, type PublishedPart } from '@ellwand/shared/records/published-garment';
 import { findMeasuringPoint } from '@ellwand/shared/points/measuring-points';
-import { howLabels, sideLabels } from '@ellwand/shared/points/point';
+import { type MeasuringHow, sideLabels } from '@ellwand/shared/points/point';
 import { counted } from '../../lib/words';
 
 type NotTakenReason = PublishedPart['notTaken'][number]['reason'];
@@ -38,10 +38,17 @@ export function supportText(support: string): string {
   return supportWords[support] ?? support;
 }
 
-/** How the tape went: "Inside, round, from fastening to fastening". */
+const tapeWent: Readonly<Record<MeasuringHow, string>> = {
+  round: 'round',
+  straight: 'straight',
+  curve: 'along the curve',
+  'flat-doubled': 'flat, doubled',
+};
+
+/** How the tape went, in as few words as a row has room for: "Inside, round". Its point's page says it in full. */
 export function howHeld(pointId: string): string | null {
   const point = findMeasuringPoint(pointId);
-  return point ? `${sideLabels[point.side]}, ${howLabels[point.how]}` : null;
+  return point ? `${sideLabels[point.side]}, ${tapeWent[point.how]}` : null;
 }
 
 /** How the level was found, where the point has one. */
