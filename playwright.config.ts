@@ -9,6 +9,7 @@
  * Run by hand (`npx playwright test`), the journeys take the Ellwand that `npm start` has opened.
  */
 import fs from 'node:fs';
+import path from 'node:path';
 import { defineConfig } from '@playwright/test';
 
 interface Running {
@@ -17,7 +18,8 @@ interface Running {
   demonstration?: string;
 }
 
-const started = new URL('.data/running.json', import.meta.url);
+// Playwright loads this file as CommonJS: `import.meta` would make it something else.
+const started = path.join(__dirname, '.data/running.json');
 
 if (process.env['ELLWAND_E2E_URL'] === undefined && fs.existsSync(started)) {
   const { url, inboxUrl, demonstration } = JSON.parse(fs.readFileSync(started, 'utf8')) as Running;

@@ -6,11 +6,19 @@ import { paths } from '../../../config/paths.js';
 import { garmentListQuery } from '../../garments/api/garment-list.js';
 
 const SIZE = 100;
+/** Others send records while a curator looks at one: the queue asks again by itself. */
+const ASK_AGAIN_MS = 10_000;
 
 /** What waits for a curator: records in review, then those approved and not yet published. */
 export function ReviewQueue() {
-  const inReview = useQuery(garmentListQuery({ stage: 'in-review', size: SIZE }));
-  const approved = useQuery(garmentListQuery({ stage: 'approved', size: SIZE }));
+  const inReview = useQuery({
+    ...garmentListQuery({ stage: 'in-review', size: SIZE }),
+    refetchInterval: ASK_AGAIN_MS,
+  });
+  const approved = useQuery({
+    ...garmentListQuery({ stage: 'approved', size: SIZE }),
+    refetchInterval: ASK_AGAIN_MS,
+  });
   const failed = [inReview, approved].find(({ isError }) => isError);
   if (failed) return <Failed error={failed.error} onRetry={() => void failed.refetch()} />;
   if (inReview.isPending || approved.isPending) return <Waiting label="Fetching the queue" rows={3} />;
