@@ -33,7 +33,7 @@ function base(colour: Rgb): Cloth {
     },
     sheer: true,
     gloss: dark ? 0.5 : 0.05,
-    through: dark ? 0 : 0.5,
+    through: dark ? 0 : 0.25,
   });
 }
 
@@ -73,7 +73,7 @@ export function laceCloth(repeat: number, colour: Rgb = dye('#f0e9da')): Cloth {
 }
 
 /** White embroidery with eyelets cut through: scallops, each with a spray of holes. */
-export function eyeletEdging({ repeat, depth, colour = dye('#f2ede2') }: LaceKind): Cloth {
+export function eyeletEdging({ repeat, depth, colour = dye('#ddd7c9') }: LaceKind): Cloth {
   const worked = (u: number, v: number): number => {
     const x = (part(u / repeat) - 0.5) * repeat;
     const cy = depth - 0.42 * repeat;

@@ -60,6 +60,6 @@ export function pelerineLayer(noise: Noise, c: Pelerine): Layer {
 
 export function layPelerine(scene: Scene, noise: Noise, c: Pelerine, cloth: Cloth, across = 1300): Layer {
   const layer = pelerineLayer(noise, c);
-  scene.lay({ cloth, across, along: 150 }, (u, v, p) => layer(u, v, 0, p));
+  scene.layHalves({ cloth, across, along: 150 }, layer);
   return layer;
 }

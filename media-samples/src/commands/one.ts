@@ -30,7 +30,7 @@ export async function renderPicture(
   size: Size,
   file: string,
 ): Promise<void> {
-  const scene = new Scene(finenessAt(size.longSide) * (picture.fineness ?? 1));
+  const scene = new Scene(Math.min(1, finenessAt(size.longSide) * (picture.fineness ?? 1)));
   (picture.build ?? garment.build)(scene);
   const { height } = pixelsOf(picture, size.longSide);
   await mkdir(dirname(file), { recursive: true });

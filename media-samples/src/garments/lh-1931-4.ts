@@ -27,7 +27,7 @@ const bars = [
 ];
 const striped = patternedSilk(stripes(cream, 3.2, bars), 0.5, 0.6);
 const stripedBody = patternedSilk(stripes(cream, 3.2, bars), 0.24, 0.55);
-const gauze = whiteCotton(dye('#f2ede1'), 0.7, 0.2);
+const gauze = whiteCotton(dye('#d8d1c0'), 0.3, 0.3);
 const inside = lining(dye('#cdbd9c'));
 const WAIST = 103.5;
 
@@ -62,7 +62,7 @@ const robe: Layer = (u, v, lift, p) => {
   const at = mix(0.5 + gap, 1.5 - gap, u);
   const edge = Math.min(u, 1 - u);
   whole(at % 1, v, lift + 0.7 * bell(edge, 0.012, 0.012) - 0.8 * ease(0.012, 0, edge), p);
-  p.u = u * 300;
+  p.u = at * 320;
 };
 
 const bodice: BodiceCut = {
@@ -106,8 +106,8 @@ const bodice: BodiceCut = {
 };
 
 const pose: readonly Vec3[] = [
-  [12.5, 134.4, -1.8],
-  [15.6, 133, -2],
+  [13.8, 132.8, -1.8],
+  [16, 132, -2],
   [19.2, 127.4, -2.4],
   [21.4, 121, -2.6],
   [23, 114, -1.4],
@@ -147,17 +147,17 @@ function layBody(scene: Scene): void {
   );
   for (const sleeve of sleeves) {
     sewFrill(scene, sleeve, striped, {
-      line: round(0.96),
+      line: round(0.975),
       points: 620,
       closed: true,
       length: 70,
       depth: 4.4,
       way: 1,
-      gathers: 11,
-      stand: 0.55,
-      flare: 1.6,
-      lift: 0.3,
-      fall: 0.2,
+      gathers: 9,
+      stand: 0.6,
+      flare: 2.4,
+      lift: 0.5,
+      fall: 0.3,
     });
     sewFrill(scene, sleeve, eyeletEdging({ repeat: 2.2, depth: 9 }), {
       line: round(0.985),
@@ -168,7 +168,7 @@ function layBody(scene: Scene): void {
       way: 1,
       gathers: 9,
       stand: 0.8,
-      flare: 2.6,
+      flare: 2.2,
       lift: 0,
       fall: 0.35,
     });
@@ -178,12 +178,12 @@ function layBody(scene: Scene): void {
 /** A gauze kerchief crossed over the bosom and tucked into the front. */
 function layKerchief(scene: Scene): void {
   scene.lay({ cloth: gauze, across: 760, along: 200 }, (u, v, p) => {
-    const theta = mix(-1.9, 1.9, u);
+    const theta = mix(-1.62, 1.62, u);
     const a = Math.abs(theta);
-    const foot = mix(121.5, 134, Math.pow(a / 1.9, 0.7));
-    const y = mix(mix(136.4, 140.4, ease(0, 1.1, a)), foot, v);
+    const foot = mix(121.5, 134, Math.pow(a / 1.62, 0.7));
+    const y = mix(mix(136.2, 139.2, ease(0, 1.1, a)), foot, v);
     const crush =
-      0.6 * (noise.fold(v * 5 + 1.4 * Math.cos(theta * 1.1) + 0.4 * noise.at(theta * 2, v * 3), 6) - 0.4) +
+      0.9 * (noise.fold(v * 5 + 1.4 * Math.cos(theta * 1.1) + 0.4 * noise.at(theta * 2, v * 3), 6) - 0.4) +
       0.35 * noise.layers(theta * 2 + 5, v * 4, 2);
     bodice.form(y, theta, mix(0.1, 0.75, ease(0.75, 0.2, v)) + crush, p);
     p.u = theta * 14;

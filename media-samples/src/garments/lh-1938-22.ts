@@ -62,8 +62,8 @@ const bodice: BodiceCut = {
 };
 
 const pose: readonly Vec3[] = [
-  [13.4, 134, -1.6],
-  [16.4, 131.6, -1.8],
+  [15, 132, -1.7],
+  [16.8, 131, -1.8],
   [20, 125, -2.4],
   [22, 117, -2.8],
   [22.6, 109, -1],
@@ -156,14 +156,14 @@ export const lh1938n22: Garment = {
     {
       view: 'front',
       name: 'front',
-      shot: standing(24, { lookAt: [0, 68], span: 156, aspect: 0.86, reach: 112 }, { exposure: 1.12 }),
+      shot: standing(24, { lookAt: [0, 68], span: 156, aspect: 0.86, reach: 112 }, { exposure: 0.92 }),
       alt: 'A deep green shot silk dress of about 1844: a long pointed bodice with fan pleats, tight sleeves, a wide neck edged with lace and a full gauged skirt.',
       caption: 'Front. Rendered; invented garment.',
     },
     {
       view: 'detail',
       name: 'detail-fan-pleats',
-      shot: closeUp(10, { lookAt: [0, 106], span: 28, aspect: 1.33 }, { exposure: 1.15 }),
+      shot: closeUp(10, { lookAt: [0, 106], span: 28, aspect: 1.33 }, { exposure: 0.95 }),
       alt: 'A close view of the waist: pleats drawn together to a corded point over the gauged skirt.',
       caption: 'Fan pleats at the point. Rendered; invented garment.',
       fineness: 1.3,

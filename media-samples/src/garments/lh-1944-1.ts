@@ -47,7 +47,7 @@ const edge = (y: number): number => (y < BREAK ? 0 : 0.66 * Math.pow((y - BREAK)
 const body: Layer = (u, v, lift, p) => {
   const y = mix(146, 104.2, v);
   const open = edge(y);
-  const theta = u < 0.5 ? mix(-Math.PI, -open, u * 2) : mix(open, Math.PI, (u - 0.5) * 2);
+  const theta = u < 0.5 ? mix(-Math.PI - 0.006, -open, u * 2) : mix(open, Math.PI + 0.006, (u - 0.5) * 2);
   const lap =
     0.3 * ease(BREAK + 1, BREAK - 8, y) * ease(-0.33, -0.29, theta) * ease(1.2, 0.5, Math.abs(theta));
   form(y, theta, folds(theta, y) + lap + lift, p);
@@ -95,8 +95,8 @@ function layTails(scene: Scene): void {
   for (const side of [1, -1] as const) {
     const layer = tail(side);
     scene.layLayer({ cloth: blue, across: 480, along: 560 }, layer);
-    scene.lay({ cloth: inside, across: 160, along: 180 }, (u, v, p) =>
-      layer(mix(0.02, 0.985, u), mix(0.02, 0.99, v), -0.5, p),
+    scene.lay({ cloth: inside, across: 480, along: 300 }, (u, v, p) =>
+      layer(mix(0.02, 0.985, u), mix(0.02, 0.99, v), -0.62, p),
     );
     const flap: Layer = (u, v, lift, p) =>
       layer(mix(0.34, 0.78, u), mix(0.1, 0.185, v) + 0.009 * Math.sin(u * 2 * Math.PI), lift, p);
@@ -107,8 +107,8 @@ function layTails(scene: Scene): void {
 }
 
 const pose: readonly Vec3[] = [
-  [15, 139.4, -2],
-  [18.4, 137.6, -2.2],
+  [15.6, 136.6, -2],
+  [18, 136, -2.2],
   [22.6, 131.5, -2.8],
   [25.6, 121, -3.8],
   [27, 110, -3.2],
@@ -120,8 +120,8 @@ const creased = closeSleeve(noise, 0.56);
 const sleeve = {
   pose,
   widths: [
-    [0, 4.4],
-    [0.08, 6.2],
+    [0, 3.4],
+    [0.07, 5.6],
     [0.18, 7.2],
     [0.36, 6.9],
     [0.52, 6],
@@ -130,7 +130,7 @@ const sleeve = {
     [1, 4.3],
   ] as const,
   folds: (angle: number, t: number, side: 1 | -1) =>
-    1.3 * creased(angle, t, side) +
+    1.1 * creased(angle, t, side) +
     0.4 * bell(t, 0.16, 0.06) * (noise.fold(angle * 2.2 + 20 + 0.6 * noise.at(angle, t * 4), 9) - 0.4),
   clothWidth: 44,
 };
@@ -181,7 +181,7 @@ export const lh1944n1: Garment = {
     layFallCollar(
       scene,
       noise,
-      { foot: 143.6, roll: 151.5, fall: 142.6, opens: 0.62, drop: 5.2, half: 7.6 },
+      { foot: 142.2, roll: 151.5, fall: 142.6, opens: 0.56, drop: 5.2, half: 7.6 },
       velvet,
     );
     const p = newPoint();
@@ -201,21 +201,21 @@ export const lh1944n1: Garment = {
     {
       view: 'front',
       name: 'front',
-      shot: hung(22, { lookAt: [0, 97], span: 132, aspect: 0.8, reach: 84 }, { exposure: 1.12 }),
+      shot: hung(22, { lookAt: [0, 97], span: 132, aspect: 0.8, reach: 84 }, { exposure: 1.0 }),
       alt: "A man's dark blue wool tailcoat of 1825 to 1830, hung: double-breasted with gilt buttons, broad lapels and a velvet collar, cut away at the waist.",
       caption: 'Front. Rendered; invented garment.',
     },
     {
       view: 'back',
       name: 'back',
-      shot: hung(203, { lookAt: [0, 97], span: 132, aspect: 0.8, reach: 84 }, { exposure: 1.12 }),
+      shot: hung(203, { lookAt: [0, 97], span: 132, aspect: 0.8, reach: 84 }, { exposure: 1.0 }),
       alt: 'The dark blue tailcoat from behind: curved side-back seams, two gilt buttons at the waist and pleats in the tails.',
       caption: 'Back. Rendered; invented garment.',
     },
     {
       view: 'detail',
       name: 'detail-buttons',
-      shot: closeUp(182, { lookAt: [0, 104], span: 22, aspect: 1.33, pitch: 4 }, { exposure: 1.15 }),
+      shot: closeUp(182, { lookAt: [0, 104], span: 22, aspect: 1.33, pitch: 4 }, { exposure: 1.05 }),
       alt: 'A close view of the back waist: two gilt buttons where the side-back seams meet the waist seam.',
       caption: 'Hip buttons and waist seam. Rendered; invented garment.',
       fineness: 1.3,

@@ -2,9 +2,9 @@ import { manTorso } from '../bodices/coat-body';
 import { armholeRim, cutAway, inArmhole, type Armhole } from '../bodices/openings';
 import { dye } from '../cloths/cloth';
 import { lining, metal, patternedSilk, thread, whiteCotton } from '../cloths/cloths';
-import { layLapel } from '../collars/lapel';
+import { layShawl } from '../collars/shawl';
 import { wovenSprig } from '../motifs/motifs';
-import { bell, curve, ease, mix } from '../renderer/numbers';
+import { bell, ease, mix } from '../renderer/numbers';
 import { seededNoise } from '../renderer/noise';
 import { type Layer } from '../renderer/scene';
 import { sewButtons } from '../trims/buttons';
@@ -80,34 +80,20 @@ export const lh1944n2: Garment = {
         0.18,
         0.9,
       );
-    const shawl = curve([
-      [0, 0.3],
-      [0.25, 3],
-      [0.55, 5.2],
-      [0.8, 5.4],
-      [1, 4.6],
-    ]);
-    for (const side of [1, -1] as const)
-      layLapel(
-        scene,
-        {
-          form,
-          breakY: BREAK + 0.2,
-          gorgeY: 145.4,
-          edge: (y) => edge(y) - 0.012,
-          width: shawl,
-          lift: 0.75,
-          side,
-        },
-        sprigged,
-      );
-    // The shawl collar goes round the neck in one.
-    scene.lay({ cloth: sprigged, across: 360, along: 60 }, (u, v, p) => {
-      const theta = mix(0.62, 2 * Math.PI - 0.62, u);
-      form(mix(147.6, 143.2, v) + 0.6 * bell(v, 0, 0.2), theta, 1.1 + 1.2 * v - 0.4 * v * v, p);
-      p.u = u * 44;
-      p.v = v * 6;
-    });
+    layShawl(
+      scene,
+      {
+        form,
+        breakY: BREAK + 0.2,
+        shoulderY: 145,
+        backY: 147.2,
+        edge: (y) => edge(y) - 0.012,
+        width: 5.6,
+        widthBehind: 4.2,
+        lift: 0.75,
+      },
+      sprigged,
+    );
     sewButtons(scene, onForm, (t) => [0.02 + 0.02 * (1 - t), mix(115, 99.4, t)], {
       count: 6,
       radius: 0.62,

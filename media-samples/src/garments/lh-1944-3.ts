@@ -1,10 +1,9 @@
 import { dye } from '../cloths/cloth';
 import { lining, metal, woolTwill } from '../cloths/cloths';
-import { loft, type Loft } from '../renderer/loft';
+import { loft } from '../renderer/loft';
 import { bell, curve, ease, mix } from '../renderer/numbers';
 import { seededNoise } from '../renderer/noise';
 import { type Layer } from '../renderer/scene';
-import { line, tube, type Vec3 } from '../renderer/tube';
 import { sewButtons } from '../trims/buttons';
 import { round, sewCord } from '../trims/sewn';
 import { hung, type Garment } from './garment';
@@ -21,12 +20,6 @@ const hips = loft([
   { y: 104, half: 14.9, front: 11.4, back: 10.8 },
   { y: 109, half: 14.2, front: 11, back: 10.2 },
 ]);
-/** The hips drawn in between the legs, before and behind, as they come down to the fork. */
-const seat: Loft = (y, theta, lift, p) => {
-  hips(y, theta, lift, p);
-  const between = Math.exp(-Math.pow(p.x / mix(2.2, 5.2, ease(94, 82, y)), 2));
-  p.z *= 1 - 0.92 * between * Math.pow(ease(95, 81, y), 1.4);
-};
 const seatFolds = (theta: number, y: number): number =>
   0.5 +
   0.3 * noise.layers(theta * 2 + 5, y * 0.14, 3) +
@@ -34,54 +27,98 @@ const seatFolds = (theta: number, y: number): number =>
   0.16 * bell(Math.abs(theta), Math.PI, 0.013) -
   0.12 * bell(Math.abs(theta), 1.6, 0.014);
 
-const top: Layer = (u, v, lift, p) => {
+/** The waist, for what is sewn round it. */
+const waist: Layer = (u, v, lift, p) => {
   const theta = (u - 0.5) * 2 * Math.PI;
   const y = mix(107.6 + 1.6 * bell(Math.abs(theta), Math.PI, 0.8), 80, v);
-  seat(y, theta, seatFolds(theta, y) + lift, p);
+  hips(y, theta, seatFolds(theta, y) + lift, p);
   p.u = theta * 15;
   p.v = 110 - y;
 };
 
-const legSpine: readonly Vec3[] = [
-  [8.8, 88, 0.2],
-  [9.6, 78, 0],
-  [10.2, 62, -0.2],
-  [10.4, 46, -0.3],
-  [10.6, 28, 0],
-  [10.8, 10, 0.4],
-  [10.9, 2, 0.6],
-];
-const across = curve([
-  [0, 8.6],
-  [0.12, 9.4],
-  [0.4, 8.4],
-  [0.62, 7.6],
-  [0.85, 7.2],
-  [1, 7.3],
+const hipHalf = curve([
+  [82, 18.2],
+  [88, 18.4],
+  [96, 17.2],
+  [104, 14.9],
+  [109, 14.2],
+]);
+const hipFront = curve([
+  [82, 12.4],
+  [88, 12.9],
+  [96, 12.6],
+  [104, 11.4],
+  [109, 11],
+]);
+const hipBack = curve([
+  [82, 13.6],
+  [88, 14.2],
+  [96, 13],
+  [104, 10.8],
+  [109, 10.2],
+]);
+const legMiddle = curve([
+  [2, 10.9],
+  [46, 10.4],
+  [76, 9.5],
+  [88, 9.1],
+]);
+const legRadius = curve([
+  [2, 7.3],
+  [20, 7.2],
+  [45, 7.8],
+  [64, 8.6],
+  [80, 9.1],
 ]);
 
-function leg(side: 1 | -1): Layer {
-  const { layer } = tube({
-    spine: line(legSpine),
-    radius: (t) => [across(t), across(t) * mix(1.32, 1.06, ease(0, 0.4, t))],
-    clothWidth: 52,
-    folds: (angle, t) =>
-      0.35 * noise.layers(Math.cos(angle) * 1.8 + 9 * side + 20, t * 7 + Math.sin(angle), 3) +
-      0.4 *
-        bell(t, 0.5, 0.1) *
-        (noise.fold(t * 26 + 0.9 * Math.sin(angle) + 9, 5) - 0.5) *
-        (0.5 - 0.4 * Math.cos(angle)) +
-      0.5 *
-        bell(t, 0.06, 0.07) *
-        (noise.fold(t * 60 + 2.2 * angle + 30, 7) - 0.5) *
-        Math.max(0, -Math.sin(angle)) +
-      0.22 * bell(t, 0.93, 0.07) * (noise.fold(t * 36 + 0.8 * Math.cos(angle) + side, 8) - 0.5) -
-      0.1 * bell(angle, Math.PI / 2, 0.02),
-  });
+function legFolds(angle: number, y: number, side: 1 | -1): number {
+  const t = 1 - y / 86;
+  return (
+    0.35 * noise.layers(Math.cos(angle) * 1.8 + 9 * side + 20, t * 7 + Math.sin(angle), 3) +
+    0.4 *
+      bell(y, 44, 9) *
+      (noise.fold(t * 26 + 0.9 * Math.sin(angle) + 9, 5) - 0.5) *
+      (0.5 - 0.4 * Math.cos(angle)) +
+    0.4 *
+      bell(y, 76, 6) *
+      (noise.fold(t * 46 + 2.2 * angle + 30, 7) - 0.5) *
+      Math.max(0, -Math.sin(angle + 0.4)) +
+    0.12 * bell(y, 7, 5) * (noise.fold(t * 30 + 0.8 * Math.cos(angle) + side, 8) - 0.5) -
+    0.1 * bell(angle, Math.PI / 2, 0.02)
+  );
+}
+
+/** Share of the cloth that goes round the outside, from the middle of the front to the middle of the back. */
+const OUTSIDE = 0.68;
+
+/** One half of the trousers: half the hips above the fork, a whole leg below it, and one surface between. */
+function half(side: 1 | -1): Layer {
   return (u, v, lift, p) => {
-    layer(u, v, lift, p);
-    p.x *= side;
+    const within = u <= OUTSIDE ? u / OUTSIDE : (u - OUTSIDE) / (1 - OUTSIDE);
+    const theta = (u <= OUTSIDE ? within : 1 - within) * Math.PI;
+    const y = mix(107.6 + 1.6 * bell(theta, Math.PI, 0.8), 2, v);
+    const closed = ease(86, 73, y);
+    const angle = u <= OUTSIDE ? mix(-0.36, 1.36, within) * Math.PI : mix(1.36, 1.64, within) * Math.PI;
+    const hipX = u <= OUTSIDE ? hipHalf(y) * Math.sin(theta) : 0;
+    const hipZ =
+      u <= OUTSIDE
+        ? (Math.cos(theta) > 0 ? hipFront(y) : hipBack(y)) * Math.cos(theta)
+        : mix(-hipBack(y), hipFront(y), within);
+    const legX = legMiddle(y) + legRadius(y) * Math.sin(angle);
+    const legZ = legRadius(y) * 1.08 * Math.cos(angle) + 0.6 * ease(30, 0, y);
+    // Both halves must meet in the middle, so the hips' folds die away there.
+    const edge = ease(0, 0.05, Math.min(within, 1 - within));
+    const off =
+      mix(u <= OUTSIDE ? seatFolds(theta, y) * edge : 0, 0.3 + legFolds(angle, y, side), closed) + lift;
+    p.nx = mix(u <= OUTSIDE ? Math.sin(theta) : -0.2, Math.sin(angle), closed);
+    p.nz = mix(u <= OUTSIDE ? Math.cos(theta) : 0, Math.cos(angle), closed);
+    p.ny = 0;
+    p.x = side * (mix(hipX, legX, closed) + p.nx * off);
+    p.z = mix(hipZ, legZ, closed) + p.nz * off;
+    p.y = y;
     p.nx *= side;
+    p.u = u * 52;
+    p.v = 110 - y;
   };
 }
 
@@ -89,9 +126,9 @@ function leg(side: 1 | -1): Layer {
 const FALL = 0.82;
 const fall: Layer = (u, v, lift, p) => {
   const theta = mix(-FALL, FALL, u) * mix(1, 0.72, v);
-  const y = mix(103.6, 89.5, v);
+  const y = mix(103.6, 91, v);
   const rim = Math.min(ease(0, 0.03, u) * ease(1, 0.97, u), ease(0, 0.04, v));
-  seat(y, theta, seatFolds(theta, y) + 0.12 + 0.34 * rim * ease(1, 0.75, v) + lift, p);
+  hips(y, theta, seatFolds(theta, y) + 0.12 + 0.34 * rim * ease(1, 0.75, v) + lift, p);
   p.u = theta * 15;
   p.v = 110 - y;
 };
@@ -100,15 +137,14 @@ export const lh1944n3: Garment = {
   number: 'LH.1944.3',
   kind: 'trousers',
   build(scene) {
-    scene.layLayer({ cloth: fawn, across: 800, along: 320, closed: true }, top);
-    scene.layLayer({ cloth: inside, across: 300, along: 80, closed: true }, (u, v, lift, p) =>
-      top(u, mix(0.005, 0.7, v), lift - 0.5, p),
+    scene.layLayer({ cloth: inside, across: 300, along: 60, closed: true }, (u, v, lift, p) =>
+      waist(u, mix(0.005, 0.5, v), lift - 0.7, p),
     );
     for (const side of [1, -1] as const) {
-      const layer = leg(side);
-      scene.layLayer({ cloth: fawn, across: 520, along: 900, closed: true }, layer);
+      const layer = half(side);
+      scene.layLayer({ cloth: fawn, across: 760, along: 1000, closed: true }, layer);
       scene.layLayer({ cloth: inside, across: 160, along: 40, closed: true }, (u, v, lift, p) =>
-        layer(u, mix(0.85, 0.998, v), lift - 0.45, p),
+        layer(u, mix(0.9, 0.999, v), lift - 0.45, p),
       );
       // A strap under the boot.
       scene.lay({ cloth: fawn, across: 80, along: 24 }, (u, v, p) => {
@@ -121,7 +157,7 @@ export const lh1944n3: Garment = {
       });
     }
     scene.layLayer({ cloth: fawn, across: 420, along: 240 }, fall);
-    sewCord(scene, top, fawn, { line: round(0.085), points: 600, closed: true, length: 90 }, 0.12, 0.9);
+    sewCord(scene, waist, fawn, { line: round(0.085), points: 600, closed: true, length: 90 }, 0.12, 0.9);
     sewButtons(scene, fall, (t) => [mix(0.035, 0.965, t), 0.07], {
       count: 4,
       radius: 0.75,
@@ -130,7 +166,7 @@ export const lh1944n3: Garment = {
       height: 0.3,
       points: 36,
     });
-    sewButtons(scene, top, (t) => [0.5, mix(0.03, 0.12, t)], {
+    sewButtons(scene, waist, (t) => [0.5, mix(0.03, 0.12, t)], {
       count: 2,
       radius: 0.7,
       cloth: horn,

@@ -1,4 +1,3 @@
-import { manTorso } from '../bodices/coat-body';
 import { dye } from '../cloths/cloth';
 import { thread, whiteCotton } from '../cloths/cloths';
 import { bell, ease, mix } from '../renderer/numbers';
@@ -12,9 +11,20 @@ import { sewBand, sewCord } from '../trims/sewn';
 import { closeUp, hung, type Garment } from './garment';
 
 const noise = seededNoise(1820);
-const linen = whiteCotton(dye('#ece7da'), 0.3, 0.5);
+const linen = whiteCotton(dye('#ece7da'), 0.3, 0.34);
 const inner = whiteCotton(dye('#d9d2c1'), 0.3, 0.4);
-const form = manTorso(3.4);
+/** A shirt is cut from straight lengths: it hangs from the shoulders and has no waist. */
+const form = loft([
+  { y: 54, half: 24.5, front: 15.5, back: 15.5 },
+  { y: 100, half: 23.4, front: 15.4, back: 15 },
+  { y: 126, half: 22.6, front: 16, back: 15 },
+  { y: 132, half: 21.8, front: 14.6, back: 14.2, cz: -0.4 },
+  { y: 138, half: 18.8, front: 11.4, back: 12.2, cz: -1 },
+  { y: 142, half: 15, front: 8.8, back: 9.8, cz: -1.8 },
+  { y: 145, half: 10.6, front: 7.2, back: 7.8, cz: -2 },
+  { y: 147, half: 8, front: 6.8, back: 6.8, cz: -1.8 },
+  { y: 152, half: 7.4, front: 7, back: 6.8, cz: -2 },
+]);
 
 /** The slit in front, worked at its foot; the body falls in gathers from neckband and shoulder. */
 const SLIT = 112;
@@ -29,13 +39,8 @@ const body: Layer = (u, v, lift, p) => {
   const gathers =
     (noise.fold(a * 11 + 0.4 * noise.at(theta * 2, y * 0.1) + 0.3, 3) - 0.5) * (0.7 * bell(y, 142, 7) + 0.12);
   const broad =
-    (noise.fold(a * 3.4 + 0.5 * noise.at(theta, y * 0.05) + 0.1, 5) - 0.5) * 3 * ease(138, 100, y);
-  form(
-    Math.max(75, y),
-    theta,
-    0.4 + gathers + broad + 0.7 * noise.layers(theta * 1.8 + 6, y * 0.07, 3) + lift,
-    p,
-  );
+    (noise.fold(a * 3.4 + 0.5 * noise.at(theta * 1.4, y * 0.04) + 0.1, 5) - 0.5) * 2.6 * ease(138, 100, y);
+  form(y, theta, 0.4 + gathers + broad + 1.5 * noise.layers(theta * 1.8 + 6, y * 0.06, 3) + lift, p);
   p.y = y;
   p.u = theta * 17;
   p.v = 150 - y;
@@ -49,6 +54,7 @@ const pose: readonly Vec3[] = [
   [36.4, 105.6, 1],
   [39.4, 92, 3.4],
 ];
+const full = fullSleeve(noise, { folds: 15, depth: 2, ties: [0.06, 0.84], from: 0, to: 0.95 });
 const sleeve = {
   pose,
   widths: [
@@ -61,7 +67,9 @@ const sleeve = {
     [0.89, 3.9],
     [1, 3.8],
   ] as const,
-  folds: fullSleeve(noise, { folds: 15, depth: 2, ties: [0.06, 0.86], from: 0, to: 0.95 }),
+  // The gathers end at the cuff.
+  folds: (angle: number, t: number, side: 1 | -1) =>
+    full(angle, t, side) * (0.12 + 0.88 * ease(0.9, 0.86, t)),
   clothWidth: 56,
   depth: 1,
 };
@@ -129,9 +137,9 @@ export const lh1952n5: Garment = {
     for (const side of [1, -1] as const)
       scene.lay({ cloth: linen, across: 420, along: 40 }, (u, v, p) => {
         body(0.5 + side * 0.0005, mix(0.05, 0.47, u), 0.3, p);
-        const wave = Math.sin(u * 82 + 0.9 * Math.sin(u * 31)) + 0.3 * Math.sin(u * 213);
-        p.x += side * (2.6 * v - 0.2);
-        p.z += 1.5 * Math.sin(v * 2.2) + 0.45 * wave * v;
+        const wave = Math.sin(u * 62 + 0.9 * Math.sin(u * 23)) + 0.3 * Math.sin(u * 151);
+        p.x += side * (3.4 * v - 0.2);
+        p.z += 1.5 * Math.sin(v * 2.2) + 0.75 * wave * v;
         p.u = u * 60;
         p.v = v * 3;
       });
@@ -147,14 +155,14 @@ export const lh1952n5: Garment = {
     {
       view: 'front',
       name: 'front',
-      shot: hung(14, { lookAt: [0, 105], span: 116, aspect: 0.86, reach: 76 }, { exposure: 0.8 }),
+      shot: hung(14, { lookAt: [0, 105], span: 116, aspect: 0.86, reach: 76 }, { exposure: 0.86 }),
       alt: "A man's white linen shirt of about 1820, hung: a tall open collar, a frilled slit in front, full sleeves gathered at shoulder and cuff, and a long square-cut body.",
       caption: 'Front. Rendered; invented garment.',
     },
     {
       view: 'detail',
       name: 'detail-cuff',
-      shot: closeUp(6, { lookAt: [38, 97], span: 22, aspect: 1.33 }, { exposure: 0.8 }),
+      shot: closeUp(6, { lookAt: [38, 97], span: 22, aspect: 1.33 }, { exposure: 0.86 }),
       alt: 'A close view of the sleeve gathered into a narrow cuff that fastens with a thread button.',
       caption: 'Gathers at the cuff. Rendered; invented garment.',
       fineness: 1.4,

@@ -21,12 +21,12 @@ const worked = whiteCotton(
   (u, v, out) => {
     const down = v - 104;
     const stitch =
-      down > -1 && down < 12 ? whiteworkVine(u, down - 4.5) : v > 14 && down < -2 ? whiteworkSprig(u, v) : 0;
+      down > -1 && down < 12 ? whiteworkVine(u, down - 4.5) : v > 14 ? whiteworkSprig(u, v, 102) : 0;
     const shade =
       down > -1 && down < 12
         ? whiteworkVine(u - 0.09, down - 4.6)
-        : v > 14 && down < -2
-          ? whiteworkSprig(u - 0.08, v - 0.09)
+        : v > 14
+          ? whiteworkSprig(u - 0.08, v - 0.09, 102)
           : 0;
     for (let i = 0; i < 3; i++) out[i] = stitch > 0 ? 0.95 : white[i]! * (shade > 0 ? 0.62 : 0.9);
   },
@@ -118,7 +118,7 @@ export const lh1954n17: Garment = {
       pose: POSES.cap,
       widths: [
         [0, 3.4],
-        [0.18, 5.4],
+        [0.1, 5.4],
         [0.42, 7.8],
         [0.68, 7.6],
         [0.9, 5.2],
@@ -155,14 +155,14 @@ export const lh1954n17: Garment = {
     {
       view: 'front',
       name: 'front',
-      shot: standing(34, { lookAt: [-2, 69], span: 156, aspect: 0.66, reach: 100 }, { exposure: 0.8 }),
+      shot: standing(34, { lookAt: [-2, 69], span: 156, aspect: 0.66, reach: 100 }, { exposure: 0.85 }),
       alt: 'A white muslin dress of about 1812: high waist, a neck drawn up on a string, short puffed sleeves, and whitework sprigs over a border at the hem.',
       caption: 'Three-quarter view from the front. Rendered; invented garment.',
     },
     {
       view: 'detail',
       name: 'detail-hem',
-      shot: closeUp(22, { lookAt: [1, 15], span: 32, aspect: 1.33, pitch: 6 }, { exposure: 0.8 }),
+      shot: closeUp(22, { lookAt: [1, 15], span: 32, aspect: 1.33, pitch: 6 }, { exposure: 0.85 }),
       alt: 'A close view of the hem: a whitework vine with leaves and berries between two worked lines on muslin.',
       caption: 'Whitework border at the hem. Rendered; invented garment.',
       fineness: 1.3,

@@ -49,7 +49,7 @@ export const lh1958n6: Garment = {
     const body = layBodice(scene, bodice, red, inside);
     sewCord(scene, body, braid, { line: round(1), points: 700, closed: true, length: 100 }, 0.26, 0.8);
     sewBand(scene, body, braid, { from: 0.955, to: 0.975, lift: 0.2, across: 700, width: 1, length: 100 });
-    const collar = layStandCollar(scene, { foot: 141.6, top: 146.6, footHalf: 7, lift: 0.8 }, red, inside);
+    const collar = layStandCollar(scene, { foot: 140.9, top: 146.6, footHalf: 6.9, lift: 0.6 }, red, inside);
     sewCord(scene, collar, braid, { line: round(0.03), points: 360, closed: true, length: 38 }, 0.2, 0.6);
     sewButtons(scene, body, (t) => [uOf(0.03), mix(0.03, 0.95, t)], {
       count: 19,

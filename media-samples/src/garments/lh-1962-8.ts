@@ -47,7 +47,7 @@ const tucks = (down: number): number => tuck(down, 0.8) + tuck(down, 0.835) + tu
 /** The front is gathered in to the belt in a fan; the sides and back are plain. */
 const bodice: BodiceCut = {
   form: torso({ waistY: WAIST, waist: [11.2, 9, 9], bustY: 122, shoulder: 0.6 }),
-  neck: neckline(134.6, 138.6, 137.4),
+  neck: neckline(134.6, 139.4, 140.4),
   lower: () => WAIST - 0.8,
   folds: (theta, y) => {
     const a = Math.abs(theta);
@@ -133,7 +133,7 @@ export const lh1962n8: Garment = {
       length: 96,
       depth: 10,
     };
-    layPelerine(scene, noise, collar, eyeletEdging({ repeat: 2.4, depth: 10 }));
+    layPelerine(scene, noise, collar, eyeletEdging({ repeat: 2.4, depth: 10, colour: dye('#cbc4b3') }));
     layPelerine(
       scene,
       noise,
@@ -149,7 +149,7 @@ export const lh1962n8: Garment = {
         depth: 6,
         length: 84,
       },
-      eyeletEdging({ repeat: 2.1, depth: 6 }),
+      eyeletEdging({ repeat: 2.1, depth: 6, colour: dye('#cbc4b3') }),
     );
   },
   pictures: [
@@ -164,8 +164,8 @@ export const lh1962n8: Garment = {
       view: 'back',
       name: 'back',
       shot: standing(196, { lookAt: [0, 71], span: 160, aspect: 0.82, reach: 112 }, { exposure: 0.92 }),
-      alt: 'The printed cotton dress from behind, hooked down the middle of the back under the white collar.',
-      caption: 'Back, with its hooked opening. Rendered; invented garment.',
+      alt: 'The printed cotton dress from behind, closing down the middle of the back under the white collar.',
+      caption: 'Back, with its opening. Rendered; invented garment.',
     },
     {
       view: 'detail',

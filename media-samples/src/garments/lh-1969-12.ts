@@ -14,7 +14,7 @@ import { closeUp, hung, type Garment } from './garment';
 const noise = seededNoise(1892);
 const black = broadcloth(dye('#3d3b40'));
 const beads = jet(dye('#2e2c31'));
-const inside = lining(dye('#6a5f66'));
+const inside = lining(dye('#8d8088'));
 
 const form = loft([
   { y: 144, half: 6.8, front: 6.2, back: 6, cz: -1.2 },
@@ -41,7 +41,8 @@ const cape =
     p.v = v * (upper - lower) * 1.2;
   };
 const long = cape(143, 95, 0.09, 0);
-const short = cape(143, 119, 0.13, 3);
+/** The upper cape is cut to the same folds, so that it lies on the lower. */
+const short: Layer = (u, v, lift, p) => long(u, 0.5 * v, lift + 0.3 * v, p);
 
 /** Scrolls of cord set with beads, repeated along a layer. */
 function scrollwork(
@@ -129,7 +130,7 @@ export const lh1969n12: Garment = {
     {
       view: 'detail',
       name: 'detail-beads',
-      shot: closeUp(-14, { lookAt: [2, 122], span: 18, aspect: 1.33 }, { exposure: 1.25 }),
+      shot: closeUp(-14, { lookAt: [6, 121], span: 20, aspect: 1.33 }, { exposure: 1.25 }),
       alt: 'A close view of beaded cord laid in scrolls along the edge of the upper cape.',
       caption: 'Scrolls of beaded cord. Rendered; invented garment.',
       fineness: 1.2,

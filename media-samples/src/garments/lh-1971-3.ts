@@ -37,12 +37,12 @@ const WAIST = 105;
 const form = loft([
   { y: 106, half: 11.6, front: 9.2, back: 9.4 },
   { y: 103, half: 18, front: 15, back: 18 },
-  { y: 98, half: 27, front: 23, back: 29 },
-  { y: 90, half: 38, front: 33, back: 42 },
-  { y: 74, half: 52, front: 45.5, back: 58 },
-  { y: 50, half: 63, front: 55.5, back: 71 },
-  { y: 24, half: 69.5, front: 61.5, back: 79 },
-  { y: 1.5, half: 72.5, front: 64.5, back: 84 },
+  { y: 98, half: 25, front: 21, back: 27 },
+  { y: 90, half: 34, front: 29, back: 38 },
+  { y: 74, half: 45, front: 39, back: 51 },
+  { y: 50, half: 54, front: 47, back: 62 },
+  { y: 24, half: 60, front: 52.5, back: 69 },
+  { y: 1.5, half: 63, front: 55, back: 73 },
 ]);
 
 function flounces(scene: Scene): void {
@@ -57,8 +57,8 @@ function flounces(scene: Scene): void {
   );
   // Each flounce lies over the one below it and is fuller than the skirt it hangs from.
   for (const [upper, hem, row] of [
-    [36, 2, 3],
-    [67, 31.5, 5],
+    [33.5, 2, 3],
+    [64, 31.5, 5],
     [95, 62, 7],
   ] as const) {
     const full = gathered(noise, { folds: 44, depth: 2.6, gathers: 130, gatherDepth: 0.9, power: 0.9, row });
@@ -69,7 +69,12 @@ function flounces(scene: Scene): void {
       clothWidth: 470,
       evenAt: 30,
       folds: (u, theta, y, v) =>
-        1.5 + under(u, theta, y, 1 - y / 106) * 0.6 + full(u, theta, y, v) + 2.1 * v + 0.5 * ease(0, 0.03, v),
+        0.5 +
+        1.1 * ease(0.02, 0.3, v) +
+        under(u, theta, y, 1 - y / 106) * 0.8 +
+        full(u, theta, y, v) +
+        2.6 * v +
+        0.2 * ease(0, 0.03, v),
     });
     scene.layLayer({ cloth: checked, across: 1900, along: 330, closed: true }, flounce);
     sewFrill(scene, flounce, fringe(dye('#4c3a29'), blue, 2.6, 3), {
@@ -92,7 +97,7 @@ function flounces(scene: Scene): void {
 const seamed = fittedFolds(noise, WAIST);
 const bodice: BodiceCut = {
   form: torso({ waistY: WAIST, waist: [11.2, 9, 9], bustY: 122, shoulder: 0.8, hips: [[7, 19, 15, 18]] }),
-  neck: () => 142.4,
+  neck: () => 141,
   lower: (theta) => WAIST - 0.6 - 4.2 * Math.exp(-theta * theta * 5),
   folds: (theta, y) => seamed(theta, y) + lapEdge(theta) + 0.9 * ease(WAIST + 1, WAIST - 2.5, y),
 };
@@ -126,15 +131,16 @@ const pagoda: SleeveCut = {
 };
 const undersleeve: SleeveCut = {
   pose: [
-    [24, 118, -1],
+    [26.4, 114, -0.6],
     [27.4, 109, 1.4],
     [27.8, 102, 4.6],
     [26.2, 96.5, 8.6],
   ],
   widths: [
-    [0, 6],
-    [0.45, 7.4],
-    [0.8, 6.2],
+    [0, 3.4],
+    [0.3, 5.2],
+    [0.55, 6.6],
+    [0.8, 6],
     [0.93, 3.6],
     [1, 3.5],
   ],
@@ -154,8 +160,8 @@ export const lh1971n3: Garment = {
   build(scene) {
     flounces(scene);
     const body = layBodice(scene, bodice, checked, inside);
-    sewButtons(scene, body, (t) => [uOf(0.03), mix(0.03, 0.96, t)], {
-      count: 13,
+    sewButtons(scene, body, (t) => [uOf(0.03), mix(0.11, 0.96, t)], {
+      count: 12,
       radius: 0.6,
       cloth: thread(dye('#3f5d7d')),
       lift: 0.2,
@@ -165,18 +171,18 @@ export const lh1971n3: Garment = {
       scene,
       noise,
       {
-        neckY: 142.9,
+        neckY: 143.2,
         dropFront: 2.8,
         dropSide: 2.4,
         dropBack: 3.4,
         reachSide: 3,
         reachFront: 3,
         reachBack: 2.4,
-        neckHalf: 6.9,
+        neckHalf: 7.3,
         ripples: 10,
         rippleHeight: 0.12,
         openAt: 0.02,
-        opens: 0.22,
+        opens: 0.1,
         length: 56,
         depth: 4.6,
       },
@@ -217,7 +223,7 @@ export const lh1971n3: Garment = {
     {
       view: 'front',
       name: 'front',
-      shot: standing(26, { lookAt: [0, 71], span: 168, aspect: 1, reach: 126 }, { exposure: 1 }),
+      shot: standing(26, { lookAt: [0, 69], span: 162, aspect: 0.94, reach: 126 }, { exposure: 1 }),
       alt: 'A dress of about 1860 in brown and blue checked silk: three fringed flounces over a wide crinoline, pagoda sleeves over white undersleeves, and a buttoned front with a small white collar.',
       caption: 'Front. Rendered; invented garment.',
     },

@@ -106,7 +106,12 @@ export const lh1977n14: Garment = {
       p.u = u * 20;
       p.v = v * 14;
     });
-    layBelt(scene, noise, { upper: 111.6, lower: 106, half: 14, front: 11.9, back: 11.9, folds: 0.5 }, dark);
+    layBelt(
+      scene,
+      noise,
+      { upper: 111.6, lower: 106, half: 14.8, front: 12.7, back: 12.7, folds: 0.4 },
+      dark,
+    );
     for (const [x, y, z] of [
       [8.6, 106.6, 10.6],
       [10.2, 103.8, 10.4],

@@ -66,8 +66,8 @@ const body: Layer = (u, v, lift, p) => {
 };
 
 const pose: readonly Vec3[] = [
-  [12.6, 134.2, -1.6],
-  [16.2, 133, -1.8],
+  [15.2, 131.8, -1.7],
+  [17, 131.4, -1.8],
   [21, 129.4, -2.2],
   [24.4, 122.4, -2.6],
   [25, 114.4, -2],
@@ -123,8 +123,8 @@ export const lh1980n40: Garment = {
       points: 40,
     });
     const widths = [
-      [0, 4],
-      [0.05, 6.2],
+      [0, 2.4],
+      [0.06, 5.6],
       [0.12, 9.4],
       [0.26, 11.4],
       [0.4, 10.4],
@@ -168,7 +168,7 @@ export const lh1980n40: Garment = {
     {
       view: 'detail',
       name: 'detail-lapel',
-      shot: closeUp(16, { lookAt: [2, 128], span: 24, aspect: 1.25 }, { exposure: 1 }),
+      shot: closeUp(16, { lookAt: [-7, 125], span: 26, aspect: 1.25 }, { exposure: 1 }),
       alt: 'A close view of the lapel and collar in herringbone tweed with lighter flecks.',
       caption: 'Lapel and herringbone. Rendered; invented garment.',
       fineness: 1.3,

@@ -66,8 +66,8 @@ const bodice: BodiceCut = {
 };
 
 const pose: readonly Vec3[] = [
-  [9.5, 134, -1.6],
-  [15.6, 133, -1.8],
+  [13.4, 132.8, -1.7],
+  [16.4, 132.4, -1.8],
   [22.4, 128.5, -2.2],
   [26.4, 121, -2.6],
   [26.8, 113, -1.4],
@@ -134,7 +134,7 @@ export const lh1983n5: Garment = {
     layBelt(
       scene,
       noise,
-      { upper: 105.8, lower: 101.4, half: 12.3, front: 10.2, back: 10.2, folds: 0.3 },
+      { upper: 105.8, lower: 101.4, half: 12.9, front: 10.9, back: 10.8, folds: 0.25 },
       satin,
     );
     for (const sleeve of laySleeves(scene, greatSleeve, strawBody, inside, 720, 760)) {

@@ -85,7 +85,7 @@ export const lh1987n20: Garment = {
     {
       view: 'detail',
       name: 'detail-hem',
-      shot: closeUp(22, { lookAt: [2, 15], span: 34, aspect: 1.33, pitch: 6 }, { exposure: 0.73 }),
+      shot: closeUp(22, { lookAt: [2, 11], span: 36, aspect: 1.33, pitch: 6 }, { exposure: 0.73 }),
       alt: 'A close view of the hem: tucks above a scalloped edge worked with sprays of eyelets.',
       caption: 'Tucks and eyelet edging. Rendered; invented garment.',
       fineness: 1.2,

@@ -8,11 +8,11 @@ import { layStandCollar } from '../collars/stand-collar';
 import { loft } from '../renderer/loft';
 import { bell, ease, mix } from '../renderer/numbers';
 import { seededNoise } from '../renderer/noise';
-import { type Scene } from '../renderer/scene';
+import { type Layer, type Scene } from '../renderer/scene';
 import { type Vec3 } from '../renderer/tube';
 import { gathered, laySkirt, tuck } from '../skirts/skirt';
 import { fullSleeve, laySleeves } from '../sleeves/sleeve';
-import { round, sewBand, sewFrill } from '../trims/sewn';
+import { round, sewFrill } from '../trims/sewn';
 import { closeUp, standing, type Garment } from './garment';
 
 const noise = seededNoise(1906);
@@ -81,14 +81,7 @@ const pose: readonly Vec3[] = [
 ];
 
 /** Lace let in: the lawn under it cut away, so that a cream slip shows through. */
-function letIn(
-  scene: Scene,
-  layer: Parameters<typeof sewBand>[1],
-  from: number,
-  to: number,
-  length: number,
-  across: number,
-): void {
+function letIn(scene: Scene, layer: Layer, from: number, to: number, length: number, across: number): void {
   scene.lay({ cloth: slip, across, along: 16, closed: true }, (u, v, p) =>
     layer(u, mix(from, to, v), 0.08, p),
   );

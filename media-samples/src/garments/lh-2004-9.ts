@@ -1,7 +1,6 @@
 import { armholeRim, cutAway, inArmhole, type Armhole } from '../bodices/openings';
 import { dye, type Cloth } from '../cloths/cloth';
 import { jet, lining, silkCrepe } from '../cloths/cloths';
-import { neckline } from '../collars/neckline';
 import { part } from '../motifs/motifs';
 import { loft } from '../renderer/loft';
 import { bell, ease, mix } from '../renderer/numbers';
@@ -31,14 +30,20 @@ const form = loft([
 ]);
 
 const armhole: Armhole = { theta: Math.PI / 2, y: 128.4, wide: 0.52, high: 9.2 };
-const neck = neckline(123.5, 140.2, 120, 1.25);
+/** A soft U before and a deeper one behind; the straps are level on the shoulders. */
+const neck = (theta: number): number => {
+  const c = Math.cos(theta);
+  return c > 0 ? mix(140, 124.5, ease(0.3, 1, c)) : mix(140, 121, ease(0.3, 1, -c));
+};
 const RADIUS = 15;
+
+const nearBand = (y: number): boolean => Math.abs(y - 112) < 4.2 || Math.abs(y - 87.6) < 5.8 || y < 82;
 
 /** Beads in bands: rows of bugles laid in zigzags between lines of round beads. */
 function beadAt(u: number, y: number): 0 | 1 | 2 {
   for (const [middle, half] of [
     [112, 3.6],
-    [86, 5.2],
+    [87.6, 5.2],
     [56.5, 2.6],
   ] as const) {
     const d = y - middle;
@@ -48,6 +53,7 @@ function beadAt(u: number, y: number): 0 | 1 | 2 {
     const lines = part((d - zig * half * 0.62) / 1.15);
     if (Math.abs(d) < half - 0.9 && lines < 0.46 && part(u * 1.6) < 0.86) return 1;
   }
+  if (nearBand(y)) return 0;
   // A scatter between the bands, thicker towards them.
   const cell = 2.6;
   const shift = Math.floor(y / cell) & 1 ? 0.5 : 0;
@@ -157,15 +163,15 @@ export const lh2004n9: Garment = {
       shot: standing(
         24,
         { lookAt: [0, 85], span: 128, aspect: 0.62, reach: 84 },
-        { exposure: 1.15, backdrop: 'wall' },
+        { exposure: 0.98, backdrop: 'wall' },
       ),
-      alt: 'A black sleeveless evening dress of about 1927: a straight tube with zigzag bands of silver and gold beads, a pointed neck, and a handkerchief hem of falling points.',
+      alt: 'A black sleeveless evening dress of about 1927: a straight tube with zigzag bands of silver and gold beads, a low round neck, and a handkerchief hem of falling points.',
       caption: 'Front. Rendered; invented garment.',
     },
     {
       view: 'detail',
       name: 'detail-beads',
-      shot: closeUp(18, { lookAt: [1, 87], span: 20, aspect: 1.33 }, { exposure: 1.15 }),
+      shot: closeUp(18, { lookAt: [1, 87], span: 20, aspect: 1.33 }, { exposure: 0.98 }),
       alt: 'A close view of the hip band: silver bugle beads in zigzags between two lines of gold ones, on black crêpe.',
       caption: 'Beaded band at the hip. Rendered; invented garment.',
       fineness: 1.2,

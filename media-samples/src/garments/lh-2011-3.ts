@@ -11,18 +11,21 @@ const noise = seededNoise(1845);
 /** Silk plush brushed round the crown: its shine follows the brush. */
 const plush = plain({
   colour: (u, v, out) => {
-    const k = 1 + 0.16 * plushNoise.at(u * 0.5, v * 5) + 0.12 * plushNoise.at(u * 1.3, v * 14);
-    out[0] = 0.052 * k;
-    out[1] = 0.051 * k;
-    out[2] = 0.054 * k;
+    const k = 1 + 0.1 * plushNoise.at(u * 0.5, v * 5) + 0.08 * plushNoise.at(u * 1.3, v * 14);
+    out[0] = 0.034 * k;
+    out[1] = 0.033 * k;
+    out[2] = 0.036 * k;
   },
-  gloss: 1.1,
+  gloss: 0.9,
+  openness: 1.3,
   tightness: 7,
   pile: 0.3,
   relief: (u, v, out) => {
-    out[1] += 0.2 * plushNoise.at(u * 0.35, v * 6) + 0.1 * plushNoise.at(u * 1.2, v * 17);
+    out[1] += 0.12 * plushNoise.at(u * 0.35, v * 6) + 0.07 * plushNoise.at(u * 1.2, v * 17);
   },
 });
+/** The brim is smoother and duller than the crown. */
+const felt = { ...plush, gloss: 0.35, tightness: 5, openness: 2.6 };
 const band = ribbon(dye('#3a3839'));
 const leather = lining(dye('#7a4f33'));
 const silk = lining(dye('#c9bda4'));
@@ -91,8 +94,8 @@ export const lh2011n3: Garment = {
   kind: 'hat',
   build(scene) {
     scene.layLayer({ cloth: plush, across: 560, along: 420, closed: true }, crown);
-    scene.layLayer({ cloth: plush, across: 560, along: 120, closed: true }, brim, 0.16);
-    scene.layLayer({ cloth: plush, across: 560, along: 80, closed: true }, brim, -0.16);
+    scene.layLayer({ cloth: felt, across: 560, along: 120, closed: true }, brim, 0.16);
+    scene.layLayer({ cloth: felt, across: 560, along: 80, closed: true }, brim, -0.16);
     // The edge is bound in ribbed ribbon.
     scene.lay({ cloth: band, across: 560, along: 16, closed: true }, (u, v, p) => {
       const q = v * 2 * Math.PI;

@@ -18,7 +18,8 @@ const sole = lining(dye('#8a6a48'));
 const LENGTH = 24;
 /** Half the width of the sole from the back of the heel (0) to the pointed toe (1), cm. */
 const halfWidth = curve([
-  [0, 0.5],
+  [0, 0.02],
+  [0.008, 0.8],
   [0.03, 1.7],
   [0.1, 2.5],
   [0.25, 2.5],

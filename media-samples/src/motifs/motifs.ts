@@ -124,10 +124,12 @@ export const wovenSprig =
   };
 
 /** White embroidery on white: the stitches show by their shadow. `weight` 0–1 where there is a stitch. */
-export const whiteworkSprig = (u: number, v: number, repeat = 7): number => {
+export const whiteworkSprig = (u: number, v: number, until: number, repeat = 7): number => {
   const column = Math.floor(u / repeat);
   const x = u - (column + 0.5) * repeat;
   const y = part((v + (column & 1 ? repeat / 2 : 0)) / repeat) * repeat - repeat / 2;
+  // A sprig that would run into the border is not begun.
+  if (v - y + 2.6 > until) return 0;
   const r = Math.hypot(x, y);
   if (r < 0.2) return 1;
   for (let i = 0; i < 5; i++) {

@@ -96,7 +96,7 @@ function faceCamera(normal: Float32Array, sign: number, sinPitch: number, cosPit
 export function see(sheet: Sheet, yaw: number, pitch: number): Seen {
   const place = turned(sheet, yaw);
   const normal = crossNormals(sheet, place);
-  faceCamera(normal, outwardness(place, normal), Math.sin(pitch), Math.cos(pitch));
+  faceCamera(normal, sheet.facing || outwardness(place, normal), Math.sin(pitch), Math.cos(pitch));
   const points = place.length / 3;
   return { sheet, place, normal, key: new Float32Array(points), fill: new Float32Array(points) };
 }

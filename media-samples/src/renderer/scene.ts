@@ -28,6 +28,8 @@ export interface Sheet {
   along: number;
   closed: boolean;
   casts: boolean;
+  /** Which side of the grid is the cloth's face: 1, -1, or 0 where it must be found from the shape. */
+  facing: -1 | 0 | 1;
   place: Float32Array;
   onCloth: Float32Array;
   cut: Uint8Array;
@@ -51,7 +53,7 @@ export class Scene {
   constructor(readonly fineness = 1) {}
 
   /** Lays a sheet; `at` gives the place of each point and returns false where the cloth is cut away. */
-  lay(laying: Laying, at: (u: number, v: number, p: Point) => boolean | void): void {
+  lay(laying: Laying, at: (u: number, v: number, p: Point) => boolean | void): Sheet {
     const across = Math.max(4, Math.round(laying.across * (laying.across > 60 ? this.fineness : 1)));
     const along = Math.max(3, Math.round(laying.along * (laying.along > 60 ? this.fineness : 1)));
     const closed = laying.closed ?? false;
@@ -68,27 +70,62 @@ export class Scene {
         if (kept === false) cut[k] = 1;
       }
     }
-    this.sheets.push({
+    const sheet: Sheet = {
       cloth: laying.cloth,
       across,
       along,
       closed,
       casts: laying.casts ?? true,
+      facing: 0,
       place,
       onCloth,
       cut,
-    });
+    };
+    this.sheets.push(sheet);
+    return sheet;
   }
 
-  /** Lays a whole layer. */
+  /** Lays a whole layer. A layer knows which way its face looks, so the sheet is told. */
   layLayer(laying: Laying, layer: Layer, lift = 0): void {
-    this.lay(laying, (u, v, p) => layer(u, v, lift, p));
+    const sheet = this.lay(laying, (u, v, p) => layer(u, v, lift, p));
+    sheet.facing = facingOf(sheet, layer, lift);
   }
 
   /** Lays a layer that is open down its middle (u 0.5) as two halves, so that no cloth is drawn across the opening. */
   layHalves(laying: Laying, layer: Layer, lift = 0): void {
     const half = { ...laying, across: Math.round(laying.across / 2) };
-    this.lay(half, (u, v, p) => layer(u * 0.49999, v, lift, p));
-    this.lay(half, (u, v, p) => layer(0.50001 + u * 0.49999, v, lift, p));
+    this.layLayer(half, (u, v, off, p) => layer(u * 0.49999, v, off, p), lift);
+    this.layLayer(half, (u, v, off, p) => layer(0.50001 + u * 0.49999, v, off, p), lift);
   }
+}
+
+/** Compares the grid's own turn with the layer's normals at a few dozen places and takes the majority. */
+function facingOf(sheet: Sheet, layer: Layer, lift: number): -1 | 1 {
+  const { across, along, closed, place } = sheet;
+  const p = newPoint();
+  let sum = 0;
+  for (let n = 0; n < 64; n++) {
+    const i = Math.floor((((n * 0.618) % 1) * 0.96 + 0.02) * (across - 1));
+    const j = Math.floor(((n + 0.5) / 64) * (along - 1));
+    const k = (j * across + i) * 3;
+    const right = k + 3;
+    const down = k + across * 3;
+    layer(closed ? i / across : i / (across - 1), j / (along - 1), lift, p);
+    const a = [
+      place[right]! - place[k]!,
+      place[right + 1]! - place[k + 1]!,
+      place[right + 2]! - place[k + 2]!,
+    ] as const;
+    const b = [
+      place[down]! - place[k]!,
+      place[down + 1]! - place[k + 1]!,
+      place[down + 2]! - place[k + 2]!,
+    ] as const;
+    const turn =
+      (a[1] * b[2] - a[2] * b[1]) * p.nx +
+      (a[2] * b[0] - a[0] * b[2]) * p.ny +
+      (a[0] * b[1] - a[1] * b[0]) * p.nz;
+    sum += Math.sign(turn);
+  }
+  return sum < 0 ? -1 : 1;
 }

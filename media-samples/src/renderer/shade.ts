@@ -26,7 +26,7 @@ export function standpoint(
 const KEY_TINT = [1.04, 1, 0.95] as const;
 const FILL_TINT = [0.98, 0.99, 1.02] as const;
 /** Least fill: the inside of a garment is never black in a studio. */
-const LEAST_FILL = 0.16;
+const LEAST_FILL = 0.2;
 
 const colour: Rgb = [0, 0, 0];
 const relief: [number, number] = [0, 0];

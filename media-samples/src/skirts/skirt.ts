@@ -44,8 +44,9 @@ export function laySkirt(
 ): Layer {
   const layer = skirtLayer(cut);
   scene.layLayer({ cloth, across, along, closed: true }, layer);
-  scene.lay({ cloth: inside, across: 500, along: 24, closed: true }, (u, v, p) =>
-    layer(u, mix(0.9, 0.996, v), -0.5, p),
+  // As many points round as the skirt itself has: with fewer it would cut through the folds.
+  scene.lay({ cloth: inside, across, along: 16, closed: true }, (u, v, p) =>
+    layer(u, mix(0.93, 0.996, v), -0.6, p),
   );
   return layer;
 }

@@ -58,8 +58,8 @@ export function laySleeves(
 export const POSES = {
   /** Hanging, the forearm a little forward. */
   hanging: [
-    [8, 135, -1.8],
-    [15.6, 133.2, -2],
+    [13.4, 133.2, -1.9],
+    [16.2, 132, -2],
     [19.5, 126.5, -2.5],
     [21.6, 119, -3.1],
     [22.6, 110, -2],
@@ -68,8 +68,8 @@ export const POSES = {
   ],
   /** Bent across the front. */
   bent: [
-    [8, 135, -1.8],
-    [15.6, 133.2, -2],
+    [13.4, 133.2, -1.9],
+    [16.2, 132, -2],
     [19.8, 126.5, -2.6],
     [22.2, 119, -3],
     [23.2, 111, -1],
@@ -78,8 +78,8 @@ export const POSES = {
   ],
   /** Held off a great sleeve or a wide skirt. */
   wide: [
-    [9, 133.5, -1.4],
-    [16.2, 130.5, -1.6],
+    [12.6, 132, -1.4],
+    [16.6, 130, -1.6],
     [22.4, 124, -1.8],
     [26.4, 116, -1],
     [28.2, 109, 1.2],
@@ -87,21 +87,12 @@ export const POSES = {
     [25, 96.6, 9.5],
     [21.6, 92.6, 13.4],
   ],
-  /** To the elbow only. */
-  elbow: [
-    [8, 135, -1.8],
-    [15.4, 133.4, -2],
-    [19, 127.5, -2.4],
-    [21.2, 121, -2.8],
-    [22.8, 114, -2.2],
-    [23.4, 108.5, -0.6],
-  ],
   /** Just over the shoulder. */
   cap: [
-    [13.2, 134.6, -1.8],
-    [15, 133.6, -1.9],
-    [17.4, 131, -2],
-    [19.4, 126.8, -2.2],
+    [16.8, 132.2, -1.9],
+    [17.4, 131.8, -2],
+    [18.4, 129.8, -2],
+    [19.6, 126.6, -2.2],
     [20.2, 122.6, -2.2],
   ],
 } as const satisfies Record<string, readonly Vec3[]>;
@@ -115,7 +106,7 @@ export function closeSleeve(noise: Noise, elbow = 0.57): SleeveCut['folds'] {
       (0.45 + 0.55 * Math.cos(angle)) +
     0.25 * noise.layers(Math.cos(angle) * 2 + 5 * side + 20, t * 9 + Math.sin(angle), 3) +
     0.05 * bell(t, 0.06, 0.07) * Math.sin(angle * 14) +
-    0.16 * bell(t, 0.8, 0.05) * Math.sin(t * 150 + angle);
+    0.1 * bell(t, 0.8, 0.05) * Math.sin(t * 150 + angle);
 }
 
 export interface Fullness {
