@@ -1,16 +1,18 @@
 import { existsSync } from 'node:fs';
-import { readdir, readFile, rm, writeFile } from 'node:fs/promises';
+import { readdir, readFile, rm, utimes, writeFile } from 'node:fs/promises';
 import { join } from 'node:path';
 import type { Image } from '@ellwand/shared/records/image';
 import sharp from 'sharp';
 import { v7 as uuidv7 } from 'uuid';
 import { type Agent, type House, openHouse } from '../../test/harness/house';
+import { Publisher } from '../../test/catalogue/published-documents';
 import * as pictures from '../../test/pictures/test-pictures';
 import { Work } from '../common/work';
 import { GarmentRow } from '../garments/garment.entity';
 import { FormsMaker } from './forms/forms-maker';
 import { ImageRow } from './image.entity';
 import { ImageIntake } from './intake/image-intake';
+import { PictureStore } from './store/picture-store';
 
 describe('pictures of a garment', () => {
   let house: House;
@@ -31,7 +33,7 @@ describe('pictures of a garment', () => {
   afterEach(async () => {
     await made();
     await house.empty();
-    await rm(join(house.environment.dataFolder, 'pictures'), { recursive: true });
+    await rm(join(house.environment.dataFolder, 'pictures'), { recursive: true, force: true });
   });
 
   const made = () => house.app.get(FormsMaker).drain();
@@ -265,6 +267,51 @@ describe('pictures of a garment', () => {
       'refused',
       expect.stringContaining('Send it again'),
     ]);
+  });
+
+  it('shows the public a picture of a published version, and nothing of it once it is withdrawn', async () => {
+    const { id, widthPx, heightPx } = (await send(await pictures.honestJpeg(700, 900))).body as Image;
+    await made();
+    const image = {
+      id,
+      view: 'front',
+      alt: 'Front',
+      caption: '',
+      credit: '',
+      widthPx: widthPx ?? 0,
+      heightPx: heightPx ?? 0,
+      widths: [320, 640],
+    } as const;
+    const publisher = new Publisher(house);
+    await publisher.publish({ images: [{ ...image, widths: [...image.widths] }] });
+    const visitor = house.visitor();
+    const shown = await visitor.get(`/media/${id}/640.avif`).buffer(true);
+    expect(shown.status).toBe(200);
+    expect(shown.headers).toMatchObject({
+      'cache-control': 'public, no-cache',
+      'content-type': 'image/avif',
+      'x-content-type-options': 'nosniff',
+      'content-length': String((shown.body as Buffer).length),
+    });
+    const again = () =>
+      visitor.get(`/media/${id}/640.avif`).set('If-None-Match', String(shown.headers['etag']));
+    expect((await again()).status).toBe(304);
+    expect((await visitor.head(`/media/${id}/640.avif`)).headers['content-length']).toBe(
+      shown.headers['content-length'],
+    );
+    expect((await visitor.get(`/media/${id}/1280.avif`)).status).toBe(404);
+    await publisher.withdraw('lh-1966-30');
+    expect((await again()).status).toBe(410);
+  });
+
+  it('sweeps up what a process that died has left half received', async () => {
+    const store = house.app.get(PictureStore);
+    const [old, fresh] = [await store.incoming('old.part'), await store.incoming('fresh.part')];
+    for (const path of [old, fresh]) await writeFile(path, 'half a picture');
+    const yesterday = new Date(Date.now() - 86_400_000);
+    await utimes(old, yesterday, yesterday);
+    await store.sweepIncoming();
+    expect([existsSync(old), existsSync(fresh)]).toEqual([false, true]);
   });
 
   it('takes a file from a script, and leaves that file where it lies', async () => {

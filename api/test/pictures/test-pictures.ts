@@ -1,4 +1,4 @@
-import { deflateSync, crc32 } from 'node:zlib';
+import { constants, crc32, deflateRawSync, deflateSync } from 'node:zlib';
 import sharp from 'sharp';
 
 /** Pictures for specs, honest and hostile, made here so that no binary lies in the repository. */
@@ -64,13 +64,29 @@ export function pngBomb(width: number, height: number): Buffer {
   return pngOf([pngHeader(width, height), ['IDAT', blackRows(width, height)], ['IEND', Buffer.alloc(0)]]);
 }
 
+/**
+ * Deflated rows of black. A block of rows is compressed once and repeated (each ends in a full flush, so that
+ * they may be joined), because all the rows of a bomb would fill the memory here first.
+ */
 export function blackRows(width: number, height: number): Buffer {
-  const row = Buffer.alloc(1 + width * 3);
-  const rows = Buffer.alloc(row.length * Math.min(height, 64));
-  return deflateSync(
-    height <= 64 ? rows.subarray(0, row.length * height) : Buffer.alloc(row.length * height),
-    { level: 9 },
-  );
+  const rowsInBlock = height % 64 === 0 ? 64 : height % 50 === 0 ? 50 : 1;
+  const rowBytes = 1 + width * 3;
+  const block = deflateRawSync(Buffer.alloc(rowBytes * rowsInBlock), {
+    level: 9,
+    finishFlush: constants.Z_FULL_FLUSH,
+  });
+  const header = Buffer.from([0x78, 0xda]);
+  const lastBlock = Buffer.from([0x03, 0x00]);
+  const blocks = Array.from({ length: height / rowsInBlock }, () => block);
+  return Buffer.concat([header, ...blocks, lastBlock, adlerOfZeros(rowBytes * height)]);
+}
+
+/** RFC 1950: of nothing but zero bytes the first sum stays 1, so that the second counts them. */
+function adlerOfZeros(count: number): Buffer {
+  const sum = Buffer.alloc(4);
+  sum.writeUInt16BE(count % 65_521, 0);
+  sum.writeUInt16BE(1, 2);
+  return sum;
 }
 
 /** A small picture with a text that opens into a gigabyte, and a colour profile that does. */

@@ -107,6 +107,10 @@ describe('the decoding process', () => {
     expect(await inspect(pictures.pngTextBomb())).toEqual({ widthPx: 400, heightPx: 400 });
   });
 
+  it('opens a picture of just under 100 megapixels within its time and memory', async () => {
+    expect(await inspect(pictures.pngBomb(9_984, 9_984))).toEqual({ widthPx: 9_984, heightPx: 9_984 });
+  });
+
   it('ends a process that wants more memory than it may have, and lives on', async () => {
     // All coefficients of a progressive picture are held at once: 99 megapixels × 3 channels × 2 bytes.
     const greedy = await pictures

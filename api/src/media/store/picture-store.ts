@@ -1,6 +1,6 @@
 import { createHash } from 'node:crypto';
 import { createReadStream, existsSync } from 'node:fs';
-import { copyFile, mkdir, open, readFile, rename, rm, stat, writeFile } from 'node:fs/promises';
+import { mkdir, open, readdir, readFile, rename, rm, stat, writeFile } from 'node:fs/promises';
 import { dirname, join } from 'node:path';
 import { Inject, Injectable } from '@nestjs/common';
 import { ENVIRONMENT } from '../../common/environment.token';
@@ -12,6 +12,9 @@ export interface StoredFile {
   readonly bytes: number;
   readonly sha256: string;
 }
+
+/** No upload and no making of a form takes so long. */
+const leftoverMs = 60 * 60 * 1_000;
 
 /**
  * Where pictures lie: files under the data folder, named by keys such as `forms/3f/<id>/640.avif`. What `put`
@@ -26,6 +29,20 @@ export class PictureStore {
 
   constructor(@Inject(ENVIRONMENT) environment: Pick<Environment, 'dataFolder'>) {
     this.root = join(environment.dataFolder, 'pictures');
+  }
+
+  async onApplicationBootstrap(): Promise<void> {
+    await this.sweepIncoming();
+  }
+
+  /** Removes what dead processes left half received or half made. Other living ones may still be at work there. */
+  async sweepIncoming(): Promise<void> {
+    const folder = dirname(await this.incoming('any'));
+    for (const name of await readdir(folder)) {
+      const path = join(folder, name);
+      const { mtimeMs } = await stat(path).catch(() => ({ mtimeMs: Infinity }));
+      if (Date.now() - mtimeMs > leftoverMs) await rm(path, { force: true });
+    }
   }
 
   /** A name in the incoming area, for a file that is being received or made. Nothing there is ever served. */
@@ -63,15 +80,6 @@ export class PictureStore {
     const found = { path, bytes: (await stat(path)).size, sha256 };
     this.compared.set(key, found);
     return found;
-  }
-
-  /** A working copy in the incoming area; null where there is no such file. */
-  async copyToIncoming(key: string, name: string): Promise<string | null> {
-    const found = await this.find(key);
-    if (!found) return null;
-    const path = await this.incoming(name);
-    await copyFile(found.path, path);
-    return path;
   }
 
   async remove(key: string): Promise<void> {
