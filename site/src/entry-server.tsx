@@ -15,6 +15,7 @@ import { unitScript } from './components/units/unit-script';
 import { provideDrawings } from './components/diagram/drawings';
 import MeasuringSheet from './components/diagram/measuring-sheet';
 import OutlineShapes from './components/diagram/outline-shapes';
+import { knownOrigin, UNKNOWN_ORIGIN } from './lib/origin';
 import { isUnit } from './lib/range-boxes';
 
 provideDrawings({ Sheet: MeasuringSheet, Outline: OutlineShapes });
@@ -38,8 +39,6 @@ export const inlineScriptHashes: string[] = [
   `sha256-${createHash('sha256').update(unitScript).digest('base64')}`,
 ];
 
-const UNKNOWN_ORIGIN = 'http://catalogue.invalid';
-
 /** One handler for each catalogue: making the routes costs more than a page. */
 const handlers = new WeakMap<SiteCatalogue, StaticHandler>();
 function handlerFor(catalogue: SiteCatalogue): StaticHandler {
@@ -60,7 +59,7 @@ export async function render(
   if (found instanceof Response) {
     return { redirect: found.headers.get('Location') ?? '/', status: found.status };
   }
-  const origin = url.origin === UNKNOWN_ORIGIN ? '' : url.origin;
+  const origin = knownOrigin(url);
   const { head, status } = pageSaid(found, url);
   const router = createStaticRouter(handler.dataRoutes, found);
   const unit = url.searchParams.get('unit');

@@ -36,13 +36,13 @@ export function siteRoutes(catalogue: SiteCatalogue): RouteObject[] {
             {
               id: 'garment',
               path: 'g/:number',
-              loader: ({ params }: LoaderFunctionArgs) => garmentLoader(catalogue, params),
+              loader: ({ params, request }: LoaderFunctionArgs) => garmentLoader(catalogue, params, request),
               lazy: () => import('../features/garment/garment-route'),
             },
             {
               id: 'garment-version',
               path: 'g/:number/v/:version',
-              loader: ({ params }: LoaderFunctionArgs) => garmentLoader(catalogue, params),
+              loader: ({ params, request }: LoaderFunctionArgs) => garmentLoader(catalogue, params, request),
               lazy: () => import('../features/garment/garment-route'),
             },
             {

@@ -3,22 +3,27 @@ import { SiteLink } from '../../components/ui/site-link';
 import { paths } from '../../config/paths';
 import { dayText } from '../../lib/words';
 
+interface CitationProps {
+  readonly garment: PublishedGarment;
+  readonly origin: string;
+}
+
 /** How to cite the page, its permanent address, whose it is and under which terms. */
-export function Citation({ garment }: { readonly garment: PublishedGarment }) {
+export function Citation({ garment, origin }: CitationProps) {
   const { museum, ownNumber, title, date, number, version, publishedAt } = garment;
   return (
     <section>
       <h2>Cite this page</h2>
       <p>
         {museum}, {ownNumber}: {title}, {date.display}. Version {version}, {dayText(publishedAt)}.{' '}
-        {paths.version(number, version)}
+        {origin + paths.version(number, version)}
       </p>
       <dl className="facts">
         <div>
           <dt>Permanent address</dt>
           <dd>
             <SiteLink className="link" to={paths.garment(number)}>
-              {paths.garment(number)}
+              {origin + paths.garment(number)}
             </SiteLink>
           </dd>
         </div>

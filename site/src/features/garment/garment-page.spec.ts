@@ -77,6 +77,14 @@ describe('a garment’s page', () => {
     }
   });
 
+  it('says how to cite it by an address that can be followed from paper', async () => {
+    const { text } = await askPage('/g/lh-1966-30');
+    expect(text('.garment-end')).toContain(
+      'Larkmoor House Museum of Dress, LH.1966.30: Visiting dress in teal silk and velvet, about 1885. ' +
+        'Version 3, 14 March 2026. https://larkmoor.example/g/lh-1966-30/v/3',
+    );
+  });
+
   it('names the version to cite and the licence in its Link header', async () => {
     const { headers } = await askPage('/g/lh-1966-30');
     expect(headers.Link).toContain('<https://larkmoor.example/g/lh-1966-30/v/3>; rel="cite-as"');
@@ -104,8 +112,8 @@ describe('a garment’s page', () => {
     expect(document.querySelector('img[src=x]')).toBeNull();
     expect(text('h1')).toBe(hostile);
     const data = JSON.parse(text('#hydration')) as {
-      loaderData: { garment: { garment: { title: string } } };
+      loaderData: { garment: { found: { garment: { title: string } } } };
     };
-    expect(data.loaderData.garment.garment.title).toBe(hostile);
+    expect(data.loaderData.garment.found.garment.title).toBe(hostile);
   });
 });

@@ -1,6 +1,6 @@
 import { type PublishedGarment } from '@ellwand/shared/records/published-garment';
-import { type GarmentFound } from '@ellwand/shared/records/site-catalogue';
 import { type PageHead, pageHandle } from '../../app/page-handle';
+import { type GarmentPageData } from './garment-loader';
 import { paths } from '../../config/paths';
 import { kindName } from '../../lib/words';
 
@@ -8,14 +8,14 @@ export { GarmentPage as Component } from './garment-page';
 
 const statuses = { garment: 200, withdrawn: 410, nothing: 404 } as const;
 
-export const handle = pageHandle<GarmentFound>({
-  head: (found, { url }) => {
+export const handle = pageHandle<GarmentPageData>({
+  head: ({ found }, { url }) => {
     if (found.found === 'garment') return garmentHead(found.garment, url.pathname);
     const title =
       found.found === 'withdrawn' ? 'This garment is no longer shown' : 'Nothing is kept at this address';
     return { title, description: `${title}.`, canonicalPath: url.pathname, unlisted: true };
   },
-  status: ({ found }) => statuses[found],
+  status: ({ found }) => statuses[found.found],
 });
 
 function garmentHead(garment: PublishedGarment, pathname: string): PageHead {

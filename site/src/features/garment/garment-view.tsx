@@ -8,8 +8,13 @@ import { PrintCheck } from './print-check';
 import { Prose } from './prose';
 import { Versions } from './versions';
 
+interface GarmentViewProps {
+  readonly garment: PublishedGarment;
+  readonly origin: string;
+}
+
 /** The garment's page: what it is, its parts with diagram and measurements, pictures, condition, how to cite. */
-export function GarmentView({ garment }: { readonly garment: PublishedGarment }) {
+export function GarmentView({ garment, origin }: GarmentViewProps) {
   return (
     <article className="wide garment">
       {garment.state === 'current' ? null : <OldVersion garment={garment} />}
@@ -37,7 +42,7 @@ export function GarmentView({ garment }: { readonly garment: PublishedGarment })
         <Prose title="References" text={garment.references} />
       </div>
       <div className="garment-end">
-        <Citation garment={garment} />
+        <Citation garment={garment} origin={origin} />
         <Versions garment={garment} />
       </div>
       <PrintCheck />

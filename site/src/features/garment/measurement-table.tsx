@@ -114,8 +114,7 @@ function HowMeasured({ measurement }: { readonly measurement: PublishedMeasureme
       )}
       {tapeLengths && (
         <>
-          {tapeLengths.count} × <Length mm={tapeLengths.tapeMm} bare /> + <Length mm={tapeLengths.restMm} />
-          ;{' '}
+          {tapeLengths.count} × {tapeLengths.tapeMm} mm + {tapeLengths.restMm} mm;{' '}
         </>
       )}
       {roundsText(measurement)}
