@@ -263,20 +263,10 @@ async function findByWaist(page: Page, url: string): Promise<void> {
   await page.goto(`${url}/`);
   await expectAccessible(page, 'the public home');
   await page.goto(`${url}/search`);
-  await page.getByText('Another measurement').click();
-  await page.getByLabel(/^Measuring point|^Which measurement|^Measurement/).selectOption('waist');
-  await page
-    .getByLabel(/^From, .*\(mm\)/)
-    .last()
-    .fill('560');
-  await page
-    .getByLabel(/^To, .*\(mm\)/)
-    .last()
-    .fill('620');
-  await page
-    .getByRole('button', { name: /^Show|^Search|^Apply/ })
-    .last()
-    .click();
+  const waist = page.getByRole('group', { name: 'Waist', exact: true });
+  await waist.getByLabel(/From/).fill('560');
+  await waist.getByLabel(/To \(mm/).fill('620');
+  await page.getByRole('button', { name: 'Show these measurements' }).click();
   await expect(page).toHaveURL(/measure=waist(%3A|:)560\.\.620/);
   await expect(page.getByRole('heading', { level: 1 })).toContainText('1');
   await expectAccessible(page, 'the search by waist');
@@ -288,7 +278,7 @@ async function findByWaist(page: Page, url: string): Promise<void> {
 async function readInInches(page: Page): Promise<void> {
   const waist = page.getByRole('row').filter({ hasText: 'Waistband' });
   await expect(waist).toContainText('612');
-  await page.getByRole('banner').getByText('in', { exact: true }).click();
+  await page.getByRole('link', { name: /inches/ }).click();
   // 612 mm = 24.094 in: 24 1/8 at eighths.
   await expect(waist.getByText('24 1/8', { exact: true }).first()).toBeVisible();
   await page.emulateMedia({ media: 'print' });

@@ -1,6 +1,6 @@
 import type { NewReading } from '@ellwand/shared/records/sheet';
 import fc from 'fast-check';
-import { beforeEach, describe, expect, it } from 'vitest';
+import { beforeEach, describe, expect, it, vi } from 'vitest';
 import { NoAnswer, ProblemError } from '../../../lib/problem-error.js';
 import { newId } from '../../../lib/ids.js';
 import type { ReadingResult } from '../api/send-readings.js';
@@ -112,7 +112,7 @@ describe('the outbox', () => {
   it('is on the shelf before anything else happens', () => {
     const far = new FarSide();
     far.weather = ['lost-request'];
-    const reading = keyed('hem', '742', { tapeCount: 3 } as Partial<NewReading>);
+    const reading = keyed('hem', '742', { tapeCount: 3 });
     open(far).add(reading);
     expect(shelf().read()).toEqual([{ reading, state: 'waiting' }]);
   });
@@ -176,17 +176,13 @@ describe('the outbox', () => {
   });
 
   it('goes on in memory where the device keeps nothing', () => {
-    const setItem = Storage.prototype.setItem;
-    Storage.prototype.setItem = () => {
+    const refusing = vi.spyOn(Storage.prototype, 'setItem').mockImplementation(() => {
       throw new DOMException('full', 'QuotaExceededError');
-    };
-    try {
-      const own = shelf();
-      own.write([{ reading: keyed('waist', '612'), state: 'waiting' }]);
-      expect(own.read()).toHaveLength(1);
-    } finally {
-      Storage.prototype.setItem = setItem;
-    }
+    });
+    const own = shelf();
+    own.write([{ reading: keyed('waist', '612'), state: 'waiting' }]);
+    expect(own.read()).toHaveLength(1);
+    refusing.mockRestore();
   });
 });
 
