@@ -25,7 +25,7 @@ import { FormParam, ImageChangeDto, ImageDto, ImageFieldsDto, ImagesDto } from '
 import { toImage } from './image-view';
 import { ImagesService } from './images.service';
 import { ImageIntake } from './intake/image-intake';
-import { UploadInterceptor } from './intake/upload.interceptor';
+import { type Upload, UploadInterceptor } from './intake/upload.interceptor';
 import { sendForm } from './send-form';
 
 @ApiTags('Pictures')
@@ -52,7 +52,7 @@ export class ImagesController {
   @ZodResponse({ status: 201, type: ImageDto })
   async add(
     @Param() { id }: IdParam,
-    @UploadedFile() file: Express.Multer.File | undefined,
+    @UploadedFile() file: Upload | undefined,
     @Body() fields: ImageFieldsDto,
     @CurrentActor() actor: Actor,
   ) {

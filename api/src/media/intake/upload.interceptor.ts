@@ -1,10 +1,15 @@
 import { rm } from 'node:fs/promises';
-import { basename, dirname } from 'node:path';
-import { type CallHandler, type ExecutionContext, Injectable, type NestInterceptor } from '@nestjs/common';
-import type { Request, Response } from 'express';
-import multer, { diskStorage, MulterError } from 'multer';
+import {
+  BadRequestException,
+  type CallHandler,
+  type ExecutionContext,
+  Injectable,
+  type NestInterceptor,
+  PayloadTooLargeException,
+} from '@nestjs/common';
+import { FileInterceptor } from '@nestjs/platform-express';
+import type { Request } from 'express';
 import { finalize, type Observable } from 'rxjs';
-import { v7 as uuidv7 } from 'uuid';
 import { Refusal } from '../../common/refusal';
 import { PictureStore } from '../store/picture-store';
 
@@ -20,50 +25,46 @@ const limits = {
   parts: 12,
 };
 
-const tooLarge = () => new Refusal(413, 'image.too-large', 'A picture may have at most 60 MB.');
+/** A received file: where it lies, and what its sender called it. */
+export interface Upload {
+  readonly path: string;
+  readonly originalname: string;
+}
 
 /**
- * Receives one picture in the multipart field `file`, streamed to the incoming area under a name made here.
+ * Receives one picture in the multipart field `file`, streamed to the incoming area under a random name.
  * Whatever becomes of the request, the received file is gone at its end unless the store has taken it.
  */
 @Injectable()
 export class UploadInterceptor implements NestInterceptor {
-  constructor(private readonly store: PictureStore) {}
+  private readonly receiver: NestInterceptor;
 
-  async intercept(context: ExecutionContext, next: CallHandler): Promise<Observable<unknown>> {
-    const request = context.switchToHttp().getRequest<Request>();
-    if (Number(request.header('content-length') ?? 0) > mostBytes + besideBytes) throw tooLarge();
-    await this.receive(request, context.switchToHttp().getResponse<Response>());
-    const path = request.file?.path;
-    return next.handle().pipe(finalize(() => void (path && rm(path, { force: true }))));
+  constructor(private readonly store: PictureStore) {
+    const Receiver = FileInterceptor('file', { dest: store.incomingFolder, limits, defParamCharset: 'utf8' });
+    this.receiver = new Receiver();
   }
 
-  private async receive(request: Request, response: Response): Promise<void> {
-    const target = await this.store.incoming(`${uuidv7()}.part`);
-    const storage = diskStorage({
-      destination: dirname(target),
-      filename: (_request, _file, done) => done(null, basename(target)),
-    });
-    const receive = multer({ storage, limits, defParamCharset: 'utf8' }).single('file');
+  async intercept(context: ExecutionContext, next: CallHandler): Promise<Observable<unknown>> {
+    const request = context.switchToHttp().getRequest<Request & { readonly file?: Upload }>();
+    // Said before the first byte of the picture is read.
+    if (Number(request.header('content-length') ?? 0) > mostBytes + besideBytes) throw tooLarge();
+    await this.store.incoming('any');
+    const answer = await this.receive(context, next);
+    const path = request.file?.path;
+    return answer.pipe(finalize(() => void (path && rm(path, { force: true }))));
+  }
+
+  private async receive(context: ExecutionContext, next: CallHandler): Promise<Observable<unknown>> {
     try {
-      await new Promise<void>((resolve, reject) => {
-        receive(request, response, (fault: unknown) => (fault ? reject(asError(fault)) : resolve()));
-      });
+      return await this.receiver.intercept(context, next);
     } catch (fault) {
-      await rm(target, { force: true });
-      throw fault;
+      if (fault instanceof PayloadTooLargeException) throw tooLarge();
+      if (!(fault instanceof BadRequestException)) throw fault;
+      throw new Refusal(400, 'image.upload', 'The upload broke off or could not be read. Send it again.');
     }
   }
 }
 
-function asError(fault: unknown): Error {
-  if (fault instanceof MulterError) {
-    if (fault.code === 'LIMIT_FILE_SIZE') return tooLarge();
-    return new Refusal(400, 'image.upload', `The upload could not be read: ${fault.message.toLowerCase()}.`);
-  }
-  // Busboy's own words for a body that is cut short or has no boundary.
-  if (fault instanceof Error && /multipart|boundary|unexpected end|malformed|aborted/i.test(fault.message)) {
-    return new Refusal(400, 'image.upload', 'The upload broke off or could not be read. Send it again.');
-  }
-  return fault instanceof Error ? fault : new Error(String(fault));
+function tooLarge(): Refusal {
+  return new Refusal(413, 'image.too-large', 'A picture may have at most 60 MB.');
 }

@@ -37,19 +37,22 @@ export class PictureStore {
 
   /** Removes what dead processes left half received or half made. Other living ones may still be at work there. */
   async sweepIncoming(): Promise<void> {
-    const folder = dirname(await this.incoming('any'));
-    for (const name of await readdir(folder)) {
-      const path = join(folder, name);
+    for (const name of await readdir(this.incomingFolder).catch(() => [])) {
+      const path = await this.incoming(name);
       const { mtimeMs } = await stat(path).catch(() => ({ mtimeMs: Infinity }));
       if (Date.now() - mtimeMs > leftoverMs) await rm(path, { force: true });
     }
   }
 
-  /** A name in the incoming area, for a file that is being received or made. Nothing there is ever served. */
+  /** Where files are received and made. Nothing there is ever served. */
+  get incomingFolder(): string {
+    return join(this.root, 'incoming');
+  }
+
+  /** A name in the incoming area, which is made if it is not there. */
   async incoming(name: string): Promise<string> {
-    const folder = join(this.root, 'incoming');
-    await mkdir(folder, { recursive: true, mode: 0o700 });
-    return join(folder, name);
+    await mkdir(this.incomingFolder, { recursive: true, mode: 0o700 });
+    return join(this.incomingFolder, name);
   }
 
   /** Takes a file from the incoming area (by moving it) into the store. */
