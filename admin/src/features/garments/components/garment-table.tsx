@@ -62,7 +62,7 @@ export function GarmentTable({
 function GarmentRow({ garment, height }: { readonly garment: GarmentSummary; readonly height: RowHeight }) {
   return (
     <tr
-      className={`relative border-b border-hair hover:bg-paper max-md:grid max-md:grid-cols-[4rem_minmax(0,1fr)] max-md:gap-x-2 max-md:py-2 ${heights[height]} max-md:h-auto`}
+      className={`relative border-b border-hair hover:bg-paper max-md:grid max-md:grid-cols-[4.5rem_minmax(0,1fr)] max-md:gap-x-2 max-md:py-2 ${heights[height]} max-md:h-auto`}
     >
       <td className="px-3 max-md:row-span-4 max-md:px-2">
         <Thumbnail garment={garment} className={`${thumbs[height]} max-md:h-20 max-md:w-14`} />

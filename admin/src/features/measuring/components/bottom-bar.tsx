@@ -20,7 +20,7 @@ export function BottomBar({
     <div
       role="region"
       aria-label="Measuring"
-      className="sticky bottom-0 z-10 flex flex-wrap items-end gap-3 border-t border-hair bg-sheet px-4 py-2 max-sm:gap-2 max-sm:px-2"
+      className="z-10 flex shrink-0 flex-wrap items-end gap-3 border-t border-hair bg-sheet px-4 py-2 max-sm:gap-2 max-sm:px-2"
     >
       <Button
         height="table"
@@ -85,7 +85,7 @@ function LockedBar({ desk }: { readonly desk: SheetDesk }) {
     <div
       role="region"
       aria-label="Measuring"
-      className="sticky bottom-0 flex flex-wrap items-end gap-4 border-t border-hair bg-sheet px-4 py-2"
+      className="flex shrink-0 flex-wrap items-end gap-4 border-t border-hair bg-sheet px-4 py-2"
     >
       <div className="grow">
         <TapeProgress done={desk.done} wanted={desk.points.length} />

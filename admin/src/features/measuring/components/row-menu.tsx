@@ -12,7 +12,7 @@ export function RowMenu({ desk, row }: { readonly desk: SheetDesk; readonly row:
   const apart = spreadOf(desk.rows, row.point.id);
   return (
     <>
-      <Menu>
+      <Menu as="div" className="relative">
         <MenuButton
           aria-label={`More for ${rowLabel(row)}`}
           className="grid size-12 place-items-center rounded-sm border border-rule bg-sheet text-ink hover:bg-well"
@@ -23,9 +23,10 @@ export function RowMenu({ desk, row }: { readonly desk: SheetDesk; readonly row:
             <circle cx="16" cy="10" r="1.6" />
           </svg>
         </MenuButton>
+        {/* In its place and not over the page: the sheet stays there for everybody, also while a menu is open. */}
         <MenuItems
-          anchor="bottom end"
-          className="z-20 rounded-sm border border-rule bg-sheet py-1 shadow-dialog focus:outline-none"
+          modal={false}
+          className="absolute top-full right-0 z-20 mt-1 w-max rounded-sm border border-rule bg-sheet py-1 shadow-dialog focus:outline-none"
         >
           <MenuItem>
             <button

@@ -37,45 +37,47 @@ export function SheetScreen({ sheet }: { readonly sheet: Sheet }) {
     if (row) desk.go(row.key);
   };
   return (
-    <div className="flex min-h-dvh flex-col md:h-dvh">
-      <SheetHeader desk={desk} />
-      <main className="grid min-h-0 grow grid-cols-[minmax(0,1fr)] max-md:content-start md:grid-cols-[20rem_minmax(0,1fr)] lg:grid-cols-[25rem_minmax(0,1fr)]">
-        <div className="min-h-0 border-hair max-md:border-b md:overflow-y-auto md:border-r">
-          <DiagramPanel
-            kind={sheet.kind}
-            points={desk.points}
-            current={desk.current.point}
-            onChoose={chooseRow}
-          />
-        </div>
-        <div className="flex min-h-0 min-w-0 flex-col">
-          <TabGroup
-            selectedIndex={shown}
-            onChange={(index) => show(tabs[index] ?? 'readings')}
-            className="flex min-h-0 grow flex-col"
-          >
-            <SheetTabs desk={desk} />
-            <TabPanels className="min-h-0 grow overflow-y-auto">
-              <Panel>
-                <ReadingList desk={desk} />
-              </Panel>
-              <Panel>
-                <FindingsPanel desk={desk} onPoint={chooseRow} />
-              </Panel>
-              <Panel>
-                <DerivedPanel sheetId={sheet.id} onPoint={chooseRow} />
-              </Panel>
-              <Panel>
-                <BoxList desk={desk} onPoint={chooseRow} onFindings={() => show('findings')} />
-              </Panel>
-              <Panel>
-                <FactsPanel sheet={sheet} />
-              </Panel>
-            </TabPanels>
-          </TabGroup>
-          {desk.keypad && !desk.locked && shown === 0 && <Keypad desk={desk} />}
-        </div>
-      </main>
+    <div className="flex h-dvh flex-col">
+      <div className="relative flex min-h-0 grow flex-col max-md:overflow-y-auto">
+        <SheetHeader desk={desk} />
+        <main className="grid grow grid-cols-[minmax(0,1fr)] max-md:content-start md:min-h-0 md:grid-cols-[20rem_minmax(0,1fr)] lg:grid-cols-[25rem_minmax(0,1fr)]">
+          <div className="min-h-0 border-hair max-md:border-b md:relative md:overflow-y-auto md:border-r">
+            <DiagramPanel
+              kind={sheet.kind}
+              points={desk.points}
+              current={desk.current.point}
+              onChoose={chooseRow}
+            />
+          </div>
+          <div className="flex min-w-0 flex-col md:min-h-0">
+            <TabGroup
+              selectedIndex={shown}
+              onChange={(index) => show(tabs[index] ?? 'readings')}
+              className="flex grow flex-col md:min-h-0"
+            >
+              <SheetTabs desk={desk} />
+              <TabPanels className="grow md:relative md:min-h-0 md:overflow-y-auto">
+                <Panel>
+                  <ReadingList desk={desk} />
+                </Panel>
+                <Panel>
+                  <FindingsPanel desk={desk} onPoint={chooseRow} />
+                </Panel>
+                <Panel>
+                  <DerivedPanel sheetId={sheet.id} onPoint={chooseRow} />
+                </Panel>
+                <Panel>
+                  <BoxList desk={desk} onPoint={chooseRow} onFindings={() => show('findings')} />
+                </Panel>
+                <Panel>
+                  <FactsPanel sheet={sheet} />
+                </Panel>
+              </TabPanels>
+            </TabGroup>
+            {desk.keypad && !desk.locked && shown === 0 && <Keypad desk={desk} />}
+          </div>
+        </main>
+      </div>
       <BottomBar desk={desk} onReadings={() => show('readings')} />
       <TurnQuestion desk={desk} />
     </div>
@@ -83,7 +85,7 @@ export function SheetScreen({ sheet }: { readonly sheet: Sheet }) {
 }
 
 const Panel = ({ children }: { readonly children: ReactNode }) => (
-  <TabPanel className="pb-8 focus:outline-none">{children}</TabPanel>
+  <TabPanel className="pb-24 focus:outline-none">{children}</TabPanel>
 );
 
 function SheetTabs({ desk }: { readonly desk: SheetDesk }) {

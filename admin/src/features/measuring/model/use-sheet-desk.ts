@@ -49,9 +49,9 @@ export function useSheetDesk(shown: Sheet) {
         text: row.reading?.typed ?? '',
         unit: row.reading && row.reading.reason === null ? row.reading.unit : unit,
         count: row.reading && row.reading.tapeCount > 0 ? String(row.reading.tapeCount) : '',
-        level: row.reading?.level ?? null,
+        level: usualLevel(rows, row),
       },
-    [typed, unit],
+    [rows, typed, unit],
   );
   const say = (key: string, sentence: string | null) =>
     setMistakes(({ [key]: _old, ...others }) =>
@@ -68,7 +68,7 @@ export function useSheetDesk(shown: Sheet) {
     if (!draft) return true;
     if (!saysSomethingNew(draft, row)) {
       // A level chosen before its reading is not nothing: it waits with the row.
-      if (draft.level === (row.reading?.level ?? null)) drafts.clear(row.key);
+      if (draft.level === usualLevel(rows, row)) drafts.clear(row.key);
       return true;
     }
     const keyed = keyedReading({ row, readBy: reader.readBy }, draft);
@@ -138,6 +138,12 @@ export function useSheetDesk(shown: Sheet) {
   };
 }
 export type SheetDesk = ReturnType<typeof useSheetDesk>;
+
+/** The level a row begins with: its own reading’s, else the one found for the point’s first reading. */
+function usualLevel(rows: readonly SheetRow[], row: SheetRow): Draft['level'] {
+  if (row.reading) return row.reading.level;
+  return rows.find(({ point, round }) => point.id === row.point.id && round === 1)?.reading?.level ?? null;
+}
 
 /** Who reads the tape just now: one of those the sheet names, else whoever is signed in. */
 function useReader(sheet: Sheet) {

@@ -82,37 +82,11 @@ function PreviewPart({ part }: { readonly part: PublishedPart }) {
     <section className="mt-6">
       <h3 className="title text-title-25">{part.name}</h3>
       {part.measuredOn && <p className="text-label text-ink-3">{measured.filter(Boolean).join(' ')}</p>}
-      <table className="mt-2 w-full text-table">
-        <caption className="sr-only">Measurements of {part.name}</caption>
-        <thead className="border-b border-ink text-left text-label text-ink-2">
-          <tr>
-            <th scope="col" className="py-1 font-medium">
-              Point
-            </th>
-            <th scope="col" className="py-1 text-right font-medium">
-              mm
-            </th>
-            <th scope="col" className="py-1 text-right font-medium">
-              ± mm
-            </th>
-            <th scope="col" className="py-1 text-right font-medium">
-              in
-            </th>
-          </tr>
-        </thead>
-        <tbody className="figures">
-          {part.measurements.map(({ pointId, label, valueMm, uncertaintyMm }) => (
-            <tr key={pointId} className="border-b border-hair">
-              <th scope="row" className="py-1 text-left font-normal">
-                {label}
-              </th>
-              <td className="py-1 text-right">{formatLength(mm(valueMm), 'mm').replace(' mm', '')}</td>
-              <td className="py-1 text-right text-ink-3">{uncertaintyMm}</td>
-              <td className="py-1 text-right">{formatLength(mm(valueMm), 'in').replace(' in', '')}</td>
-            </tr>
-          ))}
-        </tbody>
-      </table>
+      {part.measurements.length === 0 ? (
+        <p className="text-table text-ink-3">Not measured.</p>
+      ) : (
+        <Measurements part={part} />
+      )}
       {part.notTaken.length > 0 && (
         <p className="mt-2 text-label text-ink-3">
           Not taken:{' '}
@@ -123,5 +97,41 @@ function PreviewPart({ part }: { readonly part: PublishedPart }) {
         </p>
       )}
     </section>
+  );
+}
+
+function Measurements({ part }: { readonly part: PublishedPart }) {
+  return (
+    <table className="mt-2 w-full text-table">
+      <caption className="sr-only">Measurements of {part.name}</caption>
+      <thead className="border-b border-ink text-left text-label text-ink-2">
+        <tr>
+          <th scope="col" className="py-1 font-medium">
+            Point
+          </th>
+          <th scope="col" className="py-1 text-right font-medium">
+            mm
+          </th>
+          <th scope="col" className="py-1 text-right font-medium">
+            ± mm
+          </th>
+          <th scope="col" className="py-1 text-right font-medium">
+            in
+          </th>
+        </tr>
+      </thead>
+      <tbody className="figures">
+        {part.measurements.map(({ pointId, label, valueMm, uncertaintyMm }) => (
+          <tr key={pointId} className="border-b border-hair">
+            <th scope="row" className="py-1 text-left font-normal">
+              {label}
+            </th>
+            <td className="py-1 text-right">{formatLength(mm(valueMm), 'mm').replace(' mm', '')}</td>
+            <td className="py-1 text-right text-ink-3">{uncertaintyMm}</td>
+            <td className="py-1 text-right">{formatLength(mm(valueMm), 'in').replace(' in', '')}</td>
+          </tr>
+        ))}
+      </tbody>
+    </table>
   );
 }
