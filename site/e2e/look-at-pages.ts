@@ -46,7 +46,11 @@ async function look(browser: Browser, name: string, path: string, width: number)
   for (const { id, nodes } of violations) console.log(`${name} ${width}: ${id}: ${nodes[0]?.html ?? ''}`);
   const wide = await page.evaluate(() => document.documentElement.scrollWidth);
   if (wide > width) console.log(`${name} ${width}: the page is ${wide} px wide`);
-  await page.screenshot({ path: join(folder, `${name}-${width}.png`), fullPage: true, animations: 'disabled' });
+  await page.screenshot({
+    path: join(folder, `${name}-${width}.png`),
+    fullPage: true,
+    animations: 'disabled',
+  });
   await context.close();
   return violations.length + (wide > width ? 1 : 0);
 }
