@@ -10,6 +10,8 @@ export interface StandCollar {
   top: number;
   /** Radii at the foot and the top: width and depth. */
   footHalf?: number;
+  /** Depth before at the foot, cm; less than its half-width where the neck is hollow in front. */
+  footFront?: number;
   topHalf?: number;
   middleZ?: number;
   lift?: number;
@@ -19,7 +21,13 @@ export interface StandCollar {
 export function layStandCollar(scene: Scene, collar: StandCollar, cloth: Cloth, inside: Cloth): Layer {
   const { foot, top, footHalf = 6.5, topHalf = 5.7, middleZ = -1.2, lift = 0.5 } = collar;
   const form = loft([
-    { y: foot, half: footHalf, front: footHalf * 0.93, back: footHalf * 0.88, cz: middleZ },
+    {
+      y: foot,
+      half: footHalf,
+      front: collar.footFront ?? footHalf * 0.93,
+      back: footHalf * 0.88,
+      cz: middleZ,
+    },
     {
       y: (foot + top) / 2,
       half: mix(footHalf, topHalf, 0.7),
@@ -38,7 +46,7 @@ export function layStandCollar(scene: Scene, collar: StandCollar, cloth: Cloth, 
   };
   scene.layLayer({ cloth, across: 420, along: 70, closed: true }, layer);
   scene.lay({ cloth: inside, across: 240, along: 40, closed: true }, (u, v, p) =>
-    layer(u, mix(0.02, 1.5, v), -0.35, p),
+    layer(u, mix(0.02, 0.97, v), -0.35, p),
   );
   return layer;
 }

@@ -32,9 +32,9 @@ export async function renderPicture(
 ): Promise<void> {
   const scene = new Scene(Math.min(1, finenessAt(size.longSide) * (picture.fineness ?? 1)));
   (picture.build ?? garment.build)(scene);
-  const { height } = pixelsOf(picture, size.longSide);
+  const { width, height } = pixelsOf(picture, size.longSide);
   await mkdir(dirname(file), { recursive: true });
-  await takePicture(scene, picture.shot, { heightPx: height, oversample: size.oversample })
+  await takePicture(scene, picture.shot, { widthPx: width, heightPx: height, oversample: size.oversample })
     .withExif({ IFD0: { ImageDescription: MARK } })
     .withXmp(XMP)
     .jpeg({ quality: 86, mozjpeg: true, chromaSubsampling: '4:4:4' })

@@ -155,14 +155,14 @@ export const lh1952n5: Garment = {
     {
       view: 'front',
       name: 'front',
-      shot: hung(14, { lookAt: [0, 105], span: 116, aspect: 0.86, reach: 76 }, { exposure: 0.86 }),
+      shot: hung(14, { lookAt: [0, 105], span: 116, aspect: 0.86, reach: 76 }, { exposure: 0.78 }),
       alt: "A man's white linen shirt of about 1820, hung: a tall open collar, a frilled slit in front, full sleeves gathered at shoulder and cuff, and a long square-cut body.",
       caption: 'Front. Rendered; invented garment.',
     },
     {
       view: 'detail',
       name: 'detail-cuff',
-      shot: closeUp(6, { lookAt: [38, 97], span: 22, aspect: 1.33 }, { exposure: 0.86 }),
+      shot: closeUp(6, { lookAt: [38, 97], span: 22, aspect: 1.33 }, { exposure: 0.78 }),
       alt: 'A close view of the sleeve gathered into a narrow cuff that fastens with a thread button.',
       caption: 'Gathers at the cuff. Rendered; invented garment.',
       fineness: 1.4,

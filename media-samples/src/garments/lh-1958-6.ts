@@ -33,7 +33,7 @@ const bodice: BodiceCut = {
       [6.5, 14.2, 10.8, 12],
     ],
   }),
-  neck: () => 142.8,
+  neck: () => 141.8,
   lower: (theta) => {
     const a = Math.abs(theta);
     return 81.5 + 8 * ease(0.05, 1.35, a) - 5.2 * ease(1.6, 3, a);
@@ -49,9 +49,15 @@ export const lh1958n6: Garment = {
     const body = layBodice(scene, bodice, red, inside);
     sewCord(scene, body, braid, { line: round(1), points: 700, closed: true, length: 100 }, 0.26, 0.8);
     sewBand(scene, body, braid, { from: 0.955, to: 0.975, lift: 0.2, across: 700, width: 1, length: 100 });
-    const collar = layStandCollar(scene, { foot: 140.9, top: 146.6, footHalf: 6.9, lift: 0.6 }, red, inside);
+    const collar = layStandCollar(
+      scene,
+      { foot: 141.1, top: 146.6, footHalf: 7, footFront: 5.6, lift: 0.35 },
+      red,
+      inside,
+    );
     sewCord(scene, collar, braid, { line: round(0.03), points: 360, closed: true, length: 38 }, 0.2, 0.6);
-    sewButtons(scene, body, (t) => [uOf(0.03), mix(0.03, 0.95, t)], {
+    sewCord(scene, collar, red, { line: round(0.97), points: 400, closed: true, length: 46 }, 0.14, 0.6);
+    sewButtons(scene, body, (t) => [uOf(0.03), mix(0.02, 0.95, t)], {
       count: 19,
       radius: 0.6,
       cloth: jet(dye('#4a2b2c')),

@@ -76,14 +76,14 @@ export const lh1958n7: Garment = {
       upper: () => 19,
       hem: () => 0.6,
       clothWidth: 520,
-      folds: (u, theta, y, v) => 1 + folds(u, theta, y, 1 - y / 101) * 0.85 + pleats(u, v) + 0.7 * v * v,
+      folds: (u, theta, y, v) => 0.5 + folds(u, theta, y, 1 - y / 101) * 0.85 + pleats(u, v) + 0.7 * v * v,
     });
     scene.layLayer({ cloth: olive, across: 2400, along: 110, closed: true }, flounce);
     sewBand(scene, flounce, trim, { from: 0.06, to: 0.12, lift: 0.4, across: 1400, width: 1.4, length: 300 });
     sewBand(scene, flounce, olive, {
-      from: -0.08,
-      to: 0.04,
-      lift: 0.7,
+      from: -0.05,
+      to: 0.05,
+      lift: 0.35,
       across: 1400,
       width: 2.4,
       length: 300,
@@ -91,7 +91,7 @@ export const lh1958n7: Garment = {
     layBelt(scene, noise, { upper: 102.6, lower: 99.6, half: 11.5, front: 9.2, back: 9.4 }, olive);
     // The inside of the waistband, seen over its upper edge.
     scene.lay({ cloth: inside, across: 300, along: 20, closed: true }, (u, v, p) =>
-      form(mix(102.4, 96, v), (u - 0.5) * 2 * Math.PI, -0.1, p),
+      form(mix(102.4, 100.4, v), (u - 0.5) * 2 * Math.PI, 0, p),
     );
   },
   pictures: [

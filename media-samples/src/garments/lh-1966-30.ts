@@ -150,7 +150,7 @@ export const lh1966n30: Garment = {
       name: 'detail-waist-tape',
       build: (scene) => layWaistTape(scene, noise),
       shot: {
-        camera: { yaw: 0, pitch: 1, distance: 160, lookAt: [2.4, -0.2], span: 13.5, aspect: 1.5 },
+        camera: { yaw: 0, pitch: 1, distance: 160, lookAt: [3, -0.2], span: 14.2, aspect: 1.5 },
         backdrop: 'none',
         reach: 24,
         bias: 0.06,

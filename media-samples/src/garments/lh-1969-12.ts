@@ -14,7 +14,7 @@ import { closeUp, hung, type Garment } from './garment';
 const noise = seededNoise(1892);
 const black = broadcloth(dye('#3d3b40'));
 const beads = jet(dye('#2e2c31'));
-const inside = lining(dye('#8d8088'));
+const inside = { ...lining(dye('#8d8088')), openness: 3 };
 
 const form = loft([
   { y: 144, half: 6.8, front: 6.2, back: 6, cz: -1.2 },

@@ -53,7 +53,7 @@ export const lh1987n20: Garment = {
       width: 1.6,
       length: 330,
     });
-    sewFrill(scene, skirt, eyeletEdging({ repeat: 4.6, depth: 11.5 }), {
+    sewFrill(scene, skirt, eyeletEdging({ repeat: 4.6, depth: 11.5, colour: dye('#ebe7dc') }), {
       line: round(0.99),
       points: 2000,
       closed: true,

@@ -138,7 +138,7 @@ export const lh2011n3: Garment = {
           camera: { yaw: 38, pitch: 11, distance: 240, lookAt: [0, 9], span: 30, aspect: 1.15 },
         },
       ),
-      alt: "A man's black silk plush top hat of the 1840s: a tall crown flaring a little to the tip, a ribbed ribbon with a flat bow and a brim curled at the sides.",
+      alt: "A man's black silk plush top hat of the 1840s: a tall crown flaring a little to the tip, a ribbed ribbon and a brim curled at the sides.",
       caption: 'Three-quarter view. Rendered; invented garment.',
     },
     {
@@ -149,7 +149,7 @@ export const lh2011n3: Garment = {
         { lookAt: [0, 4], span: 13, aspect: 1.33, pitch: 10 },
         { exposure: 1.25, bias: 0.06, reach: 20, backdrop: 'floor' },
       ),
-      alt: 'A close view of the curled brim with its ribbed binding, and the ribbon with its flat bow.',
+      alt: 'A close view of the curled brim with its ribbed binding, against the ribbon and the brushed plush of the crown.',
       caption: 'Brim, binding and ribbon. Rendered; invented garment.',
       fineness: 1.2,
     },

@@ -27,7 +27,7 @@ function ball(): Scene {
 }
 
 const pixels = (): Promise<Buffer> =>
-  takePicture(ball(), shot, { heightPx: 120, oversample: 1.4 }).raw().toBuffer();
+  takePicture(ball(), shot, { widthPx: 120, heightPx: 120, oversample: 1.4 }).raw().toBuffer();
 const at = (buffer: Buffer, x: number, y: number): number[] => [
   ...buffer.subarray((y * 120 + x) * 3, (y * 120 + x) * 3 + 3),
 ];

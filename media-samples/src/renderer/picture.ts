@@ -25,7 +25,8 @@ export interface Shot {
 }
 
 export interface Print {
-  /** Height of the finished picture, px. */
+  /** Size of the finished picture, px. */
+  widthPx: number;
   heightPx: number;
   /** How many times larger it is drawn before it is brought down. */
   oversample: number;
@@ -65,7 +66,7 @@ export function takePicture(scene: Scene, shot: Shot, print: Print): Sharp {
   return sharp(develop(film, view, board, keyTowards, shot.exposure ?? 1), {
     raw: { width, height, channels: 3 },
   })
-    .resize({ height: print.heightPx, kernel: 'lanczos3' })
+    .resize({ width: print.widthPx, height: print.heightPx, fit: 'fill', kernel: 'lanczos3' })
     .sharpen({ sigma: 0.5 });
 }
 
