@@ -5,7 +5,8 @@ import { readJsonIfThere } from './private-files.mjs';
 import { plainEnvironment, run } from './programs.mjs';
 
 /**
- * @typedef {{ version?: string, link?: boolean, optional?: boolean, devOptional?: boolean }} LockEntry
+ * @typedef {{ version?: string, link?: boolean, optional?: boolean, devOptional?: boolean,
+ *             extraneous?: boolean }} LockEntry
  * @typedef {Record<string, LockEntry>} LockPackages
  */
 
@@ -31,13 +32,13 @@ export async function installNpmPackages(root, step) {
 
 /**
  * Whether every package of the lock file is there in its version. Optional packages may be missing: those of
- * other systems always are.
+ * other systems always are. Extraneous ones, which nothing asks for, npm ci leaves out.
  * @param {LockPackages} wanted
  * @param {LockPackages} installed
  */
 export function isInstalled(wanted, installed) {
   return Object.entries(wanted)
-    .filter(([place]) => place.includes('node_modules/'))
+    .filter(([place, entry]) => place.includes('node_modules/') && entry.extraneous !== true)
     .every(([place, entry]) => {
       const there = installed[place];
       if (!there) return entry.optional === true || entry.devOptional === true;

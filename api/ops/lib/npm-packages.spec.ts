@@ -7,6 +7,7 @@ const wanted = {
   'node_modules/@ellwand/shared': { link: true },
   'node_modules/zod': { version: '4.6.7' },
   'node_modules/only-on-windows': { version: '1.0.0', optional: true },
+  'node_modules/left-behind': { version: '2.0.0', extraneous: true },
 };
 const installed = {
   'node_modules/@ellwand/shared': { link: true },
@@ -31,7 +32,7 @@ const notInstalled: { name: string; there: LockPackages }[] = [
 ];
 
 describe('whether the packages of the lock file are installed', () => {
-  it('they are when all but the optional ones are there', () => {
+  it('they are when all but optional and extraneous ones are there', () => {
     expect(isInstalled(wanted, installed)).toBe(true);
   });
 
