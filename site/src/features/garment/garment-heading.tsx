@@ -1,4 +1,5 @@
-import { type PublishedGarment } from '@ellwand/shared/records/published-garment';
+import { type PublishedGarment, type PublishedImage } from '@ellwand/shared/records/published-garment';
+import { Picture } from '../../components/ui/picture';
 import { SiteLink } from '../../components/ui/site-link';
 import { paths } from '../../config/paths';
 import { capitalised, isKind, kindName } from '../../lib/words';
@@ -21,8 +22,13 @@ export function GarmentHeading({ garment }: { readonly garment: PublishedGarment
   ];
   return (
     <header className="garment-heading">
-      <h1>{garment.title}</h1>
-      <p className="garment-date">{garment.date.display}</p>
+      <div className="garment-name">
+        <div>
+          <h1>{garment.title}</h1>
+          <p className="garment-date">{garment.date.display}</p>
+        </div>
+        <FirstPicture image={garment.images[0]} />
+      </div>
       <dl className="facts">
         <div>
           <dt>Kind</dt>
@@ -46,6 +52,16 @@ export function GarmentHeading({ garment }: { readonly garment: PublishedGarment
         )}
       </dl>
     </header>
+  );
+}
+
+/** What it looks like, before anything is read; the way to all its pictures, which say the rest. */
+function FirstPicture({ image }: { readonly image: PublishedImage | undefined }) {
+  if (!image) return null;
+  return (
+    <a className="garment-first-picture" href="#pictures" aria-label="To the pictures">
+      <Picture image={{ ...image, alt: '' }} sizes="(width >= 40rem) 168px, 112px" first />
+    </a>
   );
 }
 
