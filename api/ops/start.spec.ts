@@ -48,6 +48,7 @@ describe('npm start', () => {
     await started.opened();
     expect(started.output()).toContain(`http://127.0.0.1:${house.port}/workroom/`);
     expect(started.output()).toContain(path.join(house.data, 'demonstration.json'));
+    expect(started.output()).toContain('1 of 1 garments measured');
     expect(started.output()).toMatch(/Mail inbox +http:\/\/127\.0\.0\.1:\d+\//);
     expect(house.told()).toEqual(['mail up', 'migrate as ellwand_owner', 'load', 'api up']);
     expect(await close(started)).toBe(0);

@@ -133,8 +133,12 @@ export class House {
    */
   async #fill(opened) {
     writeHouseKind(this.settings.dataFolder, { opened, filled: false });
-    if (opened === 'demonstration')
-      await this.#runScript('Filling the demonstration', 'demonstration/load.js');
+    if (opened === 'demonstration') {
+      // It takes minutes and says itself how far it is.
+      await this.#runScript('Filling the demonstration', 'demonstration/load.js', (text) =>
+        process.stdout.write(text),
+      );
+    }
     writeHouseKind(this.settings.dataFolder, { opened, filled: true });
   }
 
@@ -147,13 +151,15 @@ export class House {
   /**
    * @param {string} label
    * @param {string} script below api/dist
+   * @param {(text: string) => void} [onOutput] hears what it prints while it prints
    * @returns {Promise<string>} what it printed
    */
-  async #runScript(label, script) {
+  async #runScript(label, script, onOutput) {
     const { code, output } = await this.step(label, () =>
       run(process.execPath, ['--enable-source-maps', this.#built(script)], {
         cwd: this.root,
         env: this.#env,
+        onOutput,
       }),
     );
     if (code !== 0) throw new PlainFailure(`${label} failed.`, { detail: output.slice(-4000) });

@@ -55,10 +55,11 @@ export function stopRunningPrograms() {
  * @param {string} program
  * @param {readonly string[]} args
  * @param {{ cwd?: string, env?: NodeJS.ProcessEnv, input?: string, uid?: number, gid?: number,
- *           timeoutMs?: number }} [options] after `timeoutMs` the program is killed
+ *           timeoutMs?: number, onOutput?: (text: string) => void }} [options] after `timeoutMs` the program is killed;
+ *   `onOutput` hears what it says while it says it
  * @returns {Promise<Outcome>}
  */
-export function run(program, args, { input, timeoutMs, ...options } = {}) {
+export function run(program, args, { input, timeoutMs, onOutput, ...options } = {}) {
   return new Promise((resolve) => {
     const child = spawn(program, args, {
       ...options,
@@ -68,7 +69,10 @@ export function run(program, args, { input, timeoutMs, ...options } = {}) {
     });
     runningPrograms.add(child);
     let output = '';
-    const keep = (/** @type {Buffer} */ chunk) => (output += chunk.toString());
+    const keep = (/** @type {Buffer} */ chunk) => {
+      output += chunk.toString();
+      onOutput?.(chunk.toString());
+    };
     child.stdout.on('data', keep);
     child.stderr.on('data', keep);
     // A child that ends before it has read its input is reported by its exit code, not by a broken pipe.

@@ -16,6 +16,7 @@ const scripts = {
   'demonstration/load.js': `
     if (fs.existsSync(path.join(process.env.ELLWAND_DATA, 'break-load'))) process.exit(3);
     fs.writeFileSync(path.join(process.env.ELLWAND_DATA, 'demonstration.json'), '{}');
+    console.log('1 of 1 garments measured');
     tell('load');`,
   'auth/first-administrator.js': `console.log(process.env.ELLWAND_PUBLIC_URL + '/workroom/first?once=abc');`,
   'mail/drop.js': `serve(process.env.ELLWAND_MAIL_DROP_HTTP_PORT, 'mail');`,
