@@ -120,7 +120,7 @@ test('a dress goes from the invitation of its measurers to the public, and is wi
   await completeSheet(odile.page);
   await backToTheGarment(odile.page);
   await odile.page.getByRole('button', { name: 'Send to review' }).click();
-  await expect(odile.page.getByText('In review').first()).toBeVisible();
+  await expect(stage(odile.page, 'In review')).toBeVisible();
 
   await refusedToWhoeverHeldTheTape(ines);
   await returnedOnce(hal, odile);
@@ -132,6 +132,9 @@ test('a dress goes from the invitation of its measurers to the public, and is wi
   await withdraw(hal);
   await findWithdrawn(visitor, house.url);
 });
+
+/** The mark that says where the record stands. */
+const stage = (page: Page, word: string) => page.getByRole('main').getByText(word, { exact: true }).first();
 
 async function makeTheDress({ page }: Seat): Promise<void> {
   await page
@@ -236,7 +239,7 @@ async function returnedOnce(hal: Seat, odile: Seat): Promise<void> {
   await hal.page.getByLabel('What should be done').fill(reason);
   await expectAccessible(hal.page, 'the question why a record is returned');
   await hal.page.getByRole('button', { name: 'Return it' }).click();
-  await expect(hal.page.getByText('Draft').first()).toBeVisible();
+  await expect(stage(hal.page, 'Draft')).toBeVisible();
 
   await odile.page.reload();
   await expect(odile.page.getByText(reason)).toBeVisible();
@@ -246,7 +249,7 @@ async function returnedOnce(hal: Seat, odile: Seat): Promise<void> {
   await odile.page.getByRole('button', { name: /^Save/ }).click();
   await expect(odile.page.getByText(/^Saved/).first()).toBeVisible();
   await odile.page.getByRole('button', { name: 'Send to review' }).click();
-  await expect(odile.page.getByText('In review').first()).toBeVisible();
+  await expect(stage(odile.page, 'In review')).toBeVisible();
 }
 
 async function approveAndPublish(hal: Seat): Promise<void> {
@@ -256,7 +259,8 @@ async function approveAndPublish(hal: Seat): Promise<void> {
   const question = hal.page.getByRole('dialog', { name: 'Publish version 1?' });
   await expectAccessible(hal.page, 'the question before publishing');
   await question.getByRole('button', { name: 'Publish version 1' }).click();
-  await expect(hal.page.getByText('Published').first()).toBeVisible();
+  await expect(question).toBeHidden();
+  await expect(stage(hal.page, 'Published')).toBeVisible();
 }
 
 async function findByWaist(page: Page, url: string): Promise<void> {
@@ -295,7 +299,8 @@ async function withdraw(hal: Seat): Promise<void> {
   await question.getByLabel(/^Inner reason/).fill('A letter from the family.');
   await expectAccessible(hal.page, 'the question before withdrawing');
   await question.getByRole('button', { name: 'Withdraw' }).click();
-  await expect(hal.page.getByText('Withdrawn').first()).toBeVisible();
+  await expect(question).toBeHidden();
+  await expect(stage(hal.page, 'Withdrawn')).toBeVisible();
 }
 
 async function findWithdrawn(page: Page, url: string): Promise<void> {

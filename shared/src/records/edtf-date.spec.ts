@@ -16,7 +16,10 @@ describe('a garment’s date', () => {
     expect(readDate(edtf)).toEqual({ edtf, display, fromYear, toYear });
   });
 
-  it.each(['', 'about 1885', '/1830', '../1830', '1861/1858', '12', '1885-13', '{'])('%s is refused', (text) => {
-    expect(readDate(text)).toBeUndefined();
-  });
+  it.each(['', 'about 1885', '/1830', '../1830', '1861/1858', '12', '1885-13', '{'])(
+    '%s is refused',
+    (text) => {
+      expect(readDate(text)).toBeUndefined();
+    },
+  );
 });

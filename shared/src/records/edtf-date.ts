@@ -43,4 +43,8 @@ function inWords(edtf: string, fromYear?: number, toYear?: number): string {
   return fromYear === toYear ? String(fromYear) : `${fromYear}–${toYear}`;
 }
 
-const qualifiers: Readonly<Record<string, string>> = { '~': 'about ', '?': 'perhaps ', '%': 'perhaps about ' };
+const qualifiers: Readonly<Record<string, string>> = {
+  '~': 'about ',
+  '?': 'perhaps ',
+  '%': 'perhaps about ',
+};

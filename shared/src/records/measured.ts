@@ -31,15 +31,27 @@ export function toReading(stored: StoredReading): Reading {
 function tapeLengthsOf({ tapeCount, tapeLengthMm, typed, unit }: StoredReading) {
   if (tapeCount === 0 || tapeLengthMm === null || typed === null || unit === null) return undefined;
   const rest = fromTyped({ text: typed, unit });
-  return rest.ok ? { count: tapeCount, tape: fromMmString(tapeLengthMm), rest: rest.value.length } : undefined;
+  return rest.ok
+    ? { count: tapeCount, tape: fromMmString(tapeLengthMm), rest: rest.value.length }
+    : undefined;
 }
 
 /** The derived values that the readings of one part allow, as they are shown. */
-export function derivedViews(kind: GarmentKind, readings: readonly StoredReading[]): z.output<typeof DerivedView>[] {
+export function derivedViews(
+  kind: GarmentKind,
+  readings: readonly StoredReading[],
+): z.output<typeof DerivedView>[] {
   return deriveFromReadings(kind, readings.map(toReading)).map(toDerivedView);
 }
 
-function toDerivedView({ id, label, formula, worked, figure, trace }: DerivedValue): z.output<typeof DerivedView> {
+function toDerivedView({
+  id,
+  label,
+  formula,
+  worked,
+  figure,
+  trace,
+}: DerivedValue): z.output<typeof DerivedView> {
   return {
     id,
     label,
@@ -48,6 +60,10 @@ function toDerivedView({ id, label, formula, worked, figure, trace }: DerivedVal
     valueMm: figure.type === 'length' ? toMmString(figure.length) : null,
     ratio: figure.type === 'ratio' ? figure.text : null,
     uncertaintyMm: figure.type === 'length' ? toMmString(shownUncertainty(figure.uncertaintyMm)) : null,
-    trace: trace.map(({ pointId, label: name, value }) => ({ pointId, label: name, valueMm: toMmString(value) })),
+    trace: trace.map(({ pointId, label: name, value }) => ({
+      pointId,
+      label: name,
+      valueMm: toMmString(value),
+    })),
   };
 }

@@ -1,6 +1,11 @@
 import { z } from 'zod';
 import { kindIds } from '../points/kinds.js';
-import { levelLabels, notTakenReasons, type LevelFoundBy as Level, type NotTakenReason as Reason } from '../readings/reading.js';
+import {
+  levelLabels,
+  notTakenReasons,
+  type LevelFoundBy as Level,
+  type NotTakenReason as Reason,
+} from '../readings/reading.js';
 import { Day, LengthMm, line, Moment, prose, Uuid } from './common.js';
 
 /** What somebody did at the measuring table. One person may do several; reading and holding take two. */
