@@ -194,13 +194,13 @@ describe('the public catalogue', () => {
     expect(await inProcess.garment('lh-0')).toEqual({ found: 'nothing' });
   });
 
-  it('counts on the front page, newest first', async () => {
+  it('counts on the front page, newest measured first, what is not measured last', async () => {
     await publisher.publish();
     await publisher.publish({ number: 'lh-2', title: 'Second bodice', parts: [] });
     await settled();
     const { body } = await get('/front');
     expect(body).toMatchObject({ total: 2, kinds: [{ kind: 'bodice', count: 2 }] });
-    expect(body.newest.map(({ number }: { number: string }) => number)).toEqual(['lh-2', 'lh-1966-30']);
+    expect(body.newest.map(({ number }: { number: string }) => number)).toEqual(['lh-1966-30', 'lh-2']);
   });
 
   it('defines every measuring point and kind in words', async () => {

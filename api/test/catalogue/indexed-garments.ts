@@ -13,6 +13,7 @@ export interface GarmentSketch {
   readonly measurements?: readonly (readonly [point: string, value: number, part?: string])[];
   readonly text?: string;
   readonly publishedAt?: number;
+  readonly measuredOn?: string;
 }
 
 /** A garment of the index, with whatever a spec leaves out made up. */
@@ -29,6 +30,7 @@ export function indexedGarment(sketch: GarmentSketch): IndexedGarment {
     fromYear,
     toYear,
     publishedAt: sketch.publishedAt ?? 0,
+    measuredOn: sketch.measuredOn ?? '',
     image: null,
     facets,
     measurements: (sketch.measurements ?? []).map(([pointId, value, partName = 'Dress']) => ({

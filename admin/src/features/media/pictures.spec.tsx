@@ -1,6 +1,7 @@
 import { act, fireEvent, screen, waitFor, within } from '@testing-library/react';
 import { describe, expect, it } from 'vitest';
 import { fakeApi } from '../../testing/fake-api/fake-api.js';
+import { image } from '../../testing/fake-api/garments.js';
 import { House } from '../../testing/fake-api/house.js';
 import { idOf } from '../../testing/fake-api/people.js';
 import { fakeUploads } from '../../testing/fake-upload.js';
@@ -73,6 +74,16 @@ describe('pictures on their way', () => {
 });
 
 describe('a picture', () => {
+  it('changes places with its neighbour by a button', async () => {
+    const house = new House();
+    house.garment(dress)?.images.push(image(777, dress, 1, { view: 'back' }));
+    const { user } = renderWorkroom(`/garments/${dress}`, { house });
+    expect(await screen.findByRole('button', { name: 'Earlier: Front, picture 1' })).toBeDisabled();
+    await user.click(screen.getByRole('button', { name: 'Earlier: Back, picture 2' }));
+    expect(await screen.findByRole('button', { name: 'Later: Back, picture 1' })).toBeEnabled();
+    expect(house.garment(dress)?.images.map(({ view }) => view)).toEqual(['back', 'front']);
+  });
+
   it('is described, and hidden from the public', async () => {
     const { user, house } = await openPictures();
     await user.click(await screen.findByRole('button', { name: /^Describe/ }));

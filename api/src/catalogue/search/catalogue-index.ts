@@ -15,11 +15,14 @@ type Order = Exclude<SearchQuery['sort'], 'relevance'>;
 
 const byTitle = new Intl.Collator('en', { numeric: true });
 
+/** Days as ISO text sort as days. */
+const compareText = (a: string, b: string) => (a === b ? 0 : a < b ? -1 : 1);
+
 const comparisons: Readonly<Record<Order, (a: IndexedGarment, b: IndexedGarment) => number>> = {
   date: (a, b) => a.fromYear - b.fromYear || a.toYear - b.toYear,
   'date-desc': (a, b) => b.toYear - a.toYear || b.fromYear - a.fromYear,
   title: (a, b) => byTitle.compare(a.title, b.title),
-  newest: (a, b) => b.publishedAt - a.publishedAt,
+  newest: (a, b) => compareText(b.measuredOn, a.measuredOn) || b.publishedAt - a.publishedAt,
 };
 
 /**
@@ -32,7 +35,7 @@ export class CatalogueIndex {
   readonly titles = new WordIndex();
   readonly texts = new WordIndex();
   private readonly garments: (IndexedGarment | undefined)[] = [];
-  private readonly places = new Map<string, number>();
+  private readonly placeOf = new Map<string, number>();
   private readonly free: number[] = [];
   private readonly facets = new Map<string, Map<string, FacetValue>>();
   private readonly points = new Map<string, ValueColumn>();
@@ -44,7 +47,7 @@ export class CatalogueIndex {
     this.remove(garment.number);
     const place = this.free.pop() ?? this.garments.length;
     this.garments[place] = garment;
-    this.places.set(garment.number, place);
+    this.placeOf.set(garment.number, place);
     this.all.add(place);
     this.titles.add(place, garment.title);
     this.texts.add(place, searchable(garment));
@@ -58,11 +61,11 @@ export class CatalogueIndex {
   remove(number: string): void {
     // A cached order is only good for the garments it was made of.
     this.orders = new Map();
-    const place = this.places.get(number);
+    const place = this.placeOf.get(number);
     const garment = place === undefined ? undefined : this.garments[place];
     if (place === undefined || !garment) return;
     this.garments[place] = undefined;
-    this.places.delete(number);
+    this.placeOf.delete(number);
     this.free.push(place);
     this.all.remove(place);
     this.titles.remove(place, garment.title);
@@ -71,6 +74,11 @@ export class CatalogueIndex {
       this.facetValue(facet, value, label).holders.remove(place);
     const columns = new Set(garment.measurements.flatMap(({ pointId }) => this.columnsOf(pointId)));
     for (const column of columns) column.remove(place);
+  }
+
+  /** How many places there are, taken and free: one more than the highest. */
+  get places(): number {
+    return this.garments.length;
   }
 
   garment(place: number): IndexedGarment {

@@ -5,7 +5,7 @@ import type { CatalogueFront } from '@ellwand/shared/records/site-catalogue';
 import { IndexUpkeep } from './index-upkeep';
 import { cardOf, searchIndex } from './search-index';
 
-const newestShown = 6;
+const newestShown = 8;
 
 /** The one door to searching; what stands behind it may change. */
 @Injectable()

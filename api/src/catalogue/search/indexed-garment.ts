@@ -29,6 +29,8 @@ export interface IndexedGarment {
   readonly toYear: number;
   /** Milliseconds since 1970. */
   readonly publishedAt: number;
+  /** The day on which it was last measured, `2026-11-20`; empty where it was not. */
+  readonly measuredOn: string;
   readonly image: PublishedImage | null;
   readonly facets: readonly { readonly facet: string; readonly value: string; readonly label: string }[];
   readonly measurements: readonly IndexedMeasurement[];

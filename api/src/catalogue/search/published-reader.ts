@@ -2,6 +2,7 @@ import { Injectable } from '@nestjs/common';
 import { PublishedImage } from '@ellwand/shared/records/published-garment';
 import { fromMmString } from '@ellwand/shared/units/length';
 import { DataSource } from 'typeorm';
+import { z } from 'zod';
 import { InjectCatalogue } from '../../common/catalogue-connection';
 import { fromJson } from '../json-column';
 import type { IndexedGarment, IndexedMeasurement } from './indexed-garment';
@@ -15,6 +16,8 @@ interface GarmentRow {
   readonly published_at: Date;
   readonly date_display: string;
   readonly image: unknown;
+  /** JSON: a day or null for each part. */
+  readonly measured_on: unknown;
   readonly text: string | null;
 }
 interface FacetRow {
@@ -75,7 +78,8 @@ export class PublishedReader {
     if (numbers.length === 0) return [];
     const garments: GarmentRow[] = await this.catalogue.query(
       `SELECT g.number, g.title, g.kind, g.from_year, g.to_year, g.published_at, t.text,
-          JSON_VALUE(v.document, '$.date.display') AS date_display, JSON_EXTRACT(v.document, '$.images[0]') AS image
+          JSON_VALUE(v.document, '$.date.display') AS date_display, JSON_EXTRACT(v.document, '$.images[0]') AS image,
+          JSON_EXTRACT(v.document, '$.parts[*].measuredOn') AS measured_on
         FROM published_garment g
         JOIN published_version v ON v.number = g.number AND v.version = g.current_version
         LEFT JOIN published_text t ON t.number = g.number
@@ -112,6 +116,7 @@ function indexed(
     fromYear: row.from_year,
     toYear: row.to_year,
     publishedAt: row.published_at.getTime(),
+    measuredOn: latestOf(row.measured_on),
     image: row.image === null ? null : PublishedImage.parse(fromJson(row.image)),
     facets: facets.map(({ facet, value, label }) => ({ facet, value, label })),
     measurements: measurements.map((measured): IndexedMeasurement => ({
@@ -131,4 +136,13 @@ function grouped<T extends { readonly number: string }>(rows: readonly T[]): Map
     else groups.set(row.number, [row]);
   }
   return groups;
+}
+
+/** The last day on which any part was measured; nothing where none was. */
+function latestOf(days: unknown): string {
+  return z
+    .array(z.string().nullable())
+    .catch([])
+    .parse(fromJson(days))
+    .reduce<string>((latest, day) => (day !== null && day > latest ? day : latest), '');
 }

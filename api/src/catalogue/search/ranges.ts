@@ -2,7 +2,6 @@ import { groups } from '@ellwand/shared/points/groups';
 import type { MeasuredRange } from '@ellwand/shared/records/published-garment';
 import type { SearchQuery } from '@ellwand/shared/records/search-query';
 import { type Length, lengthOf, toMmString, UNITS_PER_MM } from '@ellwand/shared/units/length';
-import { TypedFastBitSet } from 'typedfastbitset';
 import type { z } from 'zod';
 import type { CatalogueIndex } from './catalogue-index';
 import { measureKey, pointLabel } from './filters';
@@ -41,7 +40,7 @@ function measuredRange(
   const candidates = narrowed.without(measureKey(point));
   const column = index.column(point);
   const filter = query.measure.find((measure) => measure.point === point);
-  const entries = column ? [...column.of(candidates)] : [];
+  const entries = column?.of(candidates) ?? [];
   return {
     point,
     label: pointLabel(point),
@@ -68,15 +67,18 @@ export function binned(entries: readonly Entry[]): RangeAnswer['bins'] {
   if (!first || !last) return [];
   const width = roundWidth(first.value, last.value);
   const start = Math.floor(first.value / width);
-  const holders = Array.from(
-    { length: Math.floor(last.value / width) - start + 1 },
-    () => new TypedFastBitSet(),
-  );
-  for (const { value, place } of entries) holders[Math.floor(value / width) - start]?.add(place);
-  return holders.map((holding, at) => ({
+  const counts = new Array<number>(Math.floor(last.value / width) - start + 1).fill(0);
+  // Values come in order, so a garment is new to a bin unless that bin is the last it was counted in.
+  const lastBin = new Int32Array(entries.reduce((most, { place }) => Math.max(most, place), 0) + 1).fill(-1);
+  for (const { value, place } of entries) {
+    const bin = Math.floor(value / width) - start;
+    if (lastBin[place] !== bin) counts[bin] = (counts[bin] ?? 0) + 1;
+    lastBin[place] = bin;
+  }
+  return counts.map((count, at) => ({
     fromMm: toMmString(lengthOf((start + at) * width)),
     toMm: toMmString(lengthOf((start + at + 1) * width)),
-    count: holding.size(),
+    count,
   }));
 }
 

@@ -39,8 +39,7 @@ function pageOf(
 ): number[] {
   // Without words every match is as good as another: then the oldest garment comes first.
   const order = index.inOrder(sort === 'relevance' ? 'date' : sort).filter((place) => found.has(place));
-  if (sort === 'relevance' && text)
-    order.sort((a, b) => (text.scores.get(b) ?? 0) - (text.scores.get(a) ?? 0));
+  if (sort === 'relevance' && text) order.sort((a, b) => (text.scores[b] ?? 0) - (text.scores[a] ?? 0));
   return order.slice((page - 1) * size, page * size);
 }
 

@@ -7,19 +7,19 @@ const weights = { title: 8, text: 2 } as const;
 
 export interface TextMatches {
   readonly garments: TypedFastBitSet;
-  /** How well a garment answers; only for those that match. */
-  readonly scores: ReadonlyMap<number, number>;
+  /** How well the garment at each place answers. */
+  readonly scores: Float32Array;
 }
 
 /** Garments that hold every word of the text, or a word that begins so. A text without words finds nothing. */
 export function matchText(index: CatalogueIndex, text: string): TextMatches {
-  const scores = new Map<number, number>();
+  const scores = new Float32Array(index.places);
   let garments: TypedFastBitSet | null = null;
   for (const word of wordsSought(text)) {
     const holders = new TypedFastBitSet();
     const score = (weight: number) => (place: number, whole: boolean) => {
       holders.add(place);
-      scores.set(place, (scores.get(place) ?? 0) + (whole ? weight : weight / 2));
+      scores[place] = (scores[place] ?? 0) + (whole ? weight : weight / 2);
     };
     index.titles.find(word, score(weights.title));
     index.texts.find(word, score(weights.text));

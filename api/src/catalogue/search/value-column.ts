@@ -37,8 +37,8 @@ export class ValueColumn {
   }
 
   /** The values of some garments, shortest first. */
-  *of(garments: TypedFastBitSet): Generator<Entry> {
-    for (const entry of this.sorted()) if (garments.has(entry.place)) yield entry;
+  of(garments: TypedFastBitSet): readonly Entry[] {
+    return this.sorted().filter((entry) => garments.has(entry.place));
   }
 
   private sorted(): readonly Entry[] {

@@ -13,11 +13,11 @@ interface PictureCardProps {
   readonly image: Image;
   /** Its place in the order, from 0. */
   readonly place: number;
-  readonly images: readonly Image[];
+  readonly count: number;
   readonly editable: boolean;
 }
 
-export function PictureCard({ image, place, images, editable }: PictureCardProps) {
+export function PictureCard({ image, place, count, editable }: PictureCardProps) {
   const [editing, setEditing] = useState(false);
   const queries = useQueryClient();
   const change = useMutation({
@@ -55,14 +55,14 @@ export function PictureCard({ image, place, images, editable }: PictureCardProps
           <Button
             height="dense"
             disabled={place === 0 || change.isPending}
-            onClick={() => change.mutate({ position: images[place - 1]?.position ?? 0 })}
+            onClick={() => change.mutate({ position: place - 1 })}
           >
             Earlier<span className="sr-only">: {name}</span>
           </Button>
           <Button
             height="dense"
-            disabled={place === images.length - 1 || change.isPending}
-            onClick={() => change.mutate({ position: images[place + 1]?.position ?? place + 1 })}
+            disabled={place === count - 1 || change.isPending}
+            onClick={() => change.mutate({ position: place + 1 })}
           >
             Later<span className="sr-only">: {name}</span>
           </Button>

@@ -43,7 +43,7 @@ export function PicturesPanel({ garmentId }: { readonly garmentId: string }) {
                 key={image.id}
                 image={image}
                 place={index}
-                images={images.data}
+                count={images.data.length}
                 editable={mayWrite}
               />
             ))}
