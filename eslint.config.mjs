@@ -28,7 +28,7 @@ export default tseslint.config(
       '@typescript-eslint/consistent-type-imports': ['error', { fixStyle: 'inline-type-imports' }],
       '@typescript-eslint/no-unused-vars': ['error', { argsIgnorePattern: '^_' }],
       '@typescript-eslint/restrict-template-expressions': ['error', { allowNumber: true }],
-      'import-x/no-restricted-paths': ['error', { zones: walls }],
+      'import-x/no-restricted-paths': ['error', { basePath: import.meta.dirname, zones: walls }],
       'no-restricted-syntax': [
         'error',
         {

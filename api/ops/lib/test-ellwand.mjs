@@ -23,27 +23,21 @@ const SOMETHING_FAILED = 1;
 /** What `npm test` runs, in the order of its table. @type {(folder: string) => Runner[]} */
 const everything = (folder) => {
   const others = Object.keys(builds).filter((name) => name !== 'shared');
-  const alone = [
+  const together = [
     buildRunner('build shared', ['shared'], []),
     ...lintRunners(root).reverse(),
     ...typeRunners(root),
     buildRunner('build applications', others, ['build shared']),
     ...vitestRunners(root, folder),
-    jestRunner(root, folder, {
-      name: 'api (jest)',
-      after: ['build shared'],
-      env: () => startTestDatabase(path.join(folder, 'jest')),
-    }),
   ];
-  // The journeys have the machine to themselves: a browser that waits for a core fails what is right.
-  return [
-    ...alone,
-    journeysRunner(
-      root,
-      folder,
-      alone.map(({ name }) => name),
-    ),
-  ];
+  // The API's tests measure time, and a browser that waits for a core fails what is right: each has the machine
+  // to itself.
+  const api = jestRunner(root, folder, {
+    name: 'api (jest)',
+    after: together.map(({ name }) => name),
+    env: () => startTestDatabase(path.join(folder, 'jest')),
+  });
+  return [...together, api, journeysRunner(root, folder, [api.name])];
 };
 
 /** Parts of a check, by name. @type {Record<string, (folder: string) => Runner[]>} */
