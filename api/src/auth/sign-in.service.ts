@@ -31,13 +31,26 @@ export class SignInService {
   async signIn({ email: typed, password }: SignIn, caller: Caller): Promise<Opened> {
     const email = typed.toLowerCase();
     const counted = await this.slowDown.count(email, caller.address);
-    const known = await this.work.reader.findOne(UserRow, { where: { email, active: true } });
-    const fits = await this.passwords.fits(password, known?.passwordHash ?? null);
-    if (!known || !fits) {
+    const fits = await this.passwords.fits(password, await this.keptHash(email));
+    const known = fits ? await this.work.reader.findOne(UserRow, { where: { email, active: true } }) : null;
+    if (!known) {
       throw new Refusal(401, 'sign-in.refused', 'This address and this password do not belong together.');
     }
     await this.slowDown.succeeded(counted);
     return this.open(known, caller);
+  }
+
+  /**
+   * The hash that is kept for an address, or null. The answer is one row of one column in either case: to build
+   * a whole person only where there is one took measurably longer.
+   */
+  private async keptHash(email: string): Promise<string | null> {
+    const rows: { hash: string | null }[] = await this.work.reader.query(
+      `SELECT person.password_hash AS hash FROM (SELECT 1) AS always
+         LEFT JOIN ellwand.user AS person ON person.email = ? AND person.active`,
+      [email],
+    );
+    return rows[0]?.hash ?? null;
   }
 
   private open(user: UserRow, caller: Caller): Promise<Opened> {

@@ -27,6 +27,9 @@ export function Tape(props: TapeProps) {
   );
 }
 
+/** A figure's width, and room beside it: one that the tape's end would cut is left out. */
+const FIGURE_WIDTH = 7;
+
 /** A tape as part of a drawing, its edge at x = 0 or y = 0; upright it stands to the left and counts upwards. */
 export function TapeMarks(props: TapeProps) {
   const { lengthPx, upright = false } = props;
@@ -51,7 +54,7 @@ function Ticks({ unit, lengthPx, mmPerPx, upright = false }: TapeProps & { reado
     <>
       <path className="tape-ticks" d={ticks.map(line).join('')} />
       {ticks.map(({ px, label }) =>
-        label === undefined ? null : (
+        label === undefined || px + label.length * FIGURE_WIDTH > lengthPx ? null : (
           <text
             key={px}
             className="tape-figure"

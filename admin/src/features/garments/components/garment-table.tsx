@@ -30,7 +30,7 @@ export function GarmentTable({
           <th scope="col" className="px-3 py-2 font-medium">
             Number
           </th>
-          <th scope="col" className="px-3 py-2 font-medium">
+          <th scope="col" className="w-full px-3 py-2 font-medium">
             Title
           </th>
           <th scope="col" className="px-3 py-2 font-medium">
@@ -39,7 +39,7 @@ export function GarmentTable({
           <th scope="col" className="px-3 py-2 font-medium">
             Date
           </th>
-          <th scope="col" className="px-3 py-2 text-right font-medium">
+          <th scope="col" className="px-3 py-2 text-right font-medium max-lg:hidden">
             Pictures
           </th>
           <th scope="col" className="px-3 py-2 font-medium">
@@ -75,11 +75,11 @@ function GarmentRow({ garment, height }: { readonly garment: GarmentSummary; rea
           {garment.title}
         </Link>
       </th>
-      <td className="px-3 text-ink-2 max-md:hidden">{kindWord(garment.kind)}</td>
+      <td className="whitespace-nowrap px-3 text-ink-2 max-md:hidden">{kindWord(garment.kind)}</td>
       <td className="figures whitespace-nowrap px-3 text-ink-2 max-md:px-2 max-md:text-label">
         {garment.date}
       </td>
-      <td className="figures px-3 text-right text-ink-2 max-md:hidden">{garment.pictures}</td>
+      <td className="figures px-3 text-right text-ink-2 max-lg:hidden">{garment.pictures}</td>
       <td className="px-3 max-md:px-2">
         <StageMark stage={garment.stage} isPublic={garment.isPublic} />
         {garment.openSheets > 0 && (
