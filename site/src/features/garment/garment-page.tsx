@@ -1,6 +1,6 @@
 import { useLoaderData } from 'react-router-dom';
-import { NotFoundPage } from '../notices/not-found-page';
-import { WithdrawalPage } from '../notices/withdrawal-page';
+import { NotFoundPage } from '../../components/notices/not-found-page';
+import { WithdrawalPage } from '../../components/notices/withdrawal-page';
 import { type GarmentPageData } from './garment-loader';
 import { GarmentView } from './garment-view';
 

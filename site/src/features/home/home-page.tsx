@@ -3,7 +3,7 @@ import { SiteLink } from '../../components/ui/site-link';
 import { paths } from '../../config/paths';
 import { isUnit } from '../../lib/range-boxes';
 import { counted } from '../../lib/words';
-import { GarmentCard } from '../search/garment-card';
+import { GarmentCard } from '../../components/ui/garment-card';
 import { type HomeFound } from './home-loader';
 import { KindEntries } from './kind-entries';
 import { LivingDrawing } from './living-drawing';

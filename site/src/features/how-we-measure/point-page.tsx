@@ -12,7 +12,7 @@ import { SiteLink } from '../../components/ui/site-link';
 import { Length } from '../../components/units/length';
 import { paths } from '../../config/paths';
 import { kindName } from '../../lib/words';
-import { NotFoundPage } from '../notices/not-found-page';
+import { NotFoundPage } from '../../components/notices/not-found-page';
 import { PointFacts } from './point-facts';
 
 /** One measuring point: the address that every published figure of it links to. */

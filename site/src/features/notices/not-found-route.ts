@@ -1,6 +1,6 @@
 import { pageHandle } from '../../app/page-handle';
 
-export { NotFoundPage as Component } from './not-found-page';
+export { NotFoundPage as Component } from '../../components/notices/not-found-page';
 
 export const handle = pageHandle({
   head: () => ({

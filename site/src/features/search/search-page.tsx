@@ -5,7 +5,7 @@ import { paths } from '../../config/paths';
 import { type BoxProblem } from '../../lib/range-boxes';
 import { isNarrowed } from '../../lib/search-address';
 import { counted } from '../../lib/words';
-import { GarmentCard } from './garment-card';
+import { GarmentCard } from '../../components/ui/garment-card';
 import { PagesNav } from './pages-nav';
 import { ResultsTable } from './results-table';
 import { SearchChips } from './search-chips';

@@ -1,5 +1,5 @@
 import { type WithdrawalNotice } from '@ellwand/shared/records/published-garment';
-import { SiteLink } from '../../components/ui/site-link';
+import { SiteLink } from '../ui/site-link';
 import { paths } from '../../config/paths';
 import { museum } from '../../config/museum';
 import { dayText } from '../../lib/words';

@@ -1,7 +1,7 @@
 import { type CatalogueCard } from '@ellwand/shared/records/published-garment';
-import { Picture } from '../../components/ui/picture';
-import { SiteLink } from '../../components/ui/site-link';
-import { Length } from '../../components/units/length';
+import { Picture } from './picture';
+import { SiteLink } from './site-link';
+import { Length } from '../units/length';
 import { paths } from '../../config/paths';
 import { kindName } from '../../lib/words';
 

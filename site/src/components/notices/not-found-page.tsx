@@ -1,4 +1,4 @@
-import { SiteLink } from '../../components/ui/site-link';
+import { SiteLink } from '../ui/site-link';
 import { paths } from '../../config/paths';
 
 /** Also for a garment that was never published: the two cannot be told apart from outside. */
