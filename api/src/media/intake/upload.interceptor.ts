@@ -1,4 +1,4 @@
-import { rm } from 'node:fs/promises';
+import { rmSync } from 'node:fs';
 import {
   BadRequestException,
   type CallHandler,
@@ -51,7 +51,7 @@ export class UploadInterceptor implements NestInterceptor {
     await this.store.incoming('any');
     const answer = await this.receive(context, next);
     const path = request.file?.path;
-    return answer.pipe(finalize(() => void (path && rm(path, { force: true }))));
+    return answer.pipe(finalize(() => path && rmSync(path, { force: true })));
   }
 
   private async receive(context: ExecutionContext, next: CallHandler): Promise<Observable<unknown>> {
