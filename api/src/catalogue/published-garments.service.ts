@@ -10,17 +10,17 @@ import { DataSource } from 'typeorm';
 import { InjectCatalogue } from '../common/catalogue-connection';
 import { fromJson } from './json-column';
 
+/** A garment with one of its versions; the document is there for the version that was asked for. */
 interface FoundRow {
   readonly garment_state: 'published' | 'withdrawn';
   readonly notice: string | null;
   readonly withdrawn_on: string | null;
-  readonly state: VersionState | null;
-  readonly document: unknown;
-}
-interface VersionRow {
   readonly version: number;
-  readonly published_at: Date;
   readonly state: VersionState;
+  readonly published_at: Date;
+  /** 1 for the version that was asked for. */
+  readonly is_asked: string | number;
+  readonly document: unknown;
 }
 
 const nothing: GarmentFound = { found: 'nothing' };
@@ -35,40 +35,26 @@ export class PublishedGarments {
   async find(number: string, version?: number): Promise<GarmentFound> {
     if (!/^[a-z0-9-]{1,80}$/.test(number)) return nothing;
     if (version !== undefined && !(version >= 1 && version <= mostVersions)) return nothing;
-    const row = await this.row(number, version);
+    const rows = await this.rows(number, version);
+    const row = rows.find((each) => Number(each.is_asked) === 1);
+    // A garment that was withdrawn answers so for every version it ever had, but not for others.
     if (!row) return nothing;
     if (row.garment_state === 'withdrawn' || row.state === 'withdrawn') {
-      // A garment that was withdrawn answers so for every version it ever had, but not for others.
-      if (row.state === null) return nothing;
       return { found: 'withdrawn', notice: await this.notice(number, row) };
     }
-    if (row.state === null || row.document === null) return nothing;
-    return { found: 'garment', garment: await this.garment(number, row.state, row.document) };
+    return { found: 'garment', garment: garmentOf(row, rows) };
   }
 
-  private async row(number: string, version: number | undefined): Promise<FoundRow | undefined> {
-    const rows: FoundRow[] = await this.catalogue.query(
+  /** One question for the garment and all its versions: pages ask it more often than anything else. */
+  private rows(number: string, version: number | undefined): Promise<FoundRow[]> {
+    const asked = 'v.version = COALESCE(?, g.current_version)';
+    return this.catalogue.query(
       `SELECT g.state AS garment_state, g.notice, DATE_FORMAT(g.withdrawn_on, '%Y-%m-%d') AS withdrawn_on,
-          v.state, v.document
-        FROM published_garment g
-        LEFT JOIN published_version v ON v.number = g.number AND v.version = COALESCE(?, g.current_version)
-        WHERE g.number = ?`,
-      [version ?? null, number],
+          v.version, v.state, v.published_at, ${asked} AS is_asked, IF(${asked}, v.document, NULL) AS document
+        FROM published_garment g JOIN published_version v ON v.number = g.number
+        WHERE g.number = ? ORDER BY v.version`,
+      [version ?? null, version ?? null, number],
     );
-    return rows[0];
-  }
-
-  private async garment(number: string, state: VersionState, document: unknown): Promise<PublishedGarment> {
-    const rows: VersionRow[] = await this.catalogue.query(
-      'SELECT version, published_at, state FROM published_version WHERE number = ? ORDER BY version',
-      [number],
-    );
-    const versions = rows.map((row) => ({
-      version: row.version,
-      publishedAt: row.published_at.toISOString(),
-      state: row.state,
-    }));
-    return { ...(fromJson(document) as PublishedDocument), state, versions };
   }
 
   /** A garment published anew has no notice any more, but the versions from before stay withdrawn. */
@@ -90,4 +76,13 @@ export class PublishedGarments {
     if (!day) throw new Error(`No withdrawal of ${number} has been noted`);
     return day;
   }
+}
+
+function garmentOf({ state, document }: FoundRow, rows: readonly FoundRow[]): PublishedGarment {
+  const versions = rows.map((row) => ({
+    version: row.version,
+    publishedAt: row.published_at.toISOString(),
+    state: row.state,
+  }));
+  return { ...(fromJson(document) as PublishedDocument), state, versions };
 }

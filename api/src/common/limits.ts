@@ -10,10 +10,11 @@ export type LimitKind = 'public' | 'workroom' | 'sign-in' | 'upload';
 export type Limits = Readonly<Record<LimitKind, number>>;
 
 /**
- * A reading room or a school behind one address browses at a few hundred requests a minute, pictures among them; a measuring
- * table with three tablets stays below a hundred. A password is tried by hand a few times a minute.
+ * A page with its pictures is thirty requests or so, and a school class behind one address opens a hundred pages a
+ * minute; a measuring table with three tablets stays below a hundred requests. A password is tried by hand a few
+ * times a minute.
  */
-export const defaultLimits: Limits = { public: 1_500, workroom: 900, 'sign-in': 20, upload: 120 };
+export const defaultLimits: Limits = { public: 6_000, workroom: 900, 'sign-in': 20, upload: 120 };
 
 export const LIMITED_AS = 'ellwand:limited-as';
 
