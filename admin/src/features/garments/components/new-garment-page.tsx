@@ -75,7 +75,7 @@ export function NewGarmentPage() {
                   <input
                     type="radio"
                     name="division"
-                    className="size-6 accent-indigo"
+                    className="size-6 shrink-0 accent-indigo"
                     checked={division === value}
                     onChange={() => setDivision(value)}
                   />

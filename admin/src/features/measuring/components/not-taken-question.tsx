@@ -47,7 +47,7 @@ export function NotTakenQuestion({ open, label, onClose, onSaid }: NotTakenQuest
               value={id}
               checked={reason === id}
               onChange={() => setReason(id)}
-              className="size-6 accent-indigo"
+              className="size-6 shrink-0 accent-indigo"
             />
             {notTakenReasons[id]}
           </label>

@@ -68,7 +68,7 @@ export function PeopleChoice({ id, colleagues, people, onChange, error }: People
                       type="checkbox"
                       checked={has(userId, duty)}
                       onChange={() => toggle(userId, duty)}
-                      className="size-6 accent-indigo"
+                      className="size-6 shrink-0 accent-indigo"
                     />
                   </label>
                 </td>

@@ -20,10 +20,10 @@ export function RoleTicks({ id, chosen, onChange, error }: RoleTicksProps) {
     <fieldset id={id} tabIndex={-1} aria-describedby={error ? `${id}-error` : undefined}>
       <legend className="text-table font-medium">Roles</legend>
       {roles.map((role) => (
-        <label key={role} className="flex min-h-10 items-center gap-3 text-table">
+        <label key={role} className="flex min-h-10 items-center gap-3 py-1 text-table leading-5">
           <input
             type="checkbox"
-            className="size-6 accent-indigo"
+            className="size-6 shrink-0 accent-indigo"
             checked={chosen.includes(role)}
             onChange={() =>
               onChange(roles.filter((one) => (one === role ? !chosen.includes(one) : chosen.includes(one))))
