@@ -38,6 +38,17 @@ describe('the measuring sheet', () => {
     table.post(`/api/v1/workroom/sheets/${sheet}/readings`).send({ readings });
   const sheetNow = async () => (await table.get(`/api/v1/workroom/sheets/${skirt.id}`)).body as SheetShown;
 
+  it('is opened once, however often and at once the request comes', async () => {
+    const [bodice, other] = dress.parts.map((part) => part.id);
+    const body = { id: uuidv7(), facts: factsWith(reader, holder) };
+    const open = (part = bodice) => table.post(`/api/v1/workroom/parts/${part}/sheets`).send(body);
+    const answers = await Promise.all([open(), open(), open()]);
+    expect(answers.map((answer) => answer.status)).toEqual([201, 201, 201]);
+    const sheets = (await table.get(`/api/v1/workroom/garments/${dress.id}`)).body.parts[0].sheets;
+    expect(sheets).toHaveLength(1);
+    expect((await open(other)).body).toMatchObject({ status: 409, code: 'sheet.id-used' });
+  });
+
   it('keeps what was typed beside its exact millimetres', async () => {
     const answer = await send([reading('waistband', '24 3/8', reader.id, { unit: 'in' })]);
     // 24 3/8 in = 619.125 mm exactly: international yard and pound agreement, 1959.

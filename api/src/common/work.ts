@@ -44,3 +44,8 @@ function isRetriable(fault: unknown): boolean {
     retriable.has(fault.errno)
   );
 }
+
+/** Whether a row of that key is there already: two requests for the same thing came at once. */
+export function isDuplicate(fault: unknown): boolean {
+  return fault instanceof Error && 'errno' in fault && fault.errno === 1062;
+}

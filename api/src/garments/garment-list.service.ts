@@ -27,9 +27,13 @@ export class GarmentListService {
     const select = this.work.reader.createQueryBuilder(GarmentRow, 'garment').where('1 = 1');
     if (query.stage) select.andWhere('garment.stage = :stage', { stage: query.stage });
     if (query.q) {
-      select.andWhere('(garment.ownNumber LIKE :like OR garment.title LIKE :like)', {
-        like: `%${escapeLike(query.q)}%`,
-      });
+      const looked = [
+        'garment.ownNumber',
+        'garment.title',
+        "JSON_VALUE(garment.record, '$.maker') COLLATE utf8mb4_uca1400_ai_ci",
+      ];
+      const like = { like: `%${escapeLike(query.q)}%` };
+      select.andWhere(`(${looked.map((column) => `${column} LIKE :like`).join(' OR ')})`, like);
     }
     const [garments, total] = await select
       .orderBy(orders[query.sort])

@@ -6,7 +6,7 @@ import { AuditService } from '../audit/audit.service';
 import type { Actor } from '../common/actor';
 import { Clock } from '../common/clock';
 import { conflict, notFound, Refusal } from '../common/refusal';
-import { type Tx, Work } from '../common/work';
+import { isDuplicate, type Tx, Work } from '../common/work';
 import { SheetRow } from '../measuring/sheets/sheet.entity';
 import { GarmentEditor } from './garment-editor.entity';
 import { GarmentEdits } from './garment-edits';
@@ -30,8 +30,18 @@ export class GarmentsService {
   }
 
   /** Makes a garment. A repeated request with the same id answers with the garment that it made. */
-  make(made: NewGarment, actor: Actor): Promise<Garment> {
+  async make(made: NewGarment, actor: Actor): Promise<Garment> {
     const id = made.id ?? uuidv7();
+    try {
+      return await this.insert(id, made, actor);
+    } catch (fault) {
+      // The same request was under way beside this one: now its garment is there, or its number is used.
+      if (!isDuplicate(fault)) throw fault;
+      return this.insert(id, made, actor);
+    }
+  }
+
+  private insert(id: string, made: NewGarment, actor: Actor): Promise<Garment> {
     return this.work.run(async (tx) => {
       if (await tx.existsBy(GarmentRow, { id })) return this.view.of(tx, id);
       refuseUnreadableDate(made.record, '/record/date');

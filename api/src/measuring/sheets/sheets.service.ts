@@ -44,10 +44,12 @@ export class SheetsService {
     actor: Actor,
   ): Promise<SheetShown> {
     return this.work.run(async (tx) => {
-      if (await tx.existsBy(SheetRow, { id, partId })) return this.view.of(tx, id);
       const part = await tx.findOne(PartRow, { where: { id: partId } });
       if (!part) throw notFound('part.unknown', 'part');
+      if (await isOpened(tx, id, partId)) return this.view.of(tx, id);
       await this.garments.noteMeasuring(tx, actor, part.garmentId);
+      // Asked again now that the garment is locked: the same request may have been under way beside this one.
+      if (await isOpened(tx, id, partId)) return this.view.of(tx, id);
       const now = this.clock.now();
       await tx.insert(SheetRow, {
         ...columnsOf(facts),
@@ -122,6 +124,14 @@ export class SheetsService {
   private note(tx: Tx, actor: Actor, verb: string, sheetId: string, summary: string): Promise<void> {
     return this.audit.note(tx, actor, { verb, subjectKind: 'sheet', subjectId: sheetId, summary });
   }
+}
+
+/** @throws Refusal 409 where the id was used for a sheet of another part */
+async function isOpened(tx: Tx, id: string, partId: string): Promise<boolean> {
+  const sheet = await tx.findOne(SheetRow, { where: { id } });
+  if (sheet && sheet.partId !== partId)
+    throw conflict('sheet.id-used', 'Another sheet was opened under this id.');
+  return sheet !== null;
 }
 
 function refuseComplete(sheet: SheetRow): void {
