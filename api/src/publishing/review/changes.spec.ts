@@ -1,0 +1,136 @@
+import type { PublishedDocument, PublishedMeasurement } from '@ellwand/shared/records/published-garment';
+import { changesBetween } from './changes';
+
+const waist: PublishedMeasurement = {
+  pointId: 'waist',
+  label: 'Waist',
+  valueMm: '612',
+  uncertaintyMm: '2.1',
+  rounds: 1,
+  spreadMm: '0',
+  levelFoundBy: 'seam',
+  tapeLengths: null,
+  halfMm: null,
+  imageId: null,
+};
+
+const bodice: PublishedDocument['parts'][number] = {
+  number: 'LH.1958.6',
+  kind: 'bodice',
+  name: 'Bodice',
+  measuredOn: '2026-11-20',
+  support: null,
+  tape: null,
+  fasteningPair: null,
+  measuredBy: [],
+  peopleCount: 2,
+  measurements: [waist],
+  notTaken: [],
+  derived: [],
+};
+
+const published: PublishedDocument = {
+  number: 'lh-1958-6',
+  version: 1,
+  ownNumber: 'LH.1958.6',
+  title: 'Bodice of red wool',
+  kind: 'bodice',
+  wornBy: 'woman',
+  description: '',
+  date: { edtf: '1881/1883', display: '1881–1883', fromYear: 1881, toYear: 1883 },
+  maker: null,
+  label: null,
+  place: null,
+  materials: ['wool'],
+  techniques: [],
+  colours: [],
+  fastenings: '',
+  lining: '',
+  alterations: '',
+  condition: '',
+  hazards: [],
+  wearer: '',
+  references: '',
+  otherNumbers: [],
+  creditLine: 'Larkmoor House Museum of Dress',
+  rights: { uri: 'http://creativecommons.org/publicdomain/zero/1.0/', label: 'CC0 1.0' },
+  parts: [bodice],
+  images: [],
+  museum: 'Larkmoor House Museum of Dress',
+  publishedAt: '2026-11-20T09:00:00.000Z',
+};
+
+const withPart = (part: Partial<typeof bodice>): PublishedDocument => ({
+  ...published,
+  parts: [{ ...bodice, ...part }],
+});
+
+describe('what a new version changes', () => {
+  it('is nothing where the public sees the same', () => {
+    expect(
+      changesBetween(published, { ...published, version: 2, publishedAt: '2026-12-01T09:00:00.000Z' }),
+    ).toEqual([]);
+  });
+
+  it('is everything that is said, in a first version', () => {
+    const added = changesBetween(null, published);
+    expect(new Set(added.map((change) => change.kind))).toEqual(new Set(['added']));
+    expect(added.map((change) => change.label)).toEqual(
+      expect.arrayContaining(['Title', 'Materials', 'Waist (Bodice)']),
+    );
+    expect(added.map((change) => change.label)).not.toContain('Maker');
+  });
+
+  it('is told in the words of the field', () => {
+    expect(changesBetween(published, { ...published, maker: 'Harbin & Lisle', materials: [] })).toEqual([
+      { kind: 'added', area: 'record', label: 'Maker', before: null, after: 'Harbin & Lisle' },
+      { kind: 'removed', area: 'record', label: 'Materials', before: 'wool', after: null },
+    ]);
+  });
+
+  it('is a measurement that was read again, exactly', () => {
+    expect(
+      changesBetween(published, withPart({ measurements: [{ ...waist, valueMm: '613.5', rounds: 2 }] })),
+    ).toEqual([
+      {
+        kind: 'changed',
+        area: 'measurement',
+        label: 'Waist (Bodice)',
+        before: '612 mm',
+        after: '613.5 mm (2 rounds)',
+      },
+    ]);
+  });
+
+  it('is a measurement that can no longer be taken', () => {
+    const frail = withPart({
+      measurements: [],
+      notTaken: [{ pointId: 'waist', label: 'Waist', reason: 'too-fragile' }],
+    });
+    expect(changesBetween(published, frail)).toEqual([
+      {
+        kind: 'changed',
+        area: 'measurement',
+        label: 'Waist (Bodice)',
+        before: '612 mm',
+        after: 'Not taken. Too fragile to handle',
+      },
+    ]);
+  });
+
+  it('is a picture that comes, and its place', () => {
+    const image = {
+      id: 'a',
+      view: 'front' as const,
+      alt: 'Front.',
+      caption: '',
+      credit: '',
+      widthPx: 9,
+      heightPx: 9,
+      widths: [],
+    };
+    expect(changesBetween(published, { ...published, images: [image] })).toEqual([
+      { kind: 'added', area: 'picture', label: 'Picture, front', before: null, after: '1. Front.' },
+    ]);
+  });
+});
