@@ -12,7 +12,7 @@ const pages = [
   { path: '/how-we-measure/waist', status: 200 },
   { path: '/g/lh-1969-12', status: 410 },
   { path: '/g/never-published', status: 404 },
-  // A draft has no public number; the address that it would have is as unknown as any other.
+  // A draft has no public number: the address that it would have is not known either.
   { path: '/g/lh-1958-7', status: 404 },
 ];
 
