@@ -88,6 +88,37 @@ describe('the measuring sheet', () => {
     expect((await sheetNow()).readings).toHaveLength(2);
   });
 
+  it('answers a batch that comes again after the garment was published, and leaves it published', async () => {
+    const batch = soundSheet(skirt, reader.id);
+    const { sheetVersion } = (await send(batch)).body as { sheetVersion: number };
+    const complete = `/api/v1/workroom/sheets/${skirt.id}/complete`;
+    expect((await table.post(complete).set('If-Match', `"${sheetVersion}"`)).status).toBe(200);
+    const path = `/api/v1/workroom/garments/${dress.id}`;
+    const verb = async (who: Agent, name: string) => {
+      const { version } = (await table.get(path)).body as Garment;
+      return (await who.post(`${path}/${name}`).set('If-Match', `"${version}"`)).status;
+    };
+    const outcomes = async () => {
+      const { results } = (await send(batch)).body as { results: { outcome: string }[] };
+      return new Set(results.map(({ outcome }) => outcome));
+    };
+    const other = await house.signInAs(await house.person('curator', 'Hal Brandreth'));
+    expect(await verb(table, 'submit')).toBe(200);
+    expect(await outcomes()).toEqual(new Set(['already-kept']));
+    expect(await verb(other, 'approve')).toBe(200);
+    expect(await verb(other, 'publish')).toBe(200);
+    expect(await outcomes()).toEqual(new Set(['already-kept']));
+    expect((await table.get(path)).body.stage).toBe('published');
+  });
+
+  it('takes ids in capitals for the same ids', async () => {
+    const first = reading('waistband', '618', reader.id);
+    await send([{ ...first, id: first.id.toUpperCase(), readBy: reader.id.toUpperCase() }]);
+    const corrected = { replaces: first.id.toUpperCase() };
+    const answer = await send([reading('waistband', '619', reader.id, corrected)]);
+    expect(answer.body.results[0]).toMatchObject({ outcome: 'kept', reading: { replaces: first.id } });
+  });
+
   it('keeps one of a batch that arrives many times at once', async () => {
     const batch = [reading('waistband', '618', reader.id)];
     await Promise.all(Array.from({ length: 8 }, () => send(batch)));
@@ -185,6 +216,37 @@ describe('the measuring sheet', () => {
     expect((await complete(rest.body.sheetVersion)).body.state).toBe('complete');
     const late = await send([reading('waistband', '700', reader.id)]);
     expect(late.body).toMatchObject({ status: 409, code: 'sheet.complete' });
+  });
+
+  it('takes no answer for a point that was left out: it is read, or has its reason on the sheet', async () => {
+    const path = `/api/v1/workroom/sheets/${skirt.id}/findings`;
+    const missing = (await table.get(path)).body.findings.find(
+      (each: { checkId: string }) => each.checkId === 'required-missing-without-reason',
+    );
+    const answer = await table.post(`${path}/answers`).send({ key: missing.key, reason: 'Later.' });
+    expect(answer.body).toMatchObject({ status: 409, code: 'finding.unread', detail: missing.sentence });
+  });
+
+  it('names whoever has left as before, but nobody anew who does not work here', async () => {
+    const left = await house.person('recorder', 'Colm Hale');
+    await house.owner.source.query('UPDATE ellwand.user SET active = FALSE WHERE id IN (?)', [
+      [left.id, holder.id],
+    ]);
+    const setFacts = async (facts: object) => {
+      const { version } = await sheetNow();
+      const path = `/api/v1/workroom/sheets/${skirt.id}/facts`;
+      return table.put(path).set('If-Match', `"${version}"`).send(facts);
+    };
+    const same = await setFacts(factsWith(reader, holder, { place: 'The long gallery' }));
+    expect(same.body.facts).toMatchObject({ place: 'The long gallery' });
+    expect(same.body.facts.people).toContainEqual({ userId: holder.id, duty: 'held', name: 'Ines Thorne' });
+    const anew = await setFacts(factsWith(reader, left));
+    expect(anew.body).toMatchObject({
+      status: 400,
+      code: 'sheet.unknown-person',
+      errors: [{ pointer: '/people' }],
+    });
+    expect((await sheetNow()).facts.people).toHaveLength(3);
   });
 
   it('keeps an answer as long as the figures stay', async () => {

@@ -1,7 +1,7 @@
 import { z } from 'zod';
 
-/** A UUID of any version; ids made by Ellwand are UUIDv7, so that they sort by time. */
-export const Uuid = z.uuid();
+/** A UUID of any version, in small letters as it is kept; ids made by Ellwand are UUIDv7, so that they sort by time. */
+export const Uuid = z.uuid().toLowerCase();
 
 /** An exact length in millimetres as a decimal string of at most four places: "612", "920.75". Never a float. */
 export const LengthMm = z

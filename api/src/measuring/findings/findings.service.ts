@@ -18,6 +18,9 @@ import { readingsOf } from '../sheets/sheet-view';
 import { SheetRow } from '../sheets/sheet.entity';
 import { FindingAnswerRow } from './finding-answer.entity';
 
+/** Raised for a point that is neither read nor given its reason: nothing else settles it. */
+const missingPoint = 'required-missing-without-reason';
+
 /** What the checks have to say about a sheet, and what people answered. Findings are never stored: they follow the readings. */
 @Injectable()
 export class FindingsService {
@@ -41,6 +44,8 @@ export class FindingsService {
       const finding = findings.find((candidate) => candidate.key === key);
       if (!finding)
         throw conflict('finding.gone', 'That finding is not there any more; the readings have changed.');
+      // An answer here would leave the point out without a word on the public page.
+      if (finding.checkId === missingPoint) throw conflict('finding.unread', finding.sentence);
       const answer = { reason, answeredBy: actor.id, answeredAt: this.clock.now() };
       await tx
         .createQueryBuilder()
@@ -71,7 +76,7 @@ export class FindingsService {
     const { findings } = await this.of(tx, sheetId);
     const stops = findings.filter((finding) => finding.severity === 'stop' && finding.answer === null);
     if (stops.length === 0) return;
-    const missing = stops.filter((stop) => stop.checkId === 'required-missing-without-reason');
+    const missing = stops.filter((stop) => stop.checkId === missingPoint);
     if (missing.length === stops.length) {
       const points = missing.length === 1 ? 'One point is' : `${missing.length} points are`;
       throw conflict('sheet.points-missing', `${points} still to be read, or given a reason.`, {

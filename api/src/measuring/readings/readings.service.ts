@@ -1,5 +1,6 @@
 import { Injectable } from '@nestjs/common';
 import type { NewReading, ReadingResults } from '@ellwand/shared/records/sheet';
+import { In } from 'typeorm';
 import type { z } from 'zod';
 import { AuditService } from '../../audit/audit.service';
 import type { Actor } from '../../common/actor';
@@ -8,6 +9,7 @@ import { conflict } from '../../common/refusal';
 import { type Tx, Work } from '../../common/work';
 import { SheetEdits, type SheetInHand } from '../sheets/sheet-edits';
 import { SheetPersonRow } from '../sheets/sheet-person.entity';
+import { SheetRow } from '../sheets/sheet.entity';
 import { takeIn, type TapeFacts } from './reading-intake';
 import { ReadingRow } from './reading.entity';
 import { toStored } from './stored-reading';
@@ -30,6 +32,8 @@ export class ReadingsService {
 
   takeIn(sheetId: string, readings: readonly NewReading[], actor: Actor): Promise<Results> {
     return this.work.run(async (tx) => {
+      const again = await repeatedBatch(tx, sheetId, readings);
+      if (again) return again;
       const inHand = await this.sheets.take(tx, actor, sheetId);
       const facts = await tapeFacts(tx, inHand);
       const results: Result[] = [];
@@ -113,6 +117,26 @@ async function tapeFacts(tx: Tx, { sheet, part }: SheetInHand): Promise<TapeFact
     tapeZeroMm: sheet.tapeZeroMm,
     readers: readers.map((person) => person.userId),
   };
+}
+
+/**
+ * A batch that has been kept whole before, answered from what was kept. It touches neither the sheet nor the record:
+ * a tablet that never had its answer may repeat itself after the garment was sent to review or published.
+ */
+async function repeatedBatch(
+  tx: Tx,
+  sheetId: string,
+  readings: readonly NewReading[],
+): Promise<Results | undefined> {
+  const rows = await tx.find(ReadingRow, { where: { sheetId, id: In(readings.map(({ id }) => id)) } });
+  const kept = new Map(rows.map((row) => [row.id, row]));
+  const results = readings.flatMap((reading) => {
+    const already = kept.get(reading.id);
+    return already ? [repeated(already, sheetId, reading)] : [];
+  });
+  if (results.length < readings.length) return undefined;
+  const { version } = await tx.findOneByOrFail(SheetRow, { id: sheetId });
+  return { sheetVersion: version, results };
 }
 
 /** The same reading again is answered with what was kept; another one under its id is refused. */

@@ -63,7 +63,7 @@ export class SheetsService {
         updatedAt: now,
         updatedBy: actor.id,
       });
-      await namePeople(tx, id, facts.people);
+      await namePeople(tx, id, facts.people, '/facts/people');
       await this.note(tx, actor, 'open', id, `${actor.name} opened a measuring sheet for ${part.name}`);
       return this.view.of(tx, id);
     });
@@ -73,8 +73,7 @@ export class SheetsService {
     return this.work.run(async (tx) => {
       const { sheet, part } = await this.sheets.takeAt(tx, actor, id, seen);
       refuseComplete(sheet);
-      await tx.delete(SheetPersonRow, { sheetId: id });
-      await namePeople(tx, id, facts.people);
+      await namePeople(tx, id, facts.people, '/people');
       await this.sheets.set(tx, actor, sheet, columnsOf(facts));
       await this.note(
         tx,
@@ -144,11 +143,19 @@ function columnsOf({ people: _people, ...columns }: SheetFacts) {
   return columns;
 }
 
-async function namePeople(tx: Tx, sheetId: string, people: SheetFacts['people']): Promise<void> {
+/** Names these people and nobody else. Whoever is named already stays so, also once they have left the museum. */
+async function namePeople(
+  tx: Tx,
+  sheetId: string,
+  people: SheetFacts['people'],
+  pointer: string,
+): Promise<void> {
+  const before = await tx.find(SheetPersonRow, { where: { sheetId } });
   const ids = [...new Set(people.map((person) => person.userId))];
-  const known = await tx.countBy(UserRow, { id: In(ids), active: true });
-  if (known !== ids.length) {
-    const errors = [{ pointer: '/facts/people', detail: 'Name people who work here now' }];
+  const added = ids.filter((id) => !before.some(({ userId }) => userId === id));
+  const known = await tx.countBy(UserRow, { id: In(added), active: true });
+  if (known !== added.length) {
+    const errors = [{ pointer, detail: 'Name people who work here now' }];
     throw new Refusal(
       400,
       'sheet.unknown-person',
@@ -157,6 +164,7 @@ async function namePeople(tx: Tx, sheetId: string, people: SheetFacts['people'])
       errors,
     );
   }
+  await tx.delete(SheetPersonRow, { sheetId });
   const once = new Map(people.map(({ userId, duty }) => [`${userId} ${duty}`, { sheetId, userId, duty }]));
   await tx.insert(SheetPersonRow, [...once.values()]);
 }
