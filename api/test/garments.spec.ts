@@ -59,7 +59,47 @@ describe('the record of a garment', () => {
     const answer = await recorder
       .post(garments)
       .send({ record: silkDress, parts: [{ kind: 'dress', name: 'Dress' }] });
-    expect(answer.body).toMatchObject({ status: 409, code: 'garment.number-used' });
+    expect(answer.body).toMatchObject({
+      status: 409,
+      code: 'garment.number-used',
+      errors: [{ pointer: '/record/ownNumber' }],
+    });
+  });
+
+  it('takes a number from one of two who want it at once, and tells the other at its box', async () => {
+    const other = await makeDress(recorder, { ...silkDress, ownNumber: 'LH.1.1' });
+    const answers = await Promise.all(
+      [dress, other].map(({ id, version }) =>
+        recorder
+          .put(`${garments}/${id}/record`)
+          .set('If-Match', `"${version}"`)
+          .send({ ...silkDress, ownNumber: 'LH.2.2' }),
+      ),
+    );
+    expect(answers.map(({ status }) => status).sort()).toEqual([200, 409]);
+    expect(answers.find(({ status }) => status === 409)?.body).toMatchObject({
+      code: 'garment.number-used',
+      errors: [{ pointer: '/ownNumber' }],
+    });
+  });
+
+  it('has no two parts of one number, also in capitals', async () => {
+    const record = { ...silkDress, ownNumber: 'LH.1.1' };
+    const made = await recorder.post(garments).send({
+      record,
+      parts: [
+        { kind: 'bodice', name: 'Bodice', suffix: '.a' },
+        { kind: 'skirt', name: 'Skirt', suffix: '.A' },
+      ],
+    });
+    expect(made.body).toMatchObject({ status: 400, errors: [{ pointer: '/parts/1/suffix' }] });
+    const add = (version: number, suffix: string) =>
+      recorder
+        .post(`${garments}/${dress.id}/parts`)
+        .set('If-Match', `"${version}"`)
+        .send({ kind: 'cape', name: 'Cape', suffix });
+    const { version } = (await add(dress.version, '.a')).body as Garment;
+    expect((await add(version, '.A')).body).toMatchObject({ status: 409, code: 'part.number-used' });
   });
 
   it('loses no edit: of two people who saw the same version one is told what happened', async () => {

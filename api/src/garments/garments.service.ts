@@ -1,6 +1,12 @@
 import { Injectable } from '@nestjs/common';
 import { readDate } from '@ellwand/shared/records/edtf-date';
-import type { Garment, GarmentRecord, NewGarment, NewPart } from '@ellwand/shared/records/garment';
+import {
+  isSameSuffix,
+  type Garment,
+  type GarmentRecord,
+  type NewGarment,
+  type NewPart,
+} from '@ellwand/shared/records/garment';
 import { v7 as uuidv7 } from 'uuid';
 import { AuditService } from '../audit/audit.service';
 import type { Actor } from '../common/actor';
@@ -30,22 +36,16 @@ export class GarmentsService {
   }
 
   /** Makes a garment. A repeated request with the same id answers with the garment that it made. */
-  async make(made: NewGarment, actor: Actor): Promise<Garment> {
+  make(made: NewGarment, actor: Actor): Promise<Garment> {
     const id = made.id ?? uuidv7();
-    try {
-      return await this.insert(id, made, actor);
-    } catch (fault) {
-      // The same request was under way beside this one: now its garment is there, or its number is used.
-      if (!isDuplicate(fault)) throw fault;
-      return this.insert(id, made, actor);
-    }
+    return againIfDuplicate(() => this.insert(id, made, actor));
   }
 
   private insert(id: string, made: NewGarment, actor: Actor): Promise<Garment> {
     return this.work.run(async (tx) => {
       if (await tx.existsBy(GarmentRow, { id })) return this.view.of(tx, id);
       refuseUnreadableDate(made.record, '/record/date');
-      await refuseUsedNumber(tx, made.record.ownNumber, id);
+      await refuseUsedNumber(tx, made.record.ownNumber, id, '/record/ownNumber');
       const now = this.clock.now();
       await tx.insert(GarmentRow, {
         ...columnsOf(made.record),
@@ -71,10 +71,14 @@ export class GarmentsService {
   }
 
   rewrite(id: string, seen: number, record: GarmentRecord, actor: Actor): Promise<Garment> {
+    return againIfDuplicate(() => this.update(id, seen, record, actor));
+  }
+
+  private update(id: string, seen: number, record: GarmentRecord, actor: Actor): Promise<Garment> {
     return this.work.run(async (tx) => {
       const garment = await this.edits.lockAt(tx, id, seen);
       refuseUnreadableDate(record, '/date');
-      await refuseUsedNumber(tx, record.ownNumber, id);
+      await refuseUsedNumber(tx, record.ownNumber, id, '/ownNumber');
       await this.edits.edit(tx, actor, garment, columnsOf(record));
       await this.audit.note(tx, actor, {
         verb: 'edit',
@@ -92,7 +96,7 @@ export class GarmentsService {
       const garment = await this.edits.edit(tx, actor, await this.edits.lockAt(tx, id, seen), {});
       const parts = await tx.find(PartRow, { where: { garmentId: id } });
       if (parts.length >= 12) throw conflict('part.too-many', 'A garment has at most twelve parts.');
-      if (parts.some((other) => other.suffix === part.suffix)) {
+      if (parts.some((other) => isSameSuffix(other.suffix, part.suffix))) {
         throw conflict('part.number-used', `Part number "${part.suffix}" is used already on this garment.`);
       }
       const position = Math.max(-1, ...parts.map((other) => other.position)) + 1;
@@ -131,6 +135,19 @@ export class GarmentsService {
   }
 }
 
+/**
+ * Another request was under way beside this one, with the same id or number, and was the first. Asked again, this one
+ * finds its own garment there, or refuses a number that is used now.
+ */
+async function againIfDuplicate<T>(attempt: () => Promise<T>): Promise<T> {
+  try {
+    return await attempt();
+  } catch (fault) {
+    if (!isDuplicate(fault)) throw fault;
+    return attempt();
+  }
+}
+
 /** What lists need stands in columns of its own, always the same as in the record. */
 function columnsOf(record: GarmentRecord): Pick<GarmentRow, 'ownNumber' | 'title' | 'kind' | 'record'> {
   return { ownNumber: record.ownNumber, title: record.title, kind: record.kind, record };
@@ -142,13 +159,11 @@ function refuseUnreadableDate({ date }: GarmentRecord, pointer: string): void {
   throw new Refusal(400, 'garment.date', detail, {}, [{ pointer, detail }]);
 }
 
-async function refuseUsedNumber(tx: Tx, ownNumber: string, exceptId: string): Promise<void> {
+async function refuseUsedNumber(tx: Tx, ownNumber: string, exceptId: string, pointer: string): Promise<void> {
   const other = await tx.findOne(GarmentRow, { where: { ownNumber } });
   if (!other || other.id === exceptId) return;
   const message = `${ownNumber} is the number of “${other.title}” already.`;
-  throw conflict('garment.number-used', message, {
-    errors: [{ pointer: '/record/ownNumber', detail: message }],
-  });
+  throw new Refusal(409, 'garment.number-used', message, {}, [{ pointer, detail: message }]);
 }
 
 async function insertPart(tx: Tx, garmentId: string, part: NewPart, position: number): Promise<string> {

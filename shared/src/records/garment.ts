@@ -99,11 +99,30 @@ export const NewPart = z.strictObject({
 });
 export type NewPart = z.infer<typeof NewPart>;
 
+/** Whether two parts would have one number: capitals make no other number of it. */
+export const isSameSuffix = (one: string, other: string) => one.toLowerCase() === other.toLowerCase();
+
+/** Parts that are made together, each with a number of its own. */
+const NewParts = z
+  .array(NewPart)
+  .min(1, 'A garment has at least one part')
+  .max(12)
+  .superRefine((parts, context) => {
+    for (const [index, { suffix }] of parts.entries()) {
+      if (!parts.slice(0, index).some((earlier) => isSameSuffix(earlier.suffix, suffix))) continue;
+      context.addIssue({
+        code: 'custom',
+        path: [index, 'suffix'],
+        message: 'Another part has this number already',
+      });
+    }
+  });
+
 /** `POST /workroom/garments`: the client may choose the id, so that a repeated request makes one garment. */
 export const NewGarment = z.strictObject({
   id: Uuid.optional(),
   record: GarmentRecord,
-  parts: z.array(NewPart).min(1, 'A garment has at least one part').max(12),
+  parts: NewParts,
 });
 export type NewGarment = z.infer<typeof NewGarment>;
 
