@@ -186,6 +186,19 @@ describe('from the table to the public and back', () => {
     expect((await verb(curator, 'withdraw', { notice: 'Again.' })).status).toBe(409);
   });
 
+  it('keeps the whole inner reason of a withdrawal in the trail, and its notice', async () => {
+    await measureAll();
+    await publish();
+    const notice = 'Withdrawn while its history is looked into.';
+    const innerReason = `${'A long story. '.repeat(100)}The end.`;
+    await verb(curator, 'withdraw', { notice, innerReason });
+    const rows: { facts: object | string }[] = await house.owner.source.query(
+      "SELECT facts FROM ellwand_audit.entry WHERE verb = 'withdraw'",
+    );
+    const facts = rows[0]?.facts;
+    expect(typeof facts === 'string' ? JSON.parse(facts) : facts).toEqual({ notice, innerReason });
+  });
+
   it('is published once when the button is pressed twice', async () => {
     await measureAll();
     await verb(recorder, 'submit');

@@ -3,7 +3,7 @@ import type { Garment } from '@ellwand/shared/records/garment';
 import type { RecordStage } from '@ellwand/shared/records/record-moves';
 import type { Withdrawal } from '@ellwand/shared/records/publishing';
 import { v7 as uuidv7 } from 'uuid';
-import { AuditService } from '../audit/audit.service';
+import { type AuditNote, AuditService } from '../audit/audit.service';
 import type { Actor } from '../common/actor';
 import { Clock } from '../common/clock';
 import { conflict } from '../common/refusal';
@@ -20,6 +20,9 @@ import { RevisionRow } from './revision.entity';
 import { mayNotApprove } from './review/approval';
 import { ReviewService } from './review/review.service';
 import { takeSnapshot } from './snapshot-taker';
+
+/** What the audit trail tells of a verb: the rest of a sentence that begins with the person's name, and facts. */
+type Told = string | { readonly told: string; readonly facts: AuditNote['facts'] };
 
 /** The way of a record to the public and back: each verb is one transaction, and counts at once or not at all. */
 @Injectable()
@@ -120,7 +123,9 @@ export class PublishingService {
         await this.decide(tx, actor, await openRevision(tx, id), { outcome: 'set-aside', reason: notice });
       }
       await this.garments.move(tx, actor, garment, 'withdrawn', { isPublic: false });
-      return `withdrew ${garment.ownNumber}${innerReason ? `: ${innerReason}` : ''}`;
+      const told = `withdrew ${garment.ownNumber}${innerReason ? `: ${innerReason}` : ''}`;
+      // Whole, for a summary is short, and a notice is gone from the catalogue once the garment is published anew.
+      return { told, facts: { notice, innerReason } };
     });
   }
 
@@ -142,12 +147,13 @@ export class PublishingService {
     seen: number,
     actor: Actor,
     verb: string,
-    story: (tx: Tx, garment: GarmentRow) => Promise<string>,
+    story: (tx: Tx, garment: GarmentRow) => Promise<Told>,
   ): Promise<Garment> {
     return this.work.run(async (tx) => {
       const told = await story(tx, await this.garments.lockAt(tx, id, seen));
-      const summary = `${actor.name} ${told}`;
-      await this.audit.note(tx, actor, { verb, subjectKind: 'garment', subjectId: id, summary });
+      const { told: rest, facts = {} } = typeof told === 'string' ? { told } : told;
+      const summary = `${actor.name} ${rest}`;
+      await this.audit.note(tx, actor, { verb, subjectKind: 'garment', subjectId: id, summary, facts });
       return this.view.of(tx, id);
     });
   }
