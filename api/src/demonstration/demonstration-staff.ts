@@ -1,10 +1,11 @@
 import { randomBytes } from 'node:crypto';
 import { Injectable } from '@nestjs/common';
+import { v7 as uuidv7 } from 'uuid';
 import { Passwords } from '../auth/passwords.service';
 import type { Actor } from '../common/actor';
 import { Clock } from '../common/clock';
 import { Work } from '../common/work';
-import { newUser, UserRow } from '../users/user.entity';
+import { UserRow } from '../users/user.entity';
 import type { Demonstration } from './demonstration-data';
 import type { Staff } from './demonstration-sheets';
 
@@ -27,11 +28,20 @@ export class DemonstrationStaff {
     const staff = new Map<string, Actor>();
     const accounts: DemonstrationAccount[] = [];
     for (const { key, name, email, roles } of people) {
+      const id = uuidv7();
       const password = randomBytes(12).toString('base64url');
-      const passwordHash = await this.passwords.keep(password);
-      const user = newUser({ name, email }, roles, passwordHash, this.clock.now());
-      await this.work.reader.insert(UserRow, user);
-      staff.set(key, { id: user.id, name, email, roles, sessionId: '' });
+      await this.work.reader.insert(UserRow, {
+        id,
+        email,
+        name,
+        roles,
+        passwordHash: await this.passwords.keep(password),
+        active: true,
+        version: 1,
+        createdAt: this.clock.now(),
+        lastSignInAt: null,
+      });
+      staff.set(key, { id, name, email, roles, sessionId: '' });
       accounts.push({ role: roles.join(', '), email, password });
     }
     return { staff, accounts };
