@@ -272,4 +272,32 @@ describe('the measuring sheet', () => {
     );
     expect(anew.answer).toBeNull();
   });
+
+  it('works readings out again where the tape turns out to be another, and keeps what was keyed', async () => {
+    await send([reading('waistband', '618', reader.id), reading('hem', '742', reader.id, { tapeCount: 3 })]);
+    const facts = factsWith(reader, holder, { tapeZeroMm: '2', tapeLengthMm: '1501' });
+    const { version } = await sheetNow();
+    const set = (body: object, seen: number) =>
+      table.put(`/api/v1/workroom/sheets/${skirt.id}/facts`).set('If-Match', `"${seen}"`).send(body);
+    const answer = await set(facts, version);
+    const kept = (answer.body as SheetShown).readings.map(({ pointId, typed, valueMm }) => [
+      pointId,
+      typed,
+      valueMm,
+    ]);
+    // 618 − 2; 3 × 1501 + 742, less 2 for each of the four times that the tape was laid.
+    expect(kept).toEqual(
+      expect.arrayContaining([
+        ['waistband', '618', '616'],
+        ['hem', '742', '5237'],
+      ]),
+    );
+    const absurd = await set(factsWith(reader, holder, { tapeZeroMm: '700' }), answer.body.version as number);
+    expect(absurd.body).toMatchObject({
+      status: 400,
+      code: 'sheet.tape',
+      errors: [{ pointer: '/tapeZeroMm' }],
+    });
+    expect((await sheetNow()).facts.tapeZeroMm).toBe('2');
+  });
 });

@@ -58,7 +58,7 @@ export class GarmentEdits {
   async noteMeasuring(tx: Tx, actor: Pick<Actor, 'id'>, garmentId: string): Promise<void> {
     const garment = await this.lock(tx, garmentId);
     refuseLocked(garment);
-    await this.noteEditor(tx, actor, garment.id);
+    await this.noteHands(tx, garment.id, [actor.id]);
     if (garment.stage !== 'draft') await this.set(tx, actor, garment, { stage: 'draft' });
   }
 
@@ -70,7 +70,7 @@ export class GarmentEdits {
     changes: Partial<GarmentRow>,
   ): Promise<GarmentRow> {
     refuseLocked(garment);
-    await this.noteEditor(tx, actor, garment.id);
+    await this.noteHands(tx, garment.id, [actor.id]);
     return this.set(tx, actor, garment, { ...changes, stage: 'draft' });
   }
 
@@ -90,12 +90,15 @@ export class GarmentEdits {
     return this.set(tx, actor, garment, { ...changes, stage: to });
   }
 
-  private async noteEditor(tx: Tx, actor: Pick<Actor, 'id'>, garmentId: string): Promise<void> {
+  /** Keeps in mind whoever had a hand in the garment since it was last published: they may not approve it. */
+  async noteHands(tx: Tx, garmentId: string, userIds: readonly string[]): Promise<void> {
+    if (userIds.length === 0) return;
+    const editedAt = this.clock.now();
     await tx
       .createQueryBuilder()
       .insert()
       .into(GarmentEditor)
-      .values({ garmentId, userId: actor.id, editedAt: this.clock.now() })
+      .values(userIds.map((userId) => ({ garmentId, userId, editedAt })))
       .orUpdate(['edited_at'])
       .execute();
   }

@@ -39,7 +39,9 @@ export const SheetFacts = z
     place: line(200),
     support: z.enum(supports),
     tape: line(120),
-    tapeLengthMm: LengthMm.default('1500'),
+    tapeLengthMm: LengthMm.refine((length) => Number(length) > 0, 'A tape is longer than nothing').default(
+      '1500',
+    ),
     /** What the tape shows where it should show nothing: taken off every reading made with it. */
     tapeZeroMm: LengthMm.default('0'),
     fasteningPair: prose(300).default(''),

@@ -2,6 +2,7 @@ import { protocolFor } from '@ellwand/shared/protocols/standard-protocols';
 import { protocolPointIds } from '@ellwand/shared/protocols/protocol';
 import { findMeasuringPoint } from '@ellwand/shared/points/measuring-points';
 import { lowerKind, type GarmentKind } from '@ellwand/shared/points/kinds';
+import type { MeasuringHow } from '@ellwand/shared/points/point';
 import type { NewReading } from '@ellwand/shared/records/sheet';
 import { wholeValue } from '@ellwand/shared/readings/whole-value';
 import type { LengthUnit } from '@ellwand/shared/units/format-length';
@@ -44,14 +45,27 @@ export function takeIn(reading: NewReading, facts: TapeFacts): Intake {
     return refused('The sheet does not name that person as reading the tape.');
   if (reading.state === 'not-taken') return { accepted: true, valueMm: null, unit: null, tapeLengthMm: null };
 
-  const parsed = fromTyped({ text: reading.typed, unit: reading.unit });
+  return workOut({ ...reading, how: point.how }, facts);
+}
+
+/** What was read off the tape, as it is keyed and as it is kept. */
+interface Keyed {
+  readonly typed: string;
+  readonly unit: LengthUnit;
+  readonly tapeCount: number;
+  readonly how: MeasuringHow;
+}
+
+/** The whole value of what was keyed, with the tape as the sheet describes it. */
+export function workOut(keyed: Keyed, tape: Pick<TapeFacts, 'tapeLengthMm' | 'tapeZeroMm'>): Intake {
+  const parsed = fromTyped({ text: keyed.typed, unit: keyed.unit });
   if (!parsed.ok) return refused(lengthProblemSentence(parsed.problem));
   const value = wholeValue({
     read: parsed.value.length,
-    how: point.how,
-    tapeCount: reading.tapeCount,
-    tapeLength: fromMmString(facts.tapeLengthMm),
-    tapeZero: fromMmString(facts.tapeZeroMm),
+    how: keyed.how,
+    tapeCount: keyed.tapeCount,
+    tapeLength: fromMmString(tape.tapeLengthMm),
+    tapeZero: fromMmString(tape.tapeZeroMm),
   });
   return (
     inReach(value) ?? {
@@ -59,7 +73,7 @@ export function takeIn(reading: NewReading, facts: TapeFacts): Intake {
       valueMm: toMmString(value),
       // A unit typed beside the figure wins over the field's own.
       unit: parsed.value.unit,
-      tapeLengthMm: reading.tapeCount > 0 ? facts.tapeLengthMm : null,
+      tapeLengthMm: keyed.tapeCount > 0 ? tape.tapeLengthMm : null,
     }
   );
 }

@@ -1,8 +1,9 @@
 import { Column, Entity, PrimaryColumn } from 'typeorm';
 
 /**
- * One value read off the tape, exactly as keyed, beside its exact millimetres. Never changed: a correction is a
- * new reading that names the one it replaces, and at most one stands for each point and round.
+ * One value read off the tape, exactly as keyed, beside its exact millimetres. What was keyed is never changed: a
+ * correction is a new reading that names the one it replaces, and at most one stands for each point and round. The
+ * millimetres follow the sheet's tape, see `other-tape.ts`.
  */
 @Entity({ name: 'reading', database: 'ellwand' })
 export class ReadingRow {

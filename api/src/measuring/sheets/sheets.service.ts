@@ -12,6 +12,7 @@ import { type Tx, Work } from '../../common/work';
 import { GarmentEdits } from '../../garments/garment-edits';
 import { PartRow } from '../../garments/part.entity';
 import { UserRow } from '../../users/user.entity';
+import { workOutAgain } from '../readings/other-tape';
 import { FindingsService } from '../findings/findings.service';
 import { SheetEdits } from './sheet-edits';
 import { SheetPersonRow } from './sheet-person.entity';
@@ -73,15 +74,18 @@ export class SheetsService {
     return this.work.run(async (tx) => {
       const { sheet, part } = await this.sheets.takeAt(tx, actor, id, seen);
       refuseComplete(sheet);
-      await namePeople(tx, id, facts.people, '/people');
+      const dropped = await namePeople(tx, id, facts.people, '/people');
+      // Whoever held the tape held it, also when the sheet names them no more.
+      await this.garments.noteHands(tx, part.garmentId, dropped);
+      const reworked = await workOutAgain(tx, id, sheet, facts);
       await this.sheets.set(tx, actor, sheet, columnsOf(facts));
-      await this.note(
-        tx,
-        actor,
-        'edit',
-        id,
-        `${actor.name} changed who, where or how ${part.name} was measured`,
-      );
+      await this.audit.note(tx, actor, {
+        verb: 'edit',
+        subjectKind: 'sheet',
+        subjectId: id,
+        summary: `${actor.name} changed who, where or how ${part.name} was measured`,
+        facts: { named: facts.people.map(({ userId, duty }) => `${duty} ${userId}`), dropped, reworked },
+      });
       return this.view.of(tx, id);
     });
   }
@@ -143,13 +147,16 @@ function columnsOf({ people: _people, ...columns }: SheetFacts) {
   return columns;
 }
 
-/** Names these people and nobody else. Whoever is named already stays so, also once they have left the museum. */
+/**
+ * Names these people and nobody else. Whoever is named already stays so, also once they have left the museum.
+ * @returns who was named before and is no more
+ */
 async function namePeople(
   tx: Tx,
   sheetId: string,
   people: SheetFacts['people'],
   pointer: string,
-): Promise<void> {
+): Promise<string[]> {
   const before = await tx.find(SheetPersonRow, { where: { sheetId } });
   const ids = [...new Set(people.map((person) => person.userId))];
   const added = ids.filter((id) => !before.some(({ userId }) => userId === id));
@@ -167,4 +174,5 @@ async function namePeople(
   await tx.delete(SheetPersonRow, { sheetId });
   const once = new Map(people.map(({ userId, duty }) => [`${userId} ${duty}`, { sheetId, userId, duty }]));
   await tx.insert(SheetPersonRow, [...once.values()]);
+  return [...new Set(before.map(({ userId }) => userId))].filter((userId) => !ids.includes(userId));
 }
