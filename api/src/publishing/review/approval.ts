@@ -23,7 +23,10 @@ export function mayNotApprove(snapshot: Involved, personId: string): Refusal | n
     );
   }
   if (snapshot.editedBy.includes(personId)) {
-    return forbidden('review.own-edit', 'You edited this record. Somebody who did not has to approve it.');
+    return forbidden(
+      'review.own-edit',
+      'You had a hand in this record since it was last published. Somebody who had none has to approve it.',
+    );
   }
   return null;
 }

@@ -96,8 +96,28 @@ describe('what a new version changes', () => {
         kind: 'changed',
         area: 'measurement',
         label: 'Waist (Bodice)',
-        before: '612 mm',
-        after: '613.5 mm (2 rounds)',
+        before: '612 mm ± 2.1 mm, at the seam',
+        after: '613.5 mm ± 2.1 mm, at the seam, 2 rounds',
+      },
+    ]);
+  });
+
+  it('is a sixteenth of an inch, and how a level was found', () => {
+    const finer = withPart({ measurements: [{ ...waist, valueMm: '612.0625', levelFoundBy: 'nicks' }] });
+    expect(changesBetween(published, finer)).toMatchObject([
+      { label: 'Waist (Bodice)', after: '612.0625 mm ± 2.1 mm, at the nicks in the seam' },
+    ]);
+  });
+
+  it('is that people are named from now on', () => {
+    const named = withPart({ measuredBy: ['Odile Marsh', 'Ines Thorne'] });
+    expect(changesBetween(published, named)).toEqual([
+      {
+        kind: 'changed',
+        area: 'record',
+        label: 'Measured by (Bodice)',
+        before: '2 in all',
+        after: 'Odile Marsh, Ines Thorne, 2 in all',
       },
     ]);
   });
@@ -112,7 +132,7 @@ describe('what a new version changes', () => {
         kind: 'changed',
         area: 'measurement',
         label: 'Waist (Bodice)',
-        before: '612 mm',
+        before: '612 mm ± 2.1 mm, at the seam',
         after: 'Not taken. Too fragile to handle',
       },
     ]);

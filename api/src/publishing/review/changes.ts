@@ -1,12 +1,10 @@
-import { notTakenReasons } from '@ellwand/shared/readings/reading';
+import { levelLabels, notTakenReasons } from '@ellwand/shared/readings/reading';
 import type {
   PublishedDocument,
   PublishedMeasurement,
   PublishedPart,
 } from '@ellwand/shared/records/published-garment';
 import type { Change } from '@ellwand/shared/records/publishing';
-import { formatLength } from '@ellwand/shared/units/format-length';
-import { fromMmString } from '@ellwand/shared/units/length';
 
 /** The record's public fields in the order in which they are told, each with its name and how its value reads. */
 const fields: readonly { label: string; read: (document: PublishedDocument) => string | null }[] = [
@@ -40,6 +38,7 @@ export function changesBetween(before: PublishedDocument | null, after: Publishe
     ...fields.flatMap(({ label, read }) =>
       change('record', label, before ? read(before) : null, read(after)),
     ),
+    ...compare('record', partFactsOf(before), partFactsOf(after)),
     ...compare('measurement', measurementsOf(before), measurementsOf(after)),
     ...compare('picture', picturesOf(before), picturesOf(after)),
   ];
@@ -71,6 +70,26 @@ function compare(
   });
 }
 
+/** What is said of how each part was measured, and by whom where the record names them. */
+function partFactsOf(document: PublishedDocument | null): Map<string, Entry> {
+  const facts = (part: PublishedPart): [string, string | null][] => [
+    ['Part', `${part.number}, ${part.name}`],
+    ['Measured on', part.measuredOn],
+    ['Measured by', [...part.measuredBy, `${part.peopleCount} in all`].join(', ')],
+    ['Support', part.support],
+    ['Tape', part.tape],
+    ['Fastening pair', part.fasteningPair],
+  ];
+  return new Map(
+    (document?.parts ?? []).flatMap((part) =>
+      facts(part).map(([label, text]) => [
+        `${part.number} ${label}`,
+        { label: `${label} (${part.name})`, text: text ?? '' },
+      ]),
+    ),
+  );
+}
+
 function measurementsOf(document: PublishedDocument | null): Map<string, Entry> {
   const parts = document?.parts ?? [];
   return new Map(parts.flatMap((part) => [...taken(part), ...notTaken(part)]));
@@ -90,14 +109,16 @@ function notTaken(part: PublishedPart): [string, Entry][] {
   ]);
 }
 
-function readingText(measurement: PublishedMeasurement): string {
-  const value = formatLength(fromMmString(measurement.valueMm), 'mm', {
-    places: decimals(measurement.valueMm),
-  });
-  return measurement.rounds > 1 ? `${value} (${measurement.rounds} rounds)` : value;
+/** To the last place that is kept: a change of a sixteenth of an inch is a change. */
+function readingText({ valueMm, uncertaintyMm, rounds, levelFoundBy }: PublishedMeasurement): string {
+  return [
+    `${valueMm} mm ± ${uncertaintyMm} mm`,
+    levelFoundBy && levelLabels[levelFoundBy],
+    rounds > 1 && `${rounds} rounds`,
+  ]
+    .filter(Boolean)
+    .join(', ');
 }
-
-const decimals = (valueMm: string) => (valueMm.includes('.') ? 1 : 0);
 
 function picturesOf(document: PublishedDocument | null): Map<string, Entry> {
   const images = document?.images ?? [];
