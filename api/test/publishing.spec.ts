@@ -102,6 +102,48 @@ describe('from the table to the public and back', () => {
     expect((await now()).stage).toBe('in-review');
   });
 
+  it('cannot be approved by whoever held the tape and was taken off the sheet afterwards', async () => {
+    await measureAll();
+    const another = await house.person('recorder', 'Colm Hale');
+    for (const part of (await now()).parts) {
+      const sheet = `/api/v1/workroom/sheets/${part.sheets[0]?.id}`;
+      const shown = (await recorder.get(sheet)).body.version as number;
+      const open = await recorder.post(`${sheet}/reopen`).set('If-Match', `"${shown}"`);
+      const set = await recorder
+        .put(`${sheet}/facts`)
+        .set('If-Match', `"${open.body.version}"`)
+        .send(factsWith(reader, another));
+      const done = await recorder.post(`${sheet}/complete`).set('If-Match', `"${set.body.version}"`);
+      expect(done.body.facts.people).not.toContainEqual(expect.objectContaining({ userId: holder.id }));
+    }
+    await verb(recorder, 'submit');
+    expect((await verb(ines, 'approve')).body).toMatchObject({ status: 403, code: 'review.own-edit' });
+    expect((await verb(curator, 'approve')).status).toBe(200);
+  });
+
+  it('has a number of its own where two with the same one are published at once', async () => {
+    await measureAll();
+    const first = dress;
+    dress = await makeDress(recorder, { ...silkDress, ownNumber: 'LH 1966/30' });
+    await measureAll();
+    const both = [first, dress];
+    for (const each of both) {
+      dress = each;
+      await verb(recorder, 'submit');
+      await verb(curator, 'approve');
+    }
+    const answers = await Promise.all(
+      both.map(async ({ id }) => {
+        const { version } = (await curator.get(`/api/v1/workroom/garments/${id}`)).body as Garment;
+        return curator.post(`/api/v1/workroom/garments/${id}/publish`).set('If-Match', `"${version}"`);
+      }),
+    );
+    expect(answers.map((answer) => answer.body.publicNumber as string).sort()).toEqual([
+      'lh-1966-30',
+      'lh-1966-30-2',
+    ]);
+  });
+
   it('comes back with its reason, and the reason goes once it is sent again', async () => {
     await measureAll();
     await verb(recorder, 'submit');

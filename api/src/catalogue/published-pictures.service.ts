@@ -15,7 +15,7 @@ export type PublishedPicture = z.output<typeof Row>;
 export class PublishedPictures {
   constructor(@InjectCatalogue() private readonly catalogue: DataSource) {}
 
-  /** null: never published, or shown no more by the current version. */
+  /** null: never published. A picture that a newer version leaves out is still shown by the frozen one. */
   async find(imageId: string): Promise<PublishedPicture | null> {
     if (!/^[0-9a-f]{8}(-[0-9a-f]{4}){3}-[0-9a-f]{12}$/i.test(imageId)) return null;
     const rows: unknown[] = await this.catalogue.query(

@@ -36,7 +36,7 @@ const titles: Readonly<Record<number, string>> = {
 
 /** Names of database faults that pass by themselves: the caller may try again. */
 const passing =
-  /ECONNREFUSED|PROTOCOL_CONNECTION_LOST|ECONNRESET|ER_CON_COUNT_ERROR|POOL_CLOSED|Queue limit reached|ETIMEDOUT/;
+  /ECONNREFUSED|PROTOCOL_CONNECTION_LOST|ECONNRESET|ER_CON_COUNT_ERROR|POOL_CLOSED|Queue limit reached|ETIMEDOUT|ER_LOCK_DEADLOCK|ER_LOCK_WAIT_TIMEOUT|ER_STATEMENT_TIMEOUT|ER_CHECKREAD/;
 
 interface FaultLog {
   error(text: string): void;

@@ -7,7 +7,7 @@ import { type AuditNote, AuditService } from '../audit/audit.service';
 import type { Actor } from '../common/actor';
 import { Clock } from '../common/clock';
 import { conflict } from '../common/refusal';
-import { type Tx, Work } from '../common/work';
+import { isDuplicate, type Tx, Work } from '../common/work';
 import { GarmentEditor } from '../garments/garment-editor.entity';
 import { GarmentEdits } from '../garments/garment-edits';
 import { GarmentView } from '../garments/garment-view';
@@ -86,7 +86,17 @@ export class PublishingService {
   }
 
   /** Puts the approved copy before the public as its next version. */
-  publish(id: string, seen: number, actor: Actor): Promise<Garment> {
+  async publish(id: string, seen: number, actor: Actor): Promise<Garment> {
+    try {
+      return await this.publishOnce(id, seen, actor);
+    } catch (fault) {
+      // Another garment took the public number while this one was being written: the next one is free.
+      if (!isDuplicate(fault)) throw fault;
+      return this.publishOnce(id, seen, actor);
+    }
+  }
+
+  private publishOnce(id: string, seen: number, actor: Actor): Promise<Garment> {
     return this.verb(id, seen, actor, 'publish', async (tx, garment) => {
       refuseUnless(garment, ['approved'], 'Only an approved record can be published.');
       const revision = await openRevision(tx, id);

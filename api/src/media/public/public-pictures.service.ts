@@ -5,7 +5,7 @@ import type { StoredForm } from '../images.service';
 import { formKey, parseFormName } from '../store/picture-keys';
 import { PictureStore } from '../store/picture-store';
 
-/** Pictures for the public: only what the current published version shows. Originals never leave. */
+/** Pictures for the public: only what a published version shows that is not withdrawn. Originals never leave. */
 @Injectable()
 export class PublicPictures {
   constructor(

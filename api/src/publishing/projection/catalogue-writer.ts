@@ -65,7 +65,9 @@ export class CatalogueWriter {
     await this.clearSearchRows(tx, number);
     for (const { facet, value, label } of facetRows(document)) {
       await tx.query(
-        'INSERT INTO ellwand_catalogue.published_facet (number, facet, value, label) VALUES (?, ?, ?, ?)',
+        // What the database holds for the same word, such as "straße" and "strasse", is kept once.
+        `INSERT INTO ellwand_catalogue.published_facet (number, facet, value, label) VALUES (?, ?, ?, ?)
+         ON DUPLICATE KEY UPDATE label = label`,
         [number, facet, value, label],
       );
     }
