@@ -11,6 +11,7 @@ import { FindingAnswerRow } from '../measuring/findings/finding-answer.entity';
 import { ReadingRow } from '../measuring/readings/reading.entity';
 import { SheetPersonRow } from '../measuring/sheets/sheet-person.entity';
 import { SheetRow } from '../measuring/sheets/sheet.entity';
+import { TableNoteRow } from '../measuring/table-notes/table-note.entity';
 import { ImageRow } from '../media/image.entity';
 import { RevisionRow } from '../publishing/revision.entity';
 import { InvitationRow } from '../users/invitation.entity';
@@ -19,6 +20,7 @@ import { UserRow } from '../users/user.entity';
 import { guardedDriver } from './guarded-pool';
 import { AuditTrail1764550000001 } from './migrations/1764550000001-audit-trail';
 import { Catalogue1764550000002 } from './migrations/1764550000002-catalogue';
+import { AtTheTable1764560000000 } from './migrations/1764560000000-at-the-table';
 import { Workroom1764550000000 } from './migrations/1764550000000-workroom';
 
 const entities = [
@@ -37,11 +39,17 @@ const entities = [
   SheetPersonRow,
   SheetRow,
   SignInSlowdown,
+  TableNoteRow,
   UserRow,
 ];
 
 /** In the order in which they run. */
-export const migrations = [Workroom1764550000000, AuditTrail1764550000001, Catalogue1764550000002];
+export const migrations = [
+  Workroom1764550000000,
+  AuditTrail1764550000001,
+  Catalogue1764550000002,
+  AtTheTable1764560000000,
+];
 
 /** For the handshake; how long somebody waits for a free connection is the pool's own affair. */
 const connectWithinMs = 5_000;

@@ -1,5 +1,5 @@
 import { Injectable } from '@nestjs/common';
-import type { NewReading, SheetFacts } from '@ellwand/shared/records/sheet';
+import { NewReading, type SheetFacts } from '@ellwand/shared/records/sheet';
 import { v7 as uuidv7 } from 'uuid';
 import type { Actor } from '../common/actor';
 import { FindingsService } from '../measuring/findings/findings.service';
@@ -75,6 +75,8 @@ function factsOf(data: DemonstrationSheet, staff: Staff): SheetFacts {
     tapeZeroMm: '0',
     fasteningPair,
     note,
+    repeatPoints: [],
+    purpose: 'record',
   };
 }
 
@@ -84,22 +86,24 @@ function readingsOf(
   readBy: string,
   keyedAt: string,
 ): NewReading[] {
-  const base = { pointId, replaces: null, readBy, device: 'Table tablet', keyedAt };
+  const base = { pointId, readBy, device: 'Table tablet', keyedAt };
   if (typeof data === 'string') return readingsOf(pointId, plain(data), readBy, keyedAt);
   if ('notTaken' in data)
-    return [{ ...base, id: uuidv7(), round: 1, note: '', state: 'not-taken', reason: data.notTaken }];
+    return [NewReading.parse({ ...base, id: uuidv7(), round: 1, state: 'not-taken', reason: data.notTaken })];
   const { unit, tapeCount, levelFoundBy, note } = data;
-  return [data.typed, ...data.rounds].map((typed, index) => ({
-    ...base,
-    id: uuidv7(),
-    round: index + 1,
-    note: index === 0 ? note : '',
-    state: 'taken',
-    typed,
-    unit,
-    tapeCount,
-    levelFoundBy,
-  }));
+  return [data.typed, ...data.rounds].map((typed, index) =>
+    NewReading.parse({
+      ...base,
+      id: uuidv7(),
+      round: index + 1,
+      note: index === 0 ? note : '',
+      state: 'taken',
+      typed,
+      unit,
+      tapeCount,
+      levelFoundBy,
+    }),
+  );
 }
 
 function plain(typed: string): Exclude<DemonstrationReading, string | { notTaken: unknown }> {

@@ -10,4 +10,6 @@ export class PartRow {
   @Column({ type: 'varchar', length: 20 }) kind: GarmentKind;
   @Column({ type: 'varchar', length: 120 }) name: string;
   @Column({ type: 'smallint', unsigned: true }) position: number;
+  /** Not a part by itself but all of them, laid together as worn. */
+  @Column({ name: 'worn_together', type: 'boolean' }) wornTogether: boolean;
 }

@@ -2,6 +2,7 @@ import { Module } from '@nestjs/common';
 import { GarmentsModule } from '../garments/garments.module';
 import { FindingsService } from './findings/findings.service';
 import { MeasuringController } from './measuring.controller';
+import { ProtocolBook } from './protocols/protocol-book';
 import { ReadingsService } from './readings/readings.service';
 import { SheetEdits } from './sheets/sheet-edits';
 import { SheetView } from './sheets/sheet-view';
@@ -10,7 +11,7 @@ import { SheetsService } from './sheets/sheets.service';
 @Module({
   imports: [GarmentsModule],
   controllers: [MeasuringController],
-  providers: [SheetEdits, SheetView, SheetsService, ReadingsService, FindingsService],
-  exports: [SheetsService, ReadingsService, FindingsService],
+  providers: [ProtocolBook, SheetEdits, SheetView, SheetsService, ReadingsService, FindingsService],
+  exports: [ProtocolBook, SheetsService, ReadingsService, FindingsService],
 })
 export class MeasuringModule {}

@@ -1,13 +1,17 @@
 import type { GarmentRecord } from '@ellwand/shared/records/garment';
 import type { Image } from '@ellwand/shared/records/image';
 import type { GarmentKind } from '@ellwand/shared/points/kinds';
-import type { SheetPerson, StoredReading } from '@ellwand/shared/records/sheet';
+import type { SheetPerson } from '@ellwand/shared/records/hands';
+import type { ProtocolView } from '@ellwand/shared/records/protocol';
+import type { StoredReading } from '@ellwand/shared/records/sheet';
 import type { z } from 'zod';
 
 /** The sheet that speaks for a part when a garment is published: the newest complete one. */
 export interface SnapshotSheet {
   readonly id: string;
   readonly protocolVersion: number;
+  /** The protocol it was taken by; revisions frozen before sheets carried theirs have none. */
+  readonly protocol?: ProtocolView;
   readonly measuredOn: string;
   readonly support: string;
   readonly tape: string;

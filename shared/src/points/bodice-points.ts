@@ -131,6 +131,7 @@ export const bodicePoints = [
     softRange: between(20, 220),
     softRangeByKind: { 'child-dress': between(10, 150) },
     watchFor: 'The seam may lie well to the back of the shoulder: follow it where it is.',
+    paired: true,
   }),
   point({
     id: 'across-back',
@@ -181,6 +182,7 @@ export const bodicePoints = [
     kinds: ['bodice', 'dress', 'jacket', 'waistcoat'],
     softRange: between(50, 250),
     watchFor: 'Some cuts have no side seam: then it is not taken.',
+    paired: true,
   }),
   point({
     id: 'armscye',
@@ -193,6 +195,7 @@ export const bodicePoints = [
     kinds: ['bodice', 'dress', 'coat', 'jacket', 'waistcoat'],
     softRange: between(330, 560),
     watchFor: 'This seam stretches: lay the tape, do not pull it.',
+    paired: true,
   }),
   point({
     id: 'neck-to-hem-back',

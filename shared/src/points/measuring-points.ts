@@ -55,6 +55,6 @@ export function pointsInGroup(group: PointGroup): readonly CataloguedPoint[] {
 }
 
 /** The range that is usual for the point on this kind of part. */
-export function softRangeFor(entry: CataloguedPoint, kind: GarmentKind): SoftRange {
+export function softRangeFor(entry: MeasuringPoint, kind: GarmentKind): SoftRange {
   return entry.softRangeByKind[kind] ?? entry.softRange;
 }

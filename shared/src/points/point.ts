@@ -62,6 +62,8 @@ export interface MeasuringPoint<Id extends string = string> {
   readonly levelRecorded: boolean;
   /** Taken over the parts of a garment laid together as worn, never on one part. */
   readonly wornTogether: boolean;
+  /** There on both sides of the garment: left and right, as worn, may each be read. */
+  readonly paired: boolean;
 }
 
 /** Ranges from the working experience of the trade, not from a published count. */
@@ -75,7 +77,8 @@ export function between(fromMm: number, toMm: number, basis = PRACTICE): SoftRan
   return { from: mm(fromMm), to: mm(toMm), basis };
 }
 
-type Optional = 'softRangeByKind' | 'tolerance' | 'takesTapeLengths' | 'levelRecorded' | 'wornTogether';
+type Optional =
+  'softRangeByKind' | 'tolerance' | 'takesTapeLengths' | 'levelRecorded' | 'wornTogether' | 'paired';
 
 /** A point as it is written in the catalogue files: what is usual may be left out. */
 export type PointEntry<Id extends string> = Omit<MeasuringPoint<Id>, Optional> &
@@ -88,6 +91,7 @@ export function point<const Id extends string>(entry: PointEntry<Id>): Measuring
     takesTapeLengths: false,
     levelRecorded: false,
     wornTogether: false,
+    paired: false,
     ...entry,
   };
 }

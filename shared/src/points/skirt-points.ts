@@ -78,6 +78,7 @@ export const skirtPoints = [
     kinds: ['skirt', 'petticoat'],
     softRange: between(450, 1500, LENGTH_BASIS),
     watchFor: 'Left and right often differ: read the right as worn and note the left.',
+    paired: true,
   }),
   point({
     id: 'waist-to-hem-back',

@@ -15,6 +15,7 @@ export const sleevePoints = [
     softRange: between(60, 900),
     softRangeByKind: { 'child-dress': between(20, 550) },
     watchFor: 'On a dropped shoulder the sleeve begins on the upper arm: begin at the seam all the same.',
+    paired: true,
   }),
   point({
     id: 'sleeve-under',
@@ -27,6 +28,7 @@ export const sleevePoints = [
     kinds: ['bodice', 'dress', 'coat', 'jacket'],
     softRange: between(20, 520),
     watchFor: 'Lift the sleeve aside with a hand beneath it rather than by its edge.',
+    paired: true,
   }),
   point({
     id: 'sleeve-widest',
@@ -40,6 +42,7 @@ export const sleevePoints = [
     softRange: between(240, 1600),
     watchFor:
       'Note how far below the head of the sleeve it was read. Take tissue out first, or leave the reading.',
+    paired: true,
   }),
   point({
     id: 'elbow',
@@ -53,6 +56,7 @@ export const sleevePoints = [
     softRange: between(220, 450),
     softRangeByKind: { dress: between(220, 700), bodice: between(220, 700), jacket: between(220, 700) },
     watchFor: 'A curved sleeve has its elbow where the seam bends.',
+    paired: true,
   }),
   point({
     id: 'cuff',
@@ -66,6 +70,7 @@ export const sleevePoints = [
     softRange: between(140, 360),
     softRangeByKind: { bodice: between(140, 900), dress: between(140, 900) },
     watchFor: 'Say whether it was closed or open. A wide open sleeve has its edge as its cuff.',
+    paired: true,
   }),
   point({
     id: 'centre-back-to-cuff',
@@ -78,5 +83,6 @@ export const sleevePoints = [
     kinds: ['coat', 'shirt'],
     softRange: between(700, 1000),
     watchFor: 'The sleeves of coats are cut for a bent arm: follow the bend.',
+    paired: true,
   }),
 ] as const;

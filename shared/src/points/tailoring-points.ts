@@ -151,6 +151,7 @@ export const tailoringPoints = [
     kinds: ['trousers', 'breeches'],
     softRange: between(500, 1200),
     watchFor: 'Say where the waistband was left out.',
+    paired: true,
   }),
   point({
     id: 'inside-leg',
@@ -163,6 +164,7 @@ export const tailoringPoints = [
     kinds: ['trousers', 'breeches'],
     softRange: between(250, 900),
     watchFor: 'Begin where the four seams meet.',
+    paired: true,
   }),
   point({
     id: 'trouser-knee',
@@ -175,6 +177,7 @@ export const tailoringPoints = [
     kinds: ['trousers', 'breeches'],
     softRange: between(300, 560),
     watchFor: 'Say at what height it was read.',
+    paired: true,
   }),
   point({
     id: 'leg-hem',
@@ -187,5 +190,6 @@ export const tailoringPoints = [
     kinds: ['trousers', 'breeches'],
     softRange: between(260, 700),
     watchFor: 'On breeches this is the knee band, closed.',
+    paired: true,
   }),
 ] as const;

@@ -1,10 +1,26 @@
 import { type GarmentKind } from '../points/kinds.js';
-import { type PointId } from '../points/measuring-points.js';
+import { findMeasuringPoint } from '../points/measuring-points.js';
+import { type MeasuringPoint } from '../points/point.js';
+import { type ViewName } from '../drawings/diagram/model.js';
 
 export interface ProtocolPoint {
-  readonly pointId: PointId;
+  /** A point of the catalogue, or one of the protocol's own. */
+  readonly pointId: string;
   /** A required point is read, or its absence has a reason, before the sheet is complete. */
   readonly required: boolean;
+  /** How many rounds the protocol asks for; the second and later ones are read blind. */
+  readonly rounds: number;
+}
+
+/** Where an own point is drawn: through these places of a view, in the view's millimetres, x then y. */
+export interface OwnPointLine {
+  readonly view: ViewName;
+  readonly along: readonly (readonly [number, number])[];
+}
+
+/** A measuring point that a museum made for itself, with its own line on the diagram. */
+export interface OwnPoint extends MeasuringPoint {
+  readonly line: OwnPointLine;
 }
 
 /** The list of points for a kind of part in handling order. A sheet keeps the version it was taken by. */
@@ -14,6 +30,7 @@ export interface Protocol {
   /** True for parts laid together as worn, which have points that no single part has. */
   readonly wornTogether: boolean;
   readonly points: readonly ProtocolPoint[];
+  readonly ownPoints: readonly OwnPoint[];
 }
 
 /** I and O are left out: on a diagram they read as one and nought. */
@@ -23,7 +40,7 @@ const LETTERS = 'ABCDEFGHJKLMNPQRSTUVWXYZ';
 export const LONGEST_PROTOCOL = LETTERS.length;
 
 /** A, B, C… in handling order, for the diagram and the sheet. */
-export function lettersFor(protocol: Protocol): ReadonlyMap<PointId, string> {
+export function lettersFor(protocol: Protocol): ReadonlyMap<string, string> {
   return new Map(protocol.points.map(({ pointId }, index) => [pointId, letterAt(index)]));
 }
 
@@ -33,6 +50,16 @@ function letterAt(index: number): string {
   return `${LETTERS.charAt(index % LETTERS.length)}${turn ? turn + 1 : ''}`;
 }
 
-export function protocolPointIds(protocol: Protocol): readonly PointId[] {
+export function protocolPointIds(protocol: Protocol): readonly string[] {
   return protocol.points.map(({ pointId }) => pointId);
+}
+
+/** A point by its id, the protocol's own ones included; undefined where neither knows it. */
+export function pointIn(protocol: Pick<Protocol, 'ownPoints'>, pointId: string): MeasuringPoint | undefined {
+  return protocol.ownPoints.find(({ id }) => id === pointId) ?? findMeasuringPoint(pointId);
+}
+
+/** The points that a protocol asks for, in handling order. Ids that nothing knows are left out. */
+export function pointsOf(protocol: Protocol): readonly MeasuringPoint[] {
+  return protocolPointIds(protocol).flatMap((id) => pointIn(protocol, id) ?? []);
 }

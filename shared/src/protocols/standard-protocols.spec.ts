@@ -1,15 +1,15 @@
 import { describe, expect, it } from 'vitest';
 import { type GarmentKind, kindIds } from '../points/kinds.js';
-import { measuringPoint, type PointId } from '../points/measuring-points.js';
+import { findMeasuringPoint } from '../points/measuring-points.js';
 import { handlingSteps } from '../points/point.js';
-import { lettersFor, LONGEST_PROTOCOL, protocolPointIds } from './protocol.js';
+import { lettersFor, LONGEST_PROTOCOL, pointsOf, protocolPointIds } from './protocol.js';
 import { protocolFor, wornTogetherProtocol } from './standard-protocols.js';
 
-const asksFor = (kind: GarmentKind): readonly PointId[] => protocolPointIds(protocolFor(kind));
+const asksFor = (kind: GarmentKind): readonly string[] => protocolPointIds(protocolFor(kind));
 
 describe.each(kindIds)('the protocol of a %s', (kind) => {
   const protocol = protocolFor(kind);
-  const points = protocolPointIds(protocol).map(measuringPoint);
+  const points = pointsOf(protocol);
 
   it('goes opened, front up, back up, and never back again', () => {
     const steps = points.map(({ handlingStep }) => handlingSteps.indexOf(handlingStep));
@@ -47,7 +47,7 @@ describe('protocols together', () => {
 
   it('ask for a dress laid together as worn only what no part has', () => {
     for (const id of protocolPointIds(wornTogetherProtocol)) {
-      expect(measuringPoint(id).wornTogether).toBe(true);
+      expect(findMeasuringPoint(id)?.wornTogether).toBe(true);
       for (const kind of kindIds) expect(asksFor(kind)).not.toContain(id);
     }
   });

@@ -14,11 +14,11 @@ interface Steps {
 }
 
 function must(...ids: readonly PointId[]): readonly ProtocolPoint[] {
-  return ids.map((pointId) => ({ pointId, required: true }));
+  return ids.map((pointId) => ({ pointId, required: true, rounds: 1 }));
 }
 
 function may(...ids: readonly PointId[]): readonly ProtocolPoint[] {
-  return ids.map((pointId) => ({ pointId, required: false }));
+  return ids.map((pointId) => ({ pointId, required: false, rounds: 1 }));
 }
 
 const bodice: Steps = {
@@ -159,7 +159,13 @@ const STANDARD_VERSION = 1;
 /** The house's first protocol for a kind of part. */
 export function protocolFor(kind: GarmentKind): Protocol {
   const { inside, front, back } = stepsByKind[kind];
-  return { kind, version: STANDARD_VERSION, wornTogether: false, points: [...inside, ...front, ...back] };
+  return {
+    kind,
+    version: STANDARD_VERSION,
+    wornTogether: false,
+    points: [...inside, ...front, ...back],
+    ownPoints: [],
+  };
 }
 
 /** For a bodice and skirt laid together as worn. */
@@ -168,4 +174,5 @@ export const wornTogetherProtocol: Protocol = {
   version: STANDARD_VERSION,
   wornTogether: true,
   points: must('worn-neck-to-hem-front', 'worn-neck-to-hem-back'),
+  ownPoints: [],
 };

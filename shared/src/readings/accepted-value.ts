@@ -5,6 +5,7 @@ import { type Length, lengthOf, longestOf, shortestOf, subtract } from '../units
 import { divideHalfUp } from '../units/rounding.js';
 import { standingReadings, type Reading, type TakenReading } from './reading.js';
 import { readingStep } from './reading-step.js';
+import { speakingReadings, type WornSide } from './worn-side.js';
 import { layingUncertaintyMm, rootOfSquares, spreadUncertaintyMm, stepUncertaintyMm } from './uncertainty.js';
 import { tapeJoins } from './whole-value.js';
 
@@ -19,6 +20,8 @@ export interface AcceptedValue {
   /** Combined standard uncertainty in mm: reading step, method, tape joins, spread. */
   readonly uncertaintyMm: number;
   readonly tapeJoins: number;
+  /** The side that it was read on, for a point of which left and right were told apart. */
+  readonly worn?: WornSide;
 }
 
 /** Mean of lengths, rounded once, half-up, to 0.0001 mm. Throws RangeError for an empty list. */
@@ -27,9 +30,17 @@ export function meanOf(lengths: readonly Length[]): Length {
   return lengthOf(Number(divideHalfUp(sum, BigInt(lengths.length))));
 }
 
-/** Nothing when no reading of the point was taken and stands. The order of readings does not matter. */
-export function acceptedValue(readings: readonly Reading[], pointId: string): AcceptedValue | undefined {
-  const taken = standingReadings(readings, pointId);
+/**
+ * The value of a point, or of one side of it. Where left and right were read and no side is named, one of them speaks
+ * (see `speakingReadings`). Nothing when no such reading was taken and stands. The order of readings does not matter.
+ */
+export function acceptedValue(
+  readings: readonly Reading[],
+  pointId: string,
+  side?: WornSide,
+): AcceptedValue | undefined {
+  const standing = standingReadings(readings, pointId);
+  const taken = side ? standing.filter(({ worn }) => worn === side) : speakingReadings(standing);
   const lengths = taken.map(({ length }) => length);
   const [first, ...others] = lengths;
   if (first === undefined) return undefined;
@@ -41,6 +52,7 @@ export function acceptedValue(readings: readonly Reading[], pointId: string): Ac
     spread,
     uncertaintyMm: combinedUncertaintyMm(taken, spread),
     tapeJoins: Math.max(...taken.map(joinsOf)),
+    ...(taken[0]?.worn ? { worn: taken[0].worn } : {}),
   };
 }
 

@@ -5,6 +5,7 @@
 import { type MeasuringHow } from '../points/point.js';
 import { type LengthUnit } from '../units/format-length.js';
 import { type Length } from '../units/length.js';
+import { type WornSide } from './worn-side.js';
 
 /** Why a point was not taken. */
 export const notTakenReasons = {
@@ -49,6 +50,8 @@ interface ReadingFacts {
   readonly round: number;
   /** False once a later reading has taken its place; absent means that it stands. */
   readonly stands?: boolean;
+  /** Which of a pair it is; absent where the point is single or the side was not said. */
+  readonly worn?: WornSide;
   readonly note?: string;
   readonly readBy?: string;
 }
@@ -61,6 +64,8 @@ export interface TakenReading extends ReadingFacts {
   readonly typed?: string;
   readonly unit?: LengthUnit;
   readonly tapeLengths?: TapeLengths;
+  /** What the tape crossed where the edges could not be brought together: taken off already. */
+  readonly gap?: Length;
   /** Where it was taken otherwise than its point says, such as flat and doubled for a round. */
   readonly method?: MeasuringHow;
   readonly levelFoundBy?: LevelFoundBy;

@@ -12,7 +12,8 @@ import type { DerivedView, StoredReading } from './sheet.js';
 /** The domain's reading. Throws LengthError where a kept value is not a length. */
 export function toReading(stored: StoredReading): Reading {
   const { id, pointId, round, stands, note, readBy } = stored;
-  const facts = { id, pointId, round, stands, note, readBy };
+  const worn = stored.worn ? { worn: stored.worn } : {};
+  const facts = { id, pointId, round, stands, note, readBy, ...worn };
   if (stored.state === 'not-taken' || stored.valueMm === null) {
     return { ...facts, state: 'not-taken', ...(stored.reason ? { notTakenReason: stored.reason } : {}) };
   }
@@ -25,6 +26,9 @@ export function toReading(stored: StoredReading): Reading {
     ...(stored.unit ? { unit: stored.unit } : {}),
     ...(stored.levelFoundBy ? { levelFoundBy: stored.levelFoundBy } : {}),
     ...(tapeLengths ? { tapeLengths } : {}),
+    ...(stored.method ? { method: stored.method } : {}),
+    ...(stored.gapMm ? { gap: fromMmString(stored.gapMm) } : {}),
+    ...(stored.depthMm ? { depthBelowWaist: fromMmString(stored.depthMm) } : {}),
   };
 }
 

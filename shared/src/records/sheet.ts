@@ -6,17 +6,11 @@ import {
   type LevelFoundBy as Level,
   type NotTakenReason as Reason,
 } from '../readings/reading.js';
+import { wornSides } from '../readings/worn-side.js';
 import { Day, LengthMm, line, Moment, prose, Uuid } from './common.js';
-
-/** What somebody did at the measuring table. One person may do several; reading and holding take two. */
-export const duties = ['read', 'held', 'wrote'] as const;
-export const Duty = z.enum(duties);
-export const dutyLabels: Readonly<Record<z.infer<typeof Duty>, string>> = {
-  read: 'Read the tape',
-  held: 'Held the tape and steadied the garment',
-  wrote: 'Wrote the readings down',
-};
-export const SheetPerson = z.strictObject({ userId: Uuid, duty: Duty });
+import { Duty, SheetPerson } from './hands.js';
+import { ProtocolView } from './protocol.js';
+import { StoredTableNote } from './table-note.js';
 
 export const supports = ['flat', 'flat-tissue', 'on-a-figure', 'on-a-hanger'] as const;
 export const supportLabels: Readonly<Record<(typeof supports)[number], string>> = {
@@ -28,6 +22,9 @@ export const supportLabels: Readonly<Record<(typeof supports)[number], string>> 
 
 /** How the bust, waist or hip level was found. */
 export const LevelFoundBy = z.enum(Object.keys(levelLabels) as [Level, ...Level[]]);
+
+export const sheetPurposes = ['record', 'study'] as const;
+export type SheetPurpose = (typeof sheetPurposes)[number];
 
 /** The facts of a measuring: who, when, where, on what, with which tape. */
 export const SheetFacts = z
@@ -46,6 +43,10 @@ export const SheetFacts = z
     tapeZeroMm: LengthMm.default('0'),
     fasteningPair: prose(300).default(''),
     note: prose(4000).default(''),
+    /** Points chosen to be read a second time, blind. */
+    repeatPoints: z.array(z.string().max(60)).max(40).default([]),
+    /** A study sheet shows how well readings repeat; it never speaks for the garment. */
+    purpose: z.enum(sheetPurposes).default('record'),
   })
   .refine((facts) => facts.people.some((p) => p.duty === 'read'), {
     path: ['people'],
@@ -68,6 +69,10 @@ export const NotTakenReason = z.enum(Object.keys(notTakenReasons) as [Reason, ..
 
 export const TypedUnit = z.enum(['mm', 'cm', 'in']);
 
+/** How it was taken, where that is not how the point says. */
+export const TakenMethod = z.enum(['flat-doubled']);
+export const Worn = z.enum(wornSides);
+
 /** What was read, exactly as keyed; the API works out the millimetres and refuses where they differ. */
 const Taken = z.strictObject({
   state: z.literal('taken'),
@@ -75,6 +80,12 @@ const Taken = z.strictObject({
   unit: TypedUnit,
   /** A long reading in whole tapes and a rest: 3 × 1500 + 742. `typed` is then the rest. */
   tapeCount: z.number().int().min(0).max(20).default(0),
+  /** What the tape crossed between edges that could not be brought together, in the same unit: taken off. */
+  gapTyped: z.string().trim().max(40).nullable().default(null),
+  /** Said where a round was read flat from fold to fold: `typed` is then the half. */
+  method: TakenMethod.nullable().default(null),
+  /** How far below the waist the level lay, in the same unit. */
+  depthTyped: z.string().trim().max(40).nullable().default(null),
   /** The half that was read, for points taken flat and doubled, is what `typed` holds. */
   levelFoundBy: LevelFoundBy.nullable().default(null),
 });
@@ -86,10 +97,14 @@ const ReadingBase = z.strictObject({
   pointId: z.string().max(60),
   /** 1 for the first reading of a point, 2 for the second… */
   round: z.number().int().min(1).max(9),
+  /** Which of a pair, as worn; null where the point is single or the side is not said. */
+  worn: Worn.nullable().default(null),
   /** The reading that this one corrects, if any. Nothing is overwritten. */
   replaces: Uuid.nullable().default(null),
   note: prose(500).default(''),
   readBy: Uuid,
+  /** Who held the tape's end just then; null where one person measured alone. */
+  heldBy: Uuid.nullable().default(null),
   device: line(80),
   keyedAt: Moment,
 });
@@ -105,6 +120,7 @@ export const StoredReading = z.object({
   id: Uuid,
   pointId: z.string(),
   round: z.number().int(),
+  worn: Worn.nullable(),
   state: z.enum(['taken', 'not-taken']),
   /** The whole value (tapes and rest added, halves doubled, the tape's zero taken off). */
   valueMm: LengthMm.nullable(),
@@ -112,6 +128,11 @@ export const StoredReading = z.object({
   unit: TypedUnit.nullable(),
   tapeCount: z.number().int(),
   tapeLengthMm: LengthMm.nullable(),
+  gapTyped: z.string().nullable(),
+  gapMm: LengthMm.nullable(),
+  method: TakenMethod.nullable(),
+  depthTyped: z.string().nullable(),
+  depthMm: LengthMm.nullable(),
   levelFoundBy: LevelFoundBy.nullable(),
   reason: NotTakenReason.nullable(),
   replaces: Uuid.nullable(),
@@ -119,6 +140,7 @@ export const StoredReading = z.object({
   stands: z.boolean(),
   note: z.string(),
   readBy: Uuid,
+  heldBy: Uuid.nullable(),
   recordedBy: Uuid,
   device: z.string(),
   keyedAt: Moment,
@@ -193,6 +215,10 @@ export const Sheet = z.object({
   garmentVersion: z.number().int(),
   kind: z.enum(kindIds),
   protocolVersion: z.number().int(),
+  /** The protocol that the sheet is taken by, whole, so that the table needs nothing else. */
+  protocol: ProtocolView,
+  /** True for parts laid together as worn. */
+  wornTogether: z.boolean(),
   state: SheetState,
   facts: z.object({
     people: z.array(z.object({ userId: Uuid, name: z.string(), duty: Duty })),
@@ -205,6 +231,8 @@ export const Sheet = z.object({
     tapeZeroMm: LengthMm,
     fasteningPair: z.string(),
     note: z.string(),
+    repeatPoints: z.array(z.string()),
+    purpose: z.enum(sheetPurposes),
   }),
   garment: z.object({
     ownNumber: z.string(),
@@ -218,5 +246,7 @@ export const Sheet = z.object({
     hazards: z.array(z.object({ id: z.string(), standing: z.string(), note: z.string() })),
   }),
   readings: z.array(StoredReading),
+  /** What was said at the table beside readings, in the order in which it was said. */
+  tableNotes: z.array(StoredTableNote),
 });
 export type Sheet = z.infer<typeof Sheet>;

@@ -1,5 +1,5 @@
 import { runChecks } from '@ellwand/shared/checks/registry';
-import { protocolFor } from '@ellwand/shared/protocols/standard-protocols';
+import { toProtocol } from '@ellwand/shared/records/protocol';
 import { derivedViews, toReading } from '@ellwand/shared/records/measured';
 import {
   FindingAnswer,
@@ -11,7 +11,7 @@ import {
   type SheetFindings,
   type StoredReading,
 } from '@ellwand/shared/records/sheet';
-import { findMeasuringPoint } from '@ellwand/shared/points/measuring-points';
+import { pointIn } from '@ellwand/shared/protocols/protocol';
 import { wholeValue } from '@ellwand/shared/readings/whole-value';
 import { mm, toMmString } from '@ellwand/shared/units/length';
 import { fromTyped } from '@ellwand/shared/units/parse-length';
@@ -27,14 +27,16 @@ const known = (house: House, id: string): Sheet => {
 };
 
 function stored(house: House, sheet: Sheet, reading: NewReading): StoredReading {
-  const { id, pointId, round, replaces, note, readBy, device, keyedAt } = reading;
+  const { id, pointId, round, worn, replaces, note, readBy, heldBy, device, keyedAt } = reading;
   const base = {
     id,
     pointId,
     round,
+    worn,
     replaces,
     note,
     readBy,
+    heldBy,
     device,
     keyedAt,
     stands: true,
@@ -50,13 +52,23 @@ function stored(house: House, sheet: Sheet, reading: NewReading): StoredReading 
       unit: null,
       tapeCount: 0,
       tapeLengthMm: null,
+      gapTyped: null,
+      gapMm: null,
+      method: null,
+      depthTyped: null,
+      depthMm: null,
       levelFoundBy: null,
       reason: reading.reason,
     };
   }
   const parsed = fromTyped({ text: reading.typed, unit: reading.unit });
   if (!parsed.ok) throw new Refusal(422, 'reading.unreadable');
-  const how = findMeasuringPoint(pointId)?.how ?? 'straight';
+  const how = reading.method ?? pointIn(toProtocol(sheet.protocol), pointId)?.how ?? 'straight';
+  const beside = (text: string | null) => {
+    const length = text ? fromTyped({ text, unit: reading.unit }) : null;
+    return length?.ok ? length.value.length : null;
+  };
+  const [gap, depth] = [beside(reading.gapTyped), beside(reading.depthTyped)];
   const { tapeLengthMm, tapeZeroMm } = sheet.facts;
   const value = wholeValue({
     read: parsed.value.length,
@@ -64,6 +76,7 @@ function stored(house: House, sheet: Sheet, reading: NewReading): StoredReading 
     tapeCount: reading.tapeCount,
     tapeLength: mm(tapeLengthMm),
     tapeZero: mm(tapeZeroMm),
+    ...(gap === null ? {} : { gap }),
   });
   return {
     ...base,
@@ -73,6 +86,11 @@ function stored(house: House, sheet: Sheet, reading: NewReading): StoredReading 
     unit: reading.unit,
     tapeCount: reading.tapeCount,
     tapeLengthMm: reading.tapeCount > 0 ? tapeLengthMm : null,
+    gapTyped: reading.gapTyped,
+    gapMm: gap === null ? null : toMmString(gap),
+    method: reading.method,
+    depthTyped: reading.depthTyped,
+    depthMm: depth === null ? null : toMmString(depth),
     levelFoundBy: reading.levelFoundBy,
     reason: null,
   };
@@ -82,7 +100,8 @@ function keep(house: House, sheet: Sheet, reading: NewReading) {
   const before = sheet.readings.find(({ id }) => id === reading.id);
   if (before) return { id: reading.id, outcome: 'already-kept', reading: before };
   const standing = sheet.readings.find(
-    ({ pointId, round, stands }) => stands && pointId === reading.pointId && round === reading.round,
+    ({ pointId, round, worn, stands }) =>
+      stands && pointId === reading.pointId && round === reading.round && worn === reading.worn,
   );
   if ((standing?.id ?? null) !== reading.replaces) {
     return { id: reading.id, outcome: 'conflict', detail: 'Another reading stands at this point.', standing };
@@ -95,7 +114,7 @@ function keep(house: House, sheet: Sheet, reading: NewReading) {
 }
 
 export function findingsOf(house: House, sheet: Sheet): SheetFindings {
-  const protocol = protocolFor(sheet.kind);
+  const protocol = toProtocol(sheet.protocol);
   const found = runChecks({ kind: sheet.kind, protocol, readings: sheet.readings.map(toReading) });
   return {
     findings: found.map(({ checkId, severity, sentence, pointIds }) => {

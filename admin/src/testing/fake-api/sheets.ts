@@ -1,5 +1,6 @@
 import type { Garment } from '@ellwand/shared/records/garment';
 import { protocolFor } from '@ellwand/shared/protocols/standard-protocols';
+import { toProtocolView } from '@ellwand/shared/records/protocol';
 import type { Sheet, SheetSummary, StoredReading } from '@ellwand/shared/records/sheet';
 import type { z } from 'zod';
 import { idOf, staff } from './people.js';
@@ -22,6 +23,13 @@ export function reading(
     unit: 'mm',
     tapeCount: 0,
     tapeLengthMm: null,
+    worn: null,
+    gapTyped: null,
+    gapMm: null,
+    method: null,
+    depthTyped: null,
+    depthMm: null,
+    heldBy: null,
     levelFoundBy: null,
     reason: null,
     replaces: null,
@@ -59,6 +67,8 @@ export function sheetFor(garment: Garment, partIndex: number, id: string): Sheet
     garmentVersion: garment.version,
     kind: part.kind,
     protocolVersion: 1,
+    protocol: toProtocolView(protocolFor(part.kind)),
+    wornTogether: false,
     state: 'open',
     facts: {
       people: [
@@ -74,6 +84,8 @@ export function sheetFor(garment: Garment, partIndex: number, id: string): Sheet
       tapeZeroMm: '0',
       fasteningPair: 'Waist tape, first hook to its eye',
       note: '',
+      repeatPoints: [],
+      purpose: 'record',
     },
     garment: {
       ownNumber,
@@ -87,6 +99,7 @@ export function sheetFor(garment: Garment, partIndex: number, id: string): Sheet
       hazards,
     },
     readings: [],
+    tableNotes: [],
   };
 }
 

@@ -1,7 +1,6 @@
 import { Injectable } from '@nestjs/common';
 import type { Finding } from '@ellwand/shared/checks/finding';
 import { runChecks } from '@ellwand/shared/checks/registry';
-import { protocolFor } from '@ellwand/shared/protocols/standard-protocols';
 import { derivedViews, toReading } from '@ellwand/shared/records/measured';
 import type { FindingView, SheetFindings } from '@ellwand/shared/records/sheet';
 import { In, Not } from 'typeorm';
@@ -13,6 +12,7 @@ import { conflict, notFound } from '../../common/refusal';
 import { type Tx, Work } from '../../common/work';
 import { PartRow } from '../../garments/part.entity';
 import { UserRow } from '../../users/user.entity';
+import { ProtocolBook } from '../protocols/protocol-book';
 import { toStored } from '../readings/stored-reading';
 import { readingsOf } from '../sheets/sheet-view';
 import { SheetRow } from '../sheets/sheet.entity';
@@ -26,6 +26,7 @@ const missingPoint = 'required-missing-without-reason';
 export class FindingsService {
   constructor(
     private readonly work: Work,
+    private readonly protocols: ProtocolBook,
     private readonly audit: AuditService,
     private readonly clock: Clock,
   ) {}
@@ -93,7 +94,7 @@ export class FindingsService {
     const stored = (await readingsOf(tx, sheetId)).map(toStored);
     const findings = runChecks({
       kind: part.kind,
-      protocol: protocolFor(part.kind),
+      protocol: await this.protocols.at(tx, part, sheet.protocolVersion),
       readings: stored.map(toReading),
       otherPartsOfGarment: await this.otherParts(tx, part),
     });

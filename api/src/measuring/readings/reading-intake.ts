@@ -1,7 +1,5 @@
-import { protocolFor } from '@ellwand/shared/protocols/standard-protocols';
-import { protocolPointIds } from '@ellwand/shared/protocols/protocol';
-import { findMeasuringPoint } from '@ellwand/shared/points/measuring-points';
-import { lowerKind, type GarmentKind } from '@ellwand/shared/points/kinds';
+import { pointIn, type Protocol, protocolPointIds } from '@ellwand/shared/protocols/protocol';
+import { lowerKind } from '@ellwand/shared/points/kinds';
 import type { MeasuringHow } from '@ellwand/shared/points/point';
 import type { NewReading } from '@ellwand/shared/records/sheet';
 import { wholeValue } from '@ellwand/shared/readings/whole-value';
@@ -11,7 +9,7 @@ import { fromTyped, lengthProblemSentence } from '@ellwand/shared/units/parse-le
 
 /** The sheet's facts that a reading is worked out with. */
 export interface TapeFacts {
-  readonly kind: GarmentKind;
+  readonly protocol: Protocol;
   readonly tapeLengthMm: string;
   readonly tapeZeroMm: string;
   /** Whoever the sheet names as reading the tape. */
@@ -24,6 +22,8 @@ export type Intake =
       readonly valueMm: string | null;
       readonly unit: LengthUnit | null;
       readonly tapeLengthMm: string | null;
+      readonly gapMm: string | null;
+      readonly depthMm: string | null;
     }
   | { readonly accepted: false; readonly because: string };
 
@@ -37,15 +37,16 @@ const longest = fromMmString('999999');
  * Only what cannot be read at all is refused here. What is merely unlikely is a matter for the checks.
  */
 export function takeIn(reading: NewReading, facts: TapeFacts): Intake {
-  const point = findMeasuringPoint(reading.pointId);
-  const asked = protocolPointIds(protocolFor(facts.kind)).some((id) => id === reading.pointId);
-  if (!point || !asked)
-    return refused(`A ${lowerKind(facts.kind)} has no measuring point “${reading.pointId}”.`);
+  const point = pointIn(facts.protocol, reading.pointId);
+  if (!point || !protocolPointIds(facts.protocol).includes(reading.pointId))
+    return refused(`A ${lowerKind(facts.protocol.kind)} has no measuring point “${reading.pointId}”.`);
+  if (reading.worn && !point.paired) return refused(`${point.name} has no left and right.`);
   if (!facts.readers.includes(reading.readBy))
     return refused('The sheet does not name that person as reading the tape.');
-  if (reading.state === 'not-taken') return { accepted: true, valueMm: null, unit: null, tapeLengthMm: null };
+  if (reading.state === 'not-taken')
+    return { accepted: true, valueMm: null, unit: null, tapeLengthMm: null, gapMm: null, depthMm: null };
 
-  return workOut({ ...reading, how: point.how }, facts);
+  return workOut({ ...reading, how: reading.method ?? point.how }, facts);
 }
 
 /** What was read off the tape, as it is keyed and as it is kept. */
@@ -54,18 +55,25 @@ interface Keyed {
   readonly unit: LengthUnit;
   readonly tapeCount: number;
   readonly how: MeasuringHow;
+  readonly gapTyped: string | null;
+  readonly depthTyped: string | null;
 }
 
 /** The whole value of what was keyed, with the tape as the sheet describes it. */
 export function workOut(keyed: Keyed, tape: Pick<TapeFacts, 'tapeLengthMm' | 'tapeZeroMm'>): Intake {
   const parsed = fromTyped({ text: keyed.typed, unit: keyed.unit });
   if (!parsed.ok) return refused(lengthProblemSentence(parsed.problem));
+  const gap = beside(keyed.gapTyped, keyed.unit);
+  if (typeof gap === 'string') return refused(`The gap: ${gap}`);
+  const depth = beside(keyed.depthTyped, keyed.unit);
+  if (typeof depth === 'string') return refused(`The depth below the waist: ${depth}`);
   const value = wholeValue({
     read: parsed.value.length,
     how: keyed.how,
     tapeCount: keyed.tapeCount,
     tapeLength: fromMmString(tape.tapeLengthMm),
     tapeZero: fromMmString(tape.tapeZeroMm),
+    ...(gap === null ? {} : { gap }),
   });
   return (
     inReach(value) ?? {
@@ -74,12 +82,21 @@ export function workOut(keyed: Keyed, tape: Pick<TapeFacts, 'tapeLengthMm' | 'ta
       // A unit typed beside the figure wins over the field's own.
       unit: parsed.value.unit,
       tapeLengthMm: keyed.tapeCount > 0 ? tape.tapeLengthMm : null,
+      gapMm: gap === null ? null : toMmString(gap),
+      depthMm: depth === null ? null : toMmString(depth),
     }
   );
 }
 
+/** A length keyed beside the reading: null where there is none, a sentence where it cannot be read. */
+function beside(text: string | null, unit: LengthUnit): Length | string | null {
+  if (text === null || text === '') return null;
+  const parsed = fromTyped({ text, unit });
+  return parsed.ok ? parsed.value.length : lengthProblemSentence(parsed.problem);
+}
+
 function inReach(value: Length): Intake | undefined {
-  if (value < 0) return refused('The tape’s zero is longer than what was read.');
+  if (value < 0) return refused('The tape’s zero, or the gap, is longer than what was read.');
   if (value > longest) return refused('That is longer than a kilometre.');
   return undefined;
 }

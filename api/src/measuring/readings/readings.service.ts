@@ -1,12 +1,13 @@
 import { Injectable } from '@nestjs/common';
 import type { NewReading, ReadingResults } from '@ellwand/shared/records/sheet';
-import { In } from 'typeorm';
+import { In, IsNull } from 'typeorm';
 import type { z } from 'zod';
 import { AuditService } from '../../audit/audit.service';
 import type { Actor } from '../../common/actor';
 import { Clock } from '../../common/clock';
 import { conflict } from '../../common/refusal';
 import { type Tx, Work } from '../../common/work';
+import { ProtocolBook } from '../protocols/protocol-book';
 import { SheetEdits, type SheetInHand } from '../sheets/sheet-edits';
 import { SheetPersonRow } from '../sheets/sheet-person.entity';
 import { SheetRow } from '../sheets/sheet.entity';
@@ -26,6 +27,7 @@ export class ReadingsService {
   constructor(
     private readonly work: Work,
     private readonly sheets: SheetEdits,
+    private readonly protocols: ProtocolBook,
     private readonly audit: AuditService,
     private readonly clock: Clock,
   ) {}
@@ -35,7 +37,7 @@ export class ReadingsService {
       const again = await repeatedBatch(tx, sheetId, readings);
       if (again) return again;
       const inHand = await this.sheets.take(tx, actor, sheetId);
-      const facts = await tapeFacts(tx, inHand);
+      const facts = await this.tapeFacts(tx, inHand);
       const results: Result[] = [];
       for (const reading of readings) results.push(await this.takeOne(tx, inHand, facts, reading, actor));
       const kept = results.filter((result) => result.outcome === 'kept').length;
@@ -66,8 +68,9 @@ export class ReadingsService {
       throw conflict('sheet.complete', 'This sheet is complete. Open it again to go on.');
     const intake = takeIn(reading, facts);
     if (!intake.accepted) return { id: reading.id, outcome: 'refused', detail: intake.because };
+    const { pointId, round, worn } = reading;
     const standing = await tx.findOne(ReadingRow, {
-      where: { sheetId: sheet.id, pointId: reading.pointId, round: reading.round, stands: true },
+      where: { sheetId: sheet.id, pointId, round, worn: worn ?? IsNull(), stands: true },
     });
     if ((standing?.id ?? null) !== reading.replaces) return disputed(reading, standing);
 
@@ -75,6 +78,16 @@ export class ReadingsService {
     const row = this.rowOf(sheet.id, reading, intake, actor);
     await tx.insert(ReadingRow, row);
     return { id: reading.id, outcome: 'kept', reading: toStored(row) };
+  }
+
+  private async tapeFacts(tx: Tx, { sheet, part }: SheetInHand): Promise<TapeFacts> {
+    const readers = await tx.find(SheetPersonRow, { where: { sheetId: sheet.id, duty: 'read' } });
+    return {
+      protocol: await this.protocols.at(tx, part, sheet.protocolVersion),
+      tapeLengthMm: sheet.tapeLengthMm,
+      tapeZeroMm: sheet.tapeZeroMm,
+      readers: readers.map((person) => person.userId),
+    };
   }
 
   private rowOf(
@@ -89,34 +102,31 @@ export class ReadingsService {
       sheetId,
       pointId: reading.pointId,
       round: reading.round,
+      worn: reading.worn,
       state: reading.state,
       valueMm: intake.valueMm,
       typed: taken?.typed ?? null,
       unit: intake.unit,
       tapeCount: taken?.tapeCount ?? 0,
       tapeLengthMm: intake.tapeLengthMm,
+      gapTyped: taken?.gapTyped || null,
+      gapMm: intake.gapMm,
+      method: taken?.method ?? null,
+      depthTyped: taken?.depthTyped || null,
+      depthMm: intake.depthMm,
       levelFoundBy: taken?.levelFoundBy ?? null,
       reason: reading.state === 'not-taken' ? reading.reason : null,
       replaces: reading.replaces,
       stands: true,
       note: reading.note,
       readBy: reading.readBy,
+      heldBy: reading.heldBy,
       recordedBy: actor.id,
       device: reading.device,
       keyedAt: new Date(reading.keyedAt),
       receivedAt: this.clock.now(),
     };
   }
-}
-
-async function tapeFacts(tx: Tx, { sheet, part }: SheetInHand): Promise<TapeFacts> {
-  const readers = await tx.find(SheetPersonRow, { where: { sheetId: sheet.id, duty: 'read' } });
-  return {
-    kind: part.kind,
-    tapeLengthMm: sheet.tapeLengthMm,
-    tapeZeroMm: sheet.tapeZeroMm,
-    readers: readers.map((person) => person.userId),
-  };
 }
 
 /**
@@ -145,6 +155,7 @@ function repeated(already: ReadingRow, sheetId: string, reading: NewReading): Re
     already.sheetId === sheetId &&
     already.pointId === reading.pointId &&
     already.round === reading.round &&
+    already.worn === reading.worn &&
     already.state === reading.state &&
     already.typed === (reading.state === 'taken' ? reading.typed : null);
   if (!same)

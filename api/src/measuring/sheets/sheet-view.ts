@@ -1,5 +1,6 @@
 import { Injectable } from '@nestjs/common';
 import { GarmentRecord } from '@ellwand/shared/records/garment';
+import { toProtocolView } from '@ellwand/shared/records/protocol';
 import { Sheet } from '@ellwand/shared/records/sheet';
 import { In, IsNull } from 'typeorm';
 import type { z } from 'zod';
@@ -9,6 +10,7 @@ import { GarmentRow } from '../../garments/garment.entity';
 import { PartRow } from '../../garments/part.entity';
 import { ImageRow } from '../../media/image.entity';
 import { UserRow } from '../../users/user.entity';
+import { ProtocolBook } from '../protocols/protocol-book';
 import { ReadingRow } from '../readings/reading.entity';
 import { toStored, trimmedMm } from '../readings/stored-reading';
 import { SheetPersonRow } from './sheet-person.entity';
@@ -19,6 +21,8 @@ type SheetShown = z.output<typeof Sheet>;
 /** Puts together a measuring sheet with all that the table needs: who, what, which cautions, every reading. */
 @Injectable()
 export class SheetView {
+  constructor(private readonly protocols: ProtocolBook) {}
+
   /** @throws Refusal 404 */
   async of(tx: Tx, sheetId: string): Promise<SheetShown> {
     const sheet = await tx.findOne(SheetRow, { where: { id: sheetId } });
@@ -26,6 +30,7 @@ export class SheetView {
     const part = await tx.findOneOrFail(PartRow, { where: { id: sheet.partId } });
     const garment = await tx.findOneOrFail(GarmentRow, { where: { id: part.garmentId } });
     const readings = await readingsOf(tx, sheetId);
+    const protocol = await this.protocols.at(tx, part, sheet.protocolVersion);
     return {
       id: sheet.id,
       version: sheet.version,
@@ -34,10 +39,13 @@ export class SheetView {
       garmentVersion: garment.version,
       kind: part.kind,
       protocolVersion: sheet.protocolVersion,
+      protocol: toProtocolView(protocol),
+      wornTogether: part.wornTogether,
       state: sheet.state,
       facts: factsOf(sheet, await peopleOf(tx, sheetId)),
       garment: headingOf(garment, part, await firstImage(tx, garment.id)),
       readings: readings.map(toStored),
+      tableNotes: [],
     };
   }
 }
@@ -67,6 +75,8 @@ function factsOf(sheet: SheetRow, people: SheetShown['facts']['people']): SheetS
     tapeZeroMm: trimmedMm(sheet.tapeZeroMm),
     fasteningPair: sheet.fasteningPair,
     note: sheet.note,
+    repeatPoints: sheet.repeatPoints,
+    purpose: sheet.purpose,
   };
 }
 

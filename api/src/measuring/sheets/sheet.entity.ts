@@ -1,3 +1,4 @@
+import type { SheetPurpose } from '@ellwand/shared/records/sheet';
 import { Column, Entity, PrimaryColumn } from 'typeorm';
 
 /** The measuring of one part. Lengths are exact decimals of a millimetre, kept as strings. */
@@ -17,6 +18,8 @@ export class SheetRow {
   @Column({ name: 'tape_zero_mm', type: 'decimal', precision: 10, scale: 4 }) tapeZeroMm: string;
   @Column({ name: 'fastening_pair', type: 'varchar', length: 300 }) fasteningPair: string;
   @Column({ type: 'varchar', length: 4000 }) note: string;
+  @Column({ name: 'repeat_points', type: 'json' }) repeatPoints: string[];
+  @Column({ type: 'varchar', length: 8 }) purpose: SheetPurpose;
   @Column({ name: 'created_at', type: 'datetime', precision: 3 }) createdAt: Date;
   @Column({ name: 'created_by', type: 'uuid' }) createdBy: string;
   @Column({ name: 'updated_at', type: 'datetime', precision: 3 }) updatedAt: Date;

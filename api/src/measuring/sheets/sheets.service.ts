@@ -1,5 +1,4 @@
 import { Injectable } from '@nestjs/common';
-import { protocolFor } from '@ellwand/shared/protocols/standard-protocols';
 import type { NewSheet, Sheet, SheetFacts } from '@ellwand/shared/records/sheet';
 import { In } from 'typeorm';
 import { v7 as uuidv7 } from 'uuid';
@@ -14,6 +13,7 @@ import { PartRow } from '../../garments/part.entity';
 import { UserRow } from '../../users/user.entity';
 import { workOutAgain } from '../readings/other-tape';
 import { FindingsService } from '../findings/findings.service';
+import { ProtocolBook } from '../protocols/protocol-book';
 import { SheetEdits } from './sheet-edits';
 import { SheetPersonRow } from './sheet-person.entity';
 import { SheetView } from './sheet-view';
@@ -29,6 +29,7 @@ export class SheetsService {
     private readonly garments: GarmentEdits,
     private readonly sheets: SheetEdits,
     private readonly view: SheetView,
+    private readonly protocols: ProtocolBook,
     private readonly findings: FindingsService,
     private readonly audit: AuditService,
     private readonly clock: Clock,
@@ -56,7 +57,7 @@ export class SheetsService {
         ...columnsOf(facts),
         id,
         partId,
-        protocolVersion: protocolFor(part.kind).version,
+        protocolVersion: (await this.protocols.current(tx, part)).version,
         state: 'open',
         version: 1,
         createdAt: now,
@@ -77,7 +78,8 @@ export class SheetsService {
       const dropped = await namePeople(tx, id, facts.people, '/people');
       // Whoever held the tape held it, also when the sheet names them no more.
       await this.garments.noteHands(tx, part.garmentId, dropped);
-      const reworked = await workOutAgain(tx, id, sheet, facts);
+      const protocol = await this.protocols.at(tx, part, sheet.protocolVersion);
+      const reworked = await workOutAgain(tx, id, protocol, { before: sheet, after: facts });
       await this.sheets.set(tx, actor, sheet, columnsOf(facts));
       await this.audit.note(tx, actor, {
         verb: 'edit',

@@ -1,10 +1,11 @@
-import { measuringPoint, type PointId } from '@ellwand/shared/points/measuring-points';
+import type { MeasuringPoint } from '@ellwand/shared/points/point';
+import { pointsOf } from '@ellwand/shared/protocols/protocol';
 import { protocolFor } from '@ellwand/shared/protocols/standard-protocols';
-import { protocolPointIds } from '@ellwand/shared/protocols/protocol';
 import { acceptedValue } from '@ellwand/shared/readings/accepted-value';
 import { standingReadings, stands, type Reading } from '@ellwand/shared/readings/reading';
 import { shownUncertainty } from '@ellwand/shared/readings/uncertainty';
 import type { Image } from '@ellwand/shared/records/image';
+import { toProtocol } from '@ellwand/shared/records/protocol';
 import { derivedViews, toReading } from '@ellwand/shared/records/measured';
 import type { PublishedMeasurement, PublishedPart } from '@ellwand/shared/records/published-garment';
 import { lengthOf, toMmString } from '@ellwand/shared/units/length';
@@ -23,7 +24,7 @@ export function projectPart(part: SnapshotPart, context: PartContext): Published
   const { sheet } = part;
   if (!sheet) return { ...heading, ...unmeasured };
   const readings = sheet.readings.map(toReading);
-  const asked = protocolPointIds(protocolFor(part.kind));
+  const asked = pointsOf(sheet.protocol ? toProtocol(sheet.protocol) : protocolFor(part.kind));
   return {
     ...heading,
     measuredOn: sheet.measuredOn,
@@ -32,8 +33,8 @@ export function projectPart(part: SnapshotPart, context: PartContext): Published
     fasteningPair: sheet.fasteningPair || null,
     measuredBy: context.showPeople ? namesOf(sheet) : [],
     peopleCount: new Set(sheet.people.map((person) => person.userId)).size,
-    measurements: asked.flatMap((id) => projectMeasurement(id, readings, context.pictures) ?? []),
-    notTaken: asked.flatMap((id) => projectNotTaken(id, readings) ?? []),
+    measurements: asked.flatMap((point) => projectMeasurement(point, readings, context.pictures) ?? []),
+    notTaken: asked.flatMap((point) => projectNotTaken(point, readings) ?? []),
     derived: derivedViews(part.kind, sheet.readings),
   };
 }
@@ -55,13 +56,13 @@ function namesOf(sheet: SnapshotSheet): string[] {
 }
 
 function projectMeasurement(
-  pointId: PointId,
+  point: MeasuringPoint,
   readings: readonly Reading[],
   pictures: readonly Image[],
 ): PublishedMeasurement | undefined {
+  const pointId = point.id;
   const accepted = acceptedValue(readings, pointId);
   if (!accepted) return undefined;
-  const point = measuringPoint(pointId);
   const rounds = standingReadings(readings, pointId);
   const lengths = rounds.find((reading) => reading.tapeLengths)?.tapeLengths;
   const half = lengthOf(Number(divideHalfUp(BigInt(accepted.value), 2n)));
@@ -82,11 +83,11 @@ function projectMeasurement(
 }
 
 function projectNotTaken(
-  pointId: PointId,
+  { id: pointId, name }: MeasuringPoint,
   readings: readonly Reading[],
 ): PublishedPart['notTaken'][number] | undefined {
   const standing = readings.filter((reading) => reading.pointId === pointId && stands(reading));
   if (standing.some((reading) => reading.state === 'taken')) return undefined;
   const reason = standing.find((reading) => reading.state === 'not-taken')?.notTakenReason;
-  return reason ? { pointId, label: measuringPoint(pointId).name, reason } : undefined;
+  return reason ? { pointId, label: name, reason } : undefined;
 }

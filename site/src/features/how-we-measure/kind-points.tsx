@@ -1,7 +1,6 @@
 import { type GarmentKind } from '@ellwand/shared/points/kinds';
 import { handlingStepLabels, handlingSteps } from '@ellwand/shared/points/point';
-import { measuringPoint } from '@ellwand/shared/points/measuring-points';
-import { lettersFor } from '@ellwand/shared/protocols/protocol';
+import { lettersFor, pointsOf as protocolPoints } from '@ellwand/shared/protocols/protocol';
 import { protocolFor } from '@ellwand/shared/protocols/standard-protocols';
 import { useMemo } from 'react';
 import { useLitPoints } from '../../components/diagram/lit-points';
@@ -55,10 +54,11 @@ export function KindPoints({ kind }: { readonly kind: GarmentKind }) {
 function pointsOf(kind: GarmentKind) {
   const letters = new Map<string, string>(lettersFor(protocolFor(kind)));
   const points = [...letters.keys()];
-  const entries = protocolFor(kind).points.map(({ pointId }) => {
-    const point = measuringPoint(pointId);
-    const letter = letters.get(pointId) ?? '';
-    return { pointId, letter, name: point.name, step: point.handlingStep };
-  });
+  const entries = protocolPoints(protocolFor(kind)).map(({ id, name, handlingStep }) => ({
+    pointId: id,
+    letter: letters.get(id) ?? '',
+    name,
+    step: handlingStep,
+  }));
   return { letters, points, entries };
 }

@@ -1,4 +1,5 @@
-import { type Sheet, type SheetFactsInput, dutyLabels, supportLabels } from '@ellwand/shared/records/sheet';
+import { dutyLabels } from '@ellwand/shared/records/hands';
+import { type Sheet, type SheetFactsInput, supportLabels } from '@ellwand/shared/records/sheet';
 import { useQueryClient } from '@tanstack/react-query';
 import { dayText } from '../../../lib/moments.js';
 import { isProblem } from '../../../lib/problem-error.js';

@@ -1,4 +1,4 @@
-import { type duties, dutyLabels } from '@ellwand/shared/records/sheet';
+import { type duties, dutyLabels } from '@ellwand/shared/records/hands';
 import { FieldError } from '../../../components/ui/field.js';
 
 type Duty = (typeof duties)[number];

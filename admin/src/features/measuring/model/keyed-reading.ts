@@ -19,10 +19,12 @@ function base({ row, readBy, note }: Keying) {
     id: newId(),
     pointId: row.point.id,
     round: row.round,
+    worn: null,
     // A correction is a new reading that takes the old one's place; nothing is overwritten.
     replaces: row.reading?.id ?? null,
     note: note ?? row.reading?.note ?? '',
     readBy,
+    heldBy: null,
     device: deviceName(),
     keyedAt: new Date().toISOString(),
   };
@@ -44,6 +46,9 @@ export function keyedReading(keying: Keying, draft: Draft): Keyed {
     typed: text,
     unit: parsed.value.unit,
     tapeCount: Number(countText),
+    gapTyped: null,
+    method: null,
+    depthTyped: null,
     levelFoundBy: draft.level,
   };
   return { ok: true, reading };

@@ -1,25 +1,24 @@
-import { type GarmentKind } from '@ellwand/shared/points/kinds';
-import { type CataloguedPoint, measuringPoint } from '@ellwand/shared/points/measuring-points';
-import { howLabels, sideLabels, type HandlingStep } from '@ellwand/shared/points/point';
-import { lettersFor } from '@ellwand/shared/protocols/protocol';
-import { protocolFor } from '@ellwand/shared/protocols/standard-protocols';
+import { howLabels, type MeasuringPoint, sideLabels, type HandlingStep } from '@ellwand/shared/points/point';
+import { lettersFor, pointIn } from '@ellwand/shared/protocols/protocol';
+import { type ProtocolView, toProtocol } from '@ellwand/shared/records/protocol';
 
 /** A measuring point as it stands on a sheet: with its letter, and whether the sheet waits for it. */
 export interface SheetPoint {
   readonly id: string;
   readonly letter: string;
   readonly required: boolean;
-  readonly point: CataloguedPoint;
+  readonly point: MeasuringPoint;
   readonly step: HandlingStep;
 }
 
 /** The points of a sheet, in handling order. */
-export function sheetPoints(kind: GarmentKind): readonly SheetPoint[] {
-  const protocol = protocolFor(kind);
+export function sheetPoints(view: ProtocolView): readonly SheetPoint[] {
+  const protocol = toProtocol(view);
   const letters = lettersFor(protocol);
-  return protocol.points.map(({ pointId, required }) => {
-    const point = measuringPoint(pointId);
-    return { id: pointId, letter: letters.get(pointId) ?? '', required, point, step: point.handlingStep };
+  return protocol.points.flatMap(({ pointId, required }) => {
+    const point = pointIn(protocol, pointId);
+    if (!point) return [];
+    return [{ id: pointId, letter: letters.get(pointId) ?? '', required, point, step: point.handlingStep }];
   });
 }
 

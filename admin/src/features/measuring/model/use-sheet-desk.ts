@@ -23,7 +23,7 @@ export type NotTakenReason = Extract<NewReading, { state: 'not-taken' }>['reason
 export function useSheetDesk(shown: Sheet) {
   // What was just kept is in the cache before this screen is told of it; read there, it is never nowhere.
   const sheet = useQueryClient().getQueryData(sheetQuery(shown.id).queryKey) ?? shown;
-  const points = useMemo(() => sheetPoints(sheet.kind), [sheet.kind]);
+  const points = useMemo(() => sheetPoints(sheet.protocol), [sheet.protocol]);
   const tape = useMemo(
     () => ({ length: mm(sheet.facts.tapeLengthMm), zero: mm(sheet.facts.tapeZeroMm) }),
     [sheet.facts],
