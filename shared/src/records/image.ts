@@ -1,7 +1,7 @@
 import { z } from 'zod';
 import { Day, line, Moment, prose, Uuid } from './common.js';
 
-export const imageViews = ['front', 'back', 'side', 'inside', 'detail', 'label', 'tape'] as const;
+export const imageViews = ['front', 'back', 'side', 'inside', 'detail', 'label', 'tape', 'pattern'] as const;
 export const ImageView = z.enum(imageViews);
 export const imageViewLabels: Readonly<Record<z.infer<typeof ImageView>, string>> = {
   front: 'Front',
@@ -11,6 +11,7 @@ export const imageViewLabels: Readonly<Record<z.infer<typeof ImageView>, string>
   detail: 'Detail',
   label: 'Label',
   tape: 'The tape at a point',
+  pattern: 'Hand-drawn pattern',
 };
 
 /** Widths of the smaller forms in pixels. A form is never wider than its original. */
