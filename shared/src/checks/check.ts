@@ -4,23 +4,12 @@
  */
 import { type PointId } from '../points/measuring-points.js';
 import { type AcceptedValue } from '../readings/accepted-value.js';
-import { decimalText } from '../units/format-length.js';
-import { type Length, toMmString, UNITS_PER_MM } from '../units/length.js';
+import { wornSides } from '../readings/worn-side.js';
 import { type Finding, type Severity } from './finding.js';
-import { nameOf, type SheetView } from './sheet-view.js';
+import { type Figures, findingOf } from './finding-text.js';
+import { type SheetView } from './sheet-view.js';
 
-/** A point that is named in the sentence; `{point}` becomes its name. */
-export interface Mention {
-  readonly mentioned: string;
-}
-
-/** What goes into a sentence: a point's value, the name of a point, or a length that belongs to neither. */
-export type Figure = AcceptedValue | Mention | Length;
-
-export type Raise<Message extends string> = (
-  message: Message,
-  figures: Readonly<Record<string, Figure>>,
-) => void;
+export type Raise<Message extends string> = (message: Message, figures: Figures) => void;
 
 interface CheckFacts<Message extends string> {
   readonly id: string;
@@ -42,7 +31,7 @@ export interface Check {
   readonly run: (sheet: SheetView) => readonly Finding[];
 }
 
-/** A check that walks the sheet by itself. */
+/** A check that walks the sheet by itself. What it raises twice in the same words is said once. */
 export function sheetCheck<const Message extends string>(
   facts: CheckFacts<Message> & { run: (sheet: SheetView, raise: Raise<Message>) => void },
 ): Check {
@@ -56,18 +45,28 @@ export function sheetCheck<const Message extends string>(
     messages,
     severityOf: (message) => severityFor(message as Message),
     run: (sheet) => {
-      const findings: Finding[] = [];
-      facts.run(sheet, (message, figures) => {
-        findings.push(finding(id, message, severityFor(message), messages[message], figures));
+      const findings = new Map<string, Finding>();
+      facts.run(sheet, (message, given) => {
+        const said = {
+          checkId: id,
+          message,
+          severity: severityFor(message),
+          wording: messages[message],
+          given,
+        };
+        const finding = findingOf(said, sheet.protocol);
+        if (!findings.has(finding.key)) findings.set(finding.key, finding);
       });
-      return findings;
+      return [...findings.values()];
     },
   };
 }
 
+type Values = ReadonlyMap<string, AcceptedValue>;
+
 /**
  * A check over named figures, each the first of its points that was read. It does not run while one of them
- * is missing.
+ * is missing. Where a point was read on both sides it runs for each: the left is never held against the right.
  */
 export function check<const Message extends string, const Name extends string>(
   facts: CheckFacts<Message> & {
@@ -76,68 +75,25 @@ export function check<const Message extends string, const Name extends string>(
   },
 ): Check {
   const { needs, run, ...rest } = facts;
+  const figuresIn = (values: Values): Readonly<Record<Name, AcceptedValue>> | undefined => {
+    const found = Object.entries<readonly PointId[]>(needs).flatMap(([name, pointIds]) => {
+      const accepted = pointIds.map((pointId) => values.get(pointId)).find((value) => value !== undefined);
+      return accepted ? [[name, accepted] as const] : [];
+    });
+    if (found.length < Object.keys(needs).length) return undefined;
+    return Object.fromEntries(found) as Record<Name, AcceptedValue>;
+  };
   return sheetCheck<Message>({
     ...rest,
-    run: ({ values }, raise) => {
-      const found = Object.entries<readonly PointId[]>(needs).flatMap(([name, pointIds]) => {
-        const pointId = pointIds.find((candidate) => values.has(candidate));
-        const accepted = pointId && values.get(pointId);
-        return accepted ? [[name, accepted] as const] : [];
-      });
-      if (found.length < Object.keys(needs).length) return;
-      run(Object.fromEntries(found) as Record<Name, AcceptedValue>, raise);
+    run: ({ values, valuesOn }, raise) => {
+      for (const source of [values, ...wornSides.map((side) => valuesOn[side])]) {
+        const figures = figuresIn(source);
+        if (figures && onOneSide(Object.values(figures))) run(figures, raise);
+      }
     },
   });
 }
 
-function finding(
-  checkId: string,
-  message: string,
-  severity: Severity,
-  wording: string,
-  given: Readonly<Record<string, Figure>>,
-): Finding {
-  const pointIds = [...new Set(Object.values(given).flatMap((figure) => pointOf(figure) ?? []))];
-  const figures = Object.fromEntries(
-    Object.entries(given).flatMap(([name, figure]) => {
-      const length = lengthIn(figure);
-      return length === undefined ? [] : [[name, length] as const];
-    }),
-  );
-  return {
-    key: [checkId, message, ...pointIds, ...Object.values(figures).map(toMmString)].join(':'),
-    checkId,
-    severity,
-    sentence: fill(wording, given),
-    pointIds,
-    figures,
-  };
-}
-
-function pointOf(figure: Figure): string | undefined {
-  if (typeof figure === 'number') return undefined;
-  return 'mentioned' in figure ? figure.mentioned : figure.pointId;
-}
-
-function lengthIn(figure: Figure): Length | undefined {
-  if (typeof figure === 'number') return figure;
-  return 'mentioned' in figure ? undefined : figure.value;
-}
-
-function fill(wording: string, given: Readonly<Record<string, Figure>>): string {
-  const filled = wording.replace(/\{(\w+)\}/g, (whole, name: string) => {
-    const figure = given[name];
-    return figure === undefined ? whole : figureText(figure);
-  });
-  return filled.charAt(0).toUpperCase() + filled.slice(1);
-}
-
-function figureText(figure: Figure): string {
-  if (typeof figure === 'object' && 'mentioned' in figure) return nameOf(figure.mentioned);
-  return lengthText(typeof figure === 'object' ? figure.value : figure);
-}
-
-/** Whole millimetres as they are read at the table; tenths where the length has them. */
-export function lengthText(length: Length): string {
-  return `${decimalText(length, 'mm', length % UNITS_PER_MM === 0 ? 0 : 1)} mm`;
+function onOneSide(figures: readonly AcceptedValue[]): boolean {
+  return new Set(figures.flatMap(({ worn }) => worn ?? [])).size < 2;
 }

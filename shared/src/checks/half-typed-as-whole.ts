@@ -13,11 +13,11 @@ export const halfTypedAsWhole = sheetCheck({
       '{point} comes to {read} doubled; {meant} by itself would be usual. Was the whole entered as the half?',
   },
   run: (sheet, raise) => {
-    for (const { point, range, readings } of readPoints(sheet)) {
+    for (const { point, mention, range, readings } of readPoints(sheet)) {
       for (const reading of readings) {
         const found = explain(reading, point, range);
         if (found.cause !== 'half' && found.cause !== 'whole') continue;
-        raise(found.cause, { point: { mentioned: point.id }, read: reading.length, meant: found.meant });
+        raise(found.cause, { point: mention, read: reading.length, meant: found.meant });
         break;
       }
     }

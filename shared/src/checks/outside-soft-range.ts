@@ -19,11 +19,11 @@ export const outsideSoftRange = sheetCheck({
     above: '{point} reads {read}; {bound} or less is usual. Read it again, or say why it is so large.',
   },
   run: (sheet, raise) => {
-    for (const { point, range, readings } of readPoints(sheet)) {
+    for (const { point, mention, range, readings } of readPoints(sheet)) {
       for (const reading of readings) {
         const found = explain(reading, point, range);
         if (found.cause !== 'unexplained') continue;
-        raise(found.side, { point: { mentioned: point.id }, read: reading.length, bound: found.bound });
+        raise(found.side, { point: mention, read: reading.length, bound: found.bound });
         break;
       }
     }

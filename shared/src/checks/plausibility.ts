@@ -1,7 +1,5 @@
 /** What could explain a reading that lies outside its point's usual range. */
-import { type CataloguedPoint } from '../points/measuring-points.js';
-import { type SoftRange } from '../points/point.js';
-import { howTaken } from '../readings/accepted-value.js';
+import { type MeasuringHow, type MeasuringPoint, type SoftRange } from '../points/point.js';
 import { type TakenReading } from '../readings/reading.js';
 import { type Length, lengthOf } from '../units/length.js';
 import { divideHalfUp } from '../units/rounding.js';
@@ -26,7 +24,8 @@ const slips: readonly { readonly slip: SlipKind; readonly times: bigint; readonl
   { slip: 'mm-as-inches', times: 10n, over: 254n },
 ];
 
-export function explain(reading: TakenReading, point: CataloguedPoint, range: SoftRange): Explanation {
+/** A reading outside its point's range, and what would explain it. */
+export function explain(reading: TakenReading, point: MeasuringPoint, range: SoftRange): Explanation {
   const { length } = reading;
   if (fits(length, range)) return { cause: 'usual' };
   const unexplained = beyond(length, range);
@@ -53,16 +52,17 @@ function slipOf({ length, unit }: TakenReading, range: SoftRange): Explanation |
 }
 
 /** Points whose half is easily read in place of the whole: rounds laid flat, and widths from a centre seam. */
-function canBeHalved({ how, id }: CataloguedPoint): boolean {
+function canBeHalved({ how, id }: MeasuringPoint): boolean {
   return how === 'round' || id === 'across-back' || id === 'across-front';
 }
 
 function halfOrWhole(
   reading: TakenReading,
-  point: CataloguedPoint,
+  point: MeasuringPoint,
   range: SoftRange,
 ): Explanation | undefined {
-  const doubled = howTaken(reading) === 'flat-doubled';
+  const how: MeasuringHow = reading.method ?? point.how;
+  const doubled = how === 'flat-doubled';
   const half = scaled(reading.length, 1n, 2n);
   if (doubled && fits(half, range)) return { cause: 'whole', meant: half };
   const twice = scaled(reading.length, 2n, 1n);

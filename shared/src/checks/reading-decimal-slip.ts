@@ -16,11 +16,11 @@ export const readingDecimalSlip = sheetCheck({
     'mm-as-inches': '{point} reads {read}; {meant} would be usual. Were millimetres entered as inches?',
   },
   run: (sheet, raise) => {
-    for (const { point, range, readings } of readPoints(sheet)) {
+    for (const { point, mention, range, readings } of readPoints(sheet)) {
       for (const reading of readings) {
         const found = explain(reading, point, range);
         if (found.cause !== 'slip') continue;
-        raise(found.slip, { point: { mentioned: point.id }, read: reading.length, meant: found.meant });
+        raise(found.slip, { point: mention, read: reading.length, meant: found.meant });
         break;
       }
     }

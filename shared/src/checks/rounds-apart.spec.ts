@@ -14,6 +14,17 @@ testCheck(roundsApart, {
     },
     { name: 'a doubled reading 6 mm apart, 3 mm on the half', readings: rounds('elbow', 290, 296) },
     {
+      name: 'a round read flat and doubled, 6 mm apart',
+      readings: [
+        read('waist', 612, { method: 'flat-doubled' }),
+        read('waist', 618, { method: 'flat-doubled', round: 2 }),
+      ],
+    },
+    {
+      name: 'two sleeves, each read once',
+      readings: [read('sleeve-outer', 600, { worn: 'left' }), read('sleeve-outer', 625, { worn: 'right' })],
+    },
+    {
       name: 'a reading that was corrected',
       readings: [read('waist', 512, { stands: false }), read('waist', 612, { round: 2 })],
     },
@@ -25,6 +36,17 @@ testCheck(roundsApart, {
       says: 'The readings of waist differ by 4 mm; 3 mm is allowed. Read it once more.',
       severity: 'question',
       points: ['waist'],
+    },
+    {
+      name: 'the left sleeve, not the right',
+      readings: [
+        read('sleeve-outer', 600, { worn: 'left' }),
+        read('sleeve-outer', 612, { worn: 'left', round: 2 }),
+        read('sleeve-outer', 600, { worn: 'right' }),
+      ],
+      says: 'The readings of left sleeve, outer length differ by 12 mm; 3 mm is allowed. Read it once more.',
+      severity: 'question',
+      points: ['sleeve-outer'],
     },
     {
       name: 'a third reading far off',

@@ -12,10 +12,11 @@ export const roundsApart = sheetCheck({
     apart: 'The readings of {point} differ by {spread}; {allowed} is allowed. Read it once more.',
   },
   run: (sheet, raise) => {
-    for (const { point, accepted } of readPoints(sheet)) {
-      const allowed = allowedSpreadAt(point, accepted.value, accepted.tapeJoins);
+    for (const { point, mention, accepted, readings } of readPoints(sheet)) {
+      const how = readings.find(({ method }) => method === 'flat-doubled')?.method ?? point.how;
+      const allowed = allowedSpreadAt({ ...point, how }, accepted.value, accepted.tapeJoins);
       if (!isLonger(accepted.spread, allowed)) continue;
-      raise('apart', { point: { mentioned: point.id }, spread: accepted.spread, allowed });
+      raise('apart', { point: mention, spread: accepted.spread, allowed });
     }
   },
 });

@@ -1,4 +1,4 @@
-/** Hats, gloves and shoes. Of a pair the right is read; the left is noted where it differs. */
+/** Hats, gloves and shoes. A pair of gloves or shoes has a left and a right, and each may be read. */
 import { backStraight, between, frontDoubled, frontStraight, insideRound, point } from './point.js';
 
 const brim = {
@@ -74,6 +74,7 @@ export const accessoryPoints = [
     kinds: ['glove'],
     softRange: between(140, 260),
     watchFor: 'Without the thumb.',
+    paired: true,
   }),
   point({
     id: 'glove-length',
@@ -86,6 +87,7 @@ export const accessoryPoints = [
     kinds: ['glove'],
     softRange: between(180, 750),
     watchFor: 'Kid creases: smooth nothing out to read it.',
+    paired: true,
   }),
   point({
     id: 'heel',
@@ -98,6 +100,7 @@ export const accessoryPoints = [
     kinds: ['shoe'],
     softRange: between(0, 120),
     watchFor: 'Straight up, and not along the slope of the heel.',
+    paired: true,
   }),
   point({
     id: 'sole',
@@ -110,6 +113,7 @@ export const accessoryPoints = [
     kinds: ['shoe'],
     softRange: between(110, 320),
     watchFor: 'A pointed toe is longer than any foot: the point is included.',
+    paired: true,
   }),
   point({
     id: 'tread',
@@ -122,5 +126,6 @@ export const accessoryPoints = [
     kinds: ['shoe'],
     softRange: between(40, 115),
     watchFor: 'The sole, not the upper that stands over it.',
+    paired: true,
   }),
 ] as const;

@@ -77,7 +77,7 @@ export const skirtPoints = [
     ...frontCurve,
     kinds: ['skirt', 'petticoat'],
     softRange: between(450, 1500, LENGTH_BASIS),
-    watchFor: 'Left and right often differ: read the right as worn and note the left.',
+    watchFor: 'Left and right often differ: say which was read, and read both where they do.',
     paired: true,
   }),
   point({

@@ -1,4 +1,4 @@
-/** Sleeves and cuffs. Where left and right differ, the right as worn is read and the note says so. */
+/** Sleeves and cuffs. Left and right, as worn, may each be read; readings without a side say that the two agree. */
 import { backCurve, between, frontCurve, frontDoubled, frontStraight, insideRound, point } from './point.js';
 
 export const sleevePoints = [

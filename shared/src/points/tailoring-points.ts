@@ -114,6 +114,7 @@ export const tailoringPoints = [
     kinds: ['waistcoat'],
     softRange: between(420, 950),
     watchFor: 'Back and front are both read: they seldom agree.',
+    paired: true,
   }),
   point({
     id: 'trouser-waistband',

@@ -2,8 +2,8 @@ import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { inTapeLengths, notTaken, read, rounds } from '../testing/sample-readings.js';
 import { lengthOf, mm } from '../units/length.js';
-import { acceptedValue, acceptedValues, meanOf } from './accepted-value.js';
-import { notTakenReasonIds, notTakenReasons } from './reading.js';
+import { acceptedValue, acceptedValues, acceptedValuesOn, meanOf } from './accepted-value.js';
+import { notTakenReasonIds, notTakenReasons, type TakenReading } from './reading.js';
 import { readingStep } from './reading-step.js';
 import { rectangularMm, shownUncertainty, stepUncertaintyMm } from './uncertainty.js';
 
@@ -61,6 +61,91 @@ describe('the value of a point', () => {
   });
 });
 
+describe('left and right, as worn', () => {
+  const sleeves = [
+    read('sleeve-outer', 600, { worn: 'left' }),
+    read('sleeve-outer', 604, { worn: 'left', round: 2 }),
+    read('sleeve-outer', 640, { worn: 'right' }),
+  ];
+
+  it('are two values, never averaged into a sleeve that does not exist', () => {
+    expect(acceptedValue(sleeves, 'sleeve-outer', 'left')).toMatchObject({
+      value: mm(602),
+      n: 2,
+      spread: mm(4),
+      worn: 'left',
+    });
+    expect(acceptedValue(sleeves, 'sleeve-outer', 'right')).toMatchObject({
+      value: mm(640),
+      n: 1,
+      spread: mm(0),
+    });
+  });
+
+  it('have one that speaks for both: what has no side, else the right, else the left', () => {
+    expect(acceptedValue(sleeves, 'sleeve-outer')).toMatchObject({ value: mm(640), n: 1, worn: 'right' });
+    const left = sleeves.filter(({ worn }) => worn === 'left');
+    expect(acceptedValue(left, 'sleeve-outer')).toMatchObject({ value: mm(602), worn: 'left' });
+    const both = acceptedValue([...sleeves, read('sleeve-outer', 620)], 'sleeve-outer');
+    expect(both).toMatchObject({ value: mm(620), n: 1 });
+    expect(both).not.toHaveProperty('worn');
+  });
+
+  it('gather with the points that have no side, each on its own', () => {
+    const readings = [...sleeves, read('across-back', 320)];
+    const on = (side: 'left' | 'right') =>
+      [...acceptedValuesOn(side, readings)].map(([id, { value }]) => [id, value]);
+    expect(on('left')).toEqual([
+      ['sleeve-outer', mm(602)],
+      ['across-back', mm(320)],
+    ]);
+    expect(on('right')).toEqual([
+      ['sleeve-outer', mm(640)],
+      ['across-back', mm(320)],
+    ]);
+  });
+
+  it('are the mean of readings of one side, whatever the order in which they came', () => {
+    const reading = fc.record({
+      worn: fc.constantFrom('left' as const, 'right' as const, undefined),
+      valueMm: fc.integer({ min: 1, max: 3000 }),
+    });
+    fc.assert(
+      fc.property(
+        fc.array(reading, { minLength: 1, maxLength: 12 }),
+        fc.infiniteStream(fc.nat()),
+        (facts, keys) => {
+          const taken = facts.map(({ worn, valueMm }, index): TakenReading =>
+            read('cuff', valueMm, { round: index + 1, ...(worn ? { worn } : {}) }),
+          );
+          const shuffled = taken
+            .map((one) => ({ one, key: keys.next().value ?? 0 }))
+            .sort((first, second) => first.key - second.key)
+            .map(({ one }) => one);
+          const accepted = acceptedValue(taken, 'cuff');
+          expect(acceptedValue(shuffled, 'cuff')).toEqual(accepted);
+          const ofOneSide = taken.filter(({ worn }) => worn === accepted?.worn).map(({ length }) => length);
+          expect(accepted?.value).toBe(meanOf(ofOneSide));
+          expect(accepted?.n).toBe(ofOneSide.length);
+        },
+      ),
+    );
+  });
+});
+
+describe('a point that the museum made for itself', () => {
+  const ownPoints = [{ id: 'own-sash', how: 'flat-doubled' as const }];
+
+  it('is as sure as its own way of laying the tape', () => {
+    const readings = [read('own-sash', 300)];
+    const doubled = acceptedValue(readings, 'own-sash', undefined, ownPoints);
+    expect(doubled?.uncertaintyMm).toBeCloseTo(2 * Math.hypot(0.288675, 1), 5);
+    expect(acceptedValues(readings, ownPoints).get('own-sash')).toEqual(doubled);
+    // Nobody knows it: it counts as laid along a curve, the less sure way.
+    expect(acceptedValue(readings, 'own-sash')?.uncertaintyMm).toBeCloseTo(Math.hypot(0.288675, 2), 5);
+  });
+});
+
 describe('the uncertainty of a value', () => {
   const uncertaintyOf = (...readings: Parameters<typeof acceptedValue>[0]): number | undefined =>
     acceptedValue(readings, readings[0]?.pointId ?? '')?.uncertaintyMm;
@@ -84,6 +169,12 @@ describe('the uncertainty of a value', () => {
       2 * Math.hypot(0.288675, 1),
       5,
     );
+  });
+
+  it('grows by that of the gap, which was read by itself', () => {
+    const closed = read('waist', 612, { gap: mm(28) });
+    expect(uncertaintyOf(closed)).toBeCloseTo(Math.hypot(0.288675, 2, 0.288675, 1), 5);
+    expect(uncertaintyOf(read('waist', 612, { gap: mm(0) }))).toBe(uncertaintyOf(read('waist', 612)));
   });
 
   it('adds 1 mm for each join of tape lengths', () => {

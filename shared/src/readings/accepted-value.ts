@@ -1,6 +1,6 @@
 /** The value of a point: the mean of the rounds that stand, and how far it can be trusted. */
 import { findMeasuringPoint } from '../points/measuring-points.js';
-import { type MeasuringHow } from '../points/point.js';
+import { type MeasuringHow, type MeasuringPoint } from '../points/point.js';
 import { type Length, lengthOf, longestOf, shortestOf, subtract } from '../units/length.js';
 import { divideHalfUp } from '../units/rounding.js';
 import { standingReadings, type Reading, type TakenReading } from './reading.js';
@@ -30,6 +30,9 @@ export function meanOf(lengths: readonly Length[]): Length {
   return lengthOf(Number(divideHalfUp(sum, BigInt(lengths.length))));
 }
 
+/** Points that a museum made for itself, which the catalogue does not have. */
+export type OwnPoints = readonly Pick<MeasuringPoint, 'id' | 'how'>[];
+
 /**
  * The value of a point, or of one side of it. Where left and right were read and no side is named, one of them speaks
  * (see `speakingReadings`). Nothing when no such reading was taken and stands. The order of readings does not matter.
@@ -38,6 +41,7 @@ export function acceptedValue(
   readings: readonly Reading[],
   pointId: string,
   side?: WornSide,
+  ownPoints: OwnPoints = [],
 ): AcceptedValue | undefined {
   const standing = standingReadings(readings, pointId);
   const taken = side ? standing.filter(({ worn }) => worn === side) : speakingReadings(standing);
@@ -50,7 +54,7 @@ export function acceptedValue(
     value: meanOf(lengths),
     n: taken.length,
     spread,
-    uncertaintyMm: combinedUncertaintyMm(taken, spread),
+    uncertaintyMm: combinedUncertaintyMm(taken, spread, ownPoints),
     tapeJoins: Math.max(...taken.map(joinsOf)),
     ...(taken[0]?.worn ? { worn: taken[0].worn } : {}),
   };
@@ -58,19 +62,32 @@ export function acceptedValue(
 
 /**
  * Reading again by the same method does not make the method better, so step and laying count once, at the
- * worst of the rounds; only the spread is the rounds' own.
+ * worst of the rounds; only the spread is the rounds' own. A gap is a reading of its own and brings its own part.
  */
-function combinedUncertaintyMm(taken: readonly TakenReading[], spread: Length): number {
+function combinedUncertaintyMm(taken: readonly TakenReading[], spread: Length, ownPoints: OwnPoints): number {
+  const worst = (partOf: (reading: TakenReading, how: MeasuringHow) => number): number =>
+    Math.max(...taken.map((reading) => partOf(reading, howTaken(reading, ownPoints))));
   return rootOfSquares([
-    Math.max(...taken.map((reading) => stepUncertaintyMm(readingStep(reading), howTaken(reading)))),
-    Math.max(...taken.map((reading) => layingUncertaintyMm(howTaken(reading), joinsOf(reading)))),
+    worst((reading, how) => stepUncertaintyMm(readingStep(reading), how)),
+    worst((reading, how) => layingUncertaintyMm(how, joinsOf(reading))),
+    worst(gapUncertaintyMm),
     spreadUncertaintyMm(spread),
   ]);
 }
 
-/** The reading's own method, else its point's; a point unknown here counts as laid along a curve. */
-export function howTaken({ method, pointId }: TakenReading): MeasuringHow {
-  return method ?? findMeasuringPoint(pointId)?.how ?? 'curve';
+/** The reading's own method, else its point's; a point that neither list knows counts as laid along a curve. */
+export function howTaken({ method, pointId }: TakenReading, ownPoints: OwnPoints = []): MeasuringHow {
+  const point = ownPoints.find(({ id }) => id === pointId) ?? findMeasuringPoint(pointId);
+  return method ?? point?.how ?? 'curve';
+}
+
+/** The gap was read straight across, in the unit of its reading. */
+function gapUncertaintyMm(reading: TakenReading): number {
+  if (reading.gap === undefined || reading.gap === 0) return 0;
+  return rootOfSquares([
+    stepUncertaintyMm(readingStep(reading), 'straight'),
+    layingUncertaintyMm('straight', 0),
+  ]);
 }
 
 function joinsOf({ tapeLengths }: TakenReading): number {
@@ -78,11 +95,35 @@ function joinsOf({ tapeLengths }: TakenReading): number {
 }
 
 /** The accepted value of every point that has one, by point, in the order the points first appear. */
-export function acceptedValues(readings: readonly Reading[]): ReadonlyMap<string, AcceptedValue> {
+export function acceptedValues(
+  readings: readonly Reading[],
+  ownPoints: OwnPoints = [],
+): ReadonlyMap<string, AcceptedValue> {
+  return valuesBy(readings, (pointId) => acceptedValue(readings, pointId, undefined, ownPoints));
+}
+
+/** The same for one side: points read on it, and those that have no side. */
+export function acceptedValuesOn(
+  side: WornSide,
+  readings: readonly Reading[],
+  ownPoints: OwnPoints = [],
+): ReadonlyMap<string, AcceptedValue> {
+  const here = readings.filter(({ worn }) => worn === undefined || worn === side);
+  return valuesBy(
+    here,
+    (pointId) =>
+      acceptedValue(here, pointId, side, ownPoints) ?? acceptedValue(here, pointId, undefined, ownPoints),
+  );
+}
+
+function valuesBy(
+  readings: readonly Reading[],
+  valueOf: (pointId: string) => AcceptedValue | undefined,
+): ReadonlyMap<string, AcceptedValue> {
   const pointIds = new Set(readings.map(({ pointId }) => pointId));
   return new Map(
     [...pointIds].flatMap((pointId) => {
-      const accepted = acceptedValue(readings, pointId);
+      const accepted = valueOf(pointId);
       return accepted ? [[pointId, accepted] as const] : [];
     }),
   );

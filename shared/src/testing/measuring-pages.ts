@@ -48,6 +48,10 @@ Left and right are as worn. Ranges are for asking, never for refusing. Those of 
 ANSUR II, the body measurements of the US Army of 2012 (open data), widened for the cut and for what was worn
 beneath; for the others no published survey of garments was found, and they are the house's experience.
 
+Two rounds of a point may lie 3 mm apart, 5 mm above a metre, and 2 mm more for each join of tape lengths; twice as
+much where a half is read and doubled. A house setting. A museum may make points of its own, with their own line on
+the diagram; checks and uncertainty treat them as they treat these.
+
 ${sections.join('\n')}`;
 }
 
@@ -62,7 +66,10 @@ function pointSection(point: CataloguedPoint): string {
     `- From ${point.from} to ${point.to}`,
     `- ${tape}`,
     `- For: ${kinds}`,
-    `- Usual: ${rangesText(point)}`,
+    `- Usual: ${rangesText(point)}. ${basesText(point)}`,
+    ...(point.paired ? ['- Left and right, as worn, may each be read'] : []),
+    ...(point.levelRecorded ? ['- Says how its level was found'] : []),
+    ...(point.takesTapeLengths ? ['- May be counted in whole tapes and a rest'] : []),
     `- Watch for: ${point.watchFor}`,
     '',
   ].join('\n');
@@ -76,4 +83,9 @@ function rangesText(point: CataloguedPoint): string {
   const texts = [...new Set(ranges.map(({ text }) => text))];
   if (texts.length === 1) return texts.join('');
   return ranges.map(({ kind, text }) => `${kindLabels[kind].plural} ${text}`).join('; ');
+}
+
+function basesText(point: CataloguedPoint): string {
+  const bases = point.kinds.map((kind) => softRangeFor(point, kind).basis);
+  return [...new Set(bases)].join(' ');
 }

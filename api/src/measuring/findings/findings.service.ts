@@ -2,7 +2,8 @@ import { Injectable } from '@nestjs/common';
 import type { Finding } from '@ellwand/shared/checks/finding';
 import { runChecks } from '@ellwand/shared/checks/registry';
 import { derivedViews, toReading } from '@ellwand/shared/records/measured';
-import type { FindingView, SheetFindings } from '@ellwand/shared/records/sheet';
+import { type FindingView, Sheet, type SheetFindings } from '@ellwand/shared/records/sheet';
+import { fromMmString } from '@ellwand/shared/units/length';
 import { In, Not } from 'typeorm';
 import { v7 as uuidv7 } from 'uuid';
 import { AuditService } from '../../audit/audit.service';
@@ -97,6 +98,8 @@ export class FindingsService {
       protocol: await this.protocols.at(tx, part, sheet.protocolVersion),
       readings: stored.map(toReading),
       otherPartsOfGarment: await this.otherParts(tx, part),
+      support: Sheet.shape.facts.shape.support.parse(sheet.support),
+      tapeLength: fromMmString(sheet.tapeLengthMm),
     });
     const answers = await this.answers(tx, sheetId);
     return {

@@ -1,7 +1,7 @@
 import type { MeasuringPoint } from '@ellwand/shared/points/point';
 import { pointsOf } from '@ellwand/shared/protocols/protocol';
 import { protocolFor } from '@ellwand/shared/protocols/standard-protocols';
-import { acceptedValue } from '@ellwand/shared/readings/accepted-value';
+import { acceptedValue, type OwnPoints } from '@ellwand/shared/readings/accepted-value';
 import { standingReadings, stands, type Reading } from '@ellwand/shared/readings/reading';
 import { shownUncertainty } from '@ellwand/shared/readings/uncertainty';
 import type { Image } from '@ellwand/shared/records/image';
@@ -24,7 +24,9 @@ export function projectPart(part: SnapshotPart, context: PartContext): Published
   const { sheet } = part;
   if (!sheet) return { ...heading, ...unmeasured };
   const readings = sheet.readings.map(toReading);
-  const asked = pointsOf(sheet.protocol ? toProtocol(sheet.protocol) : protocolFor(part.kind));
+  const protocol = sheet.protocol ? toProtocol(sheet.protocol) : protocolFor(part.kind);
+  const asked = pointsOf(protocol);
+  const measured: Measured = { readings, ownPoints: protocol.ownPoints };
   return {
     ...heading,
     measuredOn: sheet.measuredOn,
@@ -33,7 +35,7 @@ export function projectPart(part: SnapshotPart, context: PartContext): Published
     fasteningPair: sheet.fasteningPair || null,
     measuredBy: context.showPeople ? namesOf(sheet) : [],
     peopleCount: new Set(sheet.people.map((person) => person.userId)).size,
-    measurements: asked.flatMap((point) => projectMeasurement(point, readings, context.pictures) ?? []),
+    measurements: asked.flatMap((point) => projectMeasurement(point, measured, context.pictures) ?? []),
     notTaken: asked.flatMap((point) => projectNotTaken(point, readings) ?? []),
     derived: derivedViews(part.kind, sheet.readings),
   };
@@ -55,13 +57,18 @@ function namesOf(sheet: SnapshotSheet): string[] {
   return [...new Set(sheet.people.map((person) => person.name))];
 }
 
+interface Measured {
+  readonly readings: readonly Reading[];
+  readonly ownPoints: OwnPoints;
+}
+
 function projectMeasurement(
   point: MeasuringPoint,
-  readings: readonly Reading[],
+  { readings, ownPoints }: Measured,
   pictures: readonly Image[],
 ): PublishedMeasurement | undefined {
   const pointId = point.id;
-  const accepted = acceptedValue(readings, pointId);
+  const accepted = acceptedValue(readings, pointId, undefined, ownPoints);
   if (!accepted) return undefined;
   const rounds = standingReadings(readings, pointId);
   const lengths = rounds.find((reading) => reading.tapeLengths)?.tapeLengths;
