@@ -39,6 +39,9 @@ describe('the record of a garment', () => {
     ]);
     await recorder.post(garments).send(body);
     expect((await recorder.get(`${garments}?q=LH.2026.1`)).body.total).toBe(1);
+    const other = await recorder.post(garments).send({ ...body, record: { ...body.record, title: 'Other' } });
+    expect(other.body).toMatchObject({ status: 422, code: 'garment.id-used' });
+    expect((await recorder.get(`${garments}/${id}`)).body.record.title).toBe(silkDress.title);
   });
 
   it('is not made without what identifies it, and says where each thing is missing', async () => {

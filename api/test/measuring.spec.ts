@@ -49,6 +49,16 @@ describe('the measuring sheet', () => {
     expect((await open(other)).body).toMatchObject({ status: 409, code: 'sheet.id-used' });
   });
 
+  it('was not measured on a day to come', async () => {
+    const facts = { ...factsWith(reader, holder), measuredOn: '2999-01-01' };
+    const answer = await table
+      .put(`/api/v1/workroom/sheets/${skirt.id}/facts`)
+      .set('If-Match', '"1"')
+      .send(facts);
+    expect(answer.body).toMatchObject({ status: 400, code: 'sheet.future' });
+    expect(answer.body.errors[0].pointer).toBe('/measuredOn');
+  });
+
   it('keeps what was typed beside its exact millimetres', async () => {
     const answer = await send([reading('waistband', '24 3/8', reader.id, { unit: 'in' })]);
     // 24 3/8 in = 619.125 mm exactly: international yard and pound agreement, 1959.

@@ -62,6 +62,8 @@ describe('the people who work here', () => {
       status: 412,
       code: 'version.stale',
       current: 2,
+      changedBy: 'Tamsin Hale',
+      changedAt: expect.any(String),
     });
   });
 
@@ -80,6 +82,20 @@ describe('the people who work here', () => {
     ]);
     expect(answers.filter(({ status }) => status === 200)).toHaveLength(1);
   });
+
+  it.each([{ active: false }, { roles: ['curator'] }])(
+    'leave no open invitation of theirs when they may invite nobody any more: %j',
+    async (body) => {
+      const other = await house.person('administrator');
+      const others = await house.signInAs(other);
+      const invited = { email: 'late@larkmoor.example', name: 'Perrin Late', roles: ['administrator'] };
+      await others.post('/api/v1/workroom/invitations').send(invited);
+      const token = await house.tokenFor('late@larkmoor.example');
+      expect((await change(other, 1, body)).status).toBe(200);
+      const answer = await house.visitor().post('/api/v1/invitations/look-up').send({ token });
+      expect(answer.body).toMatchObject({ status: 404, code: 'invitation.unknown' });
+    },
+  );
 
   it('cannot be given fields that nobody may set', async () => {
     for (const body of [

@@ -97,6 +97,9 @@ export class ProblemFilter implements ExceptionFilter {
     fault: unknown,
     log: FaultLog,
   ): { problem: ProblemDocument; headers: Record<string, string> } {
+    const clientFault = bodyFault(fault);
+    // A body that cannot be read is the sender's affair, not a fault to wake anybody for.
+    if (clientFault) return { problem: clientFault, headers: {} };
     log.error(withoutValues(fault instanceof Error ? (fault.stack ?? fault.message) : String(fault)));
     const text =
       fault instanceof Error ? `${fault.message} ${'code' in fault ? String(fault.code) : ''}` : '';
@@ -106,8 +109,6 @@ export class ProblemFilter implements ExceptionFilter {
         headers: { 'Retry-After': '2' },
       };
     }
-    const clientFault = bodyFault(fault);
-    if (clientFault) return { problem: clientFault, headers: {} };
     return {
       problem: document(500, 'service.fault', 'Nothing was changed. The fault has been noted.'),
       headers: {},

@@ -42,6 +42,13 @@ export class GarmentEdits {
     return garment;
   }
 
+  /** Asked before costly work begins; whoever edits asks again under lock. @throws Refusal 404, 409 `record.locked` */
+  async refuseUneditable(tx: Tx, garmentId: string): Promise<void> {
+    const garment = await tx.findOneBy(GarmentRow, { id: garmentId });
+    if (!garment) throw notFound('garment.unknown', 'garment');
+    refuseLocked(garment);
+  }
+
   /**
    * Marks that somebody edits this garment's record, parts, sheets or pictures: refuses where it is locked, takes
    * a published record to a draft beside its public version, notes the editor, and counts the version up.

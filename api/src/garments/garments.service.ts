@@ -1,3 +1,4 @@
+import { createHash } from 'node:crypto';
 import { Injectable } from '@nestjs/common';
 import { readDate } from '@ellwand/shared/records/edtf-date';
 import {
@@ -8,6 +9,7 @@ import {
   type NewPart,
 } from '@ellwand/shared/records/garment';
 import { v7 as uuidv7 } from 'uuid';
+import { AuditEntryRow } from '../audit/audit-entry.entity';
 import { AuditService } from '../audit/audit.service';
 import type { Actor } from '../common/actor';
 import { Clock } from '../common/clock';
@@ -35,7 +37,10 @@ export class GarmentsService {
     return this.view.of(this.work.reader, id);
   }
 
-  /** Makes a garment. A repeated request with the same id answers with the garment that it made. */
+  /**
+   * Makes a garment. A repeated request with the same id answers with the garment that it made.
+   * @throws Refusal 422 where another garment was asked for under this id before
+   */
   make(made: NewGarment, actor: Actor): Promise<Garment> {
     const id = made.id ?? uuidv7();
     return againIfDuplicate(() => this.insert(id, made, actor));
@@ -43,7 +48,10 @@ export class GarmentsService {
 
   private insert(id: string, made: NewGarment, actor: Actor): Promise<Garment> {
     return this.work.run(async (tx) => {
-      if (await tx.existsBy(GarmentRow, { id })) return this.view.of(tx, id);
+      if (await tx.existsBy(GarmentRow, { id })) {
+        await refuseOtherRequest(tx, id, made);
+        return this.view.of(tx, id);
+      }
       refuseUnreadableDate(made.record, '/record/date');
       await refuseUsedNumber(tx, made.record.ownNumber, id, '/record/ownNumber');
       const now = this.clock.now();
@@ -65,6 +73,7 @@ export class GarmentsService {
         subjectKind: 'garment',
         subjectId: id,
         summary: `${actor.name} made the record of ${made.record.ownNumber}`,
+        facts: { asked: fingerprint(made) },
       });
       return this.view.of(tx, id);
     });
@@ -146,6 +155,17 @@ async function againIfDuplicate<T>(attempt: () => Promise<T>): Promise<T> {
     if (!isDuplicate(fault)) throw fault;
     return attempt();
   }
+}
+
+/** What a request asked for, whatever became of the garment since. */
+function fingerprint({ record, parts }: NewGarment): string {
+  return createHash('sha256').update(JSON.stringify({ record, parts })).digest('hex');
+}
+
+async function refuseOtherRequest(tx: Tx, id: string, made: NewGarment): Promise<void> {
+  const entry = await tx.findOneBy(AuditEntryRow, { subjectId: id, verb: 'make' });
+  if (!entry || !('asked' in entry.facts) || entry.facts.asked === fingerprint(made)) return;
+  throw new Refusal(422, 'garment.id-used', 'Another garment was made under this id before.');
 }
 
 /** What lists need stands in columns of its own, always the same as in the record. */

@@ -9,7 +9,7 @@ import { hashOf } from '../auth/secrets';
 import { Sessions } from '../auth/sessions.service';
 import { Clock } from '../common/clock';
 import { notFound } from '../common/refusal';
-import { type Tx, Work } from '../common/work';
+import { isDuplicate, type Tx, Work } from '../common/work';
 import { InvitationRow } from './invitation.entity';
 import { museumName } from './museum';
 import { newUser, UserRow } from './user.entity';
@@ -36,7 +36,7 @@ export class AcceptanceService {
     const { email } = await this.find(this.work.reader, token);
     refuseCommonPassword(password, { name, email });
     const passwordHash = await this.passwords.keep(password);
-    return this.work.run(async (tx) => {
+    const attempt = this.work.run(async (tx) => {
       const invitation = await this.find(tx, token);
       await this.useUp(tx, token);
       const user = newUser(
@@ -54,6 +54,10 @@ export class AcceptanceService {
         facts: { roles: user.roles },
       });
       return { user, tokens: await this.sessions.open(tx, user.id, agent) };
+    });
+    // Two links to one address, both followed at once: the first one in is the person.
+    return attempt.catch((fault: unknown) => {
+      throw isDuplicate(fault) ? unknown() : fault;
     });
   }
 

@@ -1,12 +1,16 @@
 import type { Role } from '@ellwand/shared/records/roles';
 import type { Person, PersonChange } from '@ellwand/shared/records/session';
 import { Injectable } from '@nestjs/common';
+import { IsNull } from 'typeorm';
+import { AuditEntryRow } from '../audit/audit-entry.entity';
 import { AuditService } from '../audit/audit.service';
 import { Sessions } from '../auth/sessions.service';
 import type { Actor } from '../common/actor';
+import { Clock } from '../common/clock';
 import { staleVersion } from '../common/if-match';
 import { conflict, notFound } from '../common/refusal';
 import { type Tx, Work } from '../common/work';
+import { InvitationRow } from './invitation.entity';
 import { UserRow } from './user.entity';
 
 interface Page {
@@ -21,6 +25,7 @@ export class PeopleService {
     private readonly work: Work,
     private readonly sessions: Sessions,
     private readonly audit: AuditService,
+    private readonly clock: Clock,
   ) {}
 
   async list({ page, size }: Page) {
@@ -49,11 +54,18 @@ export class PeopleService {
       const { name, roles, active, version } = changed;
       const set = { name, roles: [...new Set<Role>(roles)], active, version };
       const { affected } = await tx.update(UserRow, { id, version: seen }, set);
-      if (affected !== 1) throw staleVersion(seen, row.version, null, null);
+      if (affected !== 1) throw await staleSince(tx, row, seen);
       if (!active) await this.sessions.endAllOf(tx, id);
+      if (!active || !roles.includes('administrator')) await this.withdrawInvitationsOf(tx, id);
       await this.note(tx, actor, row, set);
       return personView({ ...row, ...set });
     });
+  }
+
+  /** Whoever may invite nobody any more leaves no open door behind. */
+  private async withdrawInvitationsOf(tx: Tx, id: string): Promise<void> {
+    const open = { invitedBy: id, acceptedAt: IsNull(), withdrawnAt: IsNull() };
+    await tx.update(InvitationRow, open, { withdrawnAt: this.clock.now() });
   }
 
   private note(tx: Tx, actor: Actor, before: UserRow, after: Pick<UserRow, 'name' | 'roles' | 'active'>) {
@@ -66,6 +78,12 @@ export class PeopleService {
       facts: { rolesBefore: before.roles, roles: after.roles, active: after.active },
     });
   }
+}
+
+/** Who changed this person meanwhile, and when, as the audit trail has it. */
+async function staleSince(tx: Tx, row: UserRow, seen: number) {
+  const last = await tx.findOne(AuditEntryRow, { where: { subjectId: row.id }, order: { at: 'DESC' } });
+  return staleVersion(seen, row.version, last?.actorName ?? null, last?.at ?? null);
 }
 
 const personView = (row: UserRow): Person => ({

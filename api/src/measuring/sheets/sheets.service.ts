@@ -49,6 +49,7 @@ export class SheetsService {
       const part = await tx.findOne(PartRow, { where: { id: partId } });
       if (!part) throw notFound('part.unknown', 'part');
       if (await isOpened(tx, id, partId)) return this.view.of(tx, id);
+      refuseFuture(facts.measuredOn, this.clock.now(), '/facts/measuredOn');
       await this.garments.noteMeasuring(tx, actor, part.garmentId);
       // Asked again now that the garment is locked: the same request may have been under way beside this one.
       if (await isOpened(tx, id, partId)) return this.view.of(tx, id);
@@ -75,6 +76,7 @@ export class SheetsService {
     return this.work.run(async (tx) => {
       const { sheet, part } = await this.sheets.takeAt(tx, actor, id, seen);
       refuseComplete(sheet);
+      refuseFuture(facts.measuredOn, this.clock.now(), '/measuredOn');
       const dropped = await namePeople(tx, id, facts.people, '/people');
       // Whoever held the tape held it, also when the sheet names them no more.
       await this.garments.noteHands(tx, part.garmentId, dropped);
@@ -142,6 +144,14 @@ async function isOpened(tx: Tx, id: string, partId: string): Promise<boolean> {
 function refuseComplete(sheet: SheetRow): void {
   if (sheet.state === 'complete')
     throw conflict('sheet.complete', 'This sheet is complete. Open it again to change it.');
+}
+
+/** Today, anywhere on earth: the table may stand east of the server. */
+function refuseFuture(day: string, now: Date, pointer: string): void {
+  const latest = new Date(now.getTime() + 14 * 3_600_000).toISOString().slice(0, 10);
+  if (day <= latest) return;
+  const detail = `${day} is still to come: say the day on which it was measured`;
+  throw new Refusal(400, 'sheet.future', detail, {}, [{ pointer, detail }]);
 }
 
 /** The sheet's own columns; people stand in a table of their own. */

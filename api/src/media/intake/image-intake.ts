@@ -84,6 +84,7 @@ export class ImageIntake {
   ): Promise<ImageRow> {
     await this.refuseWhenFull();
     refuseUnknownPoint(fields.pointId);
+    await this.garments.refuseUneditable(tx ?? this.work.reader, garmentId);
     const accepted = await this.keep(file);
     const note = (within: Tx) => this.note(within, actor, garmentId, file, fields, accepted);
     try {
