@@ -9,7 +9,7 @@ import { AuditEntryRow } from './audit-entry.entity';
 export interface AuditNote {
   readonly verb: string;
   readonly subjectKind:
-    'garment' | 'part' | 'sheet' | 'reading' | 'image' | 'user' | 'invitation' | 'session';
+    'garment' | 'part' | 'sheet' | 'reading' | 'protocol' | 'image' | 'user' | 'invitation' | 'session';
   readonly subjectId: string | null;
   readonly summary: string;
   readonly facts?: Readonly<Record<string, string | number | boolean | null | readonly string[]>>;

@@ -1,8 +1,9 @@
 import { Injectable } from '@nestjs/common';
-import type {
-  PublishedDocument,
-  PublishedGarment,
-  WithdrawalNotice,
+import {
+  type PublishedDocument,
+  type PublishedGarment,
+  PublishedPart,
+  type WithdrawalNotice,
 } from '@ellwand/shared/records/published-garment';
 import type { VersionState } from '@ellwand/shared/records/record-moves';
 import type { GarmentFound } from '@ellwand/shared/records/site-catalogue';
@@ -84,5 +85,7 @@ function garmentOf({ state, document }: FoundRow, rows: readonly FoundRow[]): Pu
     publishedAt: row.published_at.toISOString(),
     state: row.state,
   }));
-  return { ...(fromJson(document) as PublishedDocument), state, versions };
+  const published = fromJson(document) as PublishedDocument;
+  // Documents from before a field of the parts was kept are given what stands for nothing.
+  return { ...published, parts: PublishedPart.array().parse(published.parts), state, versions };
 }

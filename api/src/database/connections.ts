@@ -8,6 +8,7 @@ import { GarmentRow } from '../garments/garment.entity';
 import { PartRow } from '../garments/part.entity';
 import { MailOutboxRow } from '../mail/mail-outbox.entity';
 import { FindingAnswerRow } from '../measuring/findings/finding-answer.entity';
+import { ProtocolRow } from '../measuring/protocols/protocol.entity';
 import { ReadingRow } from '../measuring/readings/reading.entity';
 import { SheetPersonRow } from '../measuring/sheets/sheet-person.entity';
 import { SheetRow } from '../measuring/sheets/sheet.entity';
@@ -21,6 +22,7 @@ import { guardedDriver } from './guarded-pool';
 import { AuditTrail1764550000001 } from './migrations/1764550000001-audit-trail';
 import { Catalogue1764550000002 } from './migrations/1764550000002-catalogue';
 import { AtTheTable1764560000000 } from './migrations/1764560000000-at-the-table';
+import { Protocols1764560000001 } from './migrations/1764560000001-protocols';
 import { Workroom1764550000000 } from './migrations/1764550000000-workroom';
 
 const entities = [
@@ -32,6 +34,7 @@ const entities = [
   InvitationRow,
   MailOutboxRow,
   PartRow,
+  ProtocolRow,
   ReadingRow,
   RevisionRow,
   SessionRow,
@@ -49,6 +52,7 @@ export const migrations = [
   AuditTrail1764550000001,
   Catalogue1764550000002,
   AtTheTable1764560000000,
+  Protocols1764560000001,
 ];
 
 /** For the handshake; how long somebody waits for a free connection is the pool's own affair. */

@@ -3,6 +3,7 @@ import { GarmentRecord, PartKind, type Garment } from '@ellwand/shared/records/g
 import { IsNull } from 'typeorm';
 import { notFound } from '../common/refusal';
 import type { Tx } from '../common/work';
+import { ProtocolBook } from '../measuring/protocols/protocol-book';
 import { ImageRow } from '../media/image.entity';
 import { toImage } from '../media/image-view';
 import { RevisionRow } from '../publishing/revision.entity';
@@ -14,12 +15,14 @@ import { sheetSummaries } from './sheet-summaries';
 /** Puts together a garment as the Workroom sees it: record, parts with their sheets, pictures, the last return. */
 @Injectable()
 export class GarmentView {
+  constructor(private readonly protocols: ProtocolBook) {}
+
   /** @throws Refusal 404 */
   async of(tx: Tx, garmentId: string): Promise<Garment> {
     const garment = await tx.findOne(GarmentRow, { where: { id: garmentId } });
     if (!garment) throw notFound('garment.unknown', 'garment');
     const parts = await tx.find(PartRow, { where: { garmentId }, order: { position: 'ASC' } });
-    const sheets = await sheetSummaries(tx, parts);
+    const sheets = await sheetSummaries(tx, parts, this.protocols);
     const images = await tx.find(ImageRow, {
       where: { garmentId, deletedAt: IsNull() },
       order: { position: 'ASC', id: 'ASC' },

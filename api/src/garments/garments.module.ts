@@ -1,4 +1,5 @@
 import { Module } from '@nestjs/common';
+import { ProtocolBookModule } from '../measuring/protocols/protocol-book.module';
 import { GarmentEdits } from './garment-edits';
 import { GarmentListService } from './garment-list.service';
 import { GarmentView } from './garment-view';
@@ -6,6 +7,7 @@ import { GarmentsController } from './garments.controller';
 import { GarmentsService } from './garments.service';
 
 @Module({
+  imports: [ProtocolBookModule],
   controllers: [GarmentsController],
   providers: [GarmentEdits, GarmentView, GarmentsService, GarmentListService],
   exports: [GarmentEdits, GarmentView, GarmentsService],

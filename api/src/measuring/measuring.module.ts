@@ -2,16 +2,27 @@ import { Module } from '@nestjs/common';
 import { GarmentsModule } from '../garments/garments.module';
 import { FindingsService } from './findings/findings.service';
 import { MeasuringController } from './measuring.controller';
-import { ProtocolBook } from './protocols/protocol-book';
+import { ProtocolBookModule } from './protocols/protocol-book.module';
+import { ProtocolsController } from './protocols/protocols.controller';
+import { ProtocolsService } from './protocols/protocols.service';
+import { SheetProtocolService } from './protocols/sheet-protocol.service';
 import { ReadingsService } from './readings/readings.service';
 import { SheetEdits } from './sheets/sheet-edits';
 import { SheetView } from './sheets/sheet-view';
 import { SheetsService } from './sheets/sheets.service';
 
 @Module({
-  imports: [GarmentsModule],
-  controllers: [MeasuringController],
-  providers: [ProtocolBook, SheetEdits, SheetView, SheetsService, ReadingsService, FindingsService],
-  exports: [ProtocolBook, SheetsService, ReadingsService, FindingsService],
+  imports: [GarmentsModule, ProtocolBookModule],
+  controllers: [MeasuringController, ProtocolsController],
+  providers: [
+    ProtocolsService,
+    SheetProtocolService,
+    SheetEdits,
+    SheetView,
+    SheetsService,
+    ReadingsService,
+    FindingsService,
+  ],
+  exports: [ProtocolBookModule, SheetsService, ReadingsService, FindingsService],
 })
 export class MeasuringModule {}

@@ -12,6 +12,7 @@ import { GarmentEditor } from '../garments/garment-editor.entity';
 import { GarmentEdits } from '../garments/garment-edits';
 import { GarmentView } from '../garments/garment-view';
 import type { GarmentRow } from '../garments/garment.entity';
+import { ProtocolBook } from '../measuring/protocols/protocol-book';
 import { museumName } from '../users/museum';
 import { CatalogueWriter } from './projection/catalogue-writer';
 import { projectGarment } from './projection/project-garment';
@@ -32,6 +33,7 @@ export class PublishingService {
     private readonly garments: GarmentEdits,
     private readonly view: GarmentView,
     private readonly reviews: ReviewService,
+    private readonly protocols: ProtocolBook,
     private readonly writer: CatalogueWriter,
     private readonly audit: AuditService,
     private readonly clock: Clock,
@@ -48,7 +50,7 @@ export class PublishingService {
         garmentId: id,
         number: (last?.number ?? 0) + 1,
         outcome: 'in-review',
-        snapshot: await takeSnapshot(tx, moved),
+        snapshot: await takeSnapshot(tx, moved, this.protocols),
         submittedBy: actor.id,
         submittedAt: this.clock.now(),
       });

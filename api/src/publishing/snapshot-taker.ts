@@ -1,10 +1,12 @@
 import { GarmentRecord } from '@ellwand/shared/records/garment';
+import { toProtocolView } from '@ellwand/shared/records/protocol';
 import { supportLabels, supports } from '@ellwand/shared/records/sheet';
 import { IsNull } from 'typeorm';
 import type { Tx } from '../common/work';
 import { GarmentEditor } from '../garments/garment-editor.entity';
 import type { GarmentRow } from '../garments/garment.entity';
 import { PartRow } from '../garments/part.entity';
+import type { ProtocolBook } from '../measuring/protocols/protocol-book';
 import { toStored, trimmedMm } from '../measuring/readings/stored-reading';
 import { SheetRow } from '../measuring/sheets/sheet.entity';
 import { peopleOf, readingsOf } from '../measuring/sheets/sheet-view';
@@ -13,7 +15,7 @@ import { toImage } from '../media/image-view';
 import type { Snapshot, SnapshotPart, SnapshotSheet } from './snapshot';
 
 /** Freezes a garment as it stands: what is reviewed is what is published, whatever happens in between. */
-export async function takeSnapshot(tx: Tx, garment: GarmentRow): Promise<Snapshot> {
+export async function takeSnapshot(tx: Tx, garment: GarmentRow, protocols: ProtocolBook): Promise<Snapshot> {
   const parts = await tx.find(PartRow, { where: { garmentId: garment.id }, order: { position: 'ASC' } });
   const frozen: SnapshotPart[] = [];
   for (const part of parts) {
@@ -22,7 +24,7 @@ export async function takeSnapshot(tx: Tx, garment: GarmentRow): Promise<Snapsho
       suffix: part.suffix,
       kind: part.kind,
       name: part.name,
-      sheet: await speakingSheet(tx, part),
+      sheet: await speakingSheet(tx, part, protocols),
     });
   }
   const images = await tx.find(ImageRow, {
@@ -40,7 +42,7 @@ export async function takeSnapshot(tx: Tx, garment: GarmentRow): Promise<Snapsho
 }
 
 /** Of several sheets over the years the newest complete one speaks for its part. */
-async function speakingSheet(tx: Tx, part: PartRow): Promise<SnapshotSheet | null> {
+async function speakingSheet(tx: Tx, part: PartRow, protocols: ProtocolBook): Promise<SnapshotSheet | null> {
   const sheet = await tx.findOne(SheetRow, {
     where: { partId: part.id, state: 'complete' },
     order: { measuredOn: 'DESC', createdAt: 'DESC' },
@@ -51,6 +53,7 @@ async function speakingSheet(tx: Tx, part: PartRow): Promise<SnapshotSheet | nul
   return {
     id: sheet.id,
     protocolVersion: sheet.protocolVersion,
+    protocol: toProtocolView(await protocols.at(tx, part, sheet.protocolVersion)),
     measuredOn: sheet.measuredOn,
     support: support ? supportLabels[support] : sheet.support,
     tape: sheet.tape,

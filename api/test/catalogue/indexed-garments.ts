@@ -1,6 +1,6 @@
 import { SearchQuery } from '@ellwand/shared/records/search-query';
 import { mm } from '@ellwand/shared/units/length';
-import type { IndexedGarment } from '../../src/catalogue/search/indexed-garment';
+import { type IndexedGarment, namedPoint } from '../../src/catalogue/search/indexed-garment';
 
 let made = 0;
 
@@ -34,7 +34,7 @@ export function indexedGarment(sketch: GarmentSketch): IndexedGarment {
     image: null,
     facets,
     measurements: (sketch.measurements ?? []).map(([pointId, value, partName = 'Dress']) => ({
-      pointId,
+      ...namedPoint(pointId),
       partName,
       value: mm(value),
     })),

@@ -60,6 +60,8 @@ export function publishedDocument(parts: Partial<PublishedDocument> = {}): Publi
         measurements: [measured('waist', '612'), measured('bust', '850.5')],
         notTaken: [],
         derived: [],
+        protocol: null,
+        ownPoints: [],
       },
     ],
     images: [],

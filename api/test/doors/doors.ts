@@ -55,6 +55,11 @@ export const doors: Readonly<Record<string, Door>> = {
   'POST /api/v1/workroom/sheets/:id/complete': 'sheet:write',
   'POST /api/v1/workroom/sheets/:id/reopen': 'sheet:write',
 
+  'GET /api/v1/workroom/protocols': 'garment:read',
+  'GET /api/v1/workroom/protocols/:kind': 'garment:read',
+  'POST /api/v1/workroom/protocols/:kind': 'protocol:write',
+  'POST /api/v1/workroom/sheets/:id/newest-protocol': 'sheet:write',
+
   'GET /api/v1/workroom/garments/:id/images': 'garment:read',
   'POST /api/v1/workroom/garments/:id/images': 'image:write',
   'PATCH /api/v1/workroom/images/:id': 'image:write',
@@ -82,6 +87,7 @@ export const rolesThrough: Readonly<Record<Exclude<Door, 'public' | 'signed-in'>
   'record:review': ['curator'],
   'record:publish': ['curator'],
   'record:withdraw': ['curator'],
+  'protocol:write': ['administrator'],
   'user:manage': ['administrator'],
   'audit:read': ['curator', 'administrator'],
 };

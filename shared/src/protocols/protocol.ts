@@ -1,5 +1,5 @@
 import { type GarmentKind } from '../points/kinds.js';
-import { findMeasuringPoint } from '../points/measuring-points.js';
+import { findMeasuringPoint, measuringPoints, pointsForKind } from '../points/measuring-points.js';
 import { type MeasuringPoint } from '../points/point.js';
 import { type ViewName } from '../drawings/diagram/model.js';
 
@@ -62,4 +62,13 @@ export function pointIn(protocol: Pick<Protocol, 'ownPoints'>, pointId: string):
 /** The points that a protocol asks for, in handling order. Ids that nothing knows are left out. */
 export function pointsOf(protocol: Protocol): readonly MeasuringPoint[] {
   return protocolPointIds(protocol).flatMap((id) => pointIn(protocol, id) ?? []);
+}
+
+/** The catalogue's points that a protocol may ask for: those of its kind, or those of parts laid together as worn. */
+export function askablePoints({
+  kind,
+  wornTogether,
+}: Pick<Protocol, 'kind' | 'wornTogether'>): readonly MeasuringPoint[] {
+  if (!wornTogether) return pointsForKind(kind);
+  return measuringPoints.filter((point) => point.wornTogether && point.kinds.includes(kind));
 }

@@ -110,3 +110,31 @@ export function toProtocolView({ kind, version, wornTogether, points, ownPoints 
     ownPoints: ownPoints.map(toOwnPointView),
   };
 }
+
+/** `POST /workroom/protocols/:kind`: a new version. Whoever made it says why, for whoever wonders years from now. */
+export const NewProtocol = z.strictObject({
+  points: z.array(ProtocolPointView).max(100),
+  ownPoints: z.array(OwnPointView).max(100),
+  note: prose(400).refine((text) => text !== '', 'Say why there is a new version'),
+});
+export type NewProtocol = z.infer<typeof NewProtocol>;
+export type NewProtocolInput = z.input<typeof NewProtocol>;
+
+/** `GET /workroom/protocols`: what every kind is measured by now, and how many versions there have been. */
+export const ProtocolList = z.object({
+  items: z.array(ProtocolVersion.extend({ versions: z.number().int() })),
+});
+export type ProtocolList = z.infer<typeof ProtocolList>;
+
+/** `GET /workroom/protocols/:kind`: every version, the newest first. `version` is the newest one's. */
+export const ProtocolHistory = z.object({
+  kind: z.enum(kindIds),
+  wornTogether: z.boolean(),
+  version: z.number().int(),
+  versions: z.array(ProtocolVersion),
+});
+export type ProtocolHistory = z.infer<typeof ProtocolHistory>;
+
+/** The answer to a new version, with what might be thought over. */
+export const ProtocolMade = ProtocolVersion.extend({ warnings: z.array(z.string()) });
+export type ProtocolMade = z.infer<typeof ProtocolMade>;

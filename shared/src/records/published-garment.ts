@@ -2,6 +2,7 @@ import { z } from 'zod';
 import { kindIds } from '../points/kinds.js';
 import { Day, LengthMm, Moment, pageOf, Uuid } from './common.js';
 import { ImageView } from './image.js';
+import { OwnPointView } from './protocol.js';
 import { VersionState } from './record-moves.js';
 import { DerivedView, LevelFoundBy, NotTakenReason } from './sheet.js';
 
@@ -39,6 +40,13 @@ export const PublishedPart = z.object({
   measurements: z.array(PublishedMeasurement),
   notTaken: z.array(z.object({ pointId: z.string(), label: z.string(), reason: NotTakenReason })),
   derived: z.array(DerivedView),
+  /** The protocol that it was measured by, in handling order; null where the document is from before it was kept. */
+  protocol: z
+    .object({ version: z.number().int(), pointIds: z.array(z.string()) })
+    .nullable()
+    .default(null),
+  /** Points that the museum made for itself, for labels, definitions and lines on the diagram. */
+  ownPoints: z.array(OwnPointView).default([]),
 });
 export type PublishedPart = z.infer<typeof PublishedPart>;
 

@@ -14,6 +14,11 @@ describe('who may do what', () => {
     expect(may(['administrator'], 'sheet:write')).toBe(false);
   });
 
+  it('lets the administrator alone say what is measured, and everybody read it', () => {
+    expect(holders('protocol:write')).toEqual(['administrator']);
+    expect(holders('garment:read')).toEqual([...roles]);
+  });
+
   it('lets the picture desk read and nothing else', () => {
     expect(permissionsOf.desk).toEqual(['garment:read']);
   });

@@ -21,6 +21,7 @@ export const permissions = [
   'record:review',
   'record:publish',
   'record:withdraw',
+  'protocol:write',
   'user:manage',
   'audit:read',
 ] as const;
@@ -41,7 +42,7 @@ export const permissionsOf: Readonly<Record<Role, readonly Permission[]>> = {
     'audit:read',
   ],
   desk: ['garment:read'],
-  administrator: ['garment:read', 'user:manage', 'audit:read'],
+  administrator: ['garment:read', 'protocol:write', 'user:manage', 'audit:read'],
 };
 
 /** Whether any of a person's roles carries the permission. */

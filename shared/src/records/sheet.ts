@@ -217,6 +217,8 @@ export const Sheet = z.object({
   protocolVersion: z.number().int(),
   /** The protocol that the sheet is taken by, whole, so that the table needs nothing else. */
   protocol: ProtocolView,
+  /** The newest version there is: a sheet without readings may move to it. */
+  newestProtocolVersion: z.number().int(),
   /** True for parts laid together as worn. */
   wornTogether: z.boolean(),
   state: SheetState,

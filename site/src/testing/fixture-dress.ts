@@ -129,6 +129,8 @@ export const dressInTwoParts: PublishedGarment = {
           trace: [traced('neck-to-hem-back', '498'), traced('waist-to-hem-back', '100')],
         },
       ],
+      protocol: null,
+      ownPoints: [],
     },
     {
       number: 'LH.1966.30.2',
@@ -163,6 +165,8 @@ export const dressInTwoParts: PublishedGarment = {
           trace: [traced('hem', '2742'), traced('waistband', '620')],
         },
       ],
+      protocol: null,
+      ownPoints: [],
     },
   ],
 };

@@ -1,7 +1,8 @@
-import { measuringPoint, type PointId } from '@ellwand/shared/points/measuring-points';
+import { pointIn } from '@ellwand/shared/protocols/protocol';
 import { acceptedValues } from '@ellwand/shared/readings/accepted-value';
 import { type Garment, rightsStatements } from '@ellwand/shared/records/garment';
 import { derivedViews, toReading } from '@ellwand/shared/records/measured';
+import { toProtocol } from '@ellwand/shared/records/protocol';
 import type { PublishedDocument, PublishedPart } from '@ellwand/shared/records/published-garment';
 import type { Review } from '@ellwand/shared/records/publishing';
 import { toMmString } from '@ellwand/shared/units/length';
@@ -31,6 +32,8 @@ export function reviewOf(house: House, garment: Garment): Review {
 function publishedPart(house: House, garment: Garment, part: Garment['parts'][number]): PublishedPart {
   const sheet = house.sheets.find(({ partId }) => partId === part.id);
   const readings = sheet?.readings ?? [];
+  const nameOf = (pointId: string) =>
+    pointIn({ ownPoints: sheet ? toProtocol(sheet.protocol).ownPoints : [] }, pointId)?.name ?? pointId;
   const values = [...acceptedValues(readings.map(toReading)).values()];
   return {
     number: garment.record.ownNumber + part.suffix,
@@ -44,7 +47,7 @@ function publishedPart(house: House, garment: Garment, part: Garment['parts'][nu
     peopleCount: 2,
     measurements: values.map(({ pointId, value, n }) => ({
       pointId,
-      label: measuringPoint(pointId as PointId).name,
+      label: nameOf(pointId),
       valueMm: toMmString(value),
       uncertaintyMm: '2.1',
       rounds: n,
@@ -55,9 +58,13 @@ function publishedPart(house: House, garment: Garment, part: Garment['parts'][nu
       imageId: null,
     })),
     notTaken: readings.flatMap(({ pointId, reason }) =>
-      reason ? [{ pointId, label: measuringPoint(pointId as PointId).name, reason }] : [],
+      reason ? [{ pointId, label: nameOf(pointId), reason }] : [],
     ),
     derived: sheet ? derivedViews(sheet.kind, readings) : [],
+    protocol: sheet
+      ? { version: sheet.protocolVersion, pointIds: sheet.protocol.points.map(({ pointId }) => pointId) }
+      : null,
+    ownPoints: sheet?.protocol.ownPoints ?? [],
   };
 }
 

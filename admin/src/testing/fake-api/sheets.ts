@@ -52,7 +52,7 @@ export function summaryOf(sheet: Sheet): z.infer<typeof SheetSummary> {
     state: sheet.state,
     measuredOn: sheet.facts.measuredOn,
     pointsDone: standing.size,
-    pointsWanted: protocolFor(sheet.kind).points.length,
+    pointsWanted: sheet.protocol.points.length,
   };
 }
 
@@ -68,6 +68,7 @@ export function sheetFor(garment: Garment, partIndex: number, id: string): Sheet
     kind: part.kind,
     protocolVersion: 1,
     protocol: toProtocolView(protocolFor(part.kind)),
+    newestProtocolVersion: 1,
     wornTogether: false,
     state: 'open',
     facts: {

@@ -1,8 +1,8 @@
-import { isPointGroup, type PointGroup } from '@ellwand/shared/points/groups';
+import { groupLabels, isPointGroup, type PointGroup } from '@ellwand/shared/points/groups';
 import { findMeasuringPoint } from '@ellwand/shared/points/measuring-points';
 import type { SearchQuery } from '@ellwand/shared/records/search-query';
 import { TypedFastBitSet } from 'typedfastbitset';
-import type { IndexedGarment } from './indexed-garment';
+import type { IndexedGarment, IndexedMeasurement } from './indexed-garment';
 import { ValueColumn } from './value-column';
 import { WordIndex } from './word-index';
 
@@ -40,6 +40,7 @@ export class CatalogueIndex {
   private readonly facets = new Map<string, Map<string, FacetValue>>();
   private readonly points = new Map<string, ValueColumn>();
   private readonly groups = new Map<PointGroup, ValueColumn>();
+  private readonly labels = new Map<string, string>();
   private orders = new Map<Order, readonly number[]>();
 
   /** Puts a garment in, in the place of what was there under its number. */
@@ -53,8 +54,9 @@ export class CatalogueIndex {
     this.texts.add(place, searchable(garment));
     for (const { facet, value, label } of garment.facets)
       this.facetValue(facet, value, label).holders.add(place);
-    for (const { pointId, value } of garment.measurements) {
-      for (const column of this.columnsOf(pointId)) column.add(place, value);
+    for (const measured of garment.measurements) {
+      for (const column of this.columnsOf(measured)) column.add(place, measured.value);
+      this.labels.set(measured.pointId, measured.label);
     }
   }
 
@@ -72,7 +74,7 @@ export class CatalogueIndex {
     this.texts.remove(place, searchable(garment));
     for (const { facet, value, label } of garment.facets)
       this.facetValue(facet, value, label).holders.remove(place);
-    const columns = new Set(garment.measurements.flatMap(({ pointId }) => this.columnsOf(pointId)));
+    const columns = new Set(garment.measurements.flatMap((measured) => this.columnsOf(measured)));
     for (const column of columns) column.remove(place);
   }
 
@@ -97,6 +99,11 @@ export class CatalogueIndex {
     return isPointGroup(id) ? this.groups.get(id) : this.points.get(id);
   }
 
+  /** What a point or group is called; an id that names neither stands for itself. */
+  label(id: string): string {
+    return isPointGroup(id) ? groupLabels[id] : (findMeasuringPoint(id)?.name ?? this.labels.get(id) ?? id);
+  }
+
   /** Every place, in an order; equal ones by number, so that pages never overlap. */
   inOrder(order: Order): readonly number[] {
     const known = this.orders.get(order);
@@ -119,8 +126,7 @@ export class CatalogueIndex {
     return known;
   }
 
-  private columnsOf(pointId: string): ValueColumn[] {
-    const group = findMeasuringPoint(pointId)?.group;
+  private columnsOf({ pointId, group }: IndexedMeasurement): ValueColumn[] {
     return [columnIn(this.points, pointId), ...(group ? [columnIn(this.groups, group)] : [])];
   }
 }

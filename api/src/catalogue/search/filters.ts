@@ -1,5 +1,3 @@
-import { groupLabels, isPointGroup } from '@ellwand/shared/points/groups';
-import { findMeasuringPoint } from '@ellwand/shared/points/measuring-points';
 import type { MeasureFilter } from '@ellwand/shared/records/measure-filter';
 import type { SearchQuery } from '@ellwand/shared/records/search-query';
 import { formatBoth } from '@ellwand/shared/units/format-length';
@@ -76,7 +74,7 @@ function measureFilter(index: CatalogueIndex, query: SearchQuery, point: string)
   return {
     key: measureKey(point),
     passing: others.reduce((passing, other) => passing.intersection(other), first ?? new TypedFastBitSet()),
-    words: `${pointLabel(point).toLowerCase()} ${ranges.map(rangeWords).join(', ')}`,
+    words: `${index.label(point).toLowerCase()} ${ranges.map(rangeWords).join(', ')}`,
     without: { measure: query.measure.filter((measure) => measure.point !== point) },
   };
 }
@@ -87,9 +85,4 @@ function rangeWords({ minMm, maxMm }: MeasureFilter): string {
   const write = (mm: string) => formatBoth(fromMmString(mm));
   if (minMm !== null && maxMm !== null) return `from ${write(minMm)} to ${write(maxMm)}`;
   return minMm !== null ? `from ${write(minMm)}` : `up to ${write(maxMm ?? '0')}`;
-}
-
-/** What a point or group is called; an id that names neither stands for itself. */
-export function pointLabel(id: string): string {
-  return isPointGroup(id) ? groupLabels[id] : (findMeasuringPoint(id)?.name ?? id);
 }

@@ -1,3 +1,5 @@
+import { isPointGroup, type PointGroup } from '@ellwand/shared/points/groups';
+import { findMeasuringPoint } from '@ellwand/shared/points/measuring-points';
 import type { PublishedImage } from '@ellwand/shared/records/published-garment';
 import type { Length } from '@ellwand/shared/units/length';
 
@@ -15,6 +17,9 @@ export const facetNames = Object.keys(facetLabels) as FacetName[];
 
 export interface IndexedMeasurement {
   readonly pointId: string;
+  /** What it is searched in; null for a point that neither the catalogue nor its garment's protocol knows. */
+  readonly group: PointGroup | null;
+  readonly label: string;
   readonly partName: string;
   readonly value: Length;
 }
@@ -35,4 +40,14 @@ export interface IndexedGarment {
   readonly facets: readonly { readonly facet: string; readonly value: string; readonly label: string }[];
   readonly measurements: readonly IndexedMeasurement[];
   readonly text: string;
+}
+
+/** The catalogue's words for a point, else those that its garment's protocol gave it, else its id. */
+export function namedPoint(
+  pointId: string,
+  own: { readonly group: string | null; readonly label: string | null } = { group: null, label: null },
+): Pick<IndexedMeasurement, 'pointId' | 'group' | 'label'> {
+  const point = findMeasuringPoint(pointId);
+  const ownGroup = own.group !== null && isPointGroup(own.group) ? own.group : null;
+  return { pointId, group: point?.group ?? ownGroup, label: point?.name ?? own.label ?? pointId };
 }

@@ -5,7 +5,7 @@ import { DataSource } from 'typeorm';
 import { z } from 'zod';
 import { InjectCatalogue } from '../../common/catalogue-connection';
 import { fromJson } from '../json-column';
-import type { IndexedGarment, IndexedMeasurement } from './indexed-garment';
+import { type IndexedGarment, type IndexedMeasurement, namedPoint } from './indexed-garment';
 
 interface GarmentRow {
   readonly number: string;
@@ -30,6 +30,8 @@ interface MeasurementRow {
   readonly number: string;
   readonly point_id: string;
   readonly part_name: string;
+  readonly own_group: string | null;
+  readonly own_label: string | null;
   readonly value_mm: string;
 }
 interface ChangeRow {
@@ -91,7 +93,8 @@ export class PublishedReader {
       [numbers],
     );
     const measurements: MeasurementRow[] = await this.catalogue.query(
-      `SELECT number, point_id, part_name, value_mm FROM published_measurement WHERE number IN (?)
+      `SELECT number, point_id, own_group, own_label, part_name, value_mm FROM published_measurement
+        WHERE number IN (?)
         ORDER BY number, part_number, point_id`,
       [numbers],
     );
@@ -120,7 +123,7 @@ function indexed(
     image: row.image === null ? null : PublishedImage.parse(fromJson(row.image)),
     facets: facets.map(({ facet, value, label }) => ({ facet, value, label })),
     measurements: measurements.map((measured): IndexedMeasurement => ({
-      pointId: measured.point_id,
+      ...namedPoint(measured.point_id, { group: measured.own_group, label: measured.own_label }),
       partName: measured.part_name,
       value: fromMmString(measured.value_mm),
     })),

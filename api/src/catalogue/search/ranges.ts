@@ -4,7 +4,7 @@ import type { SearchQuery } from '@ellwand/shared/records/search-query';
 import { type Length, lengthOf, toMmString, UNITS_PER_MM } from '@ellwand/shared/units/length';
 import type { z } from 'zod';
 import type { CatalogueIndex } from './catalogue-index';
-import { measureKey, pointLabel } from './filters';
+import { measureKey } from './filters';
 import type { Narrowed } from './narrowed';
 
 type RangeAnswer = z.output<typeof MeasuredRange>;
@@ -43,7 +43,7 @@ function measuredRange(
   const entries = column?.of(candidates) ?? [];
   return {
     point,
-    label: pointLabel(point),
+    label: index.label(point),
     minMm: filter?.minMm ?? null,
     maxMm: filter?.maxMm ?? null,
     missing: candidates.size() - (column?.holders.intersection_size(candidates) ?? 0),

@@ -1,5 +1,4 @@
 import { isPointGroup, type PointGroup } from '@ellwand/shared/points/groups';
-import { findMeasuringPoint } from '@ellwand/shared/points/measuring-points';
 import type { MeasureFilter } from '@ellwand/shared/records/measure-filter';
 import type { CatalogueCard } from '@ellwand/shared/records/published-garment';
 import { toMmString } from '@ellwand/shared/units/length';
@@ -33,8 +32,6 @@ const telling: readonly PointGroup[] = [
   'neck',
 ];
 
-const groupOf = ({ pointId }: IndexedMeasurement) => findMeasuringPoint(pointId)?.group;
-
 /** The three measurements on a garment's card: those searched by first, then one for each telling group. */
 export function tellingMeasurements(
   garment: IndexedGarment,
@@ -45,20 +42,20 @@ export function tellingMeasurements(
     const answering = garment.measurements.find((each) => answers(each, filter));
     if (answering) chosen.add(answering);
   }
-  const shown = new Set([...chosen].map(groupOf));
+  const shown = new Set([...chosen].map((each) => each.group));
   for (const group of telling) {
-    const found = shown.has(group) ? undefined : garment.measurements.find((each) => groupOf(each) === group);
+    const found = shown.has(group) ? undefined : garment.measurements.find((each) => each.group === group);
     if (found) chosen.add(found);
   }
-  return [...chosen].slice(0, wanted).map(({ pointId, partName, value }) => ({
+  return [...chosen].slice(0, wanted).map(({ pointId, label, partName, value }) => ({
     pointId,
-    label: findMeasuringPoint(pointId)?.name ?? pointId,
+    label,
     partName,
     valueMm: toMmString(value),
   }));
 }
 
 function answers(measurement: IndexedMeasurement, { point, minMm, maxMm }: MeasureFilter): boolean {
-  const meant = isPointGroup(point) ? groupOf(measurement) === point : measurement.pointId === point;
+  const meant = isPointGroup(point) ? measurement.group === point : measurement.pointId === point;
   return meant && measurement.value >= (bound(minMm) ?? 0) && measurement.value <= (bound(maxMm) ?? Infinity);
 }

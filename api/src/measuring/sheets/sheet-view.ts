@@ -31,6 +31,7 @@ export class SheetView {
     const garment = await tx.findOneOrFail(GarmentRow, { where: { id: part.garmentId } });
     const readings = await readingsOf(tx, sheetId);
     const protocol = await this.protocols.at(tx, part, sheet.protocolVersion);
+    const newest = await this.protocols.current(tx, part);
     return {
       id: sheet.id,
       version: sheet.version,
@@ -40,6 +41,7 @@ export class SheetView {
       kind: part.kind,
       protocolVersion: sheet.protocolVersion,
       protocol: toProtocolView(protocol),
+      newestProtocolVersion: newest.version,
       wornTogether: part.wornTogether,
       state: sheet.state,
       facts: factsOf(sheet, await peopleOf(tx, sheetId)),

@@ -1,6 +1,7 @@
 import { copyFile, rm } from 'node:fs/promises';
 import { Injectable } from '@nestjs/common';
 import { isPointId } from '@ellwand/shared/points/measuring-points';
+import { OwnPointId } from '@ellwand/shared/records/protocol';
 import { v7 as uuidv7 } from 'uuid';
 import { AuditService } from '../../audit/audit.service';
 import type { Actor } from '../../common/actor';
@@ -185,6 +186,7 @@ export class ImageIntake {
 /** @throws Refusal 400 where a picture is said to lie at a measuring point that does not exist */
 export function refuseUnknownPoint(pointId: string | null | undefined): void {
   if (pointId === null || pointId === undefined || isPointId(pointId)) return;
+  if (OwnPointId.safeParse(pointId).success) return;
   throw new Refusal(400, 'request.invalid', 'Some of what was sent needs mending.', {}, [
     { pointer: '/pointId', detail: 'Choose one of the measuring points' },
   ]);

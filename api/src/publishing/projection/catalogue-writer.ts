@@ -71,11 +71,12 @@ export class CatalogueWriter {
         [number, facet, value, label],
       );
     }
-    for (const { partNumber, partName, pointId, valueMm } of measurementRows(document)) {
+    for (const row of measurementRows(document)) {
+      const { partNumber, partName, pointId, ownGroup, ownLabel, valueMm } = row;
       await tx.query(
-        `INSERT INTO ellwand_catalogue.published_measurement (number, part_number, part_name, point_id, value_mm)
-         VALUES (?, ?, ?, ?, ?)`,
-        [number, partNumber, partName, pointId, valueMm],
+        `INSERT INTO ellwand_catalogue.published_measurement (number, part_number, part_name, point_id, own_group, own_label, value_mm)
+         VALUES (?, ?, ?, ?, ?, ?, ?)`,
+        [number, partNumber, partName, pointId, ownGroup, ownLabel, valueMm],
       );
     }
     await tx.query('INSERT INTO ellwand_catalogue.published_text (number, text) VALUES (?, ?)', [

@@ -1,11 +1,11 @@
 import type { MeasuringPoint } from '@ellwand/shared/points/point';
-import { pointsOf } from '@ellwand/shared/protocols/protocol';
+import { type Protocol, pointsOf, protocolPointIds } from '@ellwand/shared/protocols/protocol';
 import { protocolFor } from '@ellwand/shared/protocols/standard-protocols';
 import { acceptedValue, type OwnPoints } from '@ellwand/shared/readings/accepted-value';
 import { standingReadings, stands, type Reading } from '@ellwand/shared/readings/reading';
 import { shownUncertainty } from '@ellwand/shared/readings/uncertainty';
 import type { Image } from '@ellwand/shared/records/image';
-import { toProtocol } from '@ellwand/shared/records/protocol';
+import { toProtocol, toProtocolView } from '@ellwand/shared/records/protocol';
 import { derivedViews, toReading } from '@ellwand/shared/records/measured';
 import type { PublishedMeasurement, PublishedPart } from '@ellwand/shared/records/published-garment';
 import { lengthOf, toMmString } from '@ellwand/shared/units/length';
@@ -38,6 +38,7 @@ export function projectPart(part: SnapshotPart, context: PartContext): Published
     measurements: asked.flatMap((point) => projectMeasurement(point, measured, context.pictures) ?? []),
     notTaken: asked.flatMap((point) => projectNotTaken(point, readings) ?? []),
     derived: derivedViews(part.kind, sheet.readings),
+    ...projectProtocol(protocol),
   };
 }
 
@@ -51,7 +52,17 @@ const unmeasured = {
   measurements: [],
   notTaken: [],
   derived: [],
+  protocol: null,
+  ownPoints: [],
 };
+
+function projectProtocol(protocol: Protocol): Pick<PublishedPart, 'protocol' | 'ownPoints'> {
+  const { version } = protocol;
+  return {
+    protocol: { version, pointIds: [...protocolPointIds(protocol)] },
+    ownPoints: toProtocolView(protocol).ownPoints,
+  };
+}
 
 function namesOf(sheet: SnapshotSheet): string[] {
   return [...new Set(sheet.people.map((person) => person.name))];

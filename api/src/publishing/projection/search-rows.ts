@@ -12,6 +12,9 @@ export interface MeasurementRow {
   readonly partName: string;
   readonly pointId: string;
   readonly valueMm: string;
+  /** Where the point is the museum's own: the group it is searched in and what it is called; else null. */
+  readonly ownGroup: string | null;
+  readonly ownLabel: string | null;
 }
 
 const wornByLabels: Readonly<Record<string, string>> = {
@@ -67,12 +70,17 @@ function onceEach(rows: readonly FacetRow[]): FacetRow[] {
 
 export function measurementRows(document: PublishedDocument): MeasurementRow[] {
   return document.parts.flatMap((part) =>
-    part.measurements.map(({ pointId, valueMm }) => ({
-      partNumber: part.number,
-      partName: part.name,
-      pointId,
-      valueMm,
-    })),
+    part.measurements.map(({ pointId, valueMm }) => {
+      const own = part.ownPoints.find(({ id }) => id === pointId);
+      return {
+        partNumber: part.number,
+        partName: part.name,
+        pointId,
+        valueMm,
+        ownGroup: own?.group ?? null,
+        ownLabel: own?.name ?? null,
+      };
+    }),
   );
 }
 

@@ -27,6 +27,8 @@ const bodice: PublishedDocument['parts'][number] = {
   measurements: [waist],
   notTaken: [],
   derived: [],
+  protocol: null,
+  ownPoints: [],
 };
 
 const published: PublishedDocument = {

@@ -10,6 +10,7 @@ import { type Tx, Work } from '../../common/work';
 import { GarmentView } from '../../garments/garment-view';
 import { GarmentRow } from '../../garments/garment.entity';
 import { FindingsService } from '../../measuring/findings/findings.service';
+import { ProtocolBook } from '../../measuring/protocols/protocol-book';
 import { museumName } from '../../users/museum';
 import { UserRow } from '../../users/user.entity';
 import { projectGarment } from '../projection/project-garment';
@@ -30,6 +31,7 @@ export class ReviewService {
     private readonly work: Work,
     private readonly view: GarmentView,
     private readonly findings: FindingsService,
+    private readonly protocols: ProtocolBook,
     private readonly clock: Clock,
   ) {}
 
@@ -93,12 +95,12 @@ export class ReviewService {
 
   /** In review and after it, what was frozen; before, the draft as it stands. */
   private async underReview(tx: Tx, garment: GarmentRow): Promise<Snapshot> {
-    if (garment.stage === 'draft') return takeSnapshot(tx, garment);
+    if (garment.stage === 'draft') return takeSnapshot(tx, garment, this.protocols);
     const last = await tx.findOne(RevisionRow, {
       where: { garmentId: garment.id },
       order: { number: 'DESC' },
     });
-    return last?.snapshot ?? takeSnapshot(tx, garment);
+    return last?.snapshot ?? takeSnapshot(tx, garment, this.protocols);
   }
 
   private async documentOf(tx: Tx, garment: GarmentRow, snapshot: Snapshot): Promise<PublishedDocument> {
