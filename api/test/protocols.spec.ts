@@ -1,4 +1,5 @@
 import type { Garment } from '@ellwand/shared/records/garment';
+import type { PublishedGarment, SearchAnswer } from '@ellwand/shared/records/published-garment';
 import type { ProtocolList } from '@ellwand/shared/records/protocol';
 import { type Agent, type House, openHouse } from './harness/house';
 import type { TestPerson } from './harness/people';
@@ -178,6 +179,21 @@ describe('protocols', () => {
     const skirtPart = () => dress.parts.find((part) => part.kind === 'skirt')?.id ?? '';
     const sheetNow = async (id: string) =>
       (await table.get(`/api/v1/workroom/sheets/${id}`)).body as SheetShown;
+    const completeSheet = async (who: Agent, { id }: SheetShown, readings: object[]) => {
+      const sent = await who.post(`/api/v1/workroom/sheets/${id}/readings`).send({ readings });
+      const { sheetVersion } = sent.body as { sheetVersion: number };
+      const answer = await who
+        .post(`/api/v1/workroom/sheets/${id}/complete`)
+        .set('If-Match', `"${sheetVersion}"`);
+      expect(answer.status).toBe(200);
+    };
+    const verb = async (who: Agent, name: string) => {
+      const path = `/api/v1/workroom/garments/${dress.id}`;
+      const { version } = (await who.get(path)).body as Garment;
+      const answer = await who.post(`${path}/${name}`).set('If-Match', `"${version}"`);
+      expect(answer.status).toBe(200);
+      return answer;
+    };
     const newest = (sheet: SheetShown) =>
       table.post(`/api/v1/workroom/sheets/${sheet.id}/newest-protocol`).set('If-Match', `"${sheet.version}"`);
     const asks = (sheet: SheetShown) => sheet.protocol.points.map(({ pointId }) => pointId);
@@ -233,6 +249,44 @@ describe('protocols', () => {
       expect(moved.body).toMatchObject({ protocolVersion: 2, version: empty.version + 1 });
       expect(moved.body.facts.repeatPoints).toEqual(['hem']);
       expect((await newest(empty)).status).toBe(412);
+    });
+
+    it('are published with the protocol that they were taken by, own points and all, and stay so', async () => {
+      await makeProtocol(administrator, 'skirt', 1, skirtWithLoop());
+      const skirt = await openSheet(table, skirtPart(), factsWith(reader, holder));
+      const more = [reading(loopDepth.id, '812', reader.id)];
+      await completeSheet(table, skirt, [...soundSheet(skirt, reader.id), ...more]);
+      const bodicePart = dress.parts.find((part) => part.kind === 'bodice')?.id ?? '';
+      const bodice = await openSheet(table, bodicePart, factsWith(reader, holder));
+      await completeSheet(table, bodice, soundSheet(bodice, reader.id));
+      await verb(table, 'submit');
+      // Made while the record lies in review: what was frozen keeps the protocol it was measured by.
+      const { points, ...rest } = skirtWithLoop({ ownPoints: [] });
+      const withoutLoop = points.filter(({ pointId }) => pointId !== loopDepth.id);
+      await makeProtocol(administrator, 'skirt', 2, { ...rest, points: withoutLoop });
+      const curator = await house.signInAs(await house.person('curator', 'Hal Brandreth'));
+      await verb(curator, 'approve');
+      const { body: published } = await verb(curator, 'publish');
+      const visitor = house.visitor();
+      const page = (await visitor.get(`/api/v1/catalogue/garments/${published.publicNumber}`))
+        .body as PublishedGarment;
+      const part = page.parts.find(({ kind }) => kind === 'skirt');
+      expect(part?.protocol).toEqual({
+        version: 2,
+        pointIds: skirtWithLoop().points.map(({ pointId }) => pointId),
+      });
+      expect(part?.ownPoints).toEqual([loopDepth]);
+      expect(part?.measurements.find(({ pointId }) => pointId === loopDepth.id)).toMatchObject({
+        label: 'Band to train loop',
+        valueMm: '812',
+      });
+      const found = async (measure: string) =>
+        (await visitor.get('/api/v1/catalogue/garments').query({ measure })).body as SearchAnswer;
+      expect((await found(`${loopDepth.id}:800..820`)).total).toBe(1);
+      expect((await found(`${loopDepth.id}:800..820`)).ranges[0]?.label).toBe('Band to train loop');
+      expect((await found(`${loopDepth.id}:820..830`)).total).toBe(0);
+      // An own point counts in its group: no catalogued point of the skirt is that long.
+      expect((await found('skirt-length:800..820')).total).toBe(1);
     });
 
     it('do not move once something has been read, or they are complete', async () => {

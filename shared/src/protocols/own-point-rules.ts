@@ -13,7 +13,7 @@ export function ownPointFaults(draft: Protocol, index: number, made: readonly Pr
   const found = [
     ...idFaults(draft, point, index),
     ...nameFaults(draft, point, index),
-    ...meaningFaults(draft, point, made),
+    ...meaningFaults(point, made),
     ...rangeFaults(point),
     ...lineFaults(draft, point),
   ];
@@ -64,7 +64,7 @@ export function differingMeaning(one: OwnPoint, other: OwnPoint): readonly strin
   return meaningKeys.filter((key) => one[key] !== other[key]).map((key) => meaning[key]);
 }
 
-function meaningFaults(draft: Protocol, point: OwnPoint, made: readonly Protocol[]): ProtocolFault[] {
+function meaningFaults(point: OwnPoint, made: readonly Protocol[]): ProtocolFault[] {
   for (const earlier of made) {
     const before = earlier.ownPoints.find(({ id }) => id === point.id);
     const differing = before ? differingMeaning(before, point) : [];

@@ -1,6 +1,7 @@
+import { mm } from '@ellwand/shared/units/length';
 import { indexedGarment, query } from '../../../test/catalogue/indexed-garments';
 import { CatalogueIndex } from './catalogue-index';
-import type { IndexedGarment } from './indexed-garment';
+import { type IndexedGarment, namedPoint } from './indexed-garment';
 import { searchIndex } from './search-index';
 
 function indexOf(...garments: IndexedGarment[]): CatalogueIndex {
@@ -53,6 +54,26 @@ describe('searching', () => {
 
   it('without filters finds everything, the oldest first', () => {
     expect(numbers(index, {})).toEqual(['lh-3', 'lh-2', 'lh-1']);
+  });
+
+  it('counts a museum’s own point in its group, and stands by the id of what nobody knows', () => {
+    const own = namedPoint('own-band-to-loop', { group: 'skirt-length', label: 'Band to train loop' });
+    const unknown = namedPoint('own-of-nobody', { group: 'no-such-group', label: null });
+    const skirt = indexedGarment({ number: 'lh-4', title: 'Trained skirt' });
+    const value = mm(812);
+    const more = indexOf(teal, {
+      ...skirt,
+      measurements: [own, unknown].map((named) => ({ ...named, partName: 'Skirt', value })),
+    });
+    expect(numbers(more, { measure: 'skirt-length:800..820' })).toEqual(['lh-4']);
+    const answer = searchIndex(more, query({ measure: 'own-band-to-loop:800..' }));
+    expect(answer.ranges[0]?.label).toBe('Band to train loop');
+    expect(answer.items[0]?.measurements).toEqual([
+      { pointId: 'own-band-to-loop', label: 'Band to train loop', partName: 'Skirt', valueMm: '812' },
+    ]);
+    expect(searchIndex(more, query({ measure: 'own-of-nobody:..900' })).ranges[0]?.label).toBe(
+      'own-of-nobody',
+    );
   });
 
   it('takes several values of one facet as alternatives, several facets as conditions', () => {
