@@ -4,7 +4,7 @@ import { paintDiagram } from '@ellwand/shared/drawings/diagram/paint-diagram';
 import type { GarmentKind } from '@ellwand/shared/points/kinds';
 import { useMemo, useState } from 'react';
 import { mannerOf, type SheetPoint } from '../model/sheet-points.js';
-import { SceneDrawing } from './scene-drawing.js';
+import { SceneDrawing } from '../../../components/drawing/scene-drawing.js';
 
 interface DiagramPanelProps {
   readonly kind: GarmentKind;

@@ -1,4 +1,5 @@
 import type { Scene, SceneMark, ScenePrimitive } from '@ellwand/shared/drawings/diagram/scene';
+import type { ReactNode } from 'react';
 
 interface Choosing {
   readonly current?: string;
@@ -9,8 +10,14 @@ interface Choosing {
 export function SceneDrawing({
   scene,
   className = '',
+  children,
   ...choosing
-}: { readonly scene: Scene; readonly className?: string } & Choosing) {
+}: {
+  readonly scene: Scene;
+  readonly className?: string;
+  /** Drawn on top, in the scene's pixels. */
+  readonly children?: ReactNode;
+} & Choosing) {
   return (
     <svg
       viewBox={`0 0 ${scene.width} ${scene.height}`}
@@ -31,6 +38,7 @@ export function SceneDrawing({
       {scene.primitives.map((primitive, index) => (
         <Primitive key={index} primitive={primitive} {...choosing} />
       ))}
+      {children}
     </svg>
   );
 }
