@@ -24,6 +24,7 @@ export async function markHouse(work: Work, value: 'begun' | 'finished', museum:
 
 const workroom = [
   'finding_answer',
+  'table_note',
   'reading',
   'sheet_person',
   'sheet',

@@ -13,9 +13,12 @@ import {
   SheetDto,
   SheetFactsDto,
   SheetFindingsDto,
+  NewTableNotesDto,
+  TableNoteResultsDto,
 } from './dto';
 import { FindingsService } from './findings/findings.service';
 import { ReadingsService } from './readings/readings.service';
+import { TableNotesService } from './table-notes/table-notes.service';
 import { SheetsService } from './sheets/sheets.service';
 
 @ApiTags('Measuring')
@@ -25,6 +28,7 @@ export class MeasuringController {
     private readonly sheets: SheetsService,
     private readonly readings: ReadingsService,
     private readonly findings: FindingsService,
+    private readonly notes: TableNotesService,
   ) {}
 
   @Post('parts/:id/sheets')
@@ -59,6 +63,14 @@ export class MeasuringController {
   @ZodResponse({ status: 200, type: ReadingResultsDto })
   takeIn(@Param() { id }: IdParam, @Body() { readings }: NewReadingsDto, @CurrentActor() actor: Actor) {
     return this.readings.takeIn(id, readings, actor);
+  }
+
+  @Post('sheets/:id/table-notes')
+  @HttpCode(200)
+  @Requires('sheet:write')
+  @ZodResponse({ status: 200, type: TableNoteResultsDto })
+  takeNotes(@Param() { id }: IdParam, @Body() { notes }: NewTableNotesDto, @CurrentActor() actor: Actor) {
+    return this.notes.takeIn(id, notes, actor);
   }
 
   @Get('sheets/:id/findings')

@@ -10,6 +10,7 @@ import { ReadingsService } from './readings/readings.service';
 import { SheetEdits } from './sheets/sheet-edits';
 import { SheetView } from './sheets/sheet-view';
 import { SheetsService } from './sheets/sheets.service';
+import { TableNotesService } from './table-notes/table-notes.service';
 
 @Module({
   imports: [GarmentsModule, ProtocolBookModule],
@@ -22,6 +23,7 @@ import { SheetsService } from './sheets/sheets.service';
     SheetsService,
     ReadingsService,
     FindingsService,
+    TableNotesService,
   ],
   exports: [ProtocolBookModule, SheetsService, ReadingsService, FindingsService],
 })

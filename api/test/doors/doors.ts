@@ -50,6 +50,7 @@ export const doors: Readonly<Record<string, Door>> = {
   'GET /api/v1/workroom/sheets/:id': 'garment:read',
   'PUT /api/v1/workroom/sheets/:id/facts': 'sheet:write',
   'POST /api/v1/workroom/sheets/:id/readings': 'sheet:write',
+  'POST /api/v1/workroom/sheets/:id/table-notes': 'sheet:write',
   'GET /api/v1/workroom/sheets/:id/findings': 'garment:read',
   'POST /api/v1/workroom/sheets/:id/findings/answers': 'sheet:write',
   'POST /api/v1/workroom/sheets/:id/complete': 'sheet:write',

@@ -12,9 +12,12 @@ import {
   type StoredReading,
 } from '@ellwand/shared/records/sheet';
 import { pointIn } from '@ellwand/shared/protocols/protocol';
+import type { SheetPerson } from '@ellwand/shared/records/hands';
+import { type NewTableNote, NewTableNotes } from '@ellwand/shared/records/table-note';
 import { wholeValue } from '@ellwand/shared/readings/whole-value';
 import { mm, toMmString } from '@ellwand/shared/units/length';
 import { fromTyped } from '@ellwand/shared/units/parse-length';
+import type { z } from 'zod';
 import type { House } from './house.js';
 import { Refusal, read } from './refuse.js';
 import { json, matched, type Routes } from './router.js';
@@ -132,6 +135,27 @@ export function findingsOf(house: House, sheet: Sheet): SheetFindings {
   };
 }
 
+function keepNote(house: House, sheet: Sheet, note: NewTableNote) {
+  const before = sheet.tableNotes.find(({ id }) => id === note.id);
+  if (before) return { id: note.id, outcome: 'already-kept', note: before };
+  const by = house.signedIn!;
+  const stored = { ...note, by: by.id, byName: by.name, receivedAt: new Date().toISOString() };
+  sheet.tableNotes.push(stored);
+  sheet.version += 1;
+  if (note.about === 'hands') nameHands(house, sheet, note.people);
+  if (note.about === 'answer')
+    house.answers.set(`${sheet.id} ${note.key}`, { reason: note.reason, by: by.name, at: stored.receivedAt });
+  return { id: note.id, outcome: 'kept', note: stored };
+}
+
+function nameHands(house: House, sheet: Sheet, people: readonly z.infer<typeof SheetPerson>[]): void {
+  for (const { userId, duty } of people) {
+    if (sheet.facts.people.some((one) => one.userId === userId && one.duty === duty)) continue;
+    const name = house.people.find(({ id }) => id === userId)?.name ?? '';
+    sheet.facts.people.push({ userId, duty, name });
+  }
+}
+
 function refreshSummaries(house: House, sheet: Sheet): void {
   const part = house.garment(sheet.garmentId)?.parts.find(({ id }) => id === sheet.partId);
   if (part) part.sheets = [...part.sheets.filter(({ id }) => id !== sheet.id), summaryOf(sheet)];
@@ -168,6 +192,12 @@ export const measuringRoutes: Routes = {
     const { readings } = read(NewReadings, body);
     const results = readings.map((reading) => keep(house, sheet, reading));
     refreshSummaries(house, sheet);
+    return json({ sheetVersion: sheet.version, results });
+  },
+  'POST /workroom/sheets/:id/table-notes': ({ house, params, body }) => {
+    const sheet = known(house, params.id);
+    const { notes } = read(NewTableNotes, body);
+    const results = notes.map((note) => keepNote(house, sheet, note));
     return json({ sheetVersion: sheet.version, results });
   },
   'GET /workroom/sheets/:id/findings': ({ house, params }) =>

@@ -42,29 +42,42 @@ export class FindingsService {
    */
   answer(sheetId: string, key: string, reason: string, actor: Actor): Promise<SheetFindings> {
     return this.work.run(async (tx) => {
-      const { findings } = await this.of(tx, sheetId);
-      const finding = findings.find((candidate) => candidate.key === key);
-      if (!finding)
+      if (!(await this.answerIfAsked(tx, { sheetId, key, reason }, actor)))
         throw conflict('finding.gone', 'That finding is not there any more; the readings have changed.');
-      // An answer here would leave the point out without a word on the public page.
-      if (finding.checkId === missingPoint) throw conflict('finding.unread', finding.sentence);
-      const answer = { reason, answeredBy: actor.id, answeredAt: this.clock.now() };
-      await tx
-        .createQueryBuilder()
-        .insert()
-        .into(FindingAnswerRow)
-        .values({ id: uuidv7(), sheetId, findingKey: key, ...answer })
-        .orUpdate(['reason', 'answered_by', 'answered_at'])
-        .execute();
-      await this.audit.note(tx, actor, {
-        verb: 'answer',
-        subjectKind: 'sheet',
-        subjectId: sheetId,
-        summary: `${actor.name} answered “${finding.sentence}”: ${reason}`,
-        facts: { key, checkId: finding.checkId },
-      });
       return this.of(tx, sheetId);
     });
+  }
+
+  /**
+   * @returns false where nothing asks for it any more
+   * @throws Refusal 409 where a point was left out: only reading it, or saying why not, settles that
+   */
+  async answerIfAsked(
+    tx: Tx,
+    { sheetId, key, reason }: { readonly sheetId: string; readonly key: string; readonly reason: string },
+    actor: Actor,
+  ): Promise<boolean> {
+    const { findings } = await this.of(tx, sheetId);
+    const finding = findings.find((candidate) => candidate.key === key);
+    if (!finding) return false;
+    // An answer here would leave the point out without a word on the public page.
+    if (finding.checkId === missingPoint) throw conflict('finding.unread', finding.sentence);
+    const answer = { reason, answeredBy: actor.id, answeredAt: this.clock.now() };
+    await tx
+      .createQueryBuilder()
+      .insert()
+      .into(FindingAnswerRow)
+      .values({ id: uuidv7(), sheetId, findingKey: key, ...answer })
+      .orUpdate(['reason', 'answered_by', 'answered_at'])
+      .execute();
+    await this.audit.note(tx, actor, {
+      verb: 'answer',
+      subjectKind: 'sheet',
+      subjectId: sheetId,
+      summary: `${actor.name} answered “${finding.sentence}”: ${reason}`,
+      facts: { key, checkId: finding.checkId },
+    });
+    return true;
   }
 
   /** How many questions of a sheet have no answer yet. */

@@ -14,6 +14,8 @@ export interface TapeFacts {
   readonly tapeZeroMm: string;
   /** Whoever the sheet names as reading the tape. */
   readonly readers: readonly string[];
+  /** Everybody whom the sheet names. */
+  readonly named: readonly string[];
 }
 
 export type Intake =
@@ -43,6 +45,8 @@ export function takeIn(reading: NewReading, facts: TapeFacts): Intake {
   if (reading.worn && !point.paired) return refused(`${point.name} has no left and right.`);
   if (!facts.readers.includes(reading.readBy))
     return refused('The sheet does not name that person as reading the tape.');
+  if (reading.heldBy !== null && !facts.named.includes(reading.heldBy))
+    return refused('The sheet does not name that person as holding the tape.');
   if (reading.state === 'not-taken')
     return { accepted: true, valueMm: null, unit: null, tapeLengthMm: null, gapMm: null, depthMm: null };
 

@@ -81,12 +81,13 @@ export class ReadingsService {
   }
 
   private async tapeFacts(tx: Tx, { sheet, part }: SheetInHand): Promise<TapeFacts> {
-    const readers = await tx.find(SheetPersonRow, { where: { sheetId: sheet.id, duty: 'read' } });
+    const people = await tx.find(SheetPersonRow, { where: { sheetId: sheet.id } });
     return {
       protocol: await this.protocols.at(tx, part, sheet.protocolVersion),
       tapeLengthMm: sheet.tapeLengthMm,
       tapeZeroMm: sheet.tapeZeroMm,
-      readers: readers.map((person) => person.userId),
+      readers: people.filter(({ duty }) => duty === 'read').map(({ userId }) => userId),
+      named: people.map(({ userId }) => userId),
     };
   }
 

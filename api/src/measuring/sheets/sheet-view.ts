@@ -13,6 +13,7 @@ import { UserRow } from '../../users/user.entity';
 import { ProtocolBook } from '../protocols/protocol-book';
 import { ReadingRow } from '../readings/reading.entity';
 import { toStored, trimmedMm } from '../readings/stored-reading';
+import { tableNotesOf } from '../table-notes/stored-note';
 import { SheetPersonRow } from './sheet-person.entity';
 import { SheetRow } from './sheet.entity';
 
@@ -47,7 +48,7 @@ export class SheetView {
       facts: factsOf(sheet, await peopleOf(tx, sheetId)),
       garment: headingOf(garment, part, await firstImage(tx, garment.id)),
       readings: readings.map(toStored),
-      tableNotes: [],
+      tableNotes: await tableNotesOf(tx, sheetId),
     };
   }
 }
