@@ -1,11 +1,11 @@
-import { derive, type Derivation } from '../derivations/derivation.js';
+import { derive, type FormulaDerivation } from '../derivations/derivation.js';
 import { neckToWaistBack } from '../derivations/neck-to-waist-back.js';
 import { neckToWaistFront } from '../derivations/neck-to-waist-front.js';
 import { rootOfSquares } from '../readings/uncertainty.js';
 import { absolute, isLonger, mm, subtract } from '../units/length.js';
 import { sheetCheck } from './check.js';
 
-const derivedPoints: readonly Derivation[] = [neckToWaistFront, neckToWaistBack];
+const derivedPoints: readonly FormulaDerivation[] = [neckToWaistFront, neckToWaistBack];
 
 export const derivedAgainstMeasured = sheetCheck({
   id: 'derived-against-measured',

@@ -2,8 +2,8 @@
 import { type Protocol, pointIn } from '../protocols/protocol.js';
 import { type AcceptedValue } from '../readings/accepted-value.js';
 import { type WornSide, wornSideLabels } from '../readings/worn-side.js';
-import { decimalText } from '../units/format-length.js';
-import { type Length, toMmString, UNITS_PER_MM } from '../units/length.js';
+import { readMm } from '../units/format-length.js';
+import { type Length, toMmString } from '../units/length.js';
 import { type Finding, type Severity } from './finding.js';
 
 /** A point that is named in the sentence; `{point}` becomes its name. */
@@ -101,16 +101,16 @@ function lowerFirst(text: string): string {
 }
 
 function textOf(figure: Figure, naming: Naming): string {
-  if (typeof figure === 'number') return lengthText(figure);
+  if (typeof figure === 'number') return readMm(figure);
   if ('text' in figure) return figure.text;
   if ('listed' in figure) return inWords(figure.listed.map((one) => listedText(one, naming)));
-  return 'mentioned' in figure ? mentionText(figure, naming) : lengthText(figure.value);
+  return 'mentioned' in figure ? mentionText(figure, naming) : readMm(figure.value);
 }
 
 function listedText(figure: AcceptedValue | Mention, naming: Naming): string {
   if ('mentioned' in figure) return mentionText(figure, naming);
   const { pointId: mentioned, worn, value } = figure;
-  return `${mentionText(worn ? { mentioned, worn } : { mentioned }, naming)} (${lengthText(value)})`;
+  return `${mentionText(worn ? { mentioned, worn } : { mentioned }, naming)} (${readMm(value)})`;
 }
 
 function mentionText({ mentioned, worn }: Mention, naming: Naming): string {
@@ -127,11 +127,6 @@ export function nameOf(pointId: string, naming: Naming): string {
 function inWords(parts: readonly string[]): string {
   const last = parts.at(-1) ?? '';
   return parts.length < 2 ? last : `${parts.slice(0, -1).join(', ')} and ${last}`;
-}
-
-/** Whole millimetres as they are read at the table; tenths where the length has them. */
-export function lengthText(length: Length): string {
-  return `${decimalText(length, 'mm', length % UNITS_PER_MM === 0 ? 0 : 1)} mm`;
 }
 
 /** A key that would not fit ends in a fingerprint of the whole (FNV-1a, 64 bit). */

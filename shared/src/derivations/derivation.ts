@@ -3,9 +3,11 @@ import { type GarmentKind } from '../points/kinds.js';
 import { measuringPoint, type PointId } from '../points/measuring-points.js';
 import { type AcceptedValue } from '../readings/accepted-value.js';
 import { rootOfSquares } from '../readings/uncertainty.js';
-import { decimalText } from '../units/format-length.js';
+import { wornSideLabels } from '../readings/worn-side.js';
+import { readMm } from '../units/format-length.js';
 import { type Length, subtract, toMm } from '../units/length.js';
 import { divideHalfUp } from '../units/rounding.js';
+import { type PartFigures } from './part-figures.js';
 
 /** A figure that a derivation needs: the first of these points that has a value. */
 export type Need = readonly [PointId, ...PointId[]];
@@ -31,13 +33,17 @@ export type DerivedFigure = DerivedLength | DerivedRatio;
 
 /** A figure that was put in. */
 export interface TraceEntry {
-  readonly pointId: PointId;
+  /** A measuring point, or `panel` for a width of the cut sheet. */
+  readonly pointId: string;
   readonly label: string;
   readonly value: Length;
   readonly uncertaintyMm: number;
+  /** Read on the sheet of another part, or on a cut sheet. */
+  readonly elsewhere?: boolean;
 }
 
 export interface DerivedValue {
+  /** The derivation's, and after a colon which of several it is: `whole-from-half:elbow`. */
   readonly id: string;
   readonly label: string;
   readonly formula: string;
@@ -52,13 +58,31 @@ export interface Derivation {
   readonly label: string;
   readonly formula: string;
   readonly kinds: readonly GarmentKind[];
+  /** Points, each with what may stand in for it; or a sentence where it is not a matter of certain points. */
+  readonly needs: readonly [Need, Need] | string;
+  /** One value or several; none where a figure is missing or the formula has no answer. */
+  readonly workOut: (part: PartFigures) => readonly DerivedValue[];
+}
+
+export interface FormulaFacts extends Omit<Derivation, 'needs' | 'workOut'> {
   readonly needs: readonly [Need, Need];
   /** Nothing where the formula has no answer, such as a division by zero. */
   readonly compute: (first: TraceEntry, second: TraceEntry) => DerivedFigure | undefined;
 }
 
-export function derivation(entry: Derivation): Derivation {
-  return entry;
+/** A formula over two figures of one part, and of one side of it: a left sleeve is not taken with a right armscye. */
+export interface FormulaDerivation extends FormulaFacts {
+  readonly workOut: Derivation['workOut'];
+}
+
+export function derivation(entry: FormulaFacts): FormulaDerivation {
+  return {
+    ...entry,
+    workOut: ({ values, valuesOn }) => {
+      const sources = [values, valuesOn.right, valuesOn.left];
+      return sources.flatMap((source) => derive(entry, source) ?? []).slice(0, 1);
+    },
+  };
 }
 
 /** u = √(u₁² + u₂²), as for any difference of two independent readings. */
@@ -91,35 +115,34 @@ function hundredths(whole: Length, part: Length): string {
 
 /** The derived value, or nothing where a figure is missing or the formula has no answer. */
 export function derive(
-  { id, label, formula, needs, compute }: Derivation,
+  { id, label, formula, needs, compute }: FormulaFacts,
   values: ReadonlyMap<string, AcceptedValue>,
 ): DerivedValue | undefined {
-  const first = traceEntry(needs[0], values);
-  const second = traceEntry(needs[1], values);
+  const first = firstOf(needs[0], values);
+  const second = firstOf(needs[1], values);
   if (!first || !second) return undefined;
-  const figure = compute(first, second);
+  if (first.worn && second.worn && first.worn !== second.worn) return undefined;
+  const trace = [catalogued(first), catalogued(second)] as const;
+  const figure = compute(...trace);
   if (!figure) return undefined;
   const sign = figure.type === 'length' ? '\u2212' : '÷';
-  const worked = `${inMm(first.value)} ${sign} ${inMm(second.value)} = ${figureText(figure)}`;
-  return { id, label, formula, figure, trace: [first, second], worked };
+  const worked = `${readMm(first.value)} ${sign} ${readMm(second.value)} = ${figureText(figure)}`;
+  return { id, label, formula, figure, trace, worked };
 }
 
-function traceEntry(need: Need, values: ReadonlyMap<string, AcceptedValue>): TraceEntry | undefined {
-  for (const pointId of need) {
-    const accepted = values.get(pointId);
-    if (accepted) {
-      const { value, uncertaintyMm } = accepted;
-      return { pointId, label: measuringPoint(pointId).name, value, uncertaintyMm };
-    }
-  }
-  return undefined;
+function firstOf(need: Need, values: ReadonlyMap<string, AcceptedValue>): AcceptedValue | undefined {
+  return need.map((pointId) => values.get(pointId)).find((accepted) => accepted !== undefined);
 }
 
-/** Whole millimetres, with tenths where the reading has any. */
-function inMm(length: Length): string {
-  return `${decimalText(length, 'mm', length % 10_000 === 0 ? 0 : 1)} mm`;
+function catalogued(accepted: AcceptedValue): TraceEntry {
+  return traceEntry(accepted, measuringPoint(accepted.pointId as PointId).name);
+}
+
+/** As it is shown: with the side where one was said. */
+export function traceEntry({ pointId, value, uncertaintyMm, worn }: AcceptedValue, name: string): TraceEntry {
+  return { pointId, label: worn ? `${name}, ${wornSideLabels[worn]}` : name, value, uncertaintyMm };
 }
 
 function figureText(figure: DerivedFigure): string {
-  return figure.type === 'length' ? inMm(figure.length) : figure.text;
+  return figure.type === 'length' ? readMm(figure.length) : figure.text;
 }

@@ -76,4 +76,13 @@ describe('derived values as they are shown', () => {
       }),
     ]);
   });
+
+  it('take the other parts of the garment with them', () => {
+    const otherParts = [{ kind: 'bodice', name: 'Day bodice', readings: [stored('waist', '630')] }] as const;
+    const views = derivedViews('skirt', [stored('waistband', '640')], { otherParts });
+    expect(views.map(({ id, worked }) => [id, worked])).toEqual([
+      ['smallest-girth', 'smallest of 640 mm, 630 mm = 630 mm: Waist, day bodice'],
+      ['ease-between-layers', '630 mm − 640 mm = −10 mm'],
+    ]);
+  });
 });

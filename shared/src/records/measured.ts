@@ -1,6 +1,7 @@
 /** From readings as they travel and are kept to readings as the domain reasons about them, and back to what is shown. */
 import type { z } from 'zod';
 import type { DerivedValue } from '../derivations/derivation.js';
+import type { DeriveContext } from '../derivations/part-figures.js';
 import { deriveFromReadings } from '../derivations/registry.js';
 import type { GarmentKind } from '../points/kinds.js';
 import type { Reading } from '../readings/reading.js';
@@ -40,12 +41,27 @@ function tapeLengthsOf({ tapeCount, tapeLengthMm, typed, unit }: StoredReading) 
     : undefined;
 }
 
-/** The derived values that the readings of one part allow, as they are shown. */
+/** Another part of the same garment, with the readings that speak for it. */
+export interface OtherPartStored {
+  readonly kind: GarmentKind;
+  readonly name?: string;
+  readonly readings: readonly StoredReading[];
+}
+
+export interface DerivedContext extends Omit<DeriveContext, 'otherParts'> {
+  readonly otherParts?: readonly OtherPartStored[];
+}
+
+/** The derived values that the readings of a part allow, with those of the other parts, as they are shown. */
 export function derivedViews(
   kind: GarmentKind,
   readings: readonly StoredReading[],
+  { otherParts = [], ...context }: DerivedContext = {},
 ): z.output<typeof DerivedView>[] {
-  return deriveFromReadings(kind, readings.map(toReading)).map(toDerivedView);
+  const others = otherParts.map((part) => ({ ...part, readings: part.readings.map(toReading) }));
+  return deriveFromReadings(kind, readings.map(toReading), { ...context, otherParts: others }).map(
+    toDerivedView,
+  );
 }
 
 function toDerivedView({
@@ -64,10 +80,11 @@ function toDerivedView({
     valueMm: figure.type === 'length' ? toMmString(figure.length) : null,
     ratio: figure.type === 'ratio' ? figure.text : null,
     uncertaintyMm: figure.type === 'length' ? toMmString(shownUncertainty(figure.uncertaintyMm)) : null,
-    trace: trace.map(({ pointId, label: name, value }) => ({
+    trace: trace.map(({ pointId, label: name, value, elsewhere }) => ({
       pointId,
       label: name,
       valueMm: toMmString(value),
+      ...(elsewhere ? { elsewhere } : {}),
     })),
   };
 }

@@ -195,7 +195,15 @@ export const DerivedView = z.object({
   valueMm: z.string().nullable(),
   ratio: z.string().nullable(),
   uncertaintyMm: z.string().nullable(),
-  trace: z.array(z.object({ pointId: z.string(), label: z.string(), valueMm: LengthMm })),
+  trace: z.array(
+    z.object({
+      pointId: z.string(),
+      label: z.string(),
+      valueMm: LengthMm,
+      /** Read on the sheet of another part, or on a cut sheet. */
+      elsewhere: z.boolean().optional(),
+    }),
+  ),
 });
 export type DerivedView = z.infer<typeof DerivedView>;
 

@@ -1,11 +1,16 @@
-import { derive, type Derivation, type DerivedFigure, type DerivedValue } from '../derivations/derivation.js';
+import {
+  derive,
+  type DerivedFigure,
+  type DerivedValue,
+  type FormulaFacts,
+} from '../derivations/derivation.js';
 import { type AcceptedValue, acceptedValues } from '../readings/accepted-value.js';
 import { mm } from '../units/length.js';
 import { read } from './sample-readings.js';
 
 /** The derived value of readings given in mm; throws where there is none. */
 export function derivedOf(
-  entry: Derivation,
+  entry: FormulaFacts,
   readingsMm: Readonly<Record<string, number | string>>,
 ): DerivedValue {
   const readings = Object.entries(readingsMm).map(([pointId, valueMm]) => read(pointId, valueMm));
@@ -16,7 +21,7 @@ export function derivedOf(
 
 /** The same, from values whose standard uncertainty (mm) is given rather than worked out. */
 export function derivedWithUncertainty(
-  entry: Derivation,
+  entry: FormulaFacts,
   given: readonly (readonly [pointId: string, valueMm: number, uncertaintyMm: number])[],
 ): DerivedFigure | undefined {
   const values = given.map(([pointId, valueMm, uncertaintyMm]): [string, AcceptedValue] => [

@@ -15,7 +15,10 @@ const WRITTEN_FROM_CODE = 'This page is written from the code; a test fails when
 
 export function derivationsPage(): string {
   const sections = derivations.map(({ id, label, formula, kinds, needs }) => {
-    const figures = needs.map((need) => need.map((pointId) => measuringPoint(pointId).name).join(', else '));
+    const figures =
+      typeof needs === 'string'
+        ? [needs]
+        : needs.map((need) => need.map((pointId) => measuringPoint(pointId).name).join(', else '));
     return [
       `## ${label}`,
       '',
@@ -31,7 +34,12 @@ export function derivationsPage(): string {
 Worked out from readings by a formula that is shown beside them, and never typed. ${WRITTEN_FROM_CODE}
 
 A difference carries u = √(u₁² + u₂²). A ratio q = a ÷ b carries u² = (u_a ÷ b)² + (q · u_b ÷ b)².
-The figures that were put in are shown with the value.
+A sum of panels carries the plain sum of their uncertainties: read one after the other by the same hand they may all be
+out the same way, so that eight panels each a millimetre over are eight over. A half counts twice, and so does its
+uncertainty. The figures that were put in are shown with the value.
+
+Of a pair, left goes with left and right with right; two sleeves are never averaged. Parts of one garment are taken
+together where the formula says so, each by its newest sheet.
 
 ${sections.join('\n')}`;
 }

@@ -52,6 +52,11 @@ export function formatLength(length: Length, unit: LengthUnit, format: LengthFor
   return `${figureText(length, unit, format)} ${unit}`;
 }
 
+/** Whole millimetres as they are read at the table; tenths where the length has them: "612 mm", "711.2 mm". */
+export function readMm(length: Length): string {
+  return `${decimalText(length, 'mm', length % UNITS_PER_MM === 0 ? 0 : 1)} mm`;
+}
+
 /** Metric first, inches after, as the house writes lengths: "612 mm (24 1/8 in)". */
 export function formatBoth(length: Length, denominator: InchDenominator = 8): string {
   return `${formatLength(length, 'mm')} (${formatLength(length, 'in', { denominator })})`;

@@ -1,7 +1,7 @@
 import { Injectable } from '@nestjs/common';
 import type { Finding } from '@ellwand/shared/checks/finding';
 import { runChecks } from '@ellwand/shared/checks/registry';
-import { derivedViews, toReading } from '@ellwand/shared/records/measured';
+import { derivedViews, type OtherPartStored, toReading } from '@ellwand/shared/records/measured';
 import { type FindingView, Sheet, type SheetFindings } from '@ellwand/shared/records/sheet';
 import { fromMmString } from '@ellwand/shared/units/length';
 import { In, Not } from 'typeorm';
@@ -106,33 +106,38 @@ export class FindingsService {
     if (!sheet) throw notFound('sheet.unknown', 'measuring sheet');
     const part = await tx.findOneOrFail(PartRow, { where: { id: sheet.partId } });
     const stored = (await readingsOf(tx, sheetId)).map(toStored);
+    const protocol = await this.protocols.at(tx, part, sheet.protocolVersion);
+    const otherParts = await this.otherParts(tx, part);
     const findings = runChecks({
       kind: part.kind,
-      protocol: await this.protocols.at(tx, part, sheet.protocolVersion),
+      protocol,
       readings: stored.map(toReading),
-      otherPartsOfGarment: await this.otherParts(tx, part),
+      otherPartsOfGarment: otherParts.map((other) => ({
+        ...other,
+        readings: other.readings.map(toReading),
+      })),
       support: Sheet.shape.facts.shape.support.parse(sheet.support),
       tapeLength: fromMmString(sheet.tapeLengthMm),
     });
     const answers = await this.answers(tx, sheetId);
     return {
       findings: findings.map((finding) => toView(finding, answers)),
-      derived: derivedViews(part.kind, stored),
+      derived: derivedViews(part.kind, stored, { ownPoints: protocol.ownPoints, otherParts }),
     };
   }
 
   /** The newest sheet of each other part: a waist must agree between bodice and skirt. */
-  private async otherParts(tx: Tx, part: PartRow) {
+  private async otherParts(tx: Tx, part: PartRow): Promise<OtherPartStored[]> {
     const others = await tx.find(PartRow, { where: { garmentId: part.garmentId, id: Not(part.id) } });
-    const result = [];
+    const result: OtherPartStored[] = [];
     for (const other of others) {
       const sheet = await tx.findOne(SheetRow, {
-        where: { partId: other.id },
+        where: { partId: other.id, purpose: 'record' },
         order: { measuredOn: 'DESC', createdAt: 'DESC' },
       });
       if (!sheet) continue;
-      const readings = (await readingsOf(tx, sheet.id)).map((row) => toReading(toStored(row)));
-      result.push({ kind: other.kind, readings });
+      const readings = (await readingsOf(tx, sheet.id)).map(toStored);
+      result.push({ kind: other.kind, name: other.name, readings });
     }
     return result;
   }

@@ -130,6 +130,21 @@ describe('the public copy of a garment', () => {
     expect(open?.measuredBy).toEqual(['Odile Marsh']);
   });
 
+  it('works out what lies between two parts, and does not tell a half twice', () => {
+    const snapshot = snapshotWith([stored('waistband', '640')]);
+    const [skirt] = snapshot.parts;
+    if (!skirt?.sheet) throw new Error('the skirt has no sheet');
+    const sheet = { ...skirt.sheet, readings: [stored('waist', '630'), stored('elbow', '320')] };
+    const bodice = { ...skirt, id: sheet.id + '-bodice', kind: 'bodice', name: 'Bodice', sheet } as const;
+    const { parts } = projectGarment({ ...snapshot, parts: [bodice, skirt] }, imprint);
+    const derived = parts.map((part) => part.derived.map(({ id, worked }) => [id, worked]));
+    const ease = ['ease-between-layers', '630 mm − 640 mm = −10 mm'];
+    expect(derived).toEqual([
+      [['smallest-girth', 'smallest of 630 mm, 640 mm = 630 mm: Waist'], ease],
+      [['smallest-girth', 'smallest of 640 mm, 630 mm = 630 mm: Waist, bodice'], ease],
+    ]);
+  });
+
   it('carries no private word', () => {
     const secrets = { storeLocation: 'PRIVATE', provenance: 'PRIVATE', handling: 'PRIVATE' };
     const copy = JSON.stringify(projectGarment(snapshotWith([stored('waistband', '612')], secrets), imprint));

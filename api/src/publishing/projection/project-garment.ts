@@ -23,7 +23,8 @@ export function projectGarment(snapshot: Snapshot, imprint: Imprint): PublishedD
   const date = readDate(record.date);
   if (!date) throw new Error(`The date ${record.date} of ${record.ownNumber} cannot be read`);
   const pictures = snapshot.images.filter((image) => !image.hidden && image.state === 'ready');
-  const context = { ownNumber: record.ownNumber, showPeople: record.showPeople, pictures };
+  const { ownNumber, showPeople } = record;
+  const context = { ownNumber, showPeople, pictures, parts: snapshot.parts };
   return {
     number: imprint.number,
     version: imprint.version,

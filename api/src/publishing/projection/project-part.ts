@@ -1,7 +1,8 @@
+import { wholeFromHalf } from '@ellwand/shared/derivations/whole-from-half';
 import type { MeasuringPoint } from '@ellwand/shared/points/point';
 import { type Protocol, pointsOf, protocolPointIds } from '@ellwand/shared/protocols/protocol';
 import { protocolFor } from '@ellwand/shared/protocols/standard-protocols';
-import { acceptedValue, type OwnPoints } from '@ellwand/shared/readings/accepted-value';
+import { acceptedValue } from '@ellwand/shared/readings/accepted-value';
 import { standingReadings, stands, type Reading } from '@ellwand/shared/readings/reading';
 import { shownUncertainty } from '@ellwand/shared/readings/uncertainty';
 import type { Image } from '@ellwand/shared/records/image';
@@ -16,6 +17,8 @@ interface PartContext {
   readonly ownNumber: string;
   readonly showPeople: boolean;
   readonly pictures: readonly Image[];
+  /** Every part of the garment: what lies between two of them is worked out from both. */
+  readonly parts: readonly SnapshotPart[];
 }
 
 /** A part as the public reads it. A part without a complete sheet is shown, and says that it is not measured. */
@@ -37,9 +40,24 @@ export function projectPart(part: SnapshotPart, context: PartContext): Published
     peopleCount: new Set(sheet.people.map((person) => person.userId)).size,
     measurements: asked.flatMap((point) => projectMeasurement(point, measured, context.pictures) ?? []),
     notTaken: asked.flatMap((point) => projectNotTaken(point, readings) ?? []),
-    derived: derivedViews(part.kind, sheet.readings),
+    derived: derivedOf(part, sheet, measured.ownPoints, context.parts),
     ...projectProtocol(protocol),
   };
+}
+
+/** A half is shown beside its measurement already; it is not told twice. */
+function derivedOf(
+  part: SnapshotPart,
+  sheet: SnapshotSheet,
+  ownPoints: Measured['ownPoints'],
+  parts: readonly SnapshotPart[],
+): PublishedPart['derived'] {
+  const otherParts = parts.flatMap(({ id, kind, name, sheet: theirs }) =>
+    theirs && id !== part.id ? [{ kind, name, readings: theirs.readings }] : [],
+  );
+  return derivedViews(part.kind, sheet.readings, { ownPoints, otherParts }).filter(
+    ({ id }) => !id.startsWith(`${wholeFromHalf.id}:`),
+  );
 }
 
 const unmeasured = {
@@ -70,7 +88,7 @@ function namesOf(sheet: SnapshotSheet): string[] {
 
 interface Measured {
   readonly readings: readonly Reading[];
-  readonly ownPoints: OwnPoints;
+  readonly ownPoints: readonly MeasuringPoint[];
 }
 
 function projectMeasurement(

@@ -1,3 +1,4 @@
+import { type DerivedView } from '@ellwand/shared/records/sheet';
 import { formatBoth, formatLength } from '@ellwand/shared/units/format-length';
 import { mm } from '@ellwand/shared/units/length';
 import { useQuery } from '@tanstack/react-query';
@@ -40,15 +41,9 @@ export function DerivedPanel({
               <p className="text-table text-ink-2">{value.formula}</p>
               <p className="figures text-table text-ink">{value.worked}</p>
               <ul className="mt-1 flex flex-wrap gap-x-4">
-                {value.trace.map(({ pointId, label, valueMm }) => (
-                  <li key={pointId}>
-                    <button
-                      type="button"
-                      onClick={() => onPoint(pointId)}
-                      className="figures min-h-11 text-table text-indigo underline underline-offset-4"
-                    >
-                      {label}: {formatLength(mm(valueMm), 'mm')}
-                    </button>
+                {value.trace.map((entry, index) => (
+                  <li key={`${entry.pointId} ${index}`}>
+                    <TraceFigure entry={entry} onPoint={onPoint} />
                   </li>
                 ))}
               </ul>
@@ -63,5 +58,27 @@ export function DerivedPanel({
         ))}
       </ul>
     </div>
+  );
+}
+
+/** A figure that was put in: a way to its point, unless it was read on another sheet. */
+function TraceFigure({
+  entry: { pointId, label, valueMm, elsewhere },
+  onPoint,
+}: {
+  readonly entry: DerivedView['trace'][number];
+  readonly onPoint: (pointId: string) => void;
+}) {
+  const figure = `${label}: ${formatLength(mm(valueMm), 'mm')}`;
+  if (elsewhere)
+    return <span className="figures inline-flex min-h-11 items-center text-table">{figure}</span>;
+  return (
+    <button
+      type="button"
+      onClick={() => onPoint(pointId)}
+      className="figures min-h-11 text-table text-indigo underline underline-offset-4"
+    >
+      {figure}
+    </button>
   );
 }
