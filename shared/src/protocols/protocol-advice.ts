@@ -6,6 +6,7 @@ import { type Protocol } from './protocol.js';
 export function protocolAdvice({ kind, points }: Protocol): readonly string[] {
   const asked = new Set(points.map(({ pointId }) => pointId));
   return derivations.flatMap((derivation) => {
+    if (typeof derivation.needs === 'string') return [];
     const needed = derivation.needs.map((need) => need.find((pointId) => asked.has(pointId)));
     const isAsked = asked.has(derivation.id) && derivation.kinds.includes(kind);
     if (!isAsked || needed.includes(undefined)) return [];
