@@ -7,6 +7,7 @@ import { GarmentEditor } from '../garments/garment-editor.entity';
 import { GarmentRow } from '../garments/garment.entity';
 import { PartRow } from '../garments/part.entity';
 import { MailOutboxRow } from '../mail/mail-outbox.entity';
+import { CutSheetRow } from '../measuring/cut-sheets/cut-sheet.entity';
 import { FindingAnswerRow } from '../measuring/findings/finding-answer.entity';
 import { ProtocolRow } from '../measuring/protocols/protocol.entity';
 import { ReadingRow } from '../measuring/readings/reading.entity';
@@ -23,10 +24,12 @@ import { AuditTrail1764550000001 } from './migrations/1764550000001-audit-trail'
 import { Catalogue1764550000002 } from './migrations/1764550000002-catalogue';
 import { AtTheTable1764560000000 } from './migrations/1764560000000-at-the-table';
 import { Protocols1764560000001 } from './migrations/1764560000001-protocols';
+import { CutSheet1764560000002 } from './migrations/1764560000002-cut-sheet';
 import { Workroom1764550000000 } from './migrations/1764550000000-workroom';
 
 const entities = [
   AuditEntryRow,
+  CutSheetRow,
   FindingAnswerRow,
   GarmentEditor,
   GarmentRow,
@@ -53,6 +56,7 @@ export const migrations = [
   Catalogue1764550000002,
   AtTheTable1764560000000,
   Protocols1764560000001,
+  CutSheet1764560000002,
 ];
 
 /** For the handshake; how long somebody waits for a free connection is the pool's own affair. */

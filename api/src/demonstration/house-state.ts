@@ -28,6 +28,7 @@ const workroom = [
   'reading',
   'sheet_person',
   'sheet',
+  'cut_sheet',
   'image',
   'revision',
   'part',

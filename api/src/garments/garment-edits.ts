@@ -59,8 +59,8 @@ export class GarmentEdits {
   }
 
   /**
-   * Marks that a part of this garment is being measured. Who writes on a sheet is an editor too; the record's
-   * version stays, so that readings do not get in the way of whoever describes the garment.
+   * Marks that a part of this garment is being measured, or its cut sheet written. Who writes on a sheet is an editor
+   * too; the record's version stays, so that sheets do not get in the way of whoever describes the garment.
    */
   async noteMeasuring(tx: Tx, actor: Pick<Actor, 'id'>, garmentId: string): Promise<void> {
     const garment = await this.lock(tx, garmentId);

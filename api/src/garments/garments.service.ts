@@ -15,6 +15,7 @@ import type { Actor } from '../common/actor';
 import { Clock } from '../common/clock';
 import { conflict, notFound, Refusal } from '../common/refusal';
 import { isDuplicate, type Tx, Work } from '../common/work';
+import { dropEmptyCutSheet } from '../measuring/cut-sheets/drop-empty-cut-sheet';
 import { SheetRow } from '../measuring/sheets/sheet.entity';
 import { GarmentEditor } from './garment-editor.entity';
 import { GarmentEdits } from './garment-edits';
@@ -120,7 +121,7 @@ export class GarmentsService {
     });
   }
 
-  /** Takes away a part that nobody has measured yet. */
+  /** Takes away a part that nobody has measured or described the cut of yet. */
   removePart(partId: string, seen: number, actor: Actor): Promise<Garment> {
     return this.work.run(async (tx) => {
       const part = await tx.findOne(PartRow, { where: { id: partId } });
@@ -132,6 +133,7 @@ export class GarmentsService {
       if ((await tx.countBy(PartRow, { garmentId: garment.id })) === 1) {
         throw conflict('part.last', 'A garment has at least one part.');
       }
+      await dropEmptyCutSheet(tx, part);
       await tx.delete(PartRow, { id: partId });
       await this.audit.note(tx, actor, {
         verb: 'remove',

@@ -1,5 +1,7 @@
 import { Module } from '@nestjs/common';
 import { GarmentsModule } from '../garments/garments.module';
+import { CutSheetsController } from './cut-sheets/cut-sheets.controller';
+import { CutSheetsService } from './cut-sheets/cut-sheets.service';
 import { FindingsService } from './findings/findings.service';
 import { MeasuringController } from './measuring.controller';
 import { ProtocolBookModule } from './protocols/protocol-book.module';
@@ -14,7 +16,7 @@ import { TableNotesService } from './table-notes/table-notes.service';
 
 @Module({
   imports: [GarmentsModule, ProtocolBookModule],
-  controllers: [MeasuringController, ProtocolsController],
+  controllers: [MeasuringController, ProtocolsController, CutSheetsController],
   providers: [
     ProtocolsService,
     SheetProtocolService,
@@ -24,7 +26,8 @@ import { TableNotesService } from './table-notes/table-notes.service';
     ReadingsService,
     FindingsService,
     TableNotesService,
+    CutSheetsService,
   ],
-  exports: [ProtocolBookModule, SheetsService, ReadingsService, FindingsService],
+  exports: [ProtocolBookModule, SheetsService, ReadingsService, FindingsService, CutSheetsService],
 })
 export class MeasuringModule {}

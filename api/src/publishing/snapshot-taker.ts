@@ -6,6 +6,7 @@ import type { Tx } from '../common/work';
 import { GarmentEditor } from '../garments/garment-editor.entity';
 import type { GarmentRow } from '../garments/garment.entity';
 import { PartRow } from '../garments/part.entity';
+import { bodyOf, cutSheetRow } from '../measuring/cut-sheets/cut-sheet-view';
 import type { ProtocolBook } from '../measuring/protocols/protocol-book';
 import { toStored, trimmedMm } from '../measuring/readings/stored-reading';
 import { SheetRow } from '../measuring/sheets/sheet.entity';
@@ -25,6 +26,7 @@ export async function takeSnapshot(tx: Tx, garment: GarmentRow, protocols: Proto
       kind: part.kind,
       name: part.name,
       sheet: await speakingSheet(tx, part, protocols),
+      cutSheet: bodyOf(await cutSheetRow(tx, part.id)),
     });
   }
   const images = await tx.find(ImageRow, {

@@ -1,3 +1,4 @@
+import type { CutSheetBody } from '@ellwand/shared/records/cut-sheet';
 import type { GarmentRecord } from '@ellwand/shared/records/garment';
 import type { Image } from '@ellwand/shared/records/image';
 import type { GarmentKind } from '@ellwand/shared/points/kinds';
@@ -27,6 +28,8 @@ export interface SnapshotPart {
   readonly kind: GarmentKind;
   readonly name: string;
   readonly sheet: SnapshotSheet | null;
+  /** How it is cut; revisions frozen before cut sheets have none. */
+  readonly cutSheet?: CutSheetBody | null;
 }
 
 /** A garment frozen when it was sent to review: record, parts with their sheets, pictures, and who edited. */

@@ -62,6 +62,7 @@ export function publishedDocument(parts: Partial<PublishedDocument> = {}): Publi
         derived: [],
         protocol: null,
         ownPoints: [],
+        cutSheet: null,
       },
     ],
     images: [],

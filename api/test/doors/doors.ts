@@ -46,6 +46,9 @@ export const doors: Readonly<Record<string, Door>> = {
   'POST /api/v1/workroom/garments/:id/parts': 'garment:write',
   'DELETE /api/v1/workroom/parts/:id': 'garment:write',
 
+  'GET /api/v1/workroom/parts/:id/cut-sheet': 'garment:read',
+  'PUT /api/v1/workroom/parts/:id/cut-sheet': 'garment:write',
+
   'POST /api/v1/workroom/parts/:id/sheets': 'sheet:write',
   'GET /api/v1/workroom/sheets/:id': 'garment:read',
   'PUT /api/v1/workroom/sheets/:id/facts': 'sheet:write',

@@ -3,23 +3,15 @@
  * errors may all go the same way: eight panels each 1 mm over are 8 mm over. Their uncertainties are therefore added
  * and not combined by squares.
  */
-import { readingStep } from '../readings/reading-step.js';
-import { layingUncertaintyMm, rootOfSquares, stepUncertaintyMm } from '../readings/uncertainty.js';
 import { fromMmString, sumOf, times, type Length } from '../units/length.js';
-import type { LengthUnit } from '../units/format-length.js';
+import { type LengthKept, straightUncertaintyMm } from './straight-reading.js';
 import type { PanelLevel, PieceLayer } from './words.js';
-
-interface WidthRead {
-  readonly typed: string;
-  readonly unit: LengthUnit;
-  readonly mm: string;
-}
 
 export interface PanelPiece {
   readonly name: string;
   readonly count: number;
   readonly layer: PieceLayer;
-  readonly widths: Readonly<Record<PanelLevel, WidthRead | null>>;
+  readonly widths: Readonly<Record<PanelLevel, LengthKept | null>>;
 }
 
 /** What of a cut sheet the sums need. */
@@ -61,10 +53,7 @@ function roundPanels(sheet: PanelledSheet, level: PanelLevel): readonly PanelPie
 function widthsOf({ name, count, widths }: PanelPiece, level: PanelLevel): readonly PanelWidth[] {
   const width = widths[level];
   if (width === null) return [];
-  const uncertaintyMm = rootOfSquares([
-    stepUncertaintyMm(readingStep(width), 'straight'),
-    layingUncertaintyMm('straight', 0),
-  ]);
+  const uncertaintyMm = straightUncertaintyMm(width);
   return Array.from({ length: count }, () => ({ name, width: fromMmString(width.mm), uncertaintyMm }));
 }
 

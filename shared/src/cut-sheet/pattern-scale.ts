@@ -4,8 +4,9 @@
  * a fraction of whole numbers, and a root is taken once, when a length is wanted.
  */
 import { rootOfSquares } from '../readings/uncertainty.js';
-import { type Length, lengthOf, toMm } from '../units/length.js';
+import { fromMmString, type Length, lengthOf, toMm } from '../units/length.js';
 import { divideHalfUp } from '../units/rounding.js';
+import { type LengthKept, straightUncertaintyMm } from './straight-reading.js';
 
 /** A place in the picture, in whole pixels of the original. */
 export interface PixelMark {
@@ -52,6 +53,25 @@ export function patternScale(
   if (denominator === 0n || distance <= 0) return undefined;
   const numerator = BigInt(distance) * BigInt(distance);
   return { numerator, denominator, distance, distanceUncertaintyMm, pixels: pixelsOf(marks) };
+}
+
+/** The scale of a pattern on a cut sheet; nothing while its distance is not known. */
+export function scaleOfPattern(pattern: {
+  readonly marks: MarkPair;
+  readonly distance: LengthKept | null;
+}): PatternScale | undefined {
+  const { marks, distance } = pattern;
+  if (distance === null) return undefined;
+  return patternScale(marks, fromMmString(distance.mm), straightUncertaintyMm(distance));
+}
+
+/** How many pixels of the original one pixel of the largest form is, which is what marks are set on. */
+export function markStepPx(image: {
+  readonly widthPx: number | null;
+  readonly widths: readonly number[];
+}): number {
+  const largest = Math.max(0, ...image.widths);
+  return image.widthPx === null || largest === 0 ? 1 : Math.max(1, image.widthPx / largest);
 }
 
 /** Whole root of a whole number, rounded down (Newton's method on whole numbers). */

@@ -1,6 +1,7 @@
 import { z } from 'zod';
 import { kindIds } from '../points/kinds.js';
 import { Day, LengthMm, Moment, pageOf, Uuid } from './common.js';
+import { PublishedCutSheet } from './cut-sheet.js';
 import { ImageView } from './image.js';
 import { OwnPointView } from './protocol.js';
 import { VersionState } from './record-moves.js';
@@ -47,6 +48,8 @@ export const PublishedPart = z.object({
     .default(null),
   /** Points that the museum made for itself, for labels, definitions and lines on the diagram. */
   ownPoints: z.array(OwnPointView).default([]),
+  /** How it is cut; nothing where nobody has said, and in documents from before cut sheets. */
+  cutSheet: PublishedCutSheet.nullable().default(null),
 });
 export type PublishedPart = z.infer<typeof PublishedPart>;
 

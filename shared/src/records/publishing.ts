@@ -9,7 +9,7 @@ export type Withdrawal = z.infer<typeof Withdrawal>;
 /** `GET /workroom/garments/:id/changes`: field by field against the last published version. */
 export const Change = z.object({
   kind: z.enum(['added', 'removed', 'changed']),
-  area: z.enum(['record', 'measurement', 'picture']),
+  area: z.enum(['record', 'measurement', 'cut-sheet', 'picture']),
   /** What changed, in words: "Title", "Waist (bodice)", "Picture, front". */
   label: z.string(),
   before: z.string().nullable(),

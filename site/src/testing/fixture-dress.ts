@@ -131,6 +131,7 @@ export const dressInTwoParts: PublishedGarment = {
       ],
       protocol: null,
       ownPoints: [],
+      cutSheet: null,
     },
     {
       number: 'LH.1966.30.2',
@@ -167,6 +168,7 @@ export const dressInTwoParts: PublishedGarment = {
       ],
       protocol: null,
       ownPoints: [],
+      cutSheet: null,
     },
   ],
 };

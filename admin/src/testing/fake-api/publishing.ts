@@ -65,6 +65,7 @@ function publishedPart(house: House, garment: Garment, part: Garment['parts'][nu
       ? { version: sheet.protocolVersion, pointIds: sheet.protocol.points.map(({ pointId }) => pointId) }
       : null,
     ownPoints: sheet?.protocol.ownPoints ?? [],
+    cutSheet: null,
   };
 }
 

@@ -1,3 +1,4 @@
+import { roundsRead } from '@ellwand/shared/cut-sheet/rounds-read';
 import { wholeFromHalf } from '@ellwand/shared/derivations/whole-from-half';
 import type { MeasuringPoint } from '@ellwand/shared/points/point';
 import { type Protocol, pointsOf, protocolPointIds } from '@ellwand/shared/protocols/protocol';
@@ -12,6 +13,7 @@ import type { PublishedMeasurement, PublishedPart } from '@ellwand/shared/record
 import { lengthOf, toMmString } from '@ellwand/shared/units/length';
 import { divideHalfUp } from '@ellwand/shared/units/rounding';
 import type { SnapshotPart, SnapshotSheet } from '../snapshot';
+import { projectCutSheet } from './project-cut-sheet';
 
 interface PartContext {
   readonly ownNumber: string;
@@ -25,8 +27,9 @@ interface PartContext {
 export function projectPart(part: SnapshotPart, context: PartContext): PublishedPart {
   const heading = { number: `${context.ownNumber}${part.suffix}`, kind: part.kind, name: part.name };
   const { sheet } = part;
-  if (!sheet) return { ...heading, ...unmeasured };
-  const readings = sheet.readings.map(toReading);
+  const readings = (sheet?.readings ?? []).map(toReading);
+  const cutSheet = projectCutSheet(part.cutSheet, roundsRead(readings), context.pictures);
+  if (!sheet) return { ...heading, ...unmeasured, cutSheet };
   const protocol = sheet.protocol ? toProtocol(sheet.protocol) : protocolFor(part.kind);
   const asked = pointsOf(protocol);
   const measured: Measured = { readings, ownPoints: protocol.ownPoints };
@@ -42,6 +45,7 @@ export function projectPart(part: SnapshotPart, context: PartContext): Published
     notTaken: asked.flatMap((point) => projectNotTaken(point, readings) ?? []),
     derived: derivedOf(part, sheet, measured.ownPoints, context.parts),
     ...projectProtocol(protocol),
+    cutSheet,
   };
 }
 

@@ -1,4 +1,6 @@
 import type { PublishedDocument, PublishedMeasurement } from '@ellwand/shared/records/published-garment';
+import { cutSheet, piece } from '@ellwand/shared/testing/sample-cut-sheets';
+import { projectCutSheet } from '../projection/project-cut-sheet';
 import { changesBetween } from './changes';
 
 const waist: PublishedMeasurement = {
@@ -29,6 +31,7 @@ const bodice: PublishedDocument['parts'][number] = {
   derived: [],
   protocol: null,
   ownPoints: [],
+  cutSheet: null,
 };
 
 const published: PublishedDocument = {
@@ -154,5 +157,29 @@ describe('what a new version changes', () => {
     expect(changesBetween(published, { ...published, images: [image] })).toEqual([
       { kind: 'added', area: 'picture', label: 'Picture, front', before: null, after: '1. Front.' },
     ]);
+  });
+
+  it('tells of the cut field by field, also beside a version from before cut sheets', () => {
+    const cut = (sheet: Parameters<typeof cutSheet>[0]) =>
+      withPart({ cutSheet: projectCutSheet(cutSheet(sheet), [], []) });
+    const front = piece('Front', { count: 2, widths: { waist: '152' } });
+    const darts = [{ key: 'd1', piece: 'front', count: 2, tip: { typed: '92', unit: 'mm' as const } }];
+    const before = cut({ pieces: [front], darts });
+    expect(changesBetween(before, before)).toEqual([]);
+    expect(
+      changesBetween(
+        before,
+        cut({ pieces: [piece('Front', { count: 2, grain: 'bias', widths: { waist: '152.5' } })], darts: [] }),
+      ).map(({ kind, area, label, before: was, after: is }) => [kind, area, label, was, is]),
+    ).toEqual([
+      ['changed', 'cut-sheet', 'Piece Front, grain (Bodice)', 'Not known', 'Bias'],
+      ['changed', 'cut-sheet', 'Piece Front, waist width (Bodice)', '152 mm', '152.5 mm'],
+      ['removed', 'cut-sheet', 'Dart 1, piece (Bodice)', 'Front', null],
+      ['removed', 'cut-sheet', 'Dart 1, count (Bodice)', '2', null],
+      ['removed', 'cut-sheet', 'Dart 1, tip (Bodice)', '92 mm above the waist', null],
+    ]);
+    const without = (name: string, value: unknown) => (name === 'cutSheet' ? undefined : value);
+    const old = JSON.parse(JSON.stringify(published, without)) as PublishedDocument;
+    expect(changesBetween(old, before).map(({ kind }) => kind)).toEqual(Array(7).fill('added'));
   });
 });

@@ -5,6 +5,7 @@ import type {
   PublishedPart,
 } from '@ellwand/shared/records/published-garment';
 import type { Change } from '@ellwand/shared/records/publishing';
+import { cutSheetFields } from './cut-sheet-changes';
 
 /** The record's public fields in the order in which they are told, each with its name and how its value reads. */
 const fields: readonly { label: string; read: (document: PublishedDocument) => string | null }[] = [
@@ -40,6 +41,7 @@ export function changesBetween(before: PublishedDocument | null, after: Publishe
     ),
     ...compare('record', partFactsOf(before), partFactsOf(after)),
     ...compare('measurement', measurementsOf(before), measurementsOf(after)),
+    ...compare('cut-sheet', cutSheetsOf(before), cutSheetsOf(after)),
     ...compare('picture', picturesOf(before), picturesOf(after)),
   ];
 }
@@ -118,6 +120,11 @@ function readingText({ valueMm, uncertaintyMm, rounds, levelFoundBy }: Published
   ]
     .filter(Boolean)
     .join(', ');
+}
+
+function cutSheetsOf(document: PublishedDocument | null): Map<string, Entry> {
+  const said = (document?.parts ?? []).flatMap(cutSheetFields);
+  return new Map(said.map(({ key, label, text }) => [key, { label, text }]));
 }
 
 function picturesOf(document: PublishedDocument | null): Map<string, Entry> {
