@@ -6,15 +6,18 @@ import { RouterProvider } from 'react-router-dom';
 import { Providers } from './app/providers.js';
 import { makeRouter } from './app/router.js';
 import { followDeviceTheme } from './app/theme.js';
+import { openOffline } from './offline/offline.js';
 import { makeQueryClient } from './lib/query-client.js';
 import './styles/workroom.css';
 
 followDeviceTheme();
 const root = document.getElementById('root');
 if (!root) throw new Error('expected #root in the page');
+// Opened before the first screen, so that what was typed yesterday is there when it appears.
+const offline = await openOffline();
 createRoot(root).render(
   <StrictMode>
-    <Providers queries={makeQueryClient()}>
+    <Providers queries={makeQueryClient(offline.reference)} offline={offline}>
       <RouterProvider router={makeRouter()} />
     </Providers>
   </StrictMode>,

@@ -2,6 +2,7 @@ import { useQuery } from '@tanstack/react-query';
 import { Navigate, Outlet, useLocation } from 'react-router-dom';
 import { Failed, Waiting } from '../components/ui/states.js';
 import { paths } from '../config/paths.js';
+import { useAttendant } from './attendant.js';
 import { sessionQuery } from '../features/sign-in/api/session.js';
 import { SignInAgain } from '../features/sign-in/components/sign-in-again.js';
 import { SessionContext } from '../lib/session.js';
@@ -10,6 +11,7 @@ import { SessionContext } from '../lib/session.js';
 export function Door() {
   const session = useQuery(sessionQuery);
   const { pathname, search } = useLocation();
+  useAttendant(session.data?.user.id ?? null);
   if (session.isPending) {
     return (
       <main className="mx-auto max-w-page p-6">

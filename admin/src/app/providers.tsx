@@ -1,12 +1,18 @@
 import { QueryClientProvider, type QueryClient } from '@tanstack/react-query';
 import type { ReactNode } from 'react';
+import { OfflineContext } from '../offline/context.js';
+import type { Offline } from '../offline/offline.js';
 
-export function Providers({
-  queries,
-  children,
-}: {
+interface Provided {
   readonly queries: QueryClient;
+  readonly offline: Offline;
   readonly children: ReactNode;
-}) {
-  return <QueryClientProvider client={queries}>{children}</QueryClientProvider>;
+}
+
+export function Providers({ queries, offline, children }: Provided) {
+  return (
+    <OfflineContext value={offline}>
+      <QueryClientProvider client={queries}>{children}</QueryClientProvider>
+    </OfflineContext>
+  );
 }

@@ -3,7 +3,9 @@ import { NavLink, Outlet, useNavigate } from 'react-router-dom';
 import { Button } from '../components/ui/button.js';
 import { paths } from '../config/paths.js';
 import { sessionQuery, signOut } from '../features/sign-in/api/session.js';
+import { referenceOf } from '../lib/query-client.js';
 import { useMay, useSession } from '../lib/session.js';
+import { referenceKeys } from '../offline/reference.js';
 
 const linkLook = ({ isActive }: { isActive: boolean }) =>
   `inline-flex min-h-12 items-center border-b-2 whitespace-nowrap text-table ${isActive ? 'border-indigo font-medium text-ink' : 'border-transparent text-ink-2 hover:text-ink'}`;
@@ -66,6 +68,7 @@ function SignOut() {
   const leave = async () => {
     // Whatever the server says, this screen shows nothing more.
     await signOut().catch(() => undefined);
+    await referenceOf(queries).forget(referenceKeys.session);
     queries.clear();
     queries.setQueryData(sessionQuery.queryKey, null);
     void navigate(paths.signIn(), { replace: true });

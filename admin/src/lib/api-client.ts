@@ -1,4 +1,5 @@
 import type { z } from 'zod';
+import { reach } from '../offline/reach.js';
 import { NoAnswer, parseJson, problemOf } from './problem-error.js';
 import { refreshSession, waitForSignIn } from './session-gate.js';
 
@@ -22,15 +23,18 @@ function headersOf({ body, version }: SendOptions): HeadersInit {
 
 async function ask(method: string, path: string, options: SendOptions): Promise<Response> {
   try {
-    return await fetch(PREFIX + path, {
+    const answer = await fetch(PREFIX + path, {
       method,
       credentials: 'same-origin',
       headers: headersOf(options),
       body: options.body === undefined ? undefined : JSON.stringify(options.body),
       signal: options.signal,
     });
+    reach.answered();
+    return answer;
   } catch (error) {
     if (options.signal?.aborted) throw error;
+    reach.unanswered();
     throw new NoAnswer(error instanceof Error ? error.message : 'unknown');
   }
 }

@@ -5,6 +5,9 @@ import { vi } from 'vitest';
 import { Providers } from '../app/providers.js';
 import { routes } from '../app/router.js';
 import { makeQueryClient } from '../lib/query-client.js';
+import { MemoryStore } from '../offline/memory-store.js';
+import { startOffline } from '../offline/offline.js';
+import type { OfflineStore } from '../offline/store.js';
 import { fakeApi } from './fake-api/fake-api.js';
 import { House } from './fake-api/house.js';
 
@@ -13,10 +16,17 @@ const ORIGIN = 'http://127.0.0.1:4310';
 /** A request as a test may look at it or answer it otherwise. */
 export type Interception = (request: Request) => Response | Promise<Response> | undefined;
 
+interface RenderedWith {
+  readonly house?: House;
+  readonly intercept?: Interception;
+  /** What this device keeps: hand the same one in again to load the page again. */
+  readonly store?: OfflineStore;
+}
+
 /** Opens the Workroom at an address over a house in memory, with `fetch` leading there. */
 export function renderWorkroom(
   path: string,
-  { house = new House(), intercept }: { house?: House; intercept?: Interception } = {},
+  { house = new House(), intercept, store = new MemoryStore() }: RenderedWith = {},
 ) {
   const answer = fakeApi(house);
   const asked: string[] = [];
@@ -27,14 +37,15 @@ export function renderWorkroom(
     asked.push(`${request.method} ${new URL(request.url).pathname.replace('/api/v1', '')}`);
     return (await door.intercept?.(request.clone())) ?? answer(request);
   });
-  const queries = makeQueryClient();
+  const offline = startOffline(store);
+  const queries = makeQueryClient(offline.reference);
   queries.setDefaultOptions({ queries: { ...queries.getDefaultOptions().queries, retry: false } });
   const router = createMemoryRouter(routes, { initialEntries: [path] });
   const user = userEvent.setup();
   const screen = render(
-    <Providers queries={queries}>
+    <Providers queries={queries} offline={offline}>
       <RouterProvider router={router} />
     </Providers>,
   );
-  return { house, user, router, queries, asked, door, ...screen };
+  return { offline, store, house, user, router, queries, asked, door, ...screen };
 }

@@ -195,10 +195,12 @@ describe('nothing typed is lost', () => {
     expect(await screen.findByText('Kept on this tablet')).toBeVisible();
     await waitFor(() => expect(screen.getByLabelText(/^Hip,/)).toHaveFocus());
     await first.user.keyboard('98');
+    await first.offline.drafts.flush();
     first.unmount();
+    first.offline.close();
     expect(house.sheet(skirtSheetId)!.readings).toHaveLength(0);
 
-    renderWorkroom(`/sheets/${skirtSheetId}`, { house });
+    renderWorkroom(`/sheets/${skirtSheetId}`, { house, store: first.store });
     expect(await screen.findByLabelText(/^Hip,/)).toHaveValue('98');
     expect(screen.getByLabelText(/^Waistband,/)).toHaveValue('612');
     await waitFor(() => expect(standing(house, skirtSheetId, 'waistband')).toHaveLength(1));

@@ -55,26 +55,28 @@ export function DecisionCard({
           <>
             <Button
               height="table"
-              onClick={() => outbox.decide(reading.id, { ...fresh, replaces: standing.id })}
+              onClick={() => void outbox.decide(reading.id, { ...fresh, replaces: standing.id })}
             >
               Keep the one keyed here
             </Button>
-            <Button height="table" onClick={() => outbox.decide(reading.id)}>
+            <Button height="table" onClick={() => void outbox.decide(reading.id)}>
               Keep the one that stands
             </Button>
             <Button
               height="table"
-              onClick={() => outbox.decide(reading.id, { ...fresh, round: row.round + 1, replaces: null })}
+              onClick={() =>
+                void outbox.decide(reading.id, { ...fresh, round: row.round + 1, replaces: null })
+              }
             >
               Keep both and read again
             </Button>
           </>
         ) : (
           <>
-            <Button height="table" onClick={() => outbox.decide(reading.id, fresh)}>
+            <Button height="table" onClick={() => void outbox.decide(reading.id, fresh)}>
               Send it again
             </Button>
-            <Button height="table" onClick={() => outbox.decide(reading.id)}>
+            <Button height="table" onClick={() => void outbox.decide(reading.id)}>
               Drop this reading
             </Button>
           </>

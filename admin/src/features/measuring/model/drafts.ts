@@ -1,6 +1,6 @@
 import { LevelFoundBy, TypedUnit } from '@ellwand/shared/records/sheet';
 import { z } from 'zod';
-import type { Shelf } from './shelf.js';
+import type { DeviceDrafts } from '../../../offline/drafts.js';
 
 /** What stands in a row's boxes and was not committed yet, with its unit: never converted. */
 export const Draft = z.object({
@@ -10,39 +10,43 @@ export const Draft = z.object({
   level: LevelFoundBy.nullable(),
 });
 export type Draft = z.infer<typeof Draft>;
+export type DraftsKept = Readonly<Record<string, Draft>>;
 
-export const DraftsKept = z.record(z.string(), Draft);
-export type DraftsKept = z.infer<typeof DraftsKept>;
+/** Typed text of one sheet by row, on this device with every keystroke. */
+export class SheetDrafts {
+  private seen: Readonly<Record<string, unknown>> | null = null;
+  private kept: DraftsKept = {};
 
-/** Typed text by row, on the shelf with every keystroke. */
-export class Drafts {
-  private kept: DraftsKept;
-  private readonly listeners = new Set<() => void>();
+  constructor(
+    private readonly device: DeviceDrafts,
+    private readonly sheetId: string,
+  ) {}
 
-  constructor(private readonly shelf: Shelf<DraftsKept>) {
-    this.kept = shelf.read() ?? {};
-  }
+  readonly subscribe = (listener: () => void): (() => void) => this.device.subscribe(listener);
 
-  readonly subscribe = (listener: () => void): (() => void) => {
-    this.listeners.add(listener);
-    return () => this.listeners.delete(listener);
+  readonly snapshot = (): DraftsKept => {
+    const all = this.device.ofSheet(this.sheetId);
+    if (all !== this.seen) {
+      this.seen = all;
+      this.kept = Object.fromEntries(
+        Object.entries(all).flatMap(([row, value]) => {
+          const draft = Draft.safeParse(value);
+          return draft.success ? [[row, draft.data] as const] : [];
+        }),
+      );
+    }
+    return this.kept;
   };
 
-  readonly snapshot = (): DraftsKept => this.kept;
-
   set(row: string, draft: Draft): void {
-    this.change({ ...this.kept, [row]: draft });
+    this.device.set(this.sheetId, row, draft);
   }
 
   clear(row: string): void {
-    if (!(row in this.kept)) return;
-    const others = Object.fromEntries(Object.entries(this.kept).filter(([key]) => key !== row));
-    this.change(others);
+    this.device.clear(this.sheetId, row);
   }
 
-  private change(kept: DraftsKept): void {
-    this.kept = kept;
-    this.shelf.write(kept);
-    for (const listener of this.listeners) listener();
+  flush(): Promise<void> {
+    return this.device.flush();
   }
 }

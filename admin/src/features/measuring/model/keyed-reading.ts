@@ -2,7 +2,7 @@ import type { NewReading } from '@ellwand/shared/records/sheet';
 import { fromTyped, lengthProblemSentence } from '@ellwand/shared/units/parse-length';
 import { newId } from '../../../lib/ids.js';
 import type { Draft } from './drafts.js';
-import { deviceName } from './shelf.js';
+import { deviceName } from '../../../offline/device.js';
 import type { SheetRow } from './rows.js';
 
 export type Keyed =

@@ -1,7 +1,11 @@
 import type { NewReading, StoredReading } from '@ellwand/shared/records/sheet';
-import { isProblem } from '../../../lib/problem-error.js';
-import type { ReadingResult } from '../api/send-readings.js';
-import type { Shelf } from './shelf.js';
+import type { NewTableNote } from '@ellwand/shared/records/table-note';
+import { newId } from '../../../lib/ids.js';
+import { deviceName } from '../../../offline/device.js';
+import type { DeviceDrafts } from '../../../offline/drafts.js';
+import { pictureOperation } from '../../../offline/offline.js';
+import type { Operation, OperationOf, TablePicture } from '../../../offline/operation.js';
+import type { DeviceOutbox, OutboxState } from '../../../offline/outbox.js';
 
 /** A committed reading that the API has not kept yet. It leaves only when it is kept or when a person decides. */
 export interface OutboxEntry {
@@ -13,162 +17,109 @@ export interface OutboxEntry {
   readonly standing?: StoredReading;
 }
 
+/** What of one sheet is still on this device alone. */
 export interface OutboxView {
   readonly entries: readonly OutboxEntry[];
+  readonly notes: readonly OperationOf<'note'>[];
+  readonly pictures: readonly OperationOf<'picture'>[];
   /** How many are under way just now. */
   readonly sending: number;
   /** When the last one was kept by the API; null before any. */
   readonly sentAt: number | null;
+  /** How many are on no disk yet. */
+  readonly unkept: number;
 }
 
-export interface OutboxWays {
-  readonly shelf: Shelf<readonly OutboxEntry[]>;
-  readonly deliver: (
-    readings: readonly NewReading[],
-  ) => Promise<{ sheetVersion: number; results: readonly ReadingResult[] }>;
-  /** Told before the kept readings leave the outbox, so that they are never nowhere. */
-  readonly onKept: (results: readonly ReadingResult[], sheetVersion: number) => void;
-  /** Runs the work while no other tab sends from this outbox. */
-  readonly alone: (work: () => Promise<void>) => Promise<void>;
+/** Everything that can be said in a note, without what carries it. */
+type Said<Note = NewTableNote> = Note extends NewTableNote ? Omit<Note, 'id' | 'device' | 'saidAt'> : never;
+
+export interface Keeper {
+  readonly id: string;
+  readonly name: string;
 }
 
-const LARGEST_BATCH = 100;
+/** One sheet's own way into the device's outbox, in the name of whoever is signed in. */
+export class SheetOutbox {
+  private seen: OutboxState | null = null;
+  private view: OutboxView = viewOf([], { operations: [], sending: 0, sentAt: null, unkept: new Set() });
 
-/**
- * Readings on their way to the API, append-only and in order. A reading is on the shelf before this says that it is
- * kept; its id makes a repeated delivery harmless, so whenever it is unclear what arrived, it is sent again.
- */
-export class Outbox {
-  private view: OutboxView;
-  private readonly listeners = new Set<() => void>();
-  private running: Promise<void> | null = null;
-  private askedAgain = false;
+  constructor(
+    private readonly device: DeviceOutbox,
+    private readonly drafts: DeviceDrafts,
+    private readonly sheetId: string,
+    private readonly keeper: Keeper,
+  ) {}
 
-  constructor(private readonly ways: OutboxWays) {
-    this.view = { entries: ways.shelf.read() ?? [], sending: 0, sentAt: null };
-  }
+  readonly subscribe = (listener: () => void): (() => void) => this.device.subscribe(listener);
 
-  readonly subscribe = (listener: () => void): (() => void) => {
-    this.listeners.add(listener);
-    return () => this.listeners.delete(listener);
+  readonly snapshot = (): OutboxView => {
+    const state = this.device.snapshot();
+    if (state !== this.seen) {
+      this.seen = state;
+      this.view = viewOf(
+        state.operations.filter(({ sheetId }) => sheetId === this.sheetId),
+        state,
+      );
+    }
+    return this.view;
   };
 
-  readonly snapshot = (): OutboxView => this.view;
-
-  add(reading: NewReading): void {
-    this.change((entries) => [...entries, { reading, state: 'waiting' }]);
-    void this.send();
+  /** Appends a reading; the row's draft leaves the disk in the same moment. Resolves once it is kept. */
+  add(reading: NewReading, row?: string): Promise<void> {
+    const operation: Operation = { ...this.carried(reading.id), kind: 'reading', reading };
+    const clears = row === undefined ? {} : { clears: this.drafts.handOver(this.sheetId, row) };
+    return this.device.add({ operation, ...clears });
   }
 
-  /** A person decided: the reading is dropped, or another takes its place. */
-  decide(id: string, instead?: NewReading): void {
-    this.change((entries) =>
-      entries.flatMap((entry): OutboxEntry[] => {
-        if (entry.reading.id !== id) return [entry];
-        return instead ? [{ reading: instead, state: 'waiting' }] : [];
-      }),
+  /** Says something that is no reading. */
+  say(said: Said): Promise<void> {
+    const id = newId();
+    const note = { ...said, id, device: deviceName(), saidAt: new Date().toISOString() } as NewTableNote;
+    return this.device.add({ operation: { ...this.carried(id), kind: 'note', note } });
+  }
+
+  /** Keeps a picture from the camera until it can be sent. */
+  async photograph(picture: Omit<TablePicture, 'id' | 'fileName'>, file: File): Promise<void> {
+    const { sheetId, keeper } = this;
+    const taken = { ...picture, id: newId(), fileName: file.name || 'table.jpg' };
+    await this.device.add(
+      await pictureOperation(taken, file, { sheetId, by: keeper.id, byName: keeper.name }),
     );
-    void this.send();
   }
 
-  /** Another tab changed the shelf. */
-  reread(): void {
-    this.show({ entries: this.ways.shelf.read() ?? [] });
+  /** A person decided about a reading: it is dropped, or another takes its place. */
+  decide(id: string, instead?: NewReading): Promise<void> {
+    const operation: Operation | undefined = instead && {
+      ...this.carried(instead.id),
+      kind: 'reading',
+      reading: instead,
+    };
+    return this.device.decide(id, operation);
   }
 
-  /** Sends all that waits. Never throws: what could not be sent stays where it is. */
   send(): Promise<void> {
-    this.askedAgain = true;
-    this.running ??= this.ways
-      .alone(() => this.sendWhileAsked())
-      .finally(() => {
-        this.running = null;
-        this.show({ sending: 0 });
-      });
-    return this.running;
+    return this.device.send();
   }
 
-  private async sendWhileAsked(): Promise<void> {
-    // Whoever asks while a sending is about to fail (the network has just come back) gets one of their own.
-    while (this.askedAgain) {
-      this.askedAgain = false;
-      await this.sendAll();
-    }
-  }
-
-  /** Returns when nothing waits any more, or when the API cannot be reached and it is better to wait. */
-  private async sendAll(): Promise<void> {
-    let batch = LARGEST_BATCH;
-    for (;;) {
-      const waiting = this.entries()
-        .filter(({ state }) => state === 'waiting')
-        .slice(0, batch);
-      if (waiting.length === 0) return;
-      this.show({ sending: waiting.length });
-      try {
-        this.settle(await this.ways.deliver(waiting.map(({ reading }) => reading)));
-      } catch (error) {
-        if (!isFinal(error)) return;
-        // One that cannot be read must not hold up the others: they are sent singly, and it shows itself.
-        if (waiting.length > 1) batch = 1;
-        else this.mark(waiting[0]?.reading.id, error instanceof Error ? error.message : 'Refused');
-      }
-    }
-  }
-
-  private settle({
-    sheetVersion,
-    results,
-  }: {
-    sheetVersion: number;
-    results: readonly ReadingResult[];
-  }): void {
-    const byId = new Map(results.map((result) => [result.id, result]));
-    const kept = results.filter(({ outcome }) => outcome === 'kept' || outcome === 'already-kept');
-    if (kept.length > 0) this.ways.onKept(kept, sheetVersion);
-    this.change((entries) =>
-      entries.flatMap((entry): OutboxEntry[] => {
-        const result = byId.get(entry.reading.id);
-        if (!result) return [entry];
-        if (result.outcome === 'kept' || result.outcome === 'already-kept') return [];
-        const why = result.detail ?? 'Another reading stands at this point.';
-        return [
-          { ...entry, state: 'decision', why, ...(result.standing ? { standing: result.standing } : {}) },
-        ];
-      }),
-    );
-    if (kept.length > 0) this.show({ sentAt: Date.now() });
-  }
-
-  private mark(id: string | undefined, why: string): void {
-    this.change((entries) =>
-      entries.map((entry) => (entry.reading.id === id ? { ...entry, state: 'decision', why } : entry)),
-    );
-  }
-
-  /** The shelf is the truth, for another tab may have written to it since. */
-  private entries(): readonly OutboxEntry[] {
-    return this.ways.shelf.read() ?? [];
-  }
-
-  private change(next: (entries: readonly OutboxEntry[]) => readonly OutboxEntry[]): void {
-    const entries = next(this.entries());
-    this.ways.shelf.write(entries);
-    this.show({ entries });
-  }
-
-  private show(part: Partial<OutboxView>): void {
-    this.view = { ...this.view, ...part };
-    for (const listener of this.listeners) listener();
+  private carried(id: string) {
+    const { sheetId, keeper } = this;
+    return { id, sheetId, by: keeper.id, byName: keeper.name, state: 'waiting' as const };
   }
 }
 
-/** A refusal that the same request would meet again; silence, overload and a fault of the server may pass. */
-function isFinal(error: unknown): boolean {
-  return (
-    isProblem(error) &&
-    error.status >= 400 &&
-    error.status < 500 &&
-    ![401, 408, 425, 429].includes(error.status)
-  );
+function viewOf(own: readonly Operation[], { sending, sentAt, unkept }: OutboxState): OutboxView {
+  const readings = own.filter((one): one is OperationOf<'reading'> => one.kind === 'reading');
+  return {
+    entries: readings.map(({ reading, state, why, standing }) => ({
+      reading,
+      state,
+      ...(why === undefined ? {} : { why }),
+      ...(standing === undefined ? {} : { standing }),
+    })),
+    notes: own.filter((one): one is OperationOf<'note'> => one.kind === 'note'),
+    pictures: own.filter((one): one is OperationOf<'picture'> => one.kind === 'picture'),
+    sending,
+    sentAt,
+    unkept: own.filter(({ id }) => unkept.has(id)).length,
+  };
 }

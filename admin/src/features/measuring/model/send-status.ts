@@ -5,6 +5,7 @@ const readings = (count: number) => (count === 1 ? '1 reading' : `${count} readi
 
 /** One of four sentences about where the readings are; empty on a sheet that has none. */
 export function sendStatus(view: OutboxView, drafts: number, lastReceived: string | null): string {
+  if (view.unkept > 0) return 'Not kept yet: leave this page open';
   const decisions = view.entries.filter(({ state }) => state === 'decision').length;
   const waiting = view.entries.length - decisions;
   if (waiting > 0 && view.sending > 0) return `Sending ${readings(view.sending)}`;

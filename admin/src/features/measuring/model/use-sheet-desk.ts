@@ -76,8 +76,7 @@ export function useSheetDesk(shown: Sheet) {
       say(row.key, keyed.sentence);
       return false;
     }
-    outbox.add(keyed.reading);
-    drafts.clear(row.key);
+    void outbox.add(keyed.reading, row.key);
     if (aloud) sayReading(row.point.point.name, keyed.reading);
     return true;
   };
@@ -94,9 +93,8 @@ export function useSheetDesk(shown: Sheet) {
     if (target) place.go(target.key);
   };
   const setAside = (row: SheetRow, reason: NotTakenReason, note: string) => {
-    drafts.clear(row.key);
     say(row.key, null);
-    outbox.add(notTakenReading({ row, readBy: reader.readBy, note }, reason));
+    void outbox.add(notTakenReading({ row, readBy: reader.readBy, note }, reason), row.key);
   };
   const readAgain = (pointId: string) => {
     const last = Math.max(...rows.filter(({ point }) => point.id === pointId).map(({ round }) => round));
