@@ -23,6 +23,8 @@ const DemonstrationReading = z.union([
     unit: TypedUnit.default('mm'),
     tapeCount: z.number().int().default(0),
     levelFoundBy: LevelFoundBy.nullable().default(null),
+    /** How far below the waist, in the same unit. */
+    depth: z.string().nullable().default(null),
     note: z.string().default(''),
     /** Further rounds, in the same unit. */
     rounds: z.array(z.string()).default([]),

@@ -90,7 +90,7 @@ function readingsOf(
   if (typeof data === 'string') return readingsOf(pointId, plain(data), readBy, keyedAt);
   if ('notTaken' in data)
     return [NewReading.parse({ ...base, id: uuidv7(), round: 1, state: 'not-taken', reason: data.notTaken })];
-  const { unit, tapeCount, levelFoundBy, note } = data;
+  const { unit, tapeCount, levelFoundBy, depth, note } = data;
   return [data.typed, ...data.rounds].map((typed, index) =>
     NewReading.parse({
       ...base,
@@ -102,10 +102,11 @@ function readingsOf(
       unit,
       tapeCount,
       levelFoundBy,
+      depthTyped: depth,
     }),
   );
 }
 
 function plain(typed: string): Exclude<DemonstrationReading, string | { notTaken: unknown }> {
-  return { typed, unit: 'mm', tapeCount: 0, levelFoundBy: null, note: '', rounds: [] };
+  return { typed, unit: 'mm', tapeCount: 0, levelFoundBy: null, depth: null, note: '', rounds: [] };
 }

@@ -52,7 +52,7 @@ export function factsWith(
     ],
     measuredOn: '2026-11-20',
     place: 'Measuring table, Larkmoor House',
-    support: 'flat-tissue',
+    support: 'flat',
     tape: 'Fibreglass tape 3',
     ...more,
   };
@@ -134,6 +134,6 @@ export function soundSheet(sheet: Pick<SheetShown, 'kind'>, readBy: string) {
       ? reading('hem', '742', readBy, { tapeCount: 3 })
       : values[pointId] === undefined
         ? notTaken(pointId, 'not-applicable', readBy)
-        : reading(pointId, values[pointId], readBy),
+        : reading(pointId, values[pointId], readBy, pointId === 'hip' ? { depthTyped: '200' } : {}),
   );
 }

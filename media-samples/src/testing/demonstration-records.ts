@@ -6,6 +6,7 @@ import { findMeasuringPoint } from '@ellwand/shared/points/measuring-points';
 import { protocolFor } from '@ellwand/shared/protocols/standard-protocols';
 import { type LevelFoundBy, type NotTakenReason, type Reading } from '@ellwand/shared/readings/reading';
 import { wholeValue } from '@ellwand/shared/readings/whole-value';
+import { type supports } from '@ellwand/shared/records/sheet';
 import { type GarmentRecordInput } from '@ellwand/shared/records/garment';
 import { type Role } from '@ellwand/shared/records/roles';
 import { mm } from '@ellwand/shared/units/length';
@@ -17,10 +18,13 @@ export type ReadingEntry =
       typed: string;
       tapeCount?: number;
       levelFoundBy?: LevelFoundBy;
+      depth?: string;
       rounds?: string[];
       note?: string;
     }
   | { notTaken: NotTakenReason };
+
+type Support = (typeof supports)[number];
 
 export interface SheetEntry {
   read: string;
@@ -29,6 +33,7 @@ export interface SheetEntry {
   aloneBecause?: string;
   complete?: boolean;
   readings: Record<string, ReadingEntry>;
+  support: Support;
   answers?: { checkId: string; reason: string }[];
 }
 
@@ -74,7 +79,8 @@ function readingsOf(pointId: string, entry: ReadingEntry): Reading[] {
   if (typeof entry === 'object' && 'notTaken' in entry) {
     return [{ id: pointId, pointId, round: 1, state: 'not-taken', notTakenReason: entry.notTaken }];
   }
-  const { typed, tapeCount = 0, rounds = [] } = typeof entry === 'string' ? { typed: entry } : entry;
+  const said = typeof entry === 'string' ? { typed: entry } : entry;
+  const { typed, tapeCount = 0, rounds = [], levelFoundBy, depth, note } = said;
   const how = findMeasuringPoint(pointId)?.how ?? 'curve';
   return [typed, ...rounds].map((keyed, index) => {
     const read = mm(keyed);
@@ -86,6 +92,9 @@ function readingsOf(pointId: string, entry: ReadingEntry): Reading[] {
       typed: keyed,
       unit: 'mm',
       length: wholeValue({ read, how, tapeCount, tapeLength: TAPE }),
+      ...(levelFoundBy ? { levelFoundBy } : {}),
+      ...(depth ? { depthBelowWaist: mm(depth) } : {}),
+      ...(note && index === 0 ? { note } : {}),
       ...(tapeCount > 0 ? { tapeLengths: { count: tapeCount, tape: TAPE, rest: read } } : {}),
     };
   });
@@ -101,6 +110,8 @@ export function checkSheetOf(garment: GarmentEntry, part: PartEntry): CheckSheet
     kind: part.kind,
     protocol: protocolFor(part.kind),
     readings: allReadings(part),
+    support: part.sheet.support,
+    tapeLength: TAPE,
     otherPartsOfGarment: others.map((other) => ({ kind: other.kind, readings: allReadings(other) })),
   };
 }

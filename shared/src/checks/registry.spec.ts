@@ -5,11 +5,13 @@ import { kindIds } from '../points/kinds.js';
 import { measuringPoints } from '../points/measuring-points.js';
 import { protocolFor } from '../protocols/standard-protocols.js';
 import { notTakenReasonIds, type Reading } from '../readings/reading.js';
-import { inTapeLengths, read, rounds } from '../testing/sample-readings.js';
-import { soundReadings } from '../testing/sound-sheets.js';
+import { wornSides } from '../readings/worn-side.js';
+import { inTapeLengths, read } from '../testing/sample-readings.js';
+import { supports } from '../records/sheet.js';
+import { soundSheet } from '../testing/sound-sheets.js';
 import { sheetOf } from '../testing/test-check.js';
 import { lengthUnits } from '../units/format-length.js';
-import { lengthOf, mm } from '../units/length.js';
+import { add, type Length, lengthOf, mm } from '../units/length.js';
 import { severities, severityLabels } from './finding.js';
 import { checks, runChecks } from './registry.js';
 
@@ -61,7 +63,8 @@ describe('the registry of checks', () => {
 
 describe('a sound sheet', () => {
   it.each(kindIds)('of a %s raises nothing', (kind) => {
-    expect(runChecks(sheetOf({ kind, readings: soundReadings[kind] }))).toEqual([]);
+    const facts = { support: 'flat', tapeLength: mm(5000) } as const;
+    expect(runChecks(sheetOf({ kind, readings: soundSheet(kind), facts }))).toEqual([]);
   });
 
   it('of any kind, varied by a twentieth and read twice, has no stop and at most three questions', () => {
@@ -71,11 +74,15 @@ describe('a sound sheet', () => {
     });
     fc.assert(
       fc.property(fc.constantFrom(...kindIds), variation, fc.nat(3), (kind, factors, apart) => {
-        const readings = Object.entries(soundReadings[kind]).flatMap(([pointId, valueMm], index) => {
-          const varied = Math.round(valueMm * (1 + (factors[index] ?? 0)));
-          return rounds(pointId, varied, varied + apart);
-        });
-        const severityOfAll = runChecks(sheetOf({ kind, readings })).map(({ severity }) => severity);
+        let at = 0;
+        const first = soundSheet(kind, (valueMm) => Math.round(valueMm * (1 + (factors[at++] ?? 0))));
+        const second = first.map((reading) => ({
+          ...reading,
+          ...{ id: `${reading.id} again`, round: 2, length: add(reading.length, mm(apart)) },
+        }));
+        const facts = { support: 'flat-tissue', tapeLength: mm(5000) } as const;
+        const sheet = sheetOf({ kind, readings: [...first, ...second], facts });
+        const severityOfAll = runChecks(sheet).map(({ severity }) => severity);
         expect(severityOfAll.filter((severity) => severity === 'stop')).toEqual([]);
         expect(severityOfAll.filter((severity) => severity === 'question').length).toBeLessThanOrEqual(3);
       }),
@@ -83,10 +90,11 @@ describe('a sound sheet', () => {
   });
 
   it('with a hem in tape lengths raises nothing', () => {
-    const readings = Object.entries(soundReadings.skirt).map(([pointId, valueMm]) =>
-      pointId === 'hem' ? inTapeLengths('hem', 3, 742) : read(pointId, valueMm),
+    const readings = soundSheet('skirt').map((reading) =>
+      reading.pointId === 'hem' ? inTapeLengths('hem', 3, 742) : reading,
     );
-    expect(runChecks(sheetOf({ kind: 'skirt', readings }))).toEqual([]);
+    const facts = { support: 'flat', tapeLength: mm(1500) } as const;
+    expect(runChecks(sheetOf({ kind: 'skirt', readings, facts }))).toEqual([]);
   });
 });
 
@@ -97,16 +105,27 @@ describe('any sheet at all', () => {
     // An id that itself looks like a figure left out of a sentence would be taken for one below.
     fc.string().filter((text) => !/[{}]|undefined|NaN/.test(text)),
   );
-  const length = fc.oneof(fc.maxSafeInteger(), fc.integer({ min: -10, max: 40_000_000 })).map(lengthOf);
-  const facts = { id: fc.uuid(), pointId, round: fc.integer(), stands: fc.boolean() };
-  const taken = fc.record({
+  // What a fault elsewhere could hand in: no length at all.
+  const broken = fc.constantFrom(...([Number.NaN, Infinity, -Infinity, 0.5] as Length[]));
+  const sound = fc.oneof(fc.maxSafeInteger(), fc.integer({ min: -10, max: 40_000_000 })).map(lengthOf);
+  const length = fc.oneof({ weight: 9, arbitrary: sound }, { weight: 1, arbitrary: broken });
+  const facts = { id: fc.uuid(), pointId, round: fc.oneof(fc.integer(), fc.double()), stands: fc.boolean() };
+  const takenFacts = {
     ...facts,
     state: fc.constant('taken' as const),
     length,
     typed: fc.string(),
     unit: fc.constantFrom(...lengthUnits),
-    tapeLengths: fc.record({ count: fc.integer(), tape: fc.constant(mm(1500)), rest: length }),
+    tapeLengths: fc.record({ count: fc.oneof(fc.integer(), fc.double()), tape: length, rest: length }),
     method: fc.constantFrom('round' as const, 'flat-doubled' as const),
+    gap: length,
+    depthBelowWaist: length,
+    worn: fc.constantFrom(...wornSides),
+    levelFoundBy: fc.constantFrom('band' as const, 'stated' as const),
+    note: fc.string(),
+  };
+  const taken = fc.record(takenFacts, {
+    requiredKeys: ['id', 'pointId', 'round', 'state', 'length'],
   });
   const notTaken = fc.record(
     {
@@ -118,20 +137,54 @@ describe('any sheet at all', () => {
   );
   const readings = fc.array<Reading>(fc.oneof(taken, notTaken), { maxLength: 40 });
   const kind = fc.constantFrom(...kindIds);
+  const peers = fc.array(fc.record({ pointId, valuesMm: fc.array(fc.double(), { maxLength: 20 }) }));
+  const besides = fc.record(
+    { support: fc.constantFrom(...supports), tapeLength: length, peers },
+    { requiredKeys: [] },
+  );
+
+  it('says the same whatever the order in which its readings came', () => {
+    const key = fc.infiniteStream(fc.nat());
+    const ordered = fc.array(taken, { maxLength: 20 }).map((list) =>
+      // One reading stands for a point, a round and a side, as the house keeps them.
+      [...new Map(list.map((one, index) => [index, { ...one, round: index + 1 }])).values()],
+    );
+    fc.assert(
+      fc.property(kind, ordered, key, (own, list, keys) => {
+        const shuffled = list
+          .map((one) => ({ one, key: keys.next().value ?? 0 }))
+          .sort((first, second) => first.key - second.key)
+          .map(({ one }) => one);
+        const keysOf = (readings: readonly Reading[]) =>
+          new Set(
+            runChecks({ kind: own, protocol: protocolFor(own), readings }).map((finding) => finding.key),
+          );
+        expect(keysOf(shuffled)).toEqual(keysOf(list));
+      }),
+    );
+  });
 
   it('is checked without a throw, into whole sentences with keys of their own', () => {
     fc.assert(
-      fc.property(kind, readings, kind, readings, (own, ownReadings, other, otherReadings) => {
-        const findings = runChecks({
-          kind: own,
-          protocol: protocolFor(own),
-          readings: ownReadings,
-          otherPartsOfGarment: [{ kind: other, readings: otherReadings }],
-        });
-        for (const { sentence } of findings) expect(sentence).toMatch(/[.?]$/);
-        for (const { sentence } of findings) expect(sentence).not.toMatch(/\{\w+\}|undefined|NaN/);
-        expect(new Set(findings.map(({ key }) => key)).size).toBe(findings.length);
-      }),
+      fc.property(
+        kind,
+        readings,
+        kind,
+        readings,
+        besides,
+        (own, ownReadings, other, otherReadings, facts) => {
+          const findings = runChecks({
+            kind: own,
+            protocol: protocolFor(own),
+            readings: ownReadings,
+            otherPartsOfGarment: [{ kind: other, readings: otherReadings }],
+            ...facts,
+          });
+          for (const { sentence } of findings) expect(sentence).toMatch(/[.?]$/);
+          for (const { sentence } of findings) expect(sentence).not.toMatch(/\{\w+\}|undefined|NaN/);
+          expect(new Set(findings.map(({ key }) => key)).size).toBe(findings.length);
+        },
+      ),
       { numRuns: 300 },
     );
   });

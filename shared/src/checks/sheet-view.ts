@@ -58,24 +58,41 @@ export interface SheetView extends Pick<CheckSheet, 'kind' | 'protocol' | 'suppo
 /** Nothing in dress is longer than 100 m. */
 const LONGEST = mm(100_000);
 
-function isPossible({ length }: TakenReading): boolean {
+function canBe(length: Length): boolean {
   return Number.isSafeInteger(length) && length >= 0 && length <= LONGEST;
+}
+
+function isPossible({ length }: TakenReading): boolean {
+  return canBe(length);
+}
+
+/** A gap, depth or tape that is no length of dress is left out: no check reckons with it. */
+function withoutBroken({ gap, depthBelowWaist, tapeLengths, ...reading }: TakenReading): TakenReading {
+  const areSound = tapeLengths && [tapeLengths.tape, tapeLengths.rest].every(canBe);
+  return {
+    ...reading,
+    ...(gap !== undefined && canBe(gap) ? { gap } : {}),
+    ...(depthBelowWaist !== undefined && canBe(depthBelowWaist) ? { depthBelowWaist } : {}),
+    ...(areSound ? { tapeLengths } : {}),
+  };
 }
 
 function takenOf(readings: readonly Reading[]): readonly TakenReading[] {
   return readings
     .filter(stands)
     .filter(isTaken)
+    .map(withoutBroken)
     .sort((first, second) => first.round - second.round);
 }
 
 export function viewSheet(sheet: CheckSheet): SheetView {
-  const { kind, protocol, readings, otherPartsOfGarment = [], peers = [], ...facts } = sheet;
+  const { kind, protocol, readings, otherPartsOfGarment = [], peers = [], support, tapeLength } = sheet;
   const { ownPoints } = protocol;
   const taken = takenOf(readings);
   const possible = taken.filter(isPossible);
   return {
-    ...facts,
+    ...(support ? { support } : {}),
+    ...(tapeLength !== undefined && canBe(tapeLength) ? { tapeLength } : {}),
     kind,
     protocol,
     peers,

@@ -17,6 +17,8 @@ interface QuietCase {
   readonly kind?: GarmentKind;
   readonly protocol?: Protocol;
   readonly others?: readonly OtherPart[];
+  /** What the sheet says beside its readings. */
+  readonly facts?: Pick<CheckSheet, 'support' | 'tapeLength' | 'peers'>;
 }
 
 interface RaisesCase extends QuietCase {
@@ -31,8 +33,9 @@ export function sheetOf({
   kind = 'bodice',
   protocol,
   others,
+  facts,
 }: Omit<QuietCase, 'name'>): CheckSheet {
-  const sheet = { kind, protocol: protocol ?? protocolFor(kind), readings: readingsOf(readings) };
+  const sheet = { kind, protocol: protocol ?? protocolFor(kind), readings: readingsOf(readings), ...facts };
   return others ? { ...sheet, otherPartsOfGarment: others } : sheet;
 }
 
