@@ -55,6 +55,19 @@ export const routes: RouteObject[] = [
                 lazy: async () => ({ Component: (await import('./routes/review-page.js')).ReviewPage }),
               },
               {
+                path: '/protocols',
+                lazy: async () => ({
+                  Component: (await import('../features/protocols/components/protocol-list-page.js'))
+                    .ProtocolListPage,
+                }),
+              },
+              {
+                path: '/protocols/:kind',
+                lazy: async () => ({
+                  Component: (await import('../features/protocols/components/protocol-page.js')).ProtocolPage,
+                }),
+              },
+              {
                 path: '/people',
                 lazy: async () => ({
                   Component: (await import('../features/people/components/people-page.js')).PeoplePage,

@@ -42,6 +42,9 @@ export function Shell() {
                 Review
               </NavLink>
             )}
+            <NavLink to={paths.protocols()} className={linkLook}>
+              Protocols
+            </NavLink>
             {manages && (
               <NavLink to={paths.people()} className={linkLook}>
                 People

@@ -9,6 +9,18 @@ export const paths = {
   reviewQueue: () => '/review',
   review: (garmentId: string) => `/garments/${garmentId}/review`,
   sheet: (id: string) => `/sheets/${id}`,
+  protocols: () => '/protocols',
+  /** `version` shows an earlier one. */
+  protocol: (
+    kind: string,
+    { wornTogether = false, version }: { wornTogether?: boolean; version?: number } = {},
+  ) => {
+    const search = new URLSearchParams({
+      ...(wornTogether ? { wornTogether: 'true' } : {}),
+      ...(version === undefined ? {} : { version: String(version) }),
+    }).toString();
+    return `/protocols/${kind}${search && `?${search}`}`;
+  },
   people: () => '/people',
   audit: () => '/audit',
 } as const;

@@ -6,7 +6,10 @@ interface Choosing {
   readonly onChoose?: (pointId: string) => void;
 }
 
-/** Paints a scene. Its colours are classes, so that light and dark are the style sheet's; the table is its text. */
+/**
+ * Paints a scene. Its colours are classes, so that light and dark are the style sheet's; the table is its text. A
+ * scene without a title stands beside its name and says nothing of its own.
+ */
 export function SceneDrawing({
   scene,
   className = '',
@@ -21,11 +24,10 @@ export function SceneDrawing({
   return (
     <svg
       viewBox={`0 0 ${scene.width} ${scene.height}`}
-      role="img"
-      aria-label={scene.title}
+      {...(scene.title === '' ? { 'aria-hidden': true } : { role: 'img', 'aria-label': scene.title })}
       className={`drawing ${className}`}
     >
-      <title>{scene.title}</title>
+      {scene.title !== '' && <title>{scene.title}</title>}
       <defs>
         {scene.clips.map(({ id, paths }) => (
           <clipPath key={id} id={id}>

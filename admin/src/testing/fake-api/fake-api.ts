@@ -3,8 +3,15 @@ import type { House } from './house.js';
 import { imageRoutes } from './image-routes.js';
 import { measuringRoutes } from './measuring-routes.js';
 import { peopleRoutes } from './people-routes.js';
+import { protocolRoutes } from './protocol-routes.js';
 import { makeHandler } from './router.js';
 
 /** A stand-in for the API over a house in memory: the same contract, checked with the same schemas. */
 export const fakeApi = (house: House) =>
-  makeHandler(house, { ...peopleRoutes, ...garmentRoutes, ...imageRoutes, ...measuringRoutes });
+  makeHandler(house, {
+    ...peopleRoutes,
+    ...garmentRoutes,
+    ...imageRoutes,
+    ...measuringRoutes,
+    ...protocolRoutes,
+  });

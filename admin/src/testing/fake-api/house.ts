@@ -1,10 +1,12 @@
 import type { Garment } from '@ellwand/shared/records/garment';
+import type { ProtocolVersion } from '@ellwand/shared/records/protocol';
 import type { Change } from '@ellwand/shared/records/publishing';
 import type { Invitation, Person } from '@ellwand/shared/records/session';
 import type { FindingView, Sheet } from '@ellwand/shared/records/sheet';
 import type { z } from 'zod';
 import { sampleGarments } from './garments.js';
 import { idOf, invitation, staff } from './people.js';
+import { sampleProtocols } from './protocols.js';
 import { sampleSheets } from './sheets.js';
 
 type PersonShown = z.infer<typeof Person>;
@@ -15,6 +17,8 @@ export class House {
   readonly sheets: Sheet[];
   readonly people: PersonShown[] = Object.values(staff).map((one) => ({ ...one }));
   readonly invitations: z.infer<typeof Invitation>[] = [{ ...invitation }];
+  /** Every version of every protocol. */
+  readonly protocols: ProtocolVersion[] = sampleProtocols();
   readonly answers = new Map<string, NonNullable<FindingView['answer']>>();
   readonly changes: Change[] = [
     {

@@ -1,6 +1,5 @@
 import { type Anchors } from '../geometry/path-language.js';
 import { type GarmentKind } from '../../points/kinds.js';
-import { type PointId } from '../../points/measuring-points.js';
 import { type Point } from '../geometry/point.js';
 
 /** How the garment lies while these lines are read. */
@@ -59,7 +58,7 @@ export interface View {
 export type MeasuringWay = 'straight' | 'curve' | 'round' | 'doubled';
 
 export interface MeasuringLine {
-  readonly pointId: PointId;
+  readonly pointId: string;
   readonly view: ViewName;
   readonly way: MeasuringWay;
   /** Paths over the view's anchors; between two of them the tape steps over to the next piece. */
