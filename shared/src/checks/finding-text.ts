@@ -21,6 +21,8 @@ export interface Listed {
 /** What is neither a point nor a length: a count, digits as they were keyed. */
 export interface Words {
   readonly text: string;
+  /** Said, but not what the finding is about: an answer holds when it changes. */
+  readonly inPassing?: boolean;
 }
 
 /** What goes into a sentence: a point's value, the name of a point, a length that belongs to neither, or words. */
@@ -71,7 +73,7 @@ interface Part {
 
 function partsOf(name: string, figure: Figure): readonly Part[] {
   if (typeof figure === 'number') return [{ name, length: figure }];
-  if ('text' in figure) return [{ name, text: figure.text }];
+  if ('text' in figure) return figure.inPassing ? [] : [{ name, text: figure.text }];
   if ('listed' in figure) return figure.listed.flatMap((one, index) => partsOf(`${name}${index + 1}`, one));
   const pointId = 'mentioned' in figure ? figure.mentioned : figure.pointId;
   const point = figure.worn ? `${pointId}@${figure.worn}` : pointId;

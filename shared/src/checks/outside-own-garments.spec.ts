@@ -1,4 +1,6 @@
-import { testCheck } from '../testing/test-check.js';
+import { expect, it } from 'vitest';
+import { sheetOf, testCheck } from '../testing/test-check.js';
+import { viewSheet } from './sheet-view.js';
 import { outsideOwnGarments } from './outside-own-garments.js';
 
 const waists = [610, 612, 611, 609, 613, 640, 580, 600];
@@ -34,4 +36,12 @@ testCheck(outsideOwnGarments, {
       points: ['waist'],
     },
   ],
+});
+
+it('holds to its answer when the house measures another garment', () => {
+  const keyAmong = (...valuesMm: number[]) =>
+    outsideOwnGarments.run(viewSheet(sheetOf({ readings: { waist: 700 }, facts: peers(...valuesMm) })))[0]
+      ?.key;
+  expect(keyAmong(...waists)).toBe('outside-own-garments:far:waist:700');
+  expect(keyAmong(...waists, 618)).toBe('outside-own-garments:far:waist:700');
 });

@@ -18,6 +18,7 @@ import { toStored } from '../readings/stored-reading';
 import { readingsOf } from '../sheets/sheet-view';
 import { SheetRow } from '../sheets/sheet.entity';
 import { FindingAnswerRow } from './finding-answer.entity';
+import { ownGarments } from './own-garments';
 
 /** Raised for a point that is neither read nor given its reason: nothing else settles it. */
 const missingPoint = 'required-missing-without-reason';
@@ -118,6 +119,7 @@ export class FindingsService {
       })),
       support: Sheet.shape.facts.shape.support.parse(sheet.support),
       tapeLength: fromMmString(sheet.tapeLengthMm),
+      peers: await ownGarments(tx, part),
     });
     const answers = await this.answers(tx, sheetId);
     return {
