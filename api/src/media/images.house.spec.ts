@@ -6,6 +6,7 @@ import { Publisher } from '../../test/catalogue/published-documents';
 import { type House, openHouse } from '../../test/harness/house';
 import { PictureRoom } from '../../test/pictures/picture-room';
 import * as pictures from '../../test/pictures/test-pictures';
+import { v7 as uuidv7 } from 'uuid';
 import { GarmentRow } from '../garments/garment.entity';
 import { ImageRow } from './image.entity';
 import { ImageIntake } from './intake/image-intake';
@@ -46,6 +47,20 @@ describe('pictures of a garment', () => {
     const row = await room.rows.findOneByOrFail(ImageRow, { id: sent.body.id as string });
     expect(await readFile(join(house.environment.dataFolder, 'pictures', row.originalKey))).toEqual(jpeg);
     expect(await room.filesUnder('incoming')).toEqual([]);
+  });
+
+  it('is one picture, however often a tablet sends it', async () => {
+    const jpeg = await pictures.honestJpeg();
+    const id = uuidv7();
+    const first = await room.send(jpeg, 'hem.jpg').field('id', id);
+    expect(first.body).toMatchObject({ id, fileName: 'hem.jpg' });
+    const again = await room.send(jpeg, 'hem.jpg').field('id', id);
+    expect([again.status, again.body.id]).toEqual([201, id]);
+    const both = await Promise.all(
+      [uuidv7()].flatMap((other) => [1, 2].map(() => room.send(jpeg, 'cuff.jpg').field('id', other))),
+    );
+    expect(both.map(({ status }) => status)).toEqual([201, 201]);
+    expect((await room.recorder.get(room.images)).body.items).toHaveLength(2);
   });
 
   it('refuses pictures while the record is in review, and keeps no file of them', async () => {

@@ -5,6 +5,8 @@ import { z } from 'zod';
 
 /** The texts that come beside the file: multipart fields, so an empty one means that nothing was said. */
 export const ImageFields = z.strictObject({
+  /** UUIDv7 made where the picture was taken: sent twice, it is one picture. */
+  id: Uuid.optional(),
   view: ImageView,
   alt: prose(1000).default(''),
   caption: prose(1000).default(''),

@@ -8,7 +8,7 @@ import type { Actor } from '../../common/actor';
 import { Clock } from '../../common/clock';
 import { Disk } from '../../common/disk';
 import { Refusal } from '../../common/refusal';
-import { type Tx, Work } from '../../common/work';
+import { isDuplicate, type Tx, Work } from '../../common/work';
 import { GarmentEdits } from '../../garments/garment-edits';
 import type { ImageFields } from '../dto/image.dto';
 import { ImageEngine, type PictureSize } from '../engine/image-engine';
@@ -57,7 +57,7 @@ export class ImageIntake {
   /**
    * Takes a file that lies anywhere on this machine; it stays where it is. In the caller's transaction where one
    * is handed in, else in its own.
-   * @throws Refusal 415, 422, 507, 409 `record.locked`
+   * @throws Refusal 415, 422, 507, 409 `record.locked`, 422 `image.id-used`
    */
   async acceptFile(
     actor: By,
@@ -85,14 +85,20 @@ export class ImageIntake {
   ): Promise<ImageRow> {
     await this.refuseWhenFull();
     refuseUnknownPoint(fields.pointId);
-    await this.garments.refuseUneditable(tx ?? this.work.reader, garmentId);
-    const accepted = await this.keep(file);
+    const reader = tx ?? this.work.reader;
+    const again = await takenBefore(reader, garmentId, fields);
+    if (again) return again;
+    await this.garments.refuseUneditable(reader, garmentId);
+    const accepted = await this.keep(file, fields.id ?? uuidv7());
     const note = (within: Tx) => this.note(within, actor, garmentId, file, fields, accepted);
     try {
       const row = tx ? await note(tx) : await this.work.run(note);
       this.forms.wake();
       return row;
     } catch (fault) {
+      // The same picture came twice at once: the files are the other's by now, and so is the answer.
+      const other = isDuplicate(fault) ? await takenBefore(this.work.reader, garmentId, fields) : null;
+      if (other) return other;
       await this.forget(accepted);
       throw fault;
     }
@@ -109,9 +115,8 @@ export class ImageIntake {
   }
 
   /** Decodes the picture whole, once, and stores the original and the master that the forms are made of. */
-  private async keep({ path }: ReceivedFile): Promise<Accepted> {
+  private async keep({ path }: ReceivedFile, id: string): Promise<Accepted> {
     const type = await sniffPictureFile(path);
-    const id = uuidv7();
     const master = await this.store.incoming(`${id}.master.tif`);
     const scratch = await this.store.incoming(`${id}.scratch`);
     try {
@@ -181,6 +186,18 @@ export class ImageIntake {
     });
     return row;
   }
+}
+
+/**
+ * The picture that was taken in under this id before, if any.
+ * @throws Refusal 422 where it is another garment's
+ */
+async function takenBefore(reader: Tx, garmentId: string, { id }: ImageFields): Promise<ImageRow | null> {
+  if (id === undefined) return null;
+  const row = await reader.findOneBy(ImageRow, { id });
+  if (row && row.garmentId !== garmentId)
+    throw new Refusal(422, 'image.id-used', 'Another picture was sent under this id before.');
+  return row;
 }
 
 /** @throws Refusal 400 where a picture is said to lie at a measuring point that does not exist */
