@@ -1,12 +1,14 @@
 import tailwindcss from '@tailwindcss/vite';
 import react from '@vitejs/plugin-react';
 import { defineConfig } from 'vite';
+import { VitePWA } from 'vite-plugin-pwa';
+import { offlineShell } from './offline-shell.js';
 import { sharedSource } from './shared-source.js';
 
 export default defineConfig({
   // The service worker's scope and every built address follow from this one line.
   base: '/workroom/',
-  plugins: [react(), tailwindcss()],
+  plugins: [react(), tailwindcss(), VitePWA(offlineShell)],
   resolve: { alias: sharedSource },
   build: {
     outDir: 'dist',
