@@ -3,6 +3,7 @@ import './lib/plain-schemas.js';
 import { StrictMode } from 'react';
 import { createRoot } from 'react-dom/client';
 import { RouterProvider } from 'react-router-dom';
+import { keepShell } from './app/keep-shell.js';
 import { Providers } from './app/providers.js';
 import { makeRouter } from './app/router.js';
 import { followDeviceTheme } from './app/theme.js';
@@ -15,6 +16,7 @@ const root = document.getElementById('root');
 if (!root) throw new Error('expected #root in the page');
 // Opened before the first screen, so that what was typed yesterday is there when it appears.
 const offline = await openOffline();
+if (import.meta.env.PROD) keepShell();
 createRoot(root).render(
   <StrictMode>
     <Providers queries={makeQueryClient(offline.reference)} offline={offline}>

@@ -19,7 +19,8 @@ export function securityHeaders(application: INestApplication) {
         defaultSrc: ["'self'"],
         scriptSrc: [() => contentSecurity.scriptSources],
         styleSrc: ["'self'"],
-        imgSrc: ["'self'", 'data:'],
+        // blob: is for pictures that a tablet keeps until they are sent.
+        imgSrc: ["'self'", 'data:', 'blob:'],
         objectSrc: ["'none'"],
         baseUri: ["'none'"],
         frameAncestors: ["'none'"],

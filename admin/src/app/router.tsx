@@ -68,6 +68,12 @@ export const routes: RouteObject[] = [
                 }),
               },
               {
+                path: '/tray',
+                lazy: async () => ({
+                  Component: (await import('../features/tray/components/tray-page.js')).TrayPage,
+                }),
+              },
+              {
                 path: '/people',
                 lazy: async () => ({
                   Component: (await import('../features/people/components/people-page.js')).PeoplePage,

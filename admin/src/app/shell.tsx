@@ -1,6 +1,8 @@
 import { useQueryClient } from '@tanstack/react-query';
 import { NavLink, Outlet, useNavigate } from 'react-router-dom';
 import { Button } from '../components/ui/button.js';
+import { NewerNotice } from './newer-notice.js';
+import { TrayLink } from './tray-link.js';
 import { paths } from '../config/paths.js';
 import { sessionQuery, signOut } from '../features/sign-in/api/session.js';
 import { referenceOf } from '../lib/query-client.js';
@@ -24,12 +26,14 @@ export function Shell() {
       >
         Skip to the content
       </a>
+      <NewerNotice />
       <header className="border-b border-hair bg-sheet">
         <div className="mx-auto flex max-w-page flex-wrap items-center gap-x-8 px-4 sm:px-6">
           <NavLink to={paths.garments()} className="title flex min-h-12 items-center text-title-25">
             Ellwand Workroom
           </NavLink>
           <div className="ml-auto flex items-center gap-3 text-table sm:order-last">
+            <TrayLink />
             <span className="hidden text-ink-2 sm:inline">{user.name}</span>
             <SignOut />
           </div>

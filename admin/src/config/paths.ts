@@ -22,6 +22,7 @@ export const paths = {
     return `/protocols/${kind}${search && `?${search}`}`;
   },
   people: () => '/people',
+  tray: () => '/tray',
   audit: () => '/audit',
 } as const;
 
