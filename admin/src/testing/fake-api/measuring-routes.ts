@@ -120,8 +120,7 @@ export function findingsOf(house: House, sheet: Sheet): SheetFindings {
   const protocol = toProtocol(sheet.protocol);
   const found = runChecks({ kind: sheet.kind, protocol, readings: sheet.readings.map(toReading) });
   return {
-    findings: found.map(({ checkId, severity, sentence, pointIds }) => {
-      const key = `${checkId}:${pointIds.join(',')}`;
+    findings: found.map(({ key, checkId, severity, sentence, pointIds }) => {
       return {
         key,
         checkId,

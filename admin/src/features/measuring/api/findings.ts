@@ -1,13 +1,14 @@
-import { type FindingAnswer, SheetFindings } from '@ellwand/shared/records/sheet';
+import { SheetFindings } from '@ellwand/shared/records/sheet';
 import { queryOptions } from '@tanstack/react-query';
-import type { z } from 'zod';
 import { api } from '../../../lib/api-client.js';
+import { referenceOf } from '../../../lib/query-client.js';
+import { referenceKeys } from '../../../offline/reference.js';
 
 export const findingsQuery = (sheetId: string) =>
   queryOptions({
     queryKey: ['findings', sheetId],
-    queryFn: ({ signal }) => api.get(`/workroom/sheets/${sheetId}/findings`, SheetFindings, { signal }),
+    queryFn: ({ signal, client }) =>
+      referenceOf(client).through(referenceKeys.findings(sheetId), SheetFindings, () =>
+        api.get(`/workroom/sheets/${sheetId}/findings`, SheetFindings, { signal }),
+      ),
   });
-
-export const answerFinding = (sheetId: string, body: z.infer<typeof FindingAnswer>) =>
-  api.post(`/workroom/sheets/${sheetId}/findings/answers`, SheetFindings, { body });

@@ -17,12 +17,11 @@ interface BoxListProps {
 
 /** One list of what is still to take, to read again, to photograph, to answer, while the garment is out. */
 export function BoxList({ desk, onPoint, onFindings }: BoxListProps) {
-  const findings = useQuery(findingsQuery(desk.sheet.id));
   const images = useQuery(imagesQuery(desk.sheet.garmentId));
   const tasks = boxTasks({
     rows: desk.rows,
     entries: desk.view.entries,
-    findings: findings.data?.findings ?? [],
+    findings: desk.findings.data?.findings ?? [],
     views: images.data?.map(({ view }) => view) ?? null,
   });
   const musts = tasks.filter(({ must }) => must);
@@ -43,10 +42,13 @@ export function BoxList({ desk, onPoint, onFindings }: BoxListProps) {
         onPoint={onPoint}
         onFindings={onFindings}
       />
-      <Closing desk={desk} unsent={desk.view.entries.length} />
+      <Closing desk={desk} unsent={unsentOf(desk.view)} />
     </div>
   );
 }
+
+const unsentOf = ({ entries, notes, pictures }: SheetDesk['view']): number =>
+  entries.length + notes.length + pictures.length;
 
 interface TaskListProps {
   readonly title: string;
@@ -103,7 +105,7 @@ function Closing({ desk, unsent }: { readonly desk: SheetDesk; readonly unsent: 
   return (
     <div className="space-y-3 border-t border-hair pt-4">
       {unsent > 0 && (
-        <p className="text-table text-ink-2">The sheet can be completed when all readings are sent.</p>
+        <p className="text-table text-ink-2">The sheet can be completed when all that was keyed is sent.</p>
       )}
       <Button
         tone={desk.locked ? 'plain' : 'action'}

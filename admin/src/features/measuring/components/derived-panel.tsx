@@ -1,29 +1,28 @@
 import { type DerivedView } from '@ellwand/shared/records/sheet';
 import { formatBoth, formatLength } from '@ellwand/shared/units/format-length';
 import { mm } from '@ellwand/shared/units/length';
-import { useQuery } from '@tanstack/react-query';
 import { Empty, Failed, Waiting } from '../../../components/ui/states.js';
-import { findingsQuery } from '../api/findings.js';
+import type { SheetDesk } from '../model/use-sheet-desk.js';
 
 /** What follows from the readings, with its formula and the figures that were put in. Never typed. */
 export function DerivedPanel({
-  sheetId,
+  desk,
   onPoint,
 }: {
-  readonly sheetId: string;
+  readonly desk: SheetDesk;
   readonly onPoint: (pointId: string) => void;
 }) {
-  const findings = useQuery(findingsQuery(sheetId));
+  const { findings } = desk;
   if (findings.isPending)
     return (
       <div className="p-4">
         <Waiting label="Working it out" rows={3} />
       </div>
     );
-  if (findings.isError)
+  if (!findings.data)
     return (
       <div className="p-4">
-        <Failed error={findings.error} onRetry={() => void findings.refetch()} />
+        <Failed error={findings.error} onRetry={findings.refetch} />
       </div>
     );
   const { derived } = findings.data;

@@ -6,6 +6,7 @@ import { isProblem } from '../../../lib/problem-error.js';
 import { saveFacts } from '../api/save-facts.js';
 import { sheetQuery } from '../api/sheet.js';
 import { FactsForm } from './facts-form.js';
+import { PrepareButton } from './prepare-button.js';
 
 const typedFacts = ({ people, ...facts }: Sheet['facts']): SheetFactsInput => ({
   ...facts,
@@ -17,7 +18,8 @@ export function FactsPanel({ sheet }: { readonly sheet: Sheet }) {
   const queries = useQueryClient();
   if (sheet.state === 'complete') return <FactsShown sheet={sheet} />;
   return (
-    <div className="p-4">
+    <div className="space-y-6 p-4">
+      <PrepareButton sheetId={sheet.id} />
       <FactsForm
         facts={typedFacts(sheet.facts)}
         verb="Save the facts"

@@ -1,11 +1,9 @@
 import type { FindingView } from '@ellwand/shared/records/sheet';
-import { useMutation, useQuery, useQueryClient } from '@tanstack/react-query';
 import { useState } from 'react';
 import { Button } from '../../../components/ui/button.js';
 import { FieldError } from '../../../components/ui/field.js';
-import { Empty, Failed, Refused, Waiting } from '../../../components/ui/states.js';
+import { Empty, Failed, Waiting } from '../../../components/ui/states.js';
 import { momentText } from '../../../lib/moments.js';
-import { answerFinding, findingsQuery } from '../api/findings.js';
 import type { SheetDesk } from '../model/use-sheet-desk.js';
 
 const severityWords = { stop: 'Stop', question: 'Question', note: 'Note' } as const;
@@ -24,17 +22,17 @@ export function FindingsPanel({
   readonly desk: SheetDesk;
   readonly onPoint: (pointId: string) => void;
 }) {
-  const findings = useQuery(findingsQuery(desk.sheet.id));
+  const { findings } = desk;
   if (findings.isPending)
     return (
       <div className="p-4">
         <Waiting label="Checking the sheet" rows={3} />
       </div>
     );
-  if (findings.isError)
+  if (!findings.data)
     return (
       <div className="p-4">
-        <Failed error={findings.error} onRetry={() => void findings.refetch()} />
+        <Failed error={findings.error} onRetry={findings.refetch} />
       </div>
     );
   const sorted = findings.data.findings.toSorted(
@@ -43,6 +41,11 @@ export function FindingsPanel({
   return (
     <div className="p-4">
       <h2 className="title mb-3 text-title-25">Findings</h2>
+      {findings.local && (
+        <p className="mb-3 text-table text-ink-2">
+          Worked out on this tablet. What needs the other part or other garments is asked once all is sent.
+        </p>
+      )}
       {sorted.length === 0 ? (
         <Empty title="The checks have nothing to say">They run again with every reading that is kept.</Empty>
       ) : (
@@ -90,19 +93,15 @@ function FindingCard({ finding, desk, onPoint }: FindingCardProps) {
           ))}
         </div>
       )}
-      {answerable && <AnswerForm finding={finding} sheetId={desk.sheet.id} />}
+      {answerable && <AnswerForm finding={finding} desk={desk} />}
     </li>
   );
 }
 
-function AnswerForm({ finding, sheetId }: { readonly finding: FindingView; readonly sheetId: string }) {
-  const queries = useQueryClient();
+/** Kept on this tablet at once, and sent like a reading. */
+function AnswerForm({ finding, desk }: { readonly finding: FindingView; readonly desk: SheetDesk }) {
   const [reason, setReason] = useState('');
   const [tried, setTried] = useState(false);
-  const answer = useMutation({
-    mutationFn: () => answerFinding(sheetId, { key: finding.key, reason: reason.trim() }),
-    onSuccess: (next) => queries.setQueryData(findingsQuery(sheetId).queryKey, next),
-  });
   const id = `answer-${finding.key.replace(/\W/g, '-')}`;
   const missing = tried && reason.trim() === '';
   return (
@@ -112,7 +111,7 @@ function AnswerForm({ finding, sheetId }: { readonly finding: FindingView; reado
       onSubmit={(event) => {
         event.preventDefault();
         setTried(true);
-        if (reason.trim() !== '') answer.mutate();
+        if (reason.trim() !== '') desk.answer(finding.key, reason.trim());
       }}
     >
       <label htmlFor={id} className="text-table font-medium">
@@ -128,12 +127,11 @@ function AnswerForm({ finding, sheetId }: { readonly finding: FindingView; reado
           aria-describedby={missing ? `${id}-error` : undefined}
           className="box min-h-11 w-auto min-w-48 grow"
         />
-        <Button type="submit" className="min-h-11" disabled={answer.isPending}>
+        <Button type="submit" className="min-h-11">
           Keep the reason
         </Button>
       </div>
       {missing && <FieldError id={`${id}-error`}>Write the reason, or read the point again.</FieldError>}
-      <Refused error={answer.error} />
     </form>
   );
 }

@@ -1,11 +1,9 @@
 import { Tab, TabGroup, TabList, TabPanel, TabPanels } from '@headlessui/react';
 import type { Sheet } from '@ellwand/shared/records/sheet';
-import { useQuery } from '@tanstack/react-query';
 import { type ReactNode, useEffect, useRef } from 'react';
 import { useSearchParams } from 'react-router-dom';
 import { Button } from '../../../components/ui/button.js';
 import { Question } from '../../../components/ui/dialog.js';
-import { findingsQuery } from '../api/findings.js';
 import { stepWords } from '../model/sheet-points.js';
 import { useSheetDesk, type SheetDesk } from '../model/use-sheet-desk.js';
 import { BottomBar } from './bottom-bar.js';
@@ -64,7 +62,7 @@ export function SheetScreen({ sheet }: { readonly sheet: Sheet }) {
                   <FindingsPanel desk={desk} onPoint={chooseRow} />
                 </Panel>
                 <Panel>
-                  <DerivedPanel sheetId={sheet.id} onPoint={chooseRow} />
+                  <DerivedPanel desk={desk} onPoint={chooseRow} />
                 </Panel>
                 <Panel>
                   <BoxList desk={desk} onPoint={chooseRow} onFindings={() => show('findings')} />
@@ -89,10 +87,9 @@ const Panel = ({ children }: { readonly children: ReactNode }) => (
 );
 
 function SheetTabs({ desk }: { readonly desk: SheetDesk }) {
-  const findings = useQuery(findingsQuery(desk.sheet.id));
   const open =
-    findings.data?.findings.filter(({ severity, answer }) => severity !== 'note' && answer === null).length ??
-    0;
+    desk.findings.data?.findings.filter(({ severity, answer }) => severity !== 'note' && answer === null)
+      .length ?? 0;
   const labels = ['Readings', 'Findings', 'Worked out', 'Box list', 'Facts'];
   return (
     <TabList className="flex shrink-0 gap-1 overflow-x-auto border-b border-hair bg-sheet px-2">

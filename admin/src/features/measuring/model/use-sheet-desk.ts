@@ -14,6 +14,7 @@ import { sendStatus } from './send-status.js';
 import { sheetPoints } from './sheet-points.js';
 import { useDrafts, useOutbox, useOutboxView } from './use-outbox.js';
 import { useKeypad } from './use-keypad.js';
+import { useFindings } from './use-findings.js';
 import { useTurning } from './use-turning.js';
 
 export const sheetUnits = ['mm', 'cm', 'in'] as const;
@@ -39,6 +40,7 @@ export function useSheetDesk(shown: Sheet) {
   const [unit, setUnit] = useRemembered('sheet-unit', sheetUnits, 'mm');
   const [aloud, setAloud] = useReadAloud();
   const [mistakes, setMistakes] = useState<Readonly<Record<string, string>>>({});
+  const findings = useFindings(sheet);
   const reader = useReader(sheet);
   const place = usePlace(sheet.id, rows);
   const keypad = useKeypad();
@@ -102,6 +104,7 @@ export function useSheetDesk(shown: Sheet) {
     place.go(`${pointId}:${last + 1}`);
   };
 
+  const answer = (key: string, reason: string) => void outbox.say({ about: 'answer', key, reason });
   const received =
     sheet.readings
       .map(({ receivedAt }) => receivedAt)
@@ -129,6 +132,8 @@ export function useSheetDesk(shown: Sheet) {
     step,
     setAside,
     readAgain,
+    answer,
+    findings,
     ...place,
     ...keypad,
     locked: sheet.state === 'complete',
