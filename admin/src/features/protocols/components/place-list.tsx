@@ -40,7 +40,7 @@ export function PlaceList({ line, kind, onLight, onPlace, onRemove }: PlaceListP
             onFocus={() => onLight(index)}
             className="flex flex-wrap items-center gap-x-3 gap-y-2 border-b border-hair py-2 text-table"
           >
-            <span className="w-28 font-medium">{placeWord(index, line.along.length)}</span>
+            <span className="w-28 font-medium max-sm:w-full">{placeWord(index, line.along.length)}</span>
             <MmBox axis="Across" place={index + 1} value={x} onPut={(next) => put(index, [next, y])} />
             <MmBox axis="Down" place={index + 1} value={y} onPut={(next) => put(index, [x, next])} />
             <span className="flex flex-wrap gap-1">
@@ -113,7 +113,7 @@ function MmBox({
         inputMode="numeric"
         autoComplete="off"
         aria-describedby="places-hint"
-        className="box figures w-20 text-right"
+        className="box figures w-20 text-right max-sm:w-16"
         value={typed ?? String(value)}
         onChange={({ target }) => setTyped(target.value)}
         onBlur={settle}
