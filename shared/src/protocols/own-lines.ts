@@ -1,6 +1,6 @@
 /** The lines of a museum's own points on its diagram, and where a tap on the drawing lies on the garment. */
 import { drawLine, type DrawnLine } from '../drawings/diagram/drawn-line.js';
-import { type MeasuringWay, type ViewName } from '../drawings/diagram/model.js';
+import { type ViewName } from '../drawings/diagram/model.js';
 import { paintDiagram, type DiagramRequest } from '../drawings/diagram/paint-diagram.js';
 import { pointMarks } from '../drawings/diagram/point-marks.js';
 import { isNarrow, layOut, type Projection } from '../drawings/diagram/projection.js';
@@ -8,29 +8,7 @@ import { type Scene, type ScenePoint } from '../drawings/diagram/scene.js';
 import { drawView } from '../drawings/diagram/view-shapes.js';
 import { placeAlong } from '../drawings/geometry/path.js';
 import { diagramFor } from '../drawings/kinds/diagram-for.js';
-import { type MeasuringHow } from '../points/point.js';
-import { type OwnPoint } from './protocol.js';
-
-/** A line that the kind's diagram does not have: through these places of a view, in its millimetres. */
-export interface ExtraLine {
-  readonly pointId: string;
-  readonly view: ViewName;
-  readonly way: MeasuringWay;
-  readonly along: readonly (readonly [number, number])[];
-}
-
-const wayOf: Readonly<Record<MeasuringHow, MeasuringWay>> = {
-  round: 'round',
-  straight: 'straight',
-  curve: 'curve',
-  'flat-doubled': 'doubled',
-};
-
-export function extraLinesOf(
-  ownPoints: readonly Pick<OwnPoint, 'id' | 'how' | 'line'>[],
-): readonly ExtraLine[] {
-  return ownPoints.map(({ id, how, line }) => ({ pointId: id, way: wayOf[how], ...line }));
-}
+import { type ExtraLine } from './extra-lines.js';
 
 export interface ProtocolScene {
   readonly scene: Scene;

@@ -41,7 +41,12 @@ export const LONGEST_PROTOCOL = LETTERS.length;
 
 /** A, B, C… in handling order, for the diagram and the sheet. */
 export function lettersFor(protocol: Protocol): ReadonlyMap<string, string> {
-  return new Map(protocol.points.map(({ pointId }, index) => [pointId, letterAt(index)]));
+  return lettersInOrder(protocolPointIds(protocol));
+}
+
+/** The letters of points in the order in which they are asked for. */
+export function lettersInOrder(pointIds: readonly string[]): ReadonlyMap<string, string> {
+  return new Map(pointIds.map((pointId, index) => [pointId, letterAt(index)]));
 }
 
 function letterAt(index: number): string {

@@ -1,4 +1,5 @@
 import { type GarmentKind } from '@ellwand/shared/points/kinds';
+import { type ExtraLine } from '@ellwand/shared/protocols/extra-lines';
 import { LitDrawing } from './lit-drawing';
 import { type LitPoints } from './lit-points';
 
@@ -7,6 +8,8 @@ interface MeasuringDiagramProps {
   /** Only these points are drawn. */
   readonly points: readonly string[];
   readonly letters: ReadonlyMap<string, string>;
+  /** Lines of points that the museum made for itself. */
+  readonly ownLines?: readonly ExtraLine[];
   readonly lit: LitPoints;
   /** Keeps the ids of this drawing apart from others on the page. */
   readonly prefix: string;
@@ -17,8 +20,10 @@ const WIDE_PX = 700;
 const NARROW_PX = 356;
 
 /** A kind's diagram with the lines of the points that were measured. */
-export function MeasuringDiagram({ kind, points, letters, lit, prefix }: MeasuringDiagramProps) {
-  const sheet = (widthPx: number) => ({ kind, points, letters, widthPx, idPrefix: `${prefix}-${widthPx}` });
+export function MeasuringDiagram({ kind, points, letters, ownLines, lit, prefix }: MeasuringDiagramProps) {
+  const sheet = (widthPx: number) => {
+    return { kind, points, letters, ownLines, widthPx, idPrefix: `${prefix}-${widthPx}` };
+  };
   return (
     <figure className="diagram">
       <LitDrawing sheet={sheet(WIDE_PX)} lit={lit} className="drawing-sheet only-wide" />

@@ -1,6 +1,7 @@
 import { type ViewName } from '@ellwand/shared/drawings/diagram/model';
-import { paintDiagram } from '@ellwand/shared/drawings/diagram/paint-diagram';
 import { type GarmentKind } from '@ellwand/shared/points/kinds';
+import { type ExtraLine } from '@ellwand/shared/protocols/extra-lines';
+import { paintProtocol } from '@ellwand/shared/protocols/own-lines';
 import { remembering } from '../../lib/remember';
 import { SceneDrawing } from './scene-drawing';
 import { sheetScale } from './sheet-scale';
@@ -10,6 +11,8 @@ export interface MeasuringSheetProps {
   /** Only these points are drawn. */
   readonly points: readonly string[];
   readonly letters: ReadonlyMap<string, string>;
+  /** Lines of points that the museum made for itself. */
+  readonly ownLines?: readonly ExtraLine[];
   readonly views?: readonly ViewName[];
   readonly widthPx: number;
   /** Keeps the ids of this drawing apart from others on the page. */
@@ -20,10 +23,13 @@ export interface MeasuringSheetProps {
 
 /** Placing letters is the costly part of a page; most pages ask for the drawings of a few kinds. */
 const sceneFor = remembering(
-  ({ kind, points, letters, views, widthPx, idPrefix }: MeasuringSheetProps) =>
-    [kind, points, points.map((point) => letters.get(point)), views, widthPx, idPrefix].join('|'),
-  ({ kind, points, letters, views, widthPx, idPrefix }: MeasuringSheetProps) =>
-    paintDiagram({ kind, points, letters, widthPx, idPrefix, ...(views ? { views } : {}) }),
+  ({ kind, points, letters, views, widthPx, idPrefix, ownLines }: MeasuringSheetProps) =>
+    [
+      ...[kind, points, points.map((point) => letters.get(point)), views, widthPx, idPrefix],
+      JSON.stringify(ownLines ?? []),
+    ].join('|'),
+  ({ kind, points, letters, views, widthPx, idPrefix, ownLines = [] }: MeasuringSheetProps) =>
+    paintProtocol({ kind, points, letters, widthPx, idPrefix, ...(views ? { views } : {}) }, ownLines)?.scene,
   200,
 );
 

@@ -1,9 +1,8 @@
 import { type PublishedMeasurement, type PublishedPart } from '@ellwand/shared/records/published-garment';
 import { type LitPoints } from '../../components/diagram/lit-points';
-import { SiteLink } from '../../components/ui/site-link';
 import { Length, Spread, Uncertainty, UnitName } from '../../components/units/length';
-import { paths } from '../../config/paths';
 import { howHeld, levelText, roundsText } from './measuring-words';
+import { PointName } from './point-name';
 
 interface MeasurementTableProps {
   readonly part: PublishedPart;
@@ -41,6 +40,7 @@ export function MeasurementTable({ part, letters, lit, rowId }: MeasurementTable
         {measurements.map((measurement) => (
           <MeasurementRow
             key={measurement.pointId}
+            part={part}
             measurement={measurement}
             letter={letters.get(measurement.pointId)}
             lit={lit}
@@ -53,13 +53,14 @@ export function MeasurementTable({ part, letters, lit, rowId }: MeasurementTable
 }
 
 interface MeasurementRowProps {
+  readonly part: PublishedPart;
   readonly measurement: PublishedMeasurement;
   readonly letter: string | undefined;
   readonly lit: LitPoints;
   readonly id: string;
 }
 
-function MeasurementRow({ measurement, letter, lit, id }: MeasurementRowProps) {
+function MeasurementRow({ part, measurement, letter, lit, id }: MeasurementRowProps) {
   const { pointId, label, valueMm, uncertaintyMm } = measurement;
   return (
     <tr
@@ -84,8 +85,8 @@ function MeasurementRow({ measurement, letter, lit, id }: MeasurementRowProps) {
         )}
       </td>
       <th scope="row">
-        <SiteLink to={paths.point(pointId)}>{label}</SiteLink>
-        <HowMeasured measurement={measurement} />
+        <PointName part={part} pointId={pointId} label={label} />
+        <HowMeasured part={part} measurement={measurement} />
       </th>
       <td className="measures-value">
         <Length mm={valueMm} uncertaintyMm={uncertaintyMm} bare />
@@ -101,9 +102,9 @@ function MeasurementRow({ measurement, letter, lit, id }: MeasurementRowProps) {
  * The small print of a row. A half and whole tapes are told, so that the figure can be followed;
  * tapes are counted in the millimetres they are marked in.
  */
-function HowMeasured({ measurement }: { readonly measurement: PublishedMeasurement }) {
+function HowMeasured({ part, measurement }: Pick<MeasurementRowProps, 'part' | 'measurement'>) {
   const { pointId, halfMm, tapeLengths, rounds, spreadMm } = measurement;
-  const words = [howHeld(pointId), levelText(measurement)].filter((text) => text !== null).join('; ');
+  const words = [howHeld(pointId, part), levelText(measurement)].filter((text) => text !== null).join('; ');
   return (
     <span className="measures-how">
       {words && `${words}; `}

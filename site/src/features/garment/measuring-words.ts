@@ -46,8 +46,8 @@ const tapeWent: Readonly<Record<MeasuringHow, string>> = {
 };
 
 /** How the tape went, in as few words as a row has room for: "Inside, round". Its point's page says it in full. */
-export function howHeld(pointId: string): string | null {
-  const point = findMeasuringPoint(pointId);
+export function howHeld(pointId: string, { ownPoints }: Pick<PublishedPart, 'ownPoints'>): string | null {
+  const point = ownPoints.find(({ id }) => id === pointId) ?? findMeasuringPoint(pointId);
   return point ? `${sideLabels[point.side]}, ${tapeWent[point.how]}` : null;
 }
 

@@ -1,7 +1,6 @@
 import { type PublishedPart } from '@ellwand/shared/records/published-garment';
-import { SiteLink } from '../../components/ui/site-link';
-import { paths } from '../../config/paths';
 import { reasonWords } from './measuring-words';
+import { PointName } from './point-name';
 
 /** The points that could not be taken, each with its reason. */
 export function NotTaken({ part }: { readonly part: PublishedPart }) {
@@ -12,7 +11,7 @@ export function NotTaken({ part }: { readonly part: PublishedPart }) {
       <ul>
         {part.notTaken.map(({ pointId, label, reason }) => (
           <li key={pointId}>
-            <SiteLink to={paths.point(pointId)}>{label}</SiteLink>: {reasonWords[reason]}
+            <PointName part={part} pointId={pointId} label={label} />: {reasonWords[reason]}
           </li>
         ))}
       </ul>

@@ -2,21 +2,27 @@
 import { act, cleanup, fireEvent, render, screen } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { createMemoryRouter, RouterProvider } from 'react-router-dom';
-import { afterEach, beforeEach, expect, it } from 'vitest';
+import { type PublishedPart } from '@ellwand/shared/records/published-garment';
+import { afterEach, beforeEach, describe, expect, it } from 'vitest';
 import { provideDrawings } from '../../components/diagram/drawings';
 import MeasuringSheet from '../../components/diagram/measuring-sheet';
 import OutlineShapes from '../../components/diagram/outline-shapes';
 import { dressInTwoParts } from '../../testing/fixture-dress';
 import { PartSection } from './part-section';
 
-const skirt = dressInTwoParts.parts[1];
+const [, skirt] = dressInTwoParts.parts;
+if (!skirt) throw new Error('the dress of the fixtures has a skirt');
+
+function show(part: PublishedPart) {
+  const section = <PartSection part={part} index={1} alone={false} picture={null} heading={null} />;
+  const router = createMemoryRouter([{ path: '*', element: section }], { initialEntries: ['/g/lh-1966-30'] });
+  render(<RouterProvider router={router} />);
+}
 
 beforeEach(() => {
   provideDrawings({ Sheet: MeasuringSheet, Outline: OutlineShapes });
   Element.prototype.scrollIntoView = () => undefined;
-  const section = skirt && <PartSection part={skirt} index={1} alone={false} picture={null} heading={null} />;
-  const router = createMemoryRouter([{ path: '*', element: section }], { initialEntries: ['/g/lh-1966-30'] });
-  render(<RouterProvider router={router} />);
+  show(skirt);
 });
 afterEach(cleanup);
 
@@ -52,4 +58,66 @@ it('lights a line for whoever comes by keyboard, and puts it out by a second pre
   expect(button(/show waistband/).getAttribute('aria-pressed')).toBe('true');
   await userEvent.keyboard('{Enter}');
   expect(button(/show waistband/).getAttribute('aria-pressed')).toBe('false');
+});
+
+describe('a part measured by a later protocol', () => {
+  const loop: PublishedPart['ownPoints'][number] = {
+    id: 'own-band-to-loop',
+    group: 'skirt-length',
+    name: 'Band to train loop',
+    definition: 'Inside, from the band down to the loop that lifts the train.',
+    from: 'the lower edge of the band',
+    to: 'the loop’s stitching',
+    side: 'inside',
+    how: 'straight',
+    handlingStep: 'opened-inside',
+    range: null,
+    watchFor: '',
+    takesTapeLengths: false,
+    levelRecorded: false,
+    paired: false,
+    line: {
+      view: 'inside',
+      along: [
+        [-30, 40],
+        [-30, 640],
+      ],
+    },
+  };
+  const [first] = skirt.measurements;
+  const pointIds = [loop.id, ...skirt.measurements.map(({ pointId }) => pointId).reverse()];
+
+  beforeEach(() => {
+    cleanup();
+    if (!first) throw new Error('the skirt of the fixtures is measured');
+    const measured = { ...first, pointId: loop.id, label: loop.name, valueMm: '812' };
+    show({
+      ...skirt,
+      measurements: [...skirt.measurements, measured],
+      protocol: { version: 2, pointIds },
+      ownPoints: [loop],
+    });
+  });
+
+  it('has its rows and letters in that protocol’s order', () => {
+    const letters = [...document.querySelectorAll('.measures .letter')];
+    expect(letters.map(({ textContent }) => textContent).join('')).toBe('ABCDEF');
+    expect(letters.map(({ id }) => id.replace('part-2-', ''))).toEqual(pointIds);
+  });
+
+  it('draws the museum’s own line in both widths, and lights it with its row', () => {
+    const lines = linesOf(loop.id);
+    expect(lines).toHaveLength(2);
+    expect(lines[0]?.querySelector('.drawing-letter')?.textContent).toBe('A');
+    const row = rowOf(loop.id);
+    if (row) fireEvent.pointerEnter(row);
+    expect(lines.every((line) => line.hasAttribute('data-lit'))).toBe(true);
+  });
+
+  it('defines the museum’s own point, which has no page to lead to', () => {
+    expect(screen.queryByRole('link', { name: loop.name })).toBeNull();
+    expect(rowOf(loop.id)?.textContent).toContain('Inside, straight; ');
+    expect(screen.getByText(loop.definition)).toBeTruthy();
+    expect(screen.getByText('From the lower edge of the band to the loop’s stitching.')).toBeTruthy();
+  });
 });

@@ -1,5 +1,6 @@
 import { type PublishedImage, type PublishedPart } from '@ellwand/shared/records/published-garment';
-import { lettersFor } from '@ellwand/shared/protocols/protocol';
+import { extraLinesOf } from '@ellwand/shared/protocols/extra-lines';
+import { lettersInOrder, protocolPointIds } from '@ellwand/shared/protocols/protocol';
 import { protocolFor } from '@ellwand/shared/protocols/standard-protocols';
 import { type ReactNode, useMemo } from 'react';
 import { useLitPoints } from '../../components/diagram/lit-points';
@@ -8,6 +9,7 @@ import { Picture } from '../../components/ui/picture';
 import { DerivedValues } from './derived-values';
 import { MeasurementTable } from './measurement-table';
 import { NotTaken } from './not-taken';
+import { OwnPoints } from './own-points';
 import { PartFacts } from './part-facts';
 
 interface PartSectionProps {
@@ -25,7 +27,8 @@ interface PartSectionProps {
 export function PartSection({ part, index, alone, picture, heading }: PartSectionProps) {
   const rowId = (pointId: string) => `part-${index + 1}-${pointId}`;
   const lit = useLitPoints(rowId);
-  const letters = useMemo(() => new Map<string, string>(lettersFor(protocolFor(part.kind))), [part]);
+  const letters = useMemo(() => lettersOf(part), [part]);
+  const ownLines = useMemo(() => extraLinesOf(part.ownPoints), [part]);
   const points = useMemo(() => part.measurements.map(({ pointId }) => pointId), [part]);
   const title = alone ? 'Measurements' : `${part.name}: measurements`;
   return (
@@ -37,6 +40,7 @@ export function PartSection({ part, index, alone, picture, heading }: PartSectio
             kind={part.kind}
             points={points}
             letters={letters}
+            ownLines={ownLines}
             lit={lit}
             prefix={`part-${index + 1}`}
           />
@@ -50,10 +54,16 @@ export function PartSection({ part, index, alone, picture, heading }: PartSectio
           Inside of the garment as fastened; not the wearer’s body, nor a modern size.
         </p>
         <MeasurementTable part={part} letters={letters} lit={lit} rowId={rowId} />
+        <OwnPoints part={part} />
         <NotTaken part={part} />
         <DerivedValues part={part} />
         <PartFacts part={part} />
       </div>
     </section>
   );
+}
+
+/** The letters of the protocol that it was measured by; documents from before it was kept, of the house's first. */
+function lettersOf({ kind, protocol }: PublishedPart): ReadonlyMap<string, string> {
+  return lettersInOrder(protocol?.pointIds ?? protocolPointIds(protocolFor(kind)));
 }

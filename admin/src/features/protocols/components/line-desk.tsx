@@ -1,5 +1,6 @@
 import { diagramFor } from '@ellwand/shared/drawings/kinds/diagram-for';
-import { extraLinesOf, paintProtocol, placeUnder } from '@ellwand/shared/protocols/own-lines';
+import { extraLinesOf } from '@ellwand/shared/protocols/extra-lines';
+import { paintProtocol, placeUnder } from '@ellwand/shared/protocols/own-lines';
 import type { OwnPointView } from '@ellwand/shared/records/protocol';
 import { type MouseEvent, useMemo, useRef, useState } from 'react';
 import { SceneDrawing } from '../../../components/drawing/scene-drawing.js';
