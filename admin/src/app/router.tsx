@@ -47,6 +47,12 @@ export const routes: RouteObject[] = [
                 }),
               },
               {
+                path: '/garments/:garmentId/parts/:partId/cut-sheet',
+                lazy: async () => ({
+                  Component: (await import('./routes/cut-sheet-page.js')).CutSheetPage,
+                }),
+              },
+              {
                 path: '/review',
                 lazy: async () => ({ Component: (await import('./routes/review-page.js')).ReviewPage }),
               },

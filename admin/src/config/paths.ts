@@ -6,6 +6,7 @@ export const paths = {
   newGarment: () => '/garments/new',
   garment: (id: string) => `/garments/${id}`,
   newSheet: (garmentId: string, partId: string) => `/garments/${garmentId}/parts/${partId}/sheets/new`,
+  cutSheet: (garmentId: string, partId: string) => `/garments/${garmentId}/parts/${partId}/cut-sheet`,
   reviewQueue: () => '/review',
   review: (garmentId: string) => `/garments/${garmentId}/review`,
   sheet: (id: string) => `/sheets/${id}`,

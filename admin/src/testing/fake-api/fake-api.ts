@@ -1,3 +1,4 @@
+import { cutSheetRoutes } from './cut-sheet-routes.js';
 import { garmentRoutes } from './garment-routes.js';
 import type { House } from './house.js';
 import { imageRoutes } from './image-routes.js';
@@ -14,4 +15,5 @@ export const fakeApi = (house: House) =>
     ...imageRoutes,
     ...measuringRoutes,
     ...protocolRoutes,
+    ...cutSheetRoutes,
   });

@@ -1,9 +1,11 @@
+import type { CutSheet } from '@ellwand/shared/records/cut-sheet';
 import type { Garment } from '@ellwand/shared/records/garment';
 import type { ProtocolVersion } from '@ellwand/shared/records/protocol';
 import type { Change } from '@ellwand/shared/records/publishing';
 import type { Invitation, Person } from '@ellwand/shared/records/session';
 import type { FindingView, Sheet } from '@ellwand/shared/records/sheet';
 import type { z } from 'zod';
+import { bodiceCutSheet } from './cut-sheets.js';
 import { sampleGarments } from './garments.js';
 import { idOf, invitation, staff } from './people.js';
 import { sampleProtocols } from './protocols.js';
@@ -19,6 +21,7 @@ export class House {
   readonly invitations: z.infer<typeof Invitation>[] = [{ ...invitation }];
   /** Every version of every protocol. */
   readonly protocols: ProtocolVersion[] = sampleProtocols();
+  readonly cutSheets = new Map<string, CutSheet>([[bodiceCutSheet.partId, bodiceCutSheet]]);
   readonly answers = new Map<string, NonNullable<FindingView['answer']>>();
   readonly changes: Change[] = [
     {

@@ -1,5 +1,6 @@
 import { hazardIds } from '@ellwand/shared/records/garment';
 import { useFormContext, useWatch } from 'react-hook-form';
+import { Fieldset } from '../../../components/ui/fieldset.js';
 import { TextField } from '../../../components/ui/field.js';
 import {
   hazardCautions,
@@ -8,7 +9,7 @@ import {
   standingLabels,
 } from '../../../lib/words/hazard-words.js';
 import type { RecordTyped } from '../record-form.js';
-import { Fieldset, useBox } from './record-fields.js';
+import { useBox } from './record-fields.js';
 
 /** Nine ways in which old dress can hurt. What is set brings its usual caution and a box for a note. */
 export function HazardFields() {

@@ -7,6 +7,7 @@ import { FormProvider, useForm } from 'react-hook-form';
 import { useNavigate } from 'react-router-dom';
 import { Button, ButtonLink } from '../../../components/ui/button.js';
 import { ErrorSummary } from '../../../components/ui/error-summary.js';
+import { Fieldset } from '../../../components/ui/fieldset.js';
 import { Page } from '../../../components/ui/page.js';
 import { paths } from '../../../config/paths.js';
 import { mistakesOf, showProblem } from '../../../lib/form-mistakes.js';
@@ -15,7 +16,7 @@ import { garmentQuery } from '../api/garment.js';
 import { makeGarment } from '../api/make-garment.js';
 import { kindWord } from '../../../lib/words/kind-word.js';
 import { boxLabels, emptyRecord, RecordForm, type RecordTyped } from '../record-form.js';
-import { Fieldset, RecordFields } from './record-fields.js';
+import { RecordFields } from './record-fields.js';
 
 /** How garments usually fall into parts; more can be added afterwards. */
 const divisions = [

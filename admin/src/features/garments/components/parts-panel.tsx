@@ -86,6 +86,9 @@ function PartCard({
             New measuring sheet <span className="sr-only">for {part.name}</span>
           </ButtonLink>
         )}
+        <ButtonLink height="dense" to={paths.cutSheet(garment.id, part.id)}>
+          Cut sheet <span className="sr-only">of {part.name}</span>
+        </ButtonLink>
         {!locked && part.sheets.length === 0 && garment.parts.length > 1 && (
           <Button height="dense" tone="quiet" disabled={remove.isPending} onClick={() => remove.mutate()}>
             Remove <span className="sr-only">{part.name}</span>

@@ -2,6 +2,7 @@ import { kindIds } from '@ellwand/shared/points/kinds';
 import { rightsStatements, wornByValues } from '@ellwand/shared/records/garment';
 import type { ReactNode } from 'react';
 import { type FieldPath, useFormContext } from 'react-hook-form';
+import { Fieldset, NeverPublic } from '../../../components/ui/fieldset.js';
 import { Select, TextArea, TextField, Tick } from '../../../components/ui/field.js';
 import { fieldId } from '../../../lib/form-mistakes.js';
 import { kindWord } from '../../../lib/words/kind-word.js';
@@ -23,35 +24,11 @@ export function useBox(name: FieldPath<RecordTyped>) {
   return { id: fieldId(name), error: error?.message ?? lineError?.message, ...register(name) };
 }
 
-export function Fieldset({
-  legend,
-  hint,
-  children,
-}: {
-  readonly legend: string;
-  readonly hint?: string;
-  readonly children: ReactNode;
-}) {
-  return (
-    <fieldset className="min-w-0 border-t border-hair pt-5">
-      <legend className="title float-left mb-4 w-full text-title-25">{legend}</legend>
-      <div className="clear-both space-y-5">
-        {hint && <p className="max-w-text text-label text-ink-3">{hint}</p>}
-        {children}
-      </div>
-    </fieldset>
-  );
-}
-
 const Pair = ({ children }: { readonly children: ReactNode }) => (
   <div className="grid items-end gap-5 sm:grid-cols-2">{children}</div>
 );
 
-const notPublic = (
-  <span className="ml-2 rounded-sm bg-weld-tint px-1.5 py-0.5 text-label font-medium text-weld-text">
-    never public
-  </span>
-);
+const notPublic = <NeverPublic />;
 
 const madeFor: Readonly<Record<(typeof wornByValues)[number], string>> = {
   woman: 'A woman',
