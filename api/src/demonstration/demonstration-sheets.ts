@@ -75,9 +75,15 @@ function factsOf(data: DemonstrationSheet, staff: Staff): SheetFacts {
     tapeZeroMm: '0',
     fasteningPair,
     note,
-    repeatPoints: [],
+    repeatPoints: Object.entries(data.readings).flatMap(([pointId, reading]) =>
+      isReadAgain(reading) ? [pointId] : [],
+    ),
     purpose: 'record',
   };
+}
+
+function isReadAgain(reading: DemonstrationReading): boolean {
+  return typeof reading === 'object' && 'rounds' in reading && reading.rounds.length > 0;
 }
 
 function readingsOf(

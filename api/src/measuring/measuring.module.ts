@@ -9,6 +9,8 @@ import { ProtocolsController } from './protocols/protocols.controller';
 import { ProtocolsService } from './protocols/protocols.service';
 import { SheetProtocolService } from './protocols/sheet-protocol.service';
 import { ReadingsService } from './readings/readings.service';
+import { RepeatabilityController } from './repeatability/repeatability.controller';
+import { RepeatabilityService } from './repeatability/repeatability.service';
 import { SheetEdits } from './sheets/sheet-edits';
 import { SheetView } from './sheets/sheet-view';
 import { SheetsService } from './sheets/sheets.service';
@@ -16,7 +18,7 @@ import { TableNotesService } from './table-notes/table-notes.service';
 
 @Module({
   imports: [GarmentsModule, ProtocolBookModule],
-  controllers: [MeasuringController, ProtocolsController, CutSheetsController],
+  controllers: [MeasuringController, ProtocolsController, CutSheetsController, RepeatabilityController],
   providers: [
     ProtocolsService,
     SheetProtocolService,
@@ -27,6 +29,7 @@ import { TableNotesService } from './table-notes/table-notes.service';
     FindingsService,
     TableNotesService,
     CutSheetsService,
+    RepeatabilityService,
   ],
   exports: [ProtocolBookModule, SheetsService, ReadingsService, FindingsService, CutSheetsService],
 })

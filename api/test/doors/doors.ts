@@ -59,6 +59,8 @@ export const doors: Readonly<Record<string, Door>> = {
   'POST /api/v1/workroom/sheets/:id/complete': 'sheet:write',
   'POST /api/v1/workroom/sheets/:id/reopen': 'sheet:write',
 
+  'GET /api/v1/workroom/repeatability': 'garment:read',
+
   'GET /api/v1/workroom/protocols': 'garment:read',
   'GET /api/v1/workroom/protocols/:kind': 'garment:read',
   'POST /api/v1/workroom/protocols/:kind': 'protocol:write',

@@ -55,7 +55,9 @@ export const SheetFacts = z
   .refine(
     (facts) => {
       const readers = facts.people.filter((p) => p.duty === 'read').map((p) => p.userId);
-      const second = facts.people.some((p) => p.duty === 'held' && !readers.includes(p.userId));
+      // Two who take turns both read and both hold: what counts is that somebody held for another.
+      const holders = facts.people.filter((p) => p.duty === 'held').map((p) => p.userId);
+      const second = holders.some((holder) => readers.some((reader) => reader !== holder));
       return second || facts.aloneBecause.trim() !== '';
     },
     { path: ['aloneBecause'], message: 'Say who held the tape, or why one person measured alone' },
