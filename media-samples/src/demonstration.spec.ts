@@ -2,13 +2,14 @@ import { runChecks } from '@ellwand/shared/checks/registry';
 import { viewSheet } from '@ellwand/shared/checks/sheet-view';
 import { findMeasuringPoint } from '@ellwand/shared/points/measuring-points';
 import { protocolPointIds } from '@ellwand/shared/protocols/protocol';
-import { protocolFor } from '@ellwand/shared/protocols/standard-protocols';
+import { protocolFaults } from '@ellwand/shared/protocols/protocol-rules';
 import { readDate } from '@ellwand/shared/records/edtf-date';
 import { GarmentRecord } from '@ellwand/shared/records/garment';
+import { toProtocol } from '@ellwand/shared/records/protocol';
 import { roles } from '@ellwand/shared/records/roles';
 import { mm } from '@ellwand/shared/units/length';
 import { describe, expect, it } from 'vitest';
-import { checkSheetOf, garments, house } from './testing/demonstration-records';
+import { checkSheetOf, garments, house, protocolOf, protocols } from './testing/demonstration-records';
 
 const parts = garments.flatMap((garment) =>
   garment.parts.map((part) => ({ name: `${garment.record.ownNumber}${part.suffix}`, garment, part })),
@@ -25,6 +26,22 @@ describe('the house', () => {
     expect(house.museum).toBe('Larkmoor House Museum of Dress');
     expect(new Set(house.people.flatMap((person) => person.roles))).toEqual(new Set(roles));
     for (const { email } of house.people) expect(email).toMatch(/@larkmoor\.example$/);
+  });
+});
+
+describe('the protocols', () => {
+  it('have one later version, with a point of the house’s own, that may be made as it is', () => {
+    expect(protocols.map(({ kind, version }) => `${kind} ${version}`)).toEqual(['skirt 2']);
+    for (const protocol of protocols.map(toProtocol)) {
+      expect(protocolFaults(protocol, [])).toEqual([]);
+      expect(protocol.ownPoints).toHaveLength(1);
+    }
+  });
+
+  it('are kept by their sheets: one was taken by the later version, the others by the first', () => {
+    const later = parts.filter(({ part }) => protocolOf(part).version > 1);
+    expect(later.map(({ name }) => name)).toEqual(['LH.1966.30.2']);
+    expect(parts.filter(({ part }) => part.kind === 'skirt').length).toBeGreaterThan(3);
   });
 });
 
@@ -110,8 +127,8 @@ describe.each(garments.map((garment) => [garment.record.ownNumber, garment] as c
 );
 
 describe.each(parts.map((entry) => [entry.name, entry.part] as const))('the sheet of %s', (_name, part) => {
-  const { sheet, kind } = part;
-  const asked: readonly string[] = protocolPointIds(protocolFor(kind));
+  const { sheet } = part;
+  const asked: readonly string[] = protocolPointIds(protocolOf(part));
 
   it('follows its protocol, every point read or given a reason', () => {
     const taken = Object.keys(sheet.readings);

@@ -2,6 +2,8 @@ import { readdir, readFile } from 'node:fs/promises';
 import { join } from 'node:path';
 import { GarmentRecord, PartKind } from '@ellwand/shared/records/garment';
 import { imageViews } from '@ellwand/shared/records/image';
+import { kindIds } from '@ellwand/shared/points/kinds';
+import { NewProtocol } from '@ellwand/shared/records/protocol';
 import { Role } from '@ellwand/shared/records/roles';
 import { RecordStage } from '@ellwand/shared/records/record-moves';
 import { LevelFoundBy, NotTakenReason, supports, TypedUnit } from '@ellwand/shared/records/sheet';
@@ -44,6 +46,8 @@ const DemonstrationSheet = z.strictObject({
   tape: z.string(),
   fasteningPair: z.string().default(''),
   note: z.string().default(''),
+  /** The version of its protocol; later ones than the first are made before the first sheet that names them. */
+  protocolVersion: z.number().int().default(1),
   complete: z.boolean().default(true),
   readings: z.record(z.string(), DemonstrationReading),
   /** Answers to the findings that the readings raise on purpose; any other finding stops the loading. */
@@ -73,6 +77,16 @@ export const DemonstrationGarment = z.strictObject({
 });
 export type DemonstrationGarment = z.output<typeof DemonstrationGarment>;
 
+/** A later version of a protocol, as an administrator makes it. */
+const DemonstrationProtocol = z.strictObject({
+  kind: z.enum(kindIds),
+  wornTogether: z.boolean().default(false),
+  version: z.number().int().min(2),
+  madeBy: z.string(),
+  ...NewProtocol.shape,
+});
+export type DemonstrationProtocol = z.output<typeof DemonstrationProtocol>;
+
 /** One entry of `media-samples/pictures/pictures.json`. */
 const DemonstrationPicture = z.object({
   file: z.string(),
@@ -86,6 +100,7 @@ export type DemonstrationPicture = z.output<typeof DemonstrationPicture>;
 export interface Demonstration {
   readonly museum: string;
   readonly people: readonly z.output<typeof DemonstrationPerson>[];
+  readonly protocols: readonly DemonstrationProtocol[];
   readonly garments: readonly DemonstrationGarment[];
   readonly pictures: readonly DemonstrationPicture[];
   readonly picturesFolder: string;
@@ -106,8 +121,9 @@ export async function readDemonstration(mediaSamples: string): Promise<Demonstra
   const garments = await Promise.all(
     files.map((file) => parsed(join(folder, 'garments', file), DemonstrationGarment)),
   );
+  const protocols = await parsed(join(folder, 'protocols.json'), z.array(DemonstrationProtocol));
   const pictures = await parsed(join(picturesFolder, 'pictures.json'), z.array(DemonstrationPicture));
-  return { ...house, garments, pictures, picturesFolder };
+  return { ...house, protocols, garments, pictures, picturesFolder };
 }
 
 async function parsed<T extends z.ZodType>(file: string, schema: T): Promise<z.output<T>> {

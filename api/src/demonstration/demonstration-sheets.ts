@@ -29,6 +29,8 @@ export class DemonstrationSheets {
     const reader = staffMember(staff, data.read);
     const writer = staffMember(staff, data.wrote);
     const sheet = await this.sheets.open(partId, { id: uuidv7(), facts: factsOf(data, staff) }, writer);
+    if (sheet.protocolVersion !== data.protocolVersion)
+      throw new Error(`Expected a sheet by version ${data.protocolVersion}, got ${sheet.protocolVersion}`);
     const keyedAt = `${data.measuredOn}T10:00:00.000Z`;
     const batch = Object.entries(data.readings).flatMap(([pointId, reading]) =>
       readingsOf(pointId, reading, reader.id, keyedAt),

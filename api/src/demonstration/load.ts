@@ -7,8 +7,9 @@ import { ENVIRONMENT } from '../common/environment.token';
 import { Work } from '../common/work';
 import type { Environment } from '../config/environment';
 import { FormsMaker } from '../media/forms/forms-maker';
-import { type Demonstration, readDemonstration } from './demonstration-data';
-import { DemonstrationGarments } from './demonstration-garments';
+import { type Demonstration, type DemonstrationGarment, readDemonstration } from './demonstration-data';
+import { DemonstrationGarments, type FilledGarment } from './demonstration-garments';
+import { DemonstrationProtocols, keepsFirstProtocols } from './demonstration-protocols';
 import { type DemonstrationAccount, DemonstrationStaff } from './demonstration-staff';
 import { DemonstrationModule } from './demonstration.module';
 import { clearUnfinished, houseState, markHouse } from './house-state';
@@ -42,11 +43,17 @@ async function fill(
 ): Promise<DemonstrationAccount[]> {
   const { staff, accounts } = await house.get(DemonstrationStaff).arrive(demonstration);
   const garments = house.get(DemonstrationGarments);
-  const filled = [];
-  for (const [index, data] of demonstration.garments.entries()) {
-    filled.push(await garments.fill(data, demonstration, staff));
-    say(`Demonstration: ${index + 1} of ${demonstration.garments.length} garments measured`);
-  }
+  const filled: FilledGarment[] = [];
+  const fillIn = async (some: readonly DemonstrationGarment[]) => {
+    for (const data of some) {
+      filled.push(await garments.fill(data, demonstration, staff));
+      say(`Demonstration: ${filled.length} of ${demonstration.garments.length} garments measured`);
+    }
+  };
+  await fillIn(demonstration.garments.filter(keepsFirstProtocols));
+  const protocols = house.get(DemonstrationProtocols);
+  for (const protocol of demonstration.protocols) await protocols.make(protocol, staff);
+  await fillIn(demonstration.garments.filter((garment) => !keepsFirstProtocols(garment)));
   say('Demonstration: making the smaller forms of its pictures');
   await house.get(FormsMaker).drain();
   for (const garment of filled) await garments.stage(garment, staff);

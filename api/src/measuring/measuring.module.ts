@@ -31,6 +31,13 @@ import { TableNotesService } from './table-notes/table-notes.service';
     CutSheetsService,
     RepeatabilityService,
   ],
-  exports: [ProtocolBookModule, SheetsService, ReadingsService, FindingsService, CutSheetsService],
+  exports: [
+    ProtocolBookModule,
+    ProtocolsService,
+    SheetsService,
+    ReadingsService,
+    FindingsService,
+    CutSheetsService,
+  ],
 })
 export class MeasuringModule {}

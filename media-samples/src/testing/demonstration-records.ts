@@ -2,12 +2,13 @@
 import { readdirSync, readFileSync } from 'node:fs';
 import { type CheckSheet } from '@ellwand/shared/checks/sheet-view';
 import { type GarmentKind } from '@ellwand/shared/points/kinds';
-import { findMeasuringPoint } from '@ellwand/shared/points/measuring-points';
+import { pointIn, type Protocol } from '@ellwand/shared/protocols/protocol';
 import { protocolFor } from '@ellwand/shared/protocols/standard-protocols';
 import { type LevelFoundBy, type NotTakenReason, type Reading } from '@ellwand/shared/readings/reading';
 import { wholeValue } from '@ellwand/shared/readings/whole-value';
 import { type supports } from '@ellwand/shared/records/sheet';
 import { type GarmentRecordInput } from '@ellwand/shared/records/garment';
+import { ProtocolView, toProtocol } from '@ellwand/shared/records/protocol';
 import { type Role } from '@ellwand/shared/records/roles';
 import { mm } from '@ellwand/shared/units/length';
 
@@ -32,6 +33,7 @@ export interface SheetEntry {
   wrote: string;
   aloneBecause?: string;
   complete?: boolean;
+  protocolVersion?: number;
   readings: Record<string, ReadingEntry>;
   support: Support;
   answers?: { checkId: string; reason: string }[];
@@ -66,6 +68,19 @@ const contentOf = (path: string): unknown => JSON.parse(readFileSync(new URL(pat
 
 export const house = contentOf('house.json') as House;
 
+/** Versions that an administrator makes before the first sheet is taken by them. */
+export const protocols: readonly ProtocolView[] = ProtocolView.extend({
+  wornTogether: ProtocolView.shape.wornTogether.default(false),
+})
+  .array()
+  .parse(contentOf('protocols.json'));
+
+/** The version that a part's sheet was taken by. */
+export function protocolOf({ kind, sheet: { protocolVersion = 1 } }: PartEntry): Protocol {
+  const made = protocols.find((each) => each.kind === kind && each.version === protocolVersion);
+  return made ? toProtocol(made) : protocolFor(kind);
+}
+
 export const garments: readonly GarmentEntry[] = readdirSync(new URL('garments/', folder))
   .filter((file) => file.endsWith('.json'))
   .sort()
@@ -75,13 +90,13 @@ export const garments: readonly GarmentEntry[] = readdirSync(new URL('garments/'
 const TAPE = mm(1500);
 
 /** The readings of one point, worked out to whole values as the API does. */
-function readingsOf(pointId: string, entry: ReadingEntry): Reading[] {
+function readingsOf(pointId: string, entry: ReadingEntry, protocol: Protocol): Reading[] {
   if (typeof entry === 'object' && 'notTaken' in entry) {
     return [{ id: pointId, pointId, round: 1, state: 'not-taken', notTakenReason: entry.notTaken }];
   }
   const said = typeof entry === 'string' ? { typed: entry } : entry;
   const { typed, tapeCount = 0, rounds = [], levelFoundBy, depth, note } = said;
-  const how = findMeasuringPoint(pointId)?.how ?? 'curve';
+  const how = pointIn(protocol, pointId)?.how ?? 'curve';
   return [typed, ...rounds].map((keyed, index) => {
     const read = mm(keyed);
     return {
@@ -100,15 +115,17 @@ function readingsOf(pointId: string, entry: ReadingEntry): Reading[] {
   });
 }
 
-const allReadings = ({ sheet }: PartEntry): Reading[] =>
-  Object.entries(sheet.readings).flatMap(([pointId, entry]) => readingsOf(pointId, entry));
+const allReadings = (part: PartEntry): Reading[] =>
+  Object.entries(part.sheet.readings).flatMap(([pointId, entry]) =>
+    readingsOf(pointId, entry, protocolOf(part)),
+  );
 
 /** A part's sheet with those of the other parts of its garment, as the checks want it. */
 export function checkSheetOf(garment: GarmentEntry, part: PartEntry): CheckSheet {
   const others = garment.parts.filter((other) => other !== part);
   return {
     kind: part.kind,
-    protocol: protocolFor(part.kind),
+    protocol: protocolOf(part),
     readings: allReadings(part),
     support: part.sheet.support,
     tapeLength: TAPE,
