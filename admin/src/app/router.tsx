@@ -80,6 +80,13 @@ export const routes: RouteObject[] = [
                 }),
               },
               {
+                path: '/repeatability',
+                lazy: async () => ({
+                  Component: (await import('../features/repeatability/components/repeatability-page.js'))
+                    .RepeatabilityPage,
+                }),
+              },
+              {
                 path: '/people',
                 lazy: async () => ({
                   Component: (await import('../features/people/components/people-page.js')).PeoplePage,

@@ -49,6 +49,9 @@ export function Shell() {
             <NavLink to={paths.protocols()} className={linkLook}>
               Protocols
             </NavLink>
+            <NavLink to={paths.repeatability()} className={linkLook}>
+              Repeatability
+            </NavLink>
             {manages && (
               <NavLink to={paths.people()} className={linkLook}>
                 People

@@ -22,6 +22,7 @@ export const paths = {
     }).toString();
     return `/protocols/${kind}${search && `?${search}`}`;
   },
+  repeatability: (from = 'all') => `/repeatability${from === 'all' ? '' : `?from=${from}`}`,
   people: () => '/people',
   tray: () => '/tray',
   audit: () => '/audit',

@@ -5,6 +5,7 @@ import { imageRoutes } from './image-routes.js';
 import { measuringRoutes } from './measuring-routes.js';
 import { peopleRoutes } from './people-routes.js';
 import { protocolRoutes } from './protocol-routes.js';
+import { repeatabilityRoutes } from './repeatability-routes.js';
 import { makeHandler } from './router.js';
 
 /** A stand-in for the API over a house in memory: the same contract, checked with the same schemas. */
@@ -16,4 +17,5 @@ export const fakeApi = (house: House) =>
     ...measuringRoutes,
     ...protocolRoutes,
     ...cutSheetRoutes,
+    ...repeatabilityRoutes,
   });

@@ -9,6 +9,7 @@ import { bodiceCutSheet } from './cut-sheets.js';
 import { sampleGarments } from './garments.js';
 import { idOf, invitation, staff } from './people.js';
 import { sampleProtocols } from './protocols.js';
+import { sampleRepeated } from './repeatability-routes.js';
 import { sampleSheets } from './sheets.js';
 
 type PersonShown = z.infer<typeof Person>;
@@ -22,6 +23,8 @@ export class House {
   /** Every version of every protocol. */
   readonly protocols: ProtocolVersion[] = sampleProtocols();
   readonly cutSheets = new Map<string, CutSheet>([[bodiceCutSheet.partId, bodiceCutSheet]]);
+  /** By point, what was read more than once. */
+  readonly repeated = new Map(sampleRepeated);
   readonly answers = new Map<string, NonNullable<FindingView['answer']>>();
   readonly changes: Change[] = [
     {
