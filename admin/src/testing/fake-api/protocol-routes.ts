@@ -33,6 +33,16 @@ export const protocolRoutes: Routes = {
     const versions = versionsOf(call.house, kind, wornTogether);
     return json({ kind, wornTogether, version: versions[0]?.version, versions });
   },
+  'POST /workroom/sheets/:id/newest-protocol': ({ house, params, version }) => {
+    const sheet = house.sheet(params.id);
+    if (!sheet) throw new Refusal(404, 'sheet.unknown');
+    matched(sheet.version, version);
+    if (sheet.readings.length > 0) throw new Refusal(409, 'sheet.has-readings');
+    const [newest] = versionsOf(house, sheet.kind, sheet.wornTogether);
+    if (newest) Object.assign(sheet, { protocol: newest, protocolVersion: newest.version });
+    sheet.version += 1;
+    return json(sheet);
+  },
   'POST /workroom/protocols/:kind': (call) => {
     const { house, body, version } = call;
     const name = asked(call);

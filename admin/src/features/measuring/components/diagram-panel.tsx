@@ -1,7 +1,9 @@
 import { diagramFor } from '@ellwand/shared/drawings/kinds/diagram-for';
 import { type ViewName, viewOfPoint } from '@ellwand/shared/drawings/diagram/model';
-import { paintDiagram } from '@ellwand/shared/drawings/diagram/paint-diagram';
 import type { GarmentKind } from '@ellwand/shared/points/kinds';
+import { extraLinesOf } from '@ellwand/shared/protocols/extra-lines';
+import { paintProtocol } from '@ellwand/shared/protocols/own-lines';
+import type { OwnPointView } from '@ellwand/shared/records/protocol';
 import { useMemo, useState } from 'react';
 import { mannerOf, type SheetPoint } from '../model/sheet-points.js';
 import { SceneDrawing } from '../../../components/drawing/scene-drawing.js';
@@ -9,29 +11,35 @@ import { SceneDrawing } from '../../../components/drawing/scene-drawing.js';
 interface DiagramPanelProps {
   readonly kind: GarmentKind;
   readonly points: readonly SheetPoint[];
+  /** The museum's own points of the sheet's protocol, for their lines. */
+  readonly ownPoints: readonly OwnPointView[];
   readonly current: SheetPoint;
   readonly onChoose: (pointId: string) => void;
 }
 
 /** The view on which the current point lies, its line lit, and beneath it the one instruction that matters now. */
-export function DiagramPanel({ kind, points, current, onChoose }: DiagramPanelProps) {
+export function DiagramPanel({ kind, points, ownPoints, current, onChoose }: DiagramPanelProps) {
   const diagram = diagramFor(kind);
-  const own = diagram && viewOfPoint(diagram, current.id);
+  const ownLine = ownPoints.find(({ id }) => id === current.id)?.line;
+  const own = ownLine?.view ?? (diagram && viewOfPoint(diagram, current.id));
   const [looking, setLooking] = useState<{ view: ViewName; at: string } | null>(null);
   // A view that was chosen by hand holds until the work moves to another point.
   const view = looking?.at === current.id ? looking.view : (own ?? diagram?.views[0]?.name);
   const scene = useMemo(
     () =>
       view &&
-      paintDiagram({
-        kind,
-        views: [view],
-        widthPx: 368,
-        current: current.id,
-        points: points.map(({ id }) => id),
-        letters: new Map(points.map(({ id, letter }) => [id, letter])),
-      }),
-    [kind, view, current.id, points],
+      paintProtocol(
+        {
+          kind,
+          views: [view],
+          widthPx: 368,
+          current: current.id,
+          points: points.map(({ id }) => id),
+          letters: new Map(points.map(({ id, letter }) => [id, letter])),
+        },
+        extraLinesOf(ownPoints),
+      )?.scene,
+    [kind, view, current.id, points, ownPoints],
   );
   return (
     <section

@@ -13,6 +13,7 @@ import { DiagramPanel } from './diagram-panel.js';
 import { FactsPanel } from './facts-panel.js';
 import { FindingsPanel } from './findings-panel.js';
 import { Keypad } from './keypad.js';
+import { NewestProtocol } from './newest-protocol.js';
 import { ReadingList } from './reading-list.js';
 import { SheetHeader } from './sheet-header.js';
 
@@ -43,6 +44,7 @@ export function SheetScreen({ sheet }: { readonly sheet: Sheet }) {
             <DiagramPanel
               kind={sheet.kind}
               points={desk.points}
+              ownPoints={desk.sheet.protocol.ownPoints}
               current={desk.current.point}
               onChoose={chooseRow}
             />
@@ -56,6 +58,7 @@ export function SheetScreen({ sheet }: { readonly sheet: Sheet }) {
               <SheetTabs desk={desk} />
               <TabPanels className="grow md:relative md:min-h-0 md:overflow-y-auto">
                 <Panel>
+                  <NewestProtocol desk={desk} />
                   <ReadingList desk={desk} />
                 </Panel>
                 <Panel>
