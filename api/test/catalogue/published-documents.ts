@@ -15,6 +15,10 @@ export const measured = (pointId: string, valueMm: string): PublishedMeasurement
   levelFoundBy: null,
   tapeLengths: null,
   halfMm: null,
+  worn: null,
+  method: null,
+  gapMm: null,
+  depthMm: null,
   imageId: null,
 });
 

@@ -5,12 +5,14 @@ import { PublishedCutSheet } from './cut-sheet.js';
 import { ImageView } from './image.js';
 import { OwnPointView } from './protocol.js';
 import { VersionState } from './record-moves.js';
-import { DerivedView, LevelFoundBy, NotTakenReason } from './sheet.js';
+import { DerivedView, LevelFoundBy, NotTakenReason, TakenMethod, Worn } from './sheet.js';
 
 /** One measurement as the public reads it: the number, and everything needed to trust it. */
 export const PublishedMeasurement = z.object({
   pointId: z.string(),
   label: z.string(),
+  /** Which of a pair, as worn: a point read on both sides has two measurements, the one that speaks for it first. */
+  worn: Worn.nullable().default(null),
   valueMm: LengthMm,
   uncertaintyMm: LengthMm,
   /** How many rounds stand behind the mean, and how far apart they lay. */
@@ -19,8 +21,14 @@ export const PublishedMeasurement = z.object({
   levelFoundBy: LevelFoundBy.nullable(),
   /** Whole tapes and a rest, where the reading was made so. */
   tapeLengths: z.object({ count: z.number().int(), tapeMm: LengthMm, restMm: LengthMm }).nullable(),
-  /** The half that was read, where the point was taken flat and doubled. */
+  /** The half that was read, where it was taken flat and doubled. */
   halfMm: LengthMm.nullable(),
+  /** Said where it was taken otherwise than its point says. */
+  method: TakenMethod.nullable().default(null),
+  /** What the tape crossed between edges that could not be brought together: taken off. */
+  gapMm: LengthMm.nullable().default(null),
+  /** How far below the waist the level lay. */
+  depthMm: LengthMm.nullable().default(null),
   /** A picture of the tape lying at this point. */
   imageId: Uuid.nullable(),
 });
@@ -39,7 +47,15 @@ export const PublishedPart = z.object({
   measuredBy: z.array(z.string()),
   peopleCount: z.number().int(),
   measurements: z.array(PublishedMeasurement),
-  notTaken: z.array(z.object({ pointId: z.string(), label: z.string(), reason: NotTakenReason })),
+  notTaken: z.array(
+    z.object({
+      pointId: z.string(),
+      label: z.string(),
+      /** Which of a pair, as worn, where only one of the two could not be taken or each has its own reason. */
+      worn: Worn.nullable().default(null),
+      reason: NotTakenReason,
+    }),
+  ),
   derived: z.array(DerivedView),
   /** The protocol that it was measured by, in handling order; null where the document is from before it was kept. */
   protocol: z

@@ -15,6 +15,10 @@ export function measured(pointId: PointId, valueMm: string, extra: Extra = {}): 
     levelFoundBy: null,
     tapeLengths: null,
     halfMm: null,
+    worn: null,
+    method: null,
+    gapMm: null,
+    depthMm: null,
     imageId: null,
     ...extra,
   };
@@ -115,7 +119,12 @@ export const dressInTwoParts: PublishedGarment = {
         measured('waist-to-hem-back', '100'),
       ],
       notTaken: [
-        { pointId: 'sleeve-widest', label: measuringPoint('sleeve-widest').name, reason: 'too-fragile' },
+        {
+          pointId: 'sleeve-widest',
+          label: measuringPoint('sleeve-widest').name,
+          worn: null,
+          reason: 'too-fragile',
+        },
       ],
       derived: [
         {
@@ -153,7 +162,7 @@ export const dressInTwoParts: PublishedGarment = {
         measured('waist-to-hem-front', '1015'),
         measured('waist-to-hem-back', '1168.4'),
       ],
-      notTaken: [{ pointId: 'hip', label: measuringPoint('hip').name, reason: 'not-applicable' }],
+      notTaken: [{ pointId: 'hip', label: measuringPoint('hip').name, worn: null, reason: 'not-applicable' }],
       derived: [
         {
           id: 'hem-to-waist-ratio',

@@ -45,8 +45,9 @@ function publishedPart(house: House, garment: Garment, part: Garment['parts'][nu
     fasteningPair: null,
     measuredBy: [],
     peopleCount: 2,
-    measurements: values.map(({ pointId, value, n }) => ({
+    measurements: values.map(({ pointId, value, n, worn = null }) => ({
       pointId,
+      worn,
       label: nameOf(pointId),
       valueMm: toMmString(value),
       uncertaintyMm: '2.1',
@@ -55,10 +56,13 @@ function publishedPart(house: House, garment: Garment, part: Garment['parts'][nu
       levelFoundBy: null,
       tapeLengths: null,
       halfMm: null,
+      method: null,
+      gapMm: null,
+      depthMm: null,
       imageId: null,
     })),
-    notTaken: readings.flatMap(({ pointId, reason }) =>
-      reason ? [{ pointId, label: nameOf(pointId), reason }] : [],
+    notTaken: readings.flatMap(({ pointId, worn, reason }) =>
+      reason ? [{ pointId, label: nameOf(pointId), worn, reason }] : [],
     ),
     derived: sheet ? derivedViews(sheet.kind, readings) : [],
     protocol: sheet

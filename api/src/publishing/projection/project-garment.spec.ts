@@ -2,7 +2,7 @@ import { GarmentRecord } from '@ellwand/shared/records/garment';
 import type { StoredReading } from '@ellwand/shared/records/sheet';
 import type { Snapshot } from '../snapshot';
 import { projectGarment } from './project-garment';
-import { facetRows, searchText } from './search-rows';
+import { facetRows, measurementRows, searchText } from './search-rows';
 
 const imprint = {
   number: 'lh-1949-11',
@@ -118,8 +118,56 @@ describe('the public copy of a garment', () => {
       stored('waistband', '612', { round: 2 }),
     ];
     const part = projectGarment(snapshotWith(readings), imprint).parts[0];
-    expect(part?.notTaken).toEqual([{ pointId: 'hip', label: 'Hip', reason: 'too-fragile' }]);
+    expect(part?.notTaken).toEqual([{ pointId: 'hip', label: 'Hip', worn: null, reason: 'too-fragile' }]);
     expect(part?.measurements.map((each) => each.pointId)).toEqual(['waistband']);
+  });
+
+  it('gives each side its own measurement, the one that speaks first, and is searched by that one alone', () => {
+    const readings = [
+      stored('waist-to-hem-side', '1041', { worn: 'left' }),
+      stored('waist-to-hem-side', '1044', { worn: 'left', round: 2 }),
+      stored('waist-to-hem-side', '1030', { worn: 'right' }),
+    ];
+    const copy = projectGarment(snapshotWith(readings), imprint);
+    const shown = copy.parts[0]?.measurements.map(({ worn, valueMm, rounds }) => [worn, valueMm, rounds]);
+    // Never 1038.3 mm, the mean of a left and a right that nobody has: each side's rounds by themselves.
+    expect(shown).toEqual([
+      ['right', '1030', 1],
+      ['left', '1042.5', 2],
+    ]);
+    expect(measurementRows(copy).map(({ pointId, valueMm }) => [pointId, valueMm])).toEqual([
+      ['waist-to-hem-side', '1030'],
+    ]);
+  });
+
+  it('says of which side a point could not be taken, and why, beside the other side’s figure', () => {
+    const left = { state: 'not-taken', valueMm: null, typed: null, unit: null } as const;
+    const readings = [
+      stored('waist-to-hem-side', '0', { ...left, worn: 'left', reason: 'too-fragile' }),
+      stored('waist-to-hem-side', '1030', { worn: 'right' }),
+    ];
+    const part = projectGarment(snapshotWith(readings), imprint).parts[0];
+    expect(part?.measurements.map(({ worn }) => worn)).toEqual(['right']);
+    expect(part?.notTaken.map(({ worn, reason }) => [worn, reason])).toEqual([['left', 'too-fragile']]);
+  });
+
+  it('tells a gap, another method with its half, and the depth at which a level lay', () => {
+    const readings = [
+      stored('waistband', '592', { gapMm: '28', gapTyped: '28' }),
+      stored('hip', '984', { method: 'flat-doubled', typed: '492', depthMm: '200', depthTyped: '200' }),
+    ];
+    const part = projectGarment(snapshotWith(readings), imprint).parts[0];
+    const told = part?.measurements.map(({ pointId, method, halfMm, gapMm, depthMm }) => ({
+      pointId,
+      method,
+      halfMm,
+      gapMm,
+      depthMm,
+    }));
+    expect(told).toEqual([
+      { pointId: 'waistband', method: null, halfMm: null, gapMm: '28', depthMm: null },
+      { pointId: 'hip', method: 'flat-doubled', halfMm: '492', gapMm: null, depthMm: '200' },
+    ]);
   });
 
   it('names the people only where the record says so, and counts them always', () => {

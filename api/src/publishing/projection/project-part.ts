@@ -1,19 +1,14 @@
 import { roundsRead } from '@ellwand/shared/cut-sheet/rounds-read';
 import { wholeFromHalf } from '@ellwand/shared/derivations/whole-from-half';
-import type { MeasuringPoint } from '@ellwand/shared/points/point';
 import { type Protocol, pointsOf, protocolPointIds } from '@ellwand/shared/protocols/protocol';
 import { protocolFor } from '@ellwand/shared/protocols/standard-protocols';
-import { acceptedValue } from '@ellwand/shared/readings/accepted-value';
-import { standingReadings, stands, type Reading } from '@ellwand/shared/readings/reading';
-import { shownUncertainty } from '@ellwand/shared/readings/uncertainty';
 import type { Image } from '@ellwand/shared/records/image';
 import { toProtocol, toProtocolView } from '@ellwand/shared/records/protocol';
 import { derivedViews, toReading } from '@ellwand/shared/records/measured';
-import type { PublishedMeasurement, PublishedPart } from '@ellwand/shared/records/published-garment';
-import { lengthOf, toMmString } from '@ellwand/shared/units/length';
-import { divideHalfUp } from '@ellwand/shared/units/rounding';
+import type { PublishedPart } from '@ellwand/shared/records/published-garment';
 import type { SnapshotPart, SnapshotSheet } from '../snapshot';
 import { projectCutSheet } from './project-cut-sheet';
+import { type Measured, projectMeasurements, projectNotTaken } from './project-measurements';
 
 interface PartContext {
   readonly ownNumber: string;
@@ -32,7 +27,7 @@ export function projectPart(part: SnapshotPart, context: PartContext): Published
   if (!sheet) return { ...heading, ...unmeasured, cutSheet };
   const protocol = sheet.protocol ? toProtocol(sheet.protocol) : protocolFor(part.kind);
   const asked = pointsOf(protocol);
-  const measured: Measured = { readings, ownPoints: protocol.ownPoints };
+  const measured = { readings, ownPoints: protocol.ownPoints };
   return {
     ...heading,
     measuredOn: sheet.measuredOn,
@@ -41,8 +36,8 @@ export function projectPart(part: SnapshotPart, context: PartContext): Published
     fasteningPair: sheet.fasteningPair || null,
     measuredBy: context.showPeople ? namesOf(sheet) : [],
     peopleCount: new Set(sheet.people.map((person) => person.userId)).size,
-    measurements: asked.flatMap((point) => projectMeasurement(point, measured, context.pictures) ?? []),
-    notTaken: asked.flatMap((point) => projectNotTaken(point, readings) ?? []),
+    measurements: asked.flatMap((point) => projectMeasurements(point, measured, context.pictures)),
+    notTaken: asked.flatMap((point) => projectNotTaken(point, readings)),
     derived: derivedOf(part, sheet, measured.ownPoints, context.parts),
     ...projectProtocol(protocol),
     cutSheet,
@@ -88,46 +83,4 @@ function projectProtocol(protocol: Protocol): Pick<PublishedPart, 'protocol' | '
 
 function namesOf(sheet: SnapshotSheet): string[] {
   return [...new Set(sheet.people.map((person) => person.name))];
-}
-
-interface Measured {
-  readonly readings: readonly Reading[];
-  readonly ownPoints: readonly MeasuringPoint[];
-}
-
-function projectMeasurement(
-  point: MeasuringPoint,
-  { readings, ownPoints }: Measured,
-  pictures: readonly Image[],
-): PublishedMeasurement | undefined {
-  const pointId = point.id;
-  const accepted = acceptedValue(readings, pointId, undefined, ownPoints);
-  if (!accepted) return undefined;
-  const rounds = standingReadings(readings, pointId);
-  const lengths = rounds.find((reading) => reading.tapeLengths)?.tapeLengths;
-  const half = lengthOf(Number(divideHalfUp(BigInt(accepted.value), 2n)));
-  return {
-    pointId,
-    label: point.name,
-    valueMm: toMmString(accepted.value),
-    uncertaintyMm: toMmString(shownUncertainty(accepted.uncertaintyMm)),
-    rounds: accepted.n,
-    spreadMm: toMmString(accepted.spread),
-    levelFoundBy: rounds.find((reading) => reading.levelFoundBy)?.levelFoundBy ?? null,
-    tapeLengths: lengths
-      ? { count: lengths.count, tapeMm: toMmString(lengths.tape), restMm: toMmString(lengths.rest) }
-      : null,
-    halfMm: point.how === 'flat-doubled' ? toMmString(half) : null,
-    imageId: pictures.find((picture) => picture.pointId === pointId)?.id ?? null,
-  };
-}
-
-function projectNotTaken(
-  { id: pointId, name }: MeasuringPoint,
-  readings: readonly Reading[],
-): PublishedPart['notTaken'][number] | undefined {
-  const standing = readings.filter((reading) => reading.pointId === pointId && stands(reading));
-  if (standing.some((reading) => reading.state === 'taken')) return undefined;
-  const reason = standing.find((reading) => reading.state === 'not-taken')?.notTakenReason;
-  return reason ? { pointId, label: name, reason } : undefined;
 }

@@ -1,5 +1,5 @@
 import { isGarmentKind, kindLabels } from '@ellwand/shared/points/kinds';
-import type { PublishedDocument } from '@ellwand/shared/records/published-garment';
+import type { PublishedDocument, PublishedMeasurement } from '@ellwand/shared/records/published-garment';
 
 export interface FacetRow {
   readonly facet: string;
@@ -70,7 +70,7 @@ function onceEach(rows: readonly FacetRow[]): FacetRow[] {
 
 export function measurementRows(document: PublishedDocument): MeasurementRow[] {
   return document.parts.flatMap((part) =>
-    part.measurements.map(({ pointId, valueMm }) => {
+    onceEachPoint(part.measurements).map(({ pointId, valueMm }) => {
       const own = part.ownPoints.find(({ id }) => id === pointId);
       return {
         partNumber: part.number,
@@ -81,6 +81,13 @@ export function measurementRows(document: PublishedDocument): MeasurementRow[] {
         ownLabel: own?.name ?? null,
       };
     }),
+  );
+}
+
+/** Of a point read on both sides the first speaks for it: a garment is found by one sleeve, not by two. */
+function onceEachPoint(measurements: readonly PublishedMeasurement[]): readonly PublishedMeasurement[] {
+  return measurements.filter(
+    ({ pointId }, index) => measurements.findIndex((other) => other.pointId === pointId) === index,
   );
 }
 

@@ -13,6 +13,10 @@ const waist: PublishedMeasurement = {
   levelFoundBy: 'seam',
   tapeLengths: null,
   halfMm: null,
+  worn: null,
+  method: null,
+  gapMm: null,
+  depthMm: null,
   imageId: null,
 };
 
@@ -130,7 +134,7 @@ describe('what a new version changes', () => {
   it('is a measurement that can no longer be taken', () => {
     const frail = withPart({
       measurements: [],
-      notTaken: [{ pointId: 'waist', label: 'Waist', reason: 'too-fragile' }],
+      notTaken: [{ pointId: 'waist', label: 'Waist', worn: null, reason: 'too-fragile' }],
     });
     expect(changesBetween(published, frail)).toEqual([
       {
@@ -156,6 +160,26 @@ describe('what a new version changes', () => {
     };
     expect(changesBetween(published, { ...published, images: [image] })).toEqual([
       { kind: 'added', area: 'picture', label: 'Picture, front', before: null, after: '1. Front.' },
+    ]);
+  });
+
+  it('tells left and right apart, also beside a version from before they were', () => {
+    const sleeve = { ...waist, pointId: 'sleeve-outer', label: 'Sleeve, outer', levelFoundBy: null };
+    const right = { ...sleeve, worn: 'right', valueMm: '588' } as const;
+    const left = { ...sleeve, worn: 'left', valueMm: '584', gapMm: '12' } as const;
+    const both = withPart({ measurements: [right, left] });
+    expect(changesBetween(both, both)).toEqual([]);
+    const before = JSON.parse(
+      JSON.stringify(
+        withPart({ measurements: [{ ...sleeve, valueMm: '588' }] }),
+        (name: string, value: unknown) =>
+          ['worn', 'method', 'gapMm', 'depthMm'].includes(name) ? undefined : value,
+      ),
+    ) as PublishedDocument;
+    expect(changesBetween(before, both).map(({ kind, label, after }) => [kind, label, after])).toEqual([
+      ['removed', 'Sleeve, outer (Bodice)', null],
+      ['added', 'Sleeve, outer, right, as worn (Bodice)', '588 mm ± 2.1 mm'],
+      ['added', 'Sleeve, outer, left, as worn (Bodice)', '584 mm ± 2.1 mm, gap of 12 mm taken off'],
     ]);
   });
 

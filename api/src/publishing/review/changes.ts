@@ -1,4 +1,5 @@
 import { levelLabels, notTakenReasons } from '@ellwand/shared/readings/reading';
+import { wornSideLabels } from '@ellwand/shared/readings/worn-side';
 import type {
   PublishedDocument,
   PublishedMeasurement,
@@ -99,23 +100,36 @@ function measurementsOf(document: PublishedDocument | null): Map<string, Entry> 
 
 function taken(part: PublishedPart): [string, Entry][] {
   return part.measurements.map((m) => [
-    `${part.number} ${m.pointId}`,
-    { label: `${m.label} (${part.name})`, text: readingText(m) },
+    keyOf(part, m),
+    { label: `${sided(m)} (${part.name})`, text: readingText(m) },
   ]);
 }
 
 function notTaken(part: PublishedPart): [string, Entry][] {
   return part.notTaken.map((n) => [
-    `${part.number} ${n.pointId}`,
-    { label: `${n.label} (${part.name})`, text: `Not taken. ${notTakenReasons[n.reason]}` },
+    keyOf(part, n),
+    { label: `${sided(n)} (${part.name})`, text: `Not taken. ${notTakenReasons[n.reason]}` },
   ]);
 }
 
+/** The same point of the same side, also beside a version from before sides were told apart. */
+function keyOf(part: PublishedPart, { pointId, worn }: Sided): string {
+  return `${part.number} ${pointId}${worn ? ` ${worn}` : ''}`;
+}
+
+type Sided = Pick<PublishedMeasurement, 'pointId' | 'label' | 'worn'>;
+
+const sided = ({ label, worn }: Sided) => (worn ? `${label}, ${wornSideLabels[worn]}` : label);
+
 /** To the last place that is kept: a change of a sixteenth of an inch is a change. */
-function readingText({ valueMm, uncertaintyMm, rounds, levelFoundBy }: PublishedMeasurement): string {
+function readingText(measurement: PublishedMeasurement): string {
+  const { valueMm, uncertaintyMm, rounds, levelFoundBy, method, gapMm, depthMm } = measurement;
   return [
     `${valueMm} mm ± ${uncertaintyMm} mm`,
+    method && 'flat, doubled',
     levelFoundBy && levelLabels[levelFoundBy],
+    depthMm && `${depthMm} mm below the waist`,
+    gapMm && `gap of ${gapMm} mm taken off`,
     rounds > 1 && `${rounds} rounds`,
   ]
     .filter(Boolean)

@@ -1,7 +1,8 @@
+import { Fragment, type ReactNode } from 'react';
 import { type PublishedMeasurement, type PublishedPart } from '@ellwand/shared/records/published-garment';
 import { type LitPoints } from '../../components/diagram/lit-points';
 import { Length, Spread, Uncertainty, UnitName } from '../../components/units/length';
-import { howHeld, levelText, roundsText } from './measuring-words';
+import { howHeld, levelText, roundsText, sidedKey, sidedLabel } from './measuring-words';
 import { PointName } from './point-name';
 
 interface MeasurementTableProps {
@@ -37,16 +38,21 @@ export function MeasurementTable({ part, letters, lit, rowId }: MeasurementTable
         </tr>
       </thead>
       <tbody>
-        {measurements.map((measurement) => (
-          <MeasurementRow
-            key={measurement.pointId}
-            part={part}
-            measurement={measurement}
-            letter={letters.get(measurement.pointId)}
-            lit={lit}
-            id={rowId(measurement.pointId)}
-          />
-        ))}
+        {measurements.map((measurement, index) => {
+          const { pointId } = measurement;
+          // Of a point read on both sides the first row is the one that its line leads to.
+          const leads = measurements.findIndex((other) => other.pointId === pointId) === index;
+          return (
+            <MeasurementRow
+              key={sidedKey(measurement)}
+              part={part}
+              measurement={measurement}
+              letter={letters.get(pointId)}
+              lit={lit}
+              id={rowId(leads ? pointId : sidedKey(measurement))}
+            />
+          );
+        })}
       </tbody>
     </table>
   );
@@ -61,7 +67,7 @@ interface MeasurementRowProps {
 }
 
 function MeasurementRow({ part, measurement, letter, lit, id }: MeasurementRowProps) {
-  const { pointId, label, valueMm, uncertaintyMm } = measurement;
+  const { pointId, valueMm, uncertaintyMm } = measurement;
   return (
     <tr
       data-lit={lit.lit === pointId ? '' : undefined}
@@ -77,7 +83,7 @@ function MeasurementRow({ part, measurement, letter, lit, id }: MeasurementRowPr
             id={id}
             className="letter"
             aria-pressed={lit.chosen === pointId}
-            aria-label={`${letter}: show ${label.toLowerCase()} on the diagram`}
+            aria-label={`${letter}: show ${sidedLabel(measurement).toLowerCase()} on the diagram`}
             onClick={() => lit.chooseRow(pointId)}
           >
             {letter}
@@ -85,7 +91,7 @@ function MeasurementRow({ part, measurement, letter, lit, id }: MeasurementRowPr
         )}
       </td>
       <th scope="row">
-        <PointName part={part} pointId={pointId} label={label} />
+        <PointName part={part} point={measurement} />
         <HowMeasured part={part} measurement={measurement} />
       </th>
       <td className="measures-value">
@@ -99,25 +105,48 @@ function MeasurementRow({ part, measurement, letter, lit, id }: MeasurementRowPr
 }
 
 /**
- * The small print of a row. A half and whole tapes are told, so that the figure can be followed;
+ * The small print of a row. A half, a gap and whole tapes are told, so that the figure can be followed;
  * tapes are counted in the millimetres they are marked in.
  */
 function HowMeasured({ part, measurement }: Pick<MeasurementRowProps, 'part' | 'measurement'>) {
-  const { pointId, halfMm, tapeLengths, rounds, spreadMm } = measurement;
-  const words = [howHeld(pointId, part), levelText(measurement)].filter((text) => text !== null).join('; ');
+  const { halfMm, tapeLengths, gapMm, depthMm } = measurement;
+  const told: readonly (ReactNode | null)[] = [
+    howHeld(measurement, part),
+    levelText(measurement),
+    depthMm && (
+      <>
+        <Length mm={depthMm} /> below the waist
+      </>
+    ),
+    halfMm && (
+      <>
+        half <Length mm={halfMm} />
+      </>
+    ),
+    tapeLengths && `${tapeLengths.count} × ${tapeLengths.tapeMm} mm + ${tapeLengths.restMm} mm`,
+    gapMm && (
+      <>
+        the tape crossed a gap of <Length mm={gapMm} />, taken off
+      </>
+    ),
+    <Rounds key="rounds" measurement={measurement} />,
+  ];
   return (
     <span className="measures-how">
-      {words && `${words}; `}
-      {halfMm && (
-        <>
-          half <Length mm={halfMm} />;{' '}
-        </>
-      )}
-      {tapeLengths && (
-        <>
-          {tapeLengths.count} × {tapeLengths.tapeMm} mm + {tapeLengths.restMm} mm;{' '}
-        </>
-      )}
+      {told.filter(Boolean).map((words, index) => (
+        <Fragment key={index}>
+          {index > 0 && '; '}
+          {words}
+        </Fragment>
+      ))}
+    </span>
+  );
+}
+
+function Rounds({ measurement }: Pick<MeasurementRowProps, 'measurement'>) {
+  const { rounds, spreadMm } = measurement;
+  return (
+    <>
       {roundsText(measurement)}
       {rounds > 1 && Number(spreadMm) === 0 && ', the same'}
       {rounds > 1 && Number(spreadMm) > 0 && (
@@ -125,6 +154,6 @@ function HowMeasured({ part, measurement }: Pick<MeasurementRowProps, 'part' | '
           , <Spread mm={spreadMm} /> apart
         </>
       )}
-    </span>
+    </>
   );
 }

@@ -1,6 +1,7 @@
 import { type PublishedMeasurement, type PublishedPart } from '@ellwand/shared/records/published-garment';
 import { findMeasuringPoint } from '@ellwand/shared/points/measuring-points';
 import { type MeasuringHow, sideLabels } from '@ellwand/shared/points/point';
+import { wornSideLabels } from '@ellwand/shared/readings/worn-side';
 import { counted } from '../../lib/words';
 
 type NotTakenReason = PublishedPart['notTaken'][number]['reason'];
@@ -45,10 +46,28 @@ const tapeWent: Readonly<Record<MeasuringHow, string>> = {
   'flat-doubled': 'flat, doubled',
 };
 
-/** How the tape went, in as few words as a row has room for: "Inside, round". Its point's page says it in full. */
-export function howHeld(pointId: string, { ownPoints }: Pick<PublishedPart, 'ownPoints'>): string | null {
+/**
+ * How the tape went, in as few words as a row has room for: "Inside, round". Its point's page says it in full; where
+ * it went otherwise than that page says, the row tells.
+ */
+export function howHeld(
+  { pointId, method }: Pick<PublishedMeasurement, 'pointId' | 'method'>,
+  { ownPoints }: Pick<PublishedPart, 'ownPoints'>,
+): string | null {
   const point = ownPoints.find(({ id }) => id === pointId) ?? findMeasuringPoint(pointId);
-  return point ? `${sideLabels[point.side]}, ${tapeWent[point.how]}` : null;
+  if (!point) return null;
+  const otherwise = method && method !== point.how ? 'flat and doubled instead of ' : '';
+  return `${sideLabels[point.side]}, ${otherwise}${tapeWent[point.how]}`;
+}
+
+/** One row for each point and side. */
+export function sidedKey({ pointId, worn }: Pick<PublishedMeasurement, 'pointId' | 'worn'>): string {
+  return worn ? `${pointId}-${worn}` : pointId;
+}
+
+/** "Sleeve, outer, left, as worn": a name, and which of a pair it is where that was told. */
+export function sidedLabel({ label, worn }: Pick<PublishedMeasurement, 'label' | 'worn'>): string {
+  return worn ? `${label}, ${wornSideLabels[worn]}` : label;
 }
 
 /** How the level was found, where the point has one. */

@@ -1,5 +1,5 @@
 import { type PublishedPart } from '@ellwand/shared/records/published-garment';
-import { reasonWords } from './measuring-words';
+import { reasonWords, sidedKey } from './measuring-words';
 import { PointName } from './point-name';
 
 /** The points that could not be taken, each with its reason. */
@@ -9,9 +9,9 @@ export function NotTaken({ part }: { readonly part: PublishedPart }) {
     <div className="not-taken">
       <h3>Not taken</h3>
       <ul>
-        {part.notTaken.map(({ pointId, label, reason }) => (
-          <li key={pointId}>
-            <PointName part={part} pointId={pointId} label={label} />: {reasonWords[reason]}
+        {part.notTaken.map((point) => (
+          <li key={sidedKey(point)}>
+            <PointName part={part} point={point} />: {reasonWords[point.reason]}
           </li>
         ))}
       </ul>

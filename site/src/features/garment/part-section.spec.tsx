@@ -121,3 +121,45 @@ describe('a part measured by a later protocol', () => {
     expect(screen.getByText('From the lower edge of the band to the loop’s stitching.')).toBeTruthy();
   });
 });
+
+describe('a part of which both sides were read', () => {
+  const [first] = skirt.measurements;
+  if (!first) throw new Error('the skirt of the fixtures is measured');
+  const side = { ...first, pointId: 'waist-to-hem-side', label: 'Waist to hem, side' };
+
+  beforeEach(() => {
+    cleanup();
+    show({
+      ...skirt,
+      measurements: [
+        { ...side, worn: 'right', valueMm: '1030' },
+        { ...side, worn: 'left', valueMm: '1042', gapMm: '28', depthMm: '60' },
+        { ...first, method: 'flat-doubled', halfMm: '310' },
+      ],
+      notTaken: [{ ...side, pointId: 'side-seam', label: 'Side seam', worn: 'left', reason: 'too-fragile' }],
+    });
+  });
+
+  it('names the side in each row, and lights one line for both', () => {
+    const rows = ['waist-to-hem-side', 'waist-to-hem-side-left'].map(rowOf);
+    expect(rows.map((row) => row?.querySelector('th')?.firstChild?.textContent)).toEqual(
+      Array(2).fill('Waist to hem, side'),
+    );
+    expect(rows[0]?.textContent).toContain('right, as worn');
+    expect(rows[1]?.textContent).toContain('left, as worn');
+    expect(linesOf('waist-to-hem-side')).toHaveLength(2);
+    fireEvent.click(button(/waist to hem, side, left, as worn on the diagram/));
+    expect(rows.map((row) => row?.hasAttribute('data-lit'))).toEqual([true, true]);
+    expect(screen.getByText(/left, as worn: too fragile/)).toBeTruthy();
+  });
+
+  it('tells what the tape crossed, how deep the level lay, and a method that is not the point’s own', () => {
+    const left = rowOf('waist-to-hem-side-left')?.textContent;
+    expect(left).toContain('60 mm');
+    expect(left).toContain('below the waist');
+    expect(left).toMatch(/the tape crossed a gap of 28 mm.*, taken off; 2 readings/);
+    expect(rowOf(first.pointId)?.textContent).toMatch(
+      /Inside, flat and doubled instead of round; half 310 mm/,
+    );
+  });
+});

@@ -29,7 +29,7 @@ export function PartSection({ part, index, alone, picture, heading }: PartSectio
   const lit = useLitPoints(rowId);
   const letters = useMemo(() => lettersOf(part), [part]);
   const ownLines = useMemo(() => extraLinesOf(part.ownPoints), [part]);
-  const points = useMemo(() => part.measurements.map(({ pointId }) => pointId), [part]);
+  const points = useMemo(() => [...new Set(part.measurements.map(({ pointId }) => pointId))], [part]);
   const title = alone ? 'Measurements' : `${part.name}: measurements`;
   return (
     <section className="part" aria-label={alone ? 'Measurements' : part.name}>

@@ -1,5 +1,6 @@
 import type { PublishedDocument, PublishedPart } from '@ellwand/shared/records/published-garment';
 import { notTakenReasons } from '@ellwand/shared/readings/reading';
+import { wornSideLabels } from '@ellwand/shared/readings/worn-side';
 import { formatLength } from '@ellwand/shared/units/format-length';
 import { mm } from '@ellwand/shared/units/length';
 import { staffPicture } from '../../../config/paths.js';
@@ -91,7 +92,10 @@ function PreviewPart({ part }: { readonly part: PublishedPart }) {
         <p className="mt-2 text-label text-ink-3">
           Not taken:{' '}
           {part.notTaken
-            .map(({ label, reason }) => `${label} (${notTakenReasons[reason].toLowerCase()})`)
+            .map(
+              ({ label, worn, reason }) =>
+                `${worn ? `${label}, ${wornSideLabels[worn]}` : label} (${notTakenReasons[reason].toLowerCase()})`,
+            )
             .join('; ')}
           .
         </p>
@@ -121,10 +125,11 @@ function Measurements({ part }: { readonly part: PublishedPart }) {
         </tr>
       </thead>
       <tbody className="figures">
-        {part.measurements.map(({ pointId, label, valueMm, uncertaintyMm }) => (
-          <tr key={pointId} className="border-b border-hair">
+        {part.measurements.map(({ pointId, label, worn, valueMm, uncertaintyMm }) => (
+          <tr key={`${pointId} ${worn}`} className="border-b border-hair">
             <th scope="row" className="py-1 text-left font-normal">
               {label}
+              {worn && `, ${wornSideLabels[worn]}`}
             </th>
             <td className="py-1 text-right">{formatLength(mm(valueMm), 'mm').replace(' mm', '')}</td>
             <td className="py-1 text-right text-ink-3">{uncertaintyMm}</td>
