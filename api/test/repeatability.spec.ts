@@ -72,7 +72,7 @@ describe('how well readings repeat', () => {
       temMm: Math.round(Math.sqrt(21 / 8) * 1000) / 1000,
     });
     expect(points[0]?.pairs).toHaveLength(4);
-    expect(points[0]?.says).toMatch(/^Only 4 pieces: .* Every later reading is another reader’s\.$/);
+    expect(points[0]?.says).toMatch(/^Only 4 were read twice: .* Every later reading is another reader’s\.$/);
   });
 
   it('holds what was read of a study piece together, over all its study sheets', async () => {

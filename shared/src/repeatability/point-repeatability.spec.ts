@@ -25,13 +25,15 @@ describe('the repeatability of a point', () => {
     });
     expect(pointRepeatability([twice(612, 610)])).toMatchObject({
       ...{ n: 1, temMm: null, r: null, limitsMm: null, meanDifferenceMm: -2 },
-      says: 'A single piece was read twice: nothing can be worked out from one. Every later reading is another reader’s.',
+      says: 'Only one was read twice: nothing can be worked out from one. Every later reading is another reader’s.',
     });
     expect(pointRepeatability([twice(612, 610), twice(588, 590)]).says).toMatch(
-      /^Only 2 pieces: the next one may/,
+      /^Only 2 were read twice: the next one may/,
     );
     const ten = Array.from({ length: 10 }, (_, index) => twice(600 + 10 * index, 601 + 10 * index));
-    expect(pointRepeatability(ten).says).toBe('From 10 pieces. Every later reading is another reader’s.');
+    expect(pointRepeatability(ten).says).toBe(
+      'From 10 read twice or more. Every later reading is another reader’s.',
+    );
   });
 
   it('says whose hands are compared, and names nobody', () => {

@@ -79,9 +79,9 @@ function inWords(n: number, byAnother: number, pairs: number): string {
 
 function howMany(n: number): string {
   if (n === 0) return 'Nothing was read twice at this point yet.';
-  if (n === 1) return 'A single piece was read twice: nothing can be worked out from one.';
-  if (n < ENOUGH) return `Only ${n} pieces: the next one may change these figures much.`;
-  return `From ${n} pieces.`;
+  if (n === 1) return 'Only one was read twice: nothing can be worked out from one.';
+  if (n < ENOUGH) return `Only ${n} were read twice: the next one may change these figures much.`;
+  return `From ${n} read twice or more.`;
 }
 
 function byWhom(n: number, byAnother: number, pairs: number): string {

@@ -14,7 +14,9 @@ describe('the page of repeatability', () => {
     expect(figureOf(waist, 'Technical error')).toBe('1.4 mm, 0.22 % of the mean');
     expect(figureOf(waist, 'Reliability, R')).toBe('0.998');
     expect(figureOf(waist, 'Limits of agreement')).toBe('−3.8 to +4.2 mm');
-    expect(within(waist).getByText('From 10 pieces. Every later reading is another reader’s.')).toBeVisible();
+    expect(
+      within(waist).getByText('From 10 read twice or more. Every later reading is another reader’s.'),
+    ).toBeVisible();
     expect(within(waist).getByRole('img', { name: /^Waist: difference of two readings/ })).toBeVisible();
     await user.click(within(waist).getByText('The 10 pairs as a table'));
     expect(within(within(waist).getByRole('table')).getAllByRole('row')).toHaveLength(11);
@@ -24,18 +26,20 @@ describe('the page of repeatability', () => {
   it('is honest about few pieces, and about one', async () => {
     renderWorkroom('/repeatability');
     const hem = await screen.findByRole('article', { name: 'Hem' });
-    expect(within(hem).getByText(/^Only 3 pieces: the next one may change these figures much/)).toBeVisible();
+    expect(
+      within(hem).getByText(/^Only 3 were read twice: the next one may change these figures much/),
+    ).toBeVisible();
     const cuff = screen.getByRole('article', { name: 'Cuff' });
     expect(figureOf(cuff, 'Technical error')).toBe('cannot be told yet');
     expect(figureOf(cuff, 'Limits of agreement')).toBe('cannot be told yet');
     expect(within(cuff).getByText(/Each by one reader/)).toBeVisible();
   });
 
-  it('takes study pieces or records alone, and its address keeps which', async () => {
+  it('takes study sheets or record sheets alone, and its address keeps which', async () => {
     const { user, asked } = renderWorkroom('/repeatability?from=study');
     await screen.findByRole('article', { name: 'Waist' });
-    expect(screen.getByRole('link', { name: 'Study pieces' })).toHaveAttribute('aria-current', 'true');
-    await user.click(screen.getByRole('link', { name: 'Records' }));
+    expect(screen.getByRole('link', { name: 'Study sheets' })).toHaveAttribute('aria-current', 'true');
+    await user.click(screen.getByRole('link', { name: 'Record sheets' }));
     expect(await screen.findByRole('article', { name: 'Hem' })).toBeVisible();
     expect(screen.queryByRole('article', { name: 'Waist' })).toBeNull();
     expect(asked.filter((one) => one === 'GET /workroom/repeatability')).toHaveLength(2);

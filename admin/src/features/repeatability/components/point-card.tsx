@@ -32,7 +32,7 @@ function Figures({ point }: { readonly point: RepeatabilityPoint }) {
     ['Reliability, R', r === null ? null : reliabilityText(r)],
     ['Mean difference', meanDifferenceMm === null ? null : `${signed(meanDifferenceMm, 1)} mm`],
     ['Limits of agreement', limitsMm && `${signed(limitsMm.lower, 1)} to ${signed(limitsMm.upper, 1)} mm`],
-    ['Pieces read', String(n)],
+    ['Read twice or more', String(n)],
     ['Readings of each', k > 2 ? `2 to ${k}` : '2'],
   ];
   return (

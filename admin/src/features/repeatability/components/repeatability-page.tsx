@@ -10,8 +10,8 @@ import { PointCard } from './point-card.js';
 
 const sourceLabels: Readonly<Record<RepeatabilitySource, string>> = {
   all: 'All',
-  study: 'Study pieces',
-  record: 'Records',
+  study: 'Study sheets',
+  record: 'Record sheets',
 };
 
 const isSource = (text: string | null): text is RepeatabilitySource =>
@@ -65,9 +65,9 @@ function Sources({ from }: { readonly from: RepeatabilitySource }) {
 }
 
 const steps: Readonly<Record<RepeatabilitySource, string>> = {
-  all: 'Choose points to read twice when you open a measuring sheet, or open a study sheet for a sturdy piece that two people read in turn.',
+  all: 'Choose points to read twice when you open a measuring sheet, or open a study sheet for something sturdy that two people read in turn.',
   study:
-    'Open a study sheet for a sturdy piece, and let two people read it in turn without seeing each other’s figures.',
+    'Open a study sheet for something sturdy, and let two people read it in turn without seeing each other’s figures.',
   record:
     'Choose points to read twice when you open a measuring sheet. The second round does not show the first.',
 };
