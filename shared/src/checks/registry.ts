@@ -14,6 +14,7 @@ import { halfTypedAsWhole } from './half-typed-as-whole.js';
 import { hemShorterThanWaist } from './hem-shorter-than-waist.js';
 import { hipWithoutDepth } from './hip-without-depth.js';
 import { hoopAgainstEllipse } from './hoop-against-ellipse.js';
+import { hoopsOutOfOrder } from './hoops-out-of-order.js';
 import { impossibleLength } from './impossible-length.js';
 import { innerWaistBandOverWaist } from './inner-waist-band-over-waist.js';
 import { insideLegOverOutsideLeg } from './inside-leg-over-outside-leg.js';
@@ -68,6 +69,7 @@ export const checks: readonly Check[] = [
   backWaistOverFullBack,
   corsetWaistOverBottom,
   hoopAgainstEllipse,
+  hoopsOutOfOrder,
   palmOverGloveLength,
   treadOverSole,
   brimSidesDiffer,

@@ -12,6 +12,15 @@ import {
 
 const outsideRound = { side: 'outside', how: 'round', handlingStep: 'front-up' } as const;
 
+const hoop = {
+  group: 'hoop',
+  from: 'the joint of the hoop',
+  to: 'the same joint again',
+  ...outsideRound,
+  kinds: ['crinoline'],
+  takesTapeLengths: true,
+} as const;
+
 export const foundationPoints = [
   point({
     id: 'corset-waist-closed',
@@ -76,6 +85,23 @@ export const foundationPoints = [
     kinds: ['corset'],
     softRange: between(0, 150),
     watchFor: 'Read by itself and never added to the waist.',
+  }),
+  point({
+    ...hoop,
+    id: 'crinoline-top-hoop-round',
+    name: 'Top hoop, round',
+    definition: 'Round the uppermost hoop, outside.',
+    softRange: between(600, 2000),
+    watchFor: 'The first hoop that is a whole round; half hoops at the top are left out.',
+  }),
+  point({
+    ...hoop,
+    id: 'crinoline-middle-hoop-round',
+    name: 'Middle hoop, round',
+    definition: 'Round the hoop half way from the uppermost to the lowest, outside.',
+    softRange: between(900, 3000),
+    watchFor:
+      'Say in the note which hoop it is, counted from the top. The others may be points of the house’s own.',
   }),
   point({
     id: 'crinoline-base-round',

@@ -34,6 +34,7 @@ export const groupLabels = {
   heel: 'Heel',
   busk: 'Busk',
   'lacing-gap': 'Lacing gap',
+  hoop: 'Hoop',
   'crinoline-base': 'Crinoline base',
   bustle: 'Bustle',
 } as const;

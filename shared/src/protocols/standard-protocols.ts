@@ -126,12 +126,15 @@ const stepsByKind: Readonly<Record<GarmentKind, Steps>> = {
   },
   crinoline: {
     inside: must('waistband'),
-    front: must(
-      'crinoline-base-round',
-      'crinoline-base-depth',
-      'crinoline-base-width',
-      'crinoline-front-length',
-    ),
+    front: [
+      ...may('crinoline-top-hoop-round', 'crinoline-middle-hoop-round'),
+      ...must(
+        'crinoline-base-round',
+        'crinoline-base-depth',
+        'crinoline-base-width',
+        'crinoline-front-length',
+      ),
+    ],
     back: must('crinoline-back-length'),
   },
   bustle: {

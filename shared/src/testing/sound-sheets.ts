@@ -153,6 +153,8 @@ export const soundReadings: Readonly<Record<GarmentKind, Readonly<Partial<Record
   },
   crinoline: {
     waistband: 636,
+    'crinoline-top-hoop-round': 1180,
+    'crinoline-middle-hoop-round': 1930,
     'crinoline-base-round': 2501,
     'crinoline-base-depth': 848,
     'crinoline-base-width': 766,

@@ -32,6 +32,8 @@ export const crinoline: GarmentDiagram = {
   views: [front, side],
   lines: [
     allRound('waistband', 'front', '-118,-18--118,-18', { sag: 8 }),
+    allRound('crinoline-top-hoop-round', 'front', '-208,134{5}..{0}0,156..{-5}208,134', { beside: -14 }),
+    allRound('crinoline-middle-hoop-round', 'front', '-352,484{9}..{0}0,534..{-9}352,484', { beside: -14 }),
     allRound('crinoline-base-round', 'front', '-468,930{14}..{0}0,1000..{-14}468,930', { beside: -16 }),
     straightLine('crinoline-base-width', 'front', '-468,930--468,930'),
     straightLine('crinoline-front-length', 'front', '0,6--0,994'),
