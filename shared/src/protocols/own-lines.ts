@@ -4,9 +4,10 @@ import { type ViewName } from '../drawings/diagram/model.js';
 import { paintDiagram, type DiagramRequest } from '../drawings/diagram/paint-diagram.js';
 import { pointMarks } from '../drawings/diagram/point-marks.js';
 import { isNarrow, layOut, type Projection } from '../drawings/diagram/projection.js';
-import { type Scene, type ScenePoint } from '../drawings/diagram/scene.js';
+import { type Scene, type ScenePoint, type ScenePrimitive } from '../drawings/diagram/scene.js';
 import { drawView } from '../drawings/diagram/view-shapes.js';
 import { placeAlong } from '../drawings/geometry/path.js';
+import { distance, type Point } from '../drawings/geometry/point.js';
 import { diagramFor } from '../drawings/kinds/diagram-for.js';
 import { type ExtraLine } from './extra-lines.js';
 
@@ -37,26 +38,50 @@ export function paintProtocol(
       return place ? [[name, place.projection] as const] : [];
     }),
   );
-  const drawn = lines.flatMap((line): ScenePoint[] => {
+  const drawn: ScenePoint[] = [];
+  for (const line of lines) {
     const projection = projections.get(line.view);
     const wanted = request.points?.includes(line.pointId) ?? letterIn(request.letters, line.pointId) !== '';
-    return projection && wanted && line.along.length > 1 ? [paintLine(line, projection, request)] : [];
-  });
+    if (!projection || !wanted || line.along.length < 2) continue;
+    drawn.push(paintLine(line, projection, request, ringsOf([...scene.primitives, ...drawn])));
+  }
   return { scene: { ...scene, primitives: [...scene.primitives, ...drawn] }, projections };
 }
 
-function paintLine(line: ExtraLine, projection: Projection, request: DiagramRequest): ScenePoint {
+function paintLine(
+  line: ExtraLine,
+  projection: Projection,
+  request: DiagramRequest,
+  rings: readonly Point[],
+): ScenePoint {
   const { pointId, view, way, along } = line;
   const join = way === 'straight' || way === 'doubled' ? '--' : '..';
   const path = along.map(([x, y]) => `${tenth(x)},${tenth(y)}`).join(join);
   const drawn = drawLine({ pointId, view, way, stretches: [path], beside: 0, sag: 0 }, {}, projection);
   const style = isNarrow(request.widthPx) ? { radius: 9, size: 11.5 } : { radius: 10, size: 12 };
-  const letter = { text: letterIn(request.letters, pointId), place: letterPlace(drawn) };
+  const letter = {
+    text: letterIn(request.letters, pointId),
+    place: letterPlace(drawn, rings, 2 * style.radius + 3),
+  };
   return pointMarks(drawn, letter, style, pointId === request.current);
 }
 
-function letterPlace({ stretches: [path] }: DrawnLine) {
-  return path && { at: placeAlong(path, 0.5).at, cost: 0 };
+/** The middles of the letters that are there already. */
+function ringsOf(primitives: readonly ScenePrimitive[]): Point[] {
+  const marks = primitives.flatMap((each) => (each.type === 'point' ? each.marks : []));
+  return marks.flatMap((mark): Point[] =>
+    mark.type === 'circle' && mark.role.startsWith('ring') ? [[mark.cx, mark.cy]] : [],
+  );
+}
+
+/** From the middle of the line outwards: the first place that leaves the letters there are alone. */
+const SHARES = [0.5, 0.42, 0.58, 0.34, 0.66, 0.26, 0.74, 0.18, 0.82];
+
+function letterPlace({ stretches: [path] }: DrawnLine, rings: readonly Point[], apart: number) {
+  if (!path) return undefined;
+  const places = SHARES.map((share) => placeAlong(path, share).at);
+  const free = places.find((at) => rings.every((ring) => distance(at, ring) >= apart));
+  return { at: free ?? placeAlong(path, 0.5).at, cost: 0 };
 }
 
 function letterIn(letters: DiagramRequest['letters'], pointId: string): string {
