@@ -27,11 +27,16 @@ export async function closeTestHouses() {
  * @param {string} root
  * @param {string} dataFolder
  * @param {string[]} args of start.mjs
- * @returns {Promise<import('./house-lock.mjs').Running>} its addresses
+ * @param {NodeJS.ProcessEnv} [settings] beyond port and data folder
+ * @returns {Promise<import('./house-lock.mjs').Running & { listens: string }>} its addresses, and where it listens
  */
-export async function openTestHouse(root, dataFolder, args) {
+export async function openTestHouse(root, dataFolder, args, settings = {}) {
   const port = await freePort();
-  const child = spawnStart(root, args, { ELLWAND_PORT: String(port), ELLWAND_DATA: dataFolder });
+  const child = spawnStart(root, args, {
+    ELLWAND_PORT: String(port),
+    ELLWAND_DATA: dataFolder,
+    ...settings,
+  });
   openHouses.add(child);
   let output = '';
   const keep = (/** @type {Buffer} */ chunk) => (output += chunk.toString());
@@ -40,7 +45,7 @@ export async function openTestHouse(root, dataFolder, args) {
   const deadline = Date.now() + OPEN_WITHIN_MS;
   for (;;) {
     const running = readRunning(dataFolder);
-    if (running?.ready) return running;
+    if (running?.ready) return { ...running, listens: `http://127.0.0.1:${port}` };
     if (hasEnded(child) || Date.now() > deadline) {
       throw new PlainFailure('Ellwand did not open for the tests; its last words are above.', {
         detail: output,
