@@ -1,8 +1,8 @@
 /**
  * `npm run drill:offline -- --rounds N [--control]`: types readings into a real Workroom while tabs and the API are
  * killed and the network breaks, then holds what was typed against what MariaDB has kept. Its last line is
- * `N rounds: 0 lost, 0 doubled`; anything else ends with 1. With --control the browser keeps nothing on the disk, and
- * the drill must find losses.
+ * `N rounds: 0 lost, 0 doubled`; anything else ends with 1. With --control the tablet forgets what waits when a tab
+ * dies, and the drill must find losses.
  */
 import fs from 'node:fs';
 import path from 'node:path';
@@ -24,27 +24,14 @@ import { dice, playRound } from './rounds.js';
 import { Tablet } from './table.js';
 
 const MOST_ROUNDS = 2_000;
-/** A browser that refuses its database: the Workroom goes on in memory, and a killed tab forgets. */
-const keepNothing = `IDBFactory.prototype.open = () => { throw new DOMException('refused', 'SecurityError'); };`;
-
-const pointNames: Readonly<Record<string, string>> = {
-  bust: 'Bust or chest',
-  waist: 'Waist',
-  'inner-waist-band': 'Inner waist band',
-  neck: 'Neck',
-  'side-seam': 'Side seam',
-  armscye: 'Armscye',
-  cuff: 'Cuff',
-};
-
 async function keptIn(dataFolder: string): Promise<readonly Entry[]> {
   const rows = await runAsAdministrator(dataFolder, ['SELECT point_id, typed FROM ellwand.reading']);
   return rows
     .split('\n')
     .filter((line) => line.includes('\t'))
     .map((line) => {
-      const [pointId = '', figure = ''] = line.split('\t');
-      return { point: pointNames[pointId] ?? pointId, figure };
+      const [point = '', figure = ''] = line.split('\t');
+      return { point, figure };
     });
 }
 
@@ -66,7 +53,7 @@ async function drill({ rounds, control, folder }: Drill): Promise<boolean> {
   const profile = path.join(folder, 'tablet');
   fs.mkdirSync(profile, { recursive: true });
   const chromium = findProgram(CHROMIUM.program) ?? '';
-  const seat = { chromium, profile, url, sheetId, ...(control ? { initScript: keepNothing } : {}) };
+  const seat = { chromium, profile, url, sheetId, forgetful: control };
   const tablet = await Tablet.open(seat);
   const typed: Entry[] = [];
   try {

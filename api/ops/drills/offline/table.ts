@@ -14,16 +14,28 @@ const SOON_MS = 20_000;
 /** Longer than a hand rests before a draft is written (150 ms). */
 const REST_MS = 350;
 const SETTLES_MS = 250;
+const SENT_WITHIN_MS = 90_000;
+/** As if nothing of it had ever reached the disk. */
+const forgetAll = `new Promise((resolve, reject) => {
+  const opening = indexedDB.open('ellwand-workroom');
+  opening.onerror = reject;
+  opening.onsuccess = () => {
+    const clearing = opening.result.transaction(['outbox', 'drafts'], 'readwrite');
+    clearing.objectStore('outbox').clear();
+    clearing.objectStore('drafts').clear();
+    clearing.oncomplete = () => resolve(true);
+  };
+})`;
+const DIES_WITHIN_MS = 300;
 
-/** Points of the sheet that take one figure each, by what their boxes are called. */
+/** Points of the sheet that take one figure each and come before the garment is turned. */
 export const points: readonly string[] = [
-  'Bust or chest',
-  'Waist',
-  'Inner waist band',
-  'Neck',
-  'Side seam',
-  'Armscye',
-  'Cuff',
+  'bust',
+  'waist',
+  'inner-waist-band',
+  'neck',
+  'side-seam',
+  'armscye',
 ];
 
 export interface Seat {
@@ -31,8 +43,8 @@ export interface Seat {
   readonly profile: string;
   readonly url: string;
   readonly sheetId: string;
-  /** Run before every page, for the control that must fail. */
-  readonly initScript?: string;
+  /** For the control: whatever waits on the disk is gone when a tab dies. */
+  readonly forgetful: boolean;
 }
 
 /** A tablet at the table: a browser with a profile that outlives its tabs, and a hand that types. */
@@ -50,10 +62,10 @@ export class Tablet {
       viewport: { width: 1024, height: 768 },
       locale: 'en-GB',
     });
-    if (seat.initScript) await context.addInitScript(seat.initScript);
     const page = context.pages()[0] ?? (await context.newPage());
-    page.setDefaultTimeout(SOON_MS);
-    return new Tablet(seat, context, page);
+    const tablet = new Tablet(seat, context, page);
+    await tablet.attend(page);
+    return tablet;
   }
 
   async signIn(): Promise<void> {
@@ -69,12 +81,9 @@ export class Tablet {
   /** Opens the sheet, from the tablet alone where there is no network, and goes past what is said once. */
   async openSheet(): Promise<void> {
     await this.page.goto(`${this.seat.url}/workroom/sheets/${this.seat.sheetId}`);
-    const lies = this.page.getByRole('button', { name: /It lies so/ });
-    await lies.or(this.box(points[0]!)).first().waitFor();
-    // The question covers the boxes, and may come a moment after them.
+    await this.box(points[0]!).click();
+    // The question about how the garment lies may come a moment after the boxes.
     await this.page.waitForTimeout(SETTLES_MS);
-    if (await lies.isVisible()) await lies.click();
-    await this.box(points[0]!).waitFor();
   }
 
   /** Types a figure and leaves it in its box. */
@@ -94,24 +103,38 @@ export class Tablet {
 
   /** Until everything that was keyed is at the museum. */
   async allSent(): Promise<void> {
-    await this.page.getByText(/^All readings sent/).waitFor({ timeout: 90_000 });
+    const sent = this.page.getByText(/^All readings sent/);
+    // A tablet that forgets may have nothing to send, and then never says so.
+    if (this.seat.forgetful) await sent.waitFor({ timeout: SOON_MS / 4 }).catch(() => undefined);
+    else await sent.waitFor({ timeout: SENT_WITHIN_MS });
   }
 
   /** The tab dies without being told: no handler of the page runs. */
   async kill(): Promise<void> {
     const dying = this.page;
+    if (this.seat.forgetful) await dying.evaluate(forgetAll);
     this.page = await this.context.newPage();
-    this.page.setDefaultTimeout(SOON_MS);
+    await this.attend(this.page);
     const session = await this.context.newCDPSession(dying);
-    await session.send('Page.crash').catch(() => undefined);
-    await dying.close({ runBeforeUnload: false }).catch(() => undefined);
+    // A renderer that has died answers nothing any more: nobody waits for it long.
+    const dead = session.send('Page.crash').catch(() => undefined);
+    await Promise.race([dead, this.page.waitForTimeout(DIES_WITHIN_MS)]);
+    const gone = dying.close({ runBeforeUnload: false }).catch(() => undefined);
+    await Promise.race([gone, this.page.waitForTimeout(DIES_WITHIN_MS)]);
   }
 
   async close(): Promise<void> {
     await this.context.close();
   }
 
+  /** Says "it lies so" whenever the garment is to be turned. */
+  private async attend(page: Page): Promise<void> {
+    page.setDefaultTimeout(SOON_MS);
+    const lies = page.getByRole('button', { name: /It lies so/ });
+    await page.addLocatorHandler(lies, () => lies.click());
+  }
+
   private box(point: string) {
-    return this.page.getByRole('textbox', { name: new RegExp(`^${point}\\s*, millimetres`) });
+    return this.page.locator(`#reading-${point}-1`);
   }
 }
