@@ -1,3 +1,4 @@
+import { setTimeout as wait } from 'node:timers/promises';
 import type { Garment } from '@ellwand/shared/records/garment';
 import type { PublishedGarment, SearchAnswer } from '@ellwand/shared/records/published-garment';
 import type { ProtocolList } from '@ellwand/shared/records/protocol';
@@ -224,6 +225,19 @@ describe('protocols', () => {
       );
     });
 
+    it('follow at once what another process of the API has made', async () => {
+      await openSheet(table, skirtPart(), factsWith(reader, holder));
+      const { points, ownPoints, note } = skirtWithLoop();
+      await house.owner.source.query(
+        `INSERT INTO ellwand.protocol (id, kind, worn_together, version, body, note, made_by, made_at)
+         VALUES (UUID(), 'skirt', FALSE, 2, ?, ?, ?, NOW(3))`,
+        [JSON.stringify({ points, ownPoints }), note, keeper.id],
+      );
+      const next = await openSheet(table, skirtPart(), factsWith(reader, holder));
+      expect(next.protocolVersion).toBe(2);
+      expect(asks(next)).toContain(loopDepth.id);
+    });
+
     it('take and check readings of an own point', async () => {
       await makeProtocol(administrator, 'skirt', 1, skirtWithLoop());
       const sheet = await openSheet(table, skirtPart(), factsWith(reader, holder));
@@ -280,6 +294,8 @@ describe('protocols', () => {
         label: 'Band to train loop',
         valueMm: '812',
       });
+      // The search answers from what was known a quarter of a second ago at most.
+      await wait(260);
       const found = async (measure: string) =>
         (await visitor.get('/api/v1/catalogue/garments').query({ measure })).body as SearchAnswer;
       expect((await found(`${loopDepth.id}:800..820`)).total).toBe(1);
