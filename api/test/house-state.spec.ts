@@ -1,6 +1,7 @@
 import { Work } from '../src/common/work';
 import { clearUnfinished, houseState, markHouse } from '../src/demonstration/house-state';
 import { type House, openHouse } from './harness/house';
+import { makeProtocol, skirtWithLoop } from './support/protocols';
 import { factsWith, makeDress, openSheet, reading } from './support/garments';
 
 describe('a house and its demonstration', () => {
@@ -26,7 +27,7 @@ describe('a house and its demonstration', () => {
     expect(await houseState(work)).toBe('in-use');
   });
 
-  it('is cleared of what an interrupted filling left, corrected readings too', async () => {
+  it('is cleared of what an interrupted filling left, corrected readings and protocols too', async () => {
     const reader = await house.person('recorder');
     const recorder = await house.signInAs(reader);
     const dress = await makeDress(recorder);
@@ -41,10 +42,16 @@ describe('a house and its demonstration', () => {
     await recorder
       .post(path)
       .send({ readings: [reading('waistband', '618', reader.id, { replaces: slip.id })] });
+    const administrator = await house.signInAs('administrator');
+    expect((await makeProtocol(administrator, 'skirt', 1, skirtWithLoop())).status).toBe(201);
     await markHouse(work, 'begun', 'Larkmoor House');
     await clearUnfinished(work);
     expect(await houseState(work)).toBe('new');
-    const rows: { n: string }[] = await house.owner.source.query('SELECT COUNT(*) AS n FROM ellwand.reading');
-    expect(Number(rows[0]?.n)).toBe(0);
+    for (const table of ['reading', 'protocol']) {
+      const rows: { n: string }[] = await house.owner.source.query(
+        `SELECT COUNT(*) AS n FROM ellwand.${table}`,
+      );
+      expect(Number(rows[0]?.n)).toBe(0);
+    }
   });
 });

@@ -29,6 +29,7 @@ const workroom = [
   'sheet_person',
   'sheet',
   'cut_sheet',
+  'protocol',
   'image',
   'revision',
   'part',
