@@ -1,6 +1,6 @@
 /** A sheet is measured in one or more sittings: from opening the box until it is put away. */
 import type { StoredReading } from './sheet.js';
-import type { StoredTableNote } from './table-note.js';
+import type { NewTableNote, StoredTableNote } from './table-note.js';
 
 export interface Sitting {
   /** When it began, as it was said; where nobody said so, when its first reading was keyed. */
@@ -17,7 +17,7 @@ type Moment =
   | { readonly at: string; readonly what: 'paused'; readonly reason: string }
   | { readonly at: string; readonly what: 'read' };
 
-function momentOf(note: StoredTableNote): Moment[] {
+function momentOf(note: StoredTableNote | NewTableNote): Moment[] {
   if (note.about === 'begun') return [{ at: note.saidAt, what: 'begun' }];
   if (note.about === 'paused') return [{ at: note.saidAt, what: 'paused', reason: note.reason }];
   return [];
@@ -30,7 +30,7 @@ const orderAtOnce: Readonly<Record<Moment['what'], number>> = { begun: 0, read: 
  * sitting had begun make one all the same; saying twice that one begins makes one.
  */
 export function sittingsOf(
-  notes: readonly StoredTableNote[],
+  notes: readonly (StoredTableNote | NewTableNote)[],
   readings: readonly Pick<StoredReading, 'keyedAt'>[],
 ): readonly Sitting[] {
   const moments: Moment[] = [

@@ -1,20 +1,27 @@
-import { useState } from 'react';
 import { Button } from '../../../components/ui/button.js';
 import { canReadAloud } from '../model/read-aloud.js';
 import type { SheetDesk } from '../model/use-sheet-desk.js';
+import { KeysQuestion } from './keys-question.js';
 import { NotTakenQuestion } from './not-taken-question.js';
-import { rowLabel } from './reading-row.js';
+import { rowLabel } from './row-label.js';
 import { TapeProgress } from './tape-progress.js';
 
-/** Within reach of a thumb: back, not taken, how far along the tape one is, and the next point. */
-export function BottomBar({
-  desk,
-  onReadings,
-}: {
+export interface BarWays {
+  readonly asking: boolean;
+  readonly setAsking: (asking: boolean) => void;
+  readonly keysShown: boolean;
+  readonly setKeysShown: (shown: boolean) => void;
+}
+
+interface BottomBarProps {
   readonly desk: SheetDesk;
+  readonly ways: BarWays;
   readonly onReadings: () => void;
-}) {
-  const [asking, setAsking] = useState(false);
+}
+
+/** Within reach of a thumb: back, not taken, how far along the tape one is, and the next point. */
+export function BottomBar({ desk, ways, onReadings }: BottomBarProps) {
+  const { asking, setAsking, keysShown, setKeysShown } = ways;
   if (desk.locked) return <LockedBar desk={desk} />;
   return (
     <div
@@ -34,6 +41,12 @@ export function BottomBar({
       <Button height="table" onClick={() => setAsking(true)}>
         Cannot be taken
       </Button>
+      <Button height="table" disabled={!desk.canUndo} onClick={desk.undo}>
+        Undo
+      </Button>
+      <Button height="table" onClick={() => desk.setPausing('')} className="max-md:hidden">
+        Pause
+      </Button>
       <div className="min-w-0 grow max-sm:order-first max-sm:w-full">
         <TapeProgress done={desk.done} wanted={desk.points.length} />
       </div>
@@ -44,6 +57,9 @@ export function BottomBar({
         className="aria-pressed:bg-well max-sm:hidden"
       >
         Keypad
+      </Button>
+      <Button height="table" onClick={() => setKeysShown(true)} className="max-lg:hidden">
+        Keys
       </Button>
       {canReadAloud() && (
         <Button
@@ -66,6 +82,7 @@ export function BottomBar({
       >
         Next point
       </Button>
+      <KeysQuestion open={keysShown} onClose={() => setKeysShown(false)} />
       <NotTakenQuestion
         open={asking}
         label={rowLabel(desk.current)}
@@ -73,7 +90,8 @@ export function BottomBar({
         onSaid={(reason, note) => {
           setAsking(false);
           desk.setAside(desk.current, reason, note);
-          desk.next();
+          if (reason === 'stopped-damage-seen') desk.setPausing(`Damage seen: ${note}`);
+          else desk.next();
         }}
       />
     </div>

@@ -6,6 +6,7 @@ import { imagesQuery } from '../../media/api/images.js';
 import { completeSheet, reopenSheet } from '../api/close-sheet.js';
 import { findingsQuery } from '../api/findings.js';
 import { sheetQuery } from '../api/sheet.js';
+import { describedSoFar } from '../model/use-described.js';
 import { boxTasks, type BoxTask } from '../model/box-tasks.js';
 import type { SheetDesk } from '../model/use-sheet-desk.js';
 
@@ -13,16 +14,18 @@ interface BoxListProps {
   readonly desk: SheetDesk;
   readonly onPoint: (pointId: string) => void;
   readonly onFindings: () => void;
+  readonly onNoted: () => void;
 }
 
 /** One list of what is still to take, to read again, to photograph, to answer, while the garment is out. */
-export function BoxList({ desk, onPoint, onFindings }: BoxListProps) {
+export function BoxList({ desk, onPoint, onFindings, onNoted }: BoxListProps) {
   const images = useQuery(imagesQuery(desk.sheet.garmentId));
   const tasks = boxTasks({
     rows: desk.rows,
     entries: desk.view.entries,
     findings: desk.findings.data?.findings ?? [],
-    views: images.data?.map(({ view }) => view) ?? null,
+    views: viewsSoFar(desk, images.data?.map(({ view }) => view) ?? null),
+    described: describedSoFar(desk.sheet, desk.view).map(({ thing }) => thing),
   });
   const musts = tasks.filter(({ must }) => must);
   return (
@@ -34,6 +37,7 @@ export function BoxList({ desk, onPoint, onFindings }: BoxListProps) {
         none="Nothing more is needed."
         onPoint={onPoint}
         onFindings={onFindings}
+        onNoted={onNoted}
       />
       <TaskList
         title="Worth doing while it is out"
@@ -41,6 +45,7 @@ export function BoxList({ desk, onPoint, onFindings }: BoxListProps) {
         none="Nothing more."
         onPoint={onPoint}
         onFindings={onFindings}
+        onNoted={onNoted}
       />
       <Closing desk={desk} unsent={unsentOf(desk.view)} />
     </div>
@@ -50,15 +55,21 @@ export function BoxList({ desk, onPoint, onFindings }: BoxListProps) {
 const unsentOf = ({ entries, notes, pictures }: SheetDesk['view']): number =>
   entries.length + notes.length + pictures.length;
 
+/** Pictures that wait on this tablet count as taken. */
+function viewsSoFar({ view }: SheetDesk, known: readonly string[] | null): readonly string[] | null {
+  return known && [...known, ...view.pictures.map(({ picture }) => picture.view)];
+}
+
 interface TaskListProps {
   readonly title: string;
   readonly tasks: readonly BoxTask[];
   readonly none: string;
   readonly onPoint: (pointId: string) => void;
   readonly onFindings: () => void;
+  readonly onNoted: () => void;
 }
 
-function TaskList({ title, tasks, none, onPoint, onFindings }: TaskListProps) {
+function TaskList({ title, tasks, none, onPoint, onFindings, onNoted }: TaskListProps) {
   return (
     <section>
       <h3 className="text-body font-semibold">{title}</h3>
@@ -70,6 +81,11 @@ function TaskList({ title, tasks, none, onPoint, onFindings }: TaskListProps) {
             {task.pointId !== undefined && (
               <Button tone="quiet" className="min-h-11 shrink-0" onClick={() => onPoint(task.pointId ?? '')}>
                 Go there<span className="sr-only">: {task.sentence}</span>
+              </Button>
+            )}
+            {task.describe && (
+              <Button tone="quiet" className="min-h-11 shrink-0" onClick={onNoted}>
+                Note it<span className="sr-only">: {task.sentence}</span>
               </Button>
             )}
             {task.finding && (

@@ -9,6 +9,8 @@ import { Select, TextArea, TextField } from '../../../components/ui/field.js';
 import { Failed, Waiting } from '../../../components/ui/states.js';
 import { mistakesOf, showProblem } from '../../../lib/form-mistakes.js';
 import { colleaguesQuery } from '../api/colleagues.js';
+import type { SheetPoint } from '../model/sheet-points.js';
+import { RepeatChoice } from './repeat-choice.js';
 import { PeopleChoice } from './people-choice.js';
 
 interface FactsFormProps {
@@ -16,10 +18,12 @@ interface FactsFormProps {
   readonly verb: string;
   readonly onSave: (facts: SheetFacts) => Promise<void>;
   readonly aside?: ReactNode;
+  /** The points of a sheet that is open, of which some may be read twice. */
+  readonly points?: readonly SheetPoint[];
 }
 
 /** Who, when, where, on what, with which tape. */
-export function FactsForm({ facts, verb, onSave, aside }: FactsFormProps) {
+export function FactsForm({ facts, verb, onSave, aside, points }: FactsFormProps) {
   const colleagues = useQuery(colleaguesQuery);
   const form = useForm<SheetFactsInput, unknown, SheetFacts>({
     resolver: zodResolver(SheetFacts),
@@ -48,7 +52,8 @@ export function FactsForm({ facts, verb, onSave, aside }: FactsFormProps) {
       | 'note'
       | 'aloneBecause'
       | 'measuredOn'
-      | 'support',
+      | 'support'
+      | 'purpose',
   ) => ({
     id: name,
     error: errors[name]?.message,
@@ -116,6 +121,23 @@ export function FactsForm({ facts, verb, onSave, aside }: FactsFormProps) {
         {...box('fasteningPair')}
       />
       <TextArea optional label="Note" {...box('note')} />
+      <Select
+        label="What it is for"
+        hint="A study shows how well readings repeat; it is never published."
+        {...box('purpose')}
+      >
+        <option value="record">The record of the garment</option>
+        <option value="study">A study of how well readings repeat</option>
+      </Select>
+      {points && (
+        <Controller
+          control={form.control}
+          name="repeatPoints"
+          render={({ field }) => (
+            <RepeatChoice points={points} chosen={field.value ?? []} onChange={field.onChange} />
+          )}
+        />
+      )}
       <div className="flex flex-wrap items-center gap-3">
         <Button type="submit" tone="action" height="table" disabled={isSubmitting}>
           {verb}

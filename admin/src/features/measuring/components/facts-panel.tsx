@@ -5,6 +5,7 @@ import { dayText } from '../../../lib/moments.js';
 import { isProblem } from '../../../lib/problem-error.js';
 import { saveFacts } from '../api/save-facts.js';
 import { sheetQuery } from '../api/sheet.js';
+import type { SheetPoint } from '../model/sheet-points.js';
 import { FactsForm } from './facts-form.js';
 import { PrepareButton } from './prepare-button.js';
 
@@ -14,7 +15,13 @@ const typedFacts = ({ people, ...facts }: Sheet['facts']): SheetFactsInput => ({
 });
 
 /** The facts of an open sheet can be changed while it is worked on: people may swap places. */
-export function FactsPanel({ sheet }: { readonly sheet: Sheet }) {
+export function FactsPanel({
+  sheet,
+  points,
+}: {
+  readonly sheet: Sheet;
+  readonly points: readonly SheetPoint[];
+}) {
   const queries = useQueryClient();
   if (sheet.state === 'complete') return <FactsShown sheet={sheet} />;
   return (
@@ -23,6 +30,7 @@ export function FactsPanel({ sheet }: { readonly sheet: Sheet }) {
       <FactsForm
         facts={typedFacts(sheet.facts)}
         verb="Save the facts"
+        points={points}
         onSave={async (facts) => {
           try {
             queries.setQueryData(

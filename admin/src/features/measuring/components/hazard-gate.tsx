@@ -5,12 +5,14 @@ import { Page } from '../../../components/ui/page.js';
 import { paths } from '../../../config/paths.js';
 import { today } from '../../../lib/moments.js';
 import { readRemembered, remember } from '../../../lib/remembered.js';
+import { useOutbox } from '../model/use-outbox.js';
 import { useSession } from '../../../lib/session.js';
 import { hazardCautions, hazardLabels, isHazardId, standingLabels } from '../../../lib/words/hazard-words.js';
 
 /** Hazards and handling notes, read and acknowledged before the box is opened: each person, each day. */
 export function HazardGate({ sheet, children }: { readonly sheet: Sheet; readonly children: ReactNode }) {
   const { user } = useSession();
+  const outbox = useOutbox(sheet.id);
   const name = `cautions.${sheet.id}.${user.id}`;
   const [read, setRead] = useState(() => readRemembered(name) === today());
   const hazards = sheet.garment.hazards.filter(({ standing }) => standing !== 'tested-absent');
@@ -39,6 +41,7 @@ export function HazardGate({ sheet, children }: { readonly sheet: Sheet; readonl
               height="table"
               onClick={() => {
                 remember(name, today());
+                void outbox.say({ about: 'cautions', hazards: hazards.map(({ id }) => id) });
                 setRead(true);
               }}
             >

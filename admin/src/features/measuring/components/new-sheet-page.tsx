@@ -32,6 +32,8 @@ function usualFacts(userId: string): SheetFactsInput {
     tapeZeroMm: '0',
     fasteningPair: '',
     note: '',
+    repeatPoints: [],
+    purpose: 'record',
   };
 }
 

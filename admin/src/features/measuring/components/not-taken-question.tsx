@@ -17,8 +17,10 @@ export function NotTakenQuestion({ open, label, onClose, onSaid }: NotTakenQuest
   const [reason, setReason] = useState<NotTakenReason | null>(null);
   const [note, setNote] = useState('');
   const [asked, setAsked] = useState(false);
+  const isDamage = reason === 'stopped-damage-seen';
+  const noteMissing = isDamage && note.trim() === '';
   const say = () => {
-    if (reason) onSaid(reason, note.trim());
+    if (reason && !noteMissing) onSaid(reason, note.trim());
     else setAsked(true);
   };
   return (
@@ -54,10 +56,17 @@ export function NotTakenQuestion({ open, label, onClose, onSaid }: NotTakenQuest
         ))}
         {asked && !reason && <FieldError id="reason-missing">Choose the reason that fits best.</FieldError>}
       </fieldset>
+      {isDamage && (
+        <p className="border-l-4 border-madder bg-madder-tint p-3">
+          Stop here and leave it as it lies. The curators are told as soon as this is sent; follow your own
+          museum’s rules, and let a conservator look before anybody goes on.
+        </p>
+      )}
       <TextField
         id="not-taken-note"
-        optional
-        label="Note"
+        optional={!isDamage}
+        label={isDamage ? 'What was seen, and where' : 'Note'}
+        error={asked && noteMissing ? 'Say what was seen, and where.' : undefined}
         value={note}
         maxLength={500}
         onChange={(event) => setNote(event.target.value)}

@@ -1,16 +1,19 @@
 import { levelLabels, notTakenReasons } from '@ellwand/shared/readings/reading';
 import { LevelFoundBy } from '@ellwand/shared/records/sheet';
 import { formatLength, unitLabels } from '@ellwand/shared/units/format-length';
-import type { KeyboardEvent } from 'react';
+import { type KeyboardEvent, useState } from 'react';
 import { FieldError } from '../../../components/ui/field.js';
 import { rowState, type RowState } from '../model/row-state.js';
-import { type SheetRow, valueOf } from '../model/rows.js';
+import { draftValue } from '../model/draft-value.js';
+import { howOf, type SheetRow } from '../model/rows.js';
 import type { SheetDesk } from '../model/use-sheet-desk.js';
 import { DecisionCard } from './decision-card.js';
+import { HowTaken } from './how-taken.js';
+import { rowLabel } from './row-label.js';
 import { RowMenu } from './row-menu.js';
 
 const ids = (row: SheetRow) => {
-  const base = row.key.replace(':', '-');
+  const base = row.key.replaceAll(':', '-');
   return {
     row: `row-${base}`,
     count: `count-${base}`,
@@ -32,16 +35,13 @@ const tones: Readonly<Record<RowState['tone'], string>> = {
   aside: 'bg-well text-ink-2 italic',
 };
 
-export function rowLabel(row: SheetRow): string {
-  return row.round === 1 ? row.point.point.name : `${row.point.point.name}, reading ${row.round}`;
-}
-
 /** One point in one round: its letter, its name, its boxes, its state. */
 export function ReadingRow({ desk, row }: { readonly desk: SheetDesk; readonly row: SheetRow }) {
   const id = ids(row);
   const current = desk.current.key === row.key;
   const state = rowState(row, desk.rows, desk.sheet.kind);
   const mistake = desk.mistakes[row.key];
+  const [gapAsked, setGapAsked] = useState(false);
   const leave = (event: { relatedTarget: EventTarget | null; currentTarget: Element }) => {
     if (!event.currentTarget.contains(event.relatedTarget as Node | null)) desk.commit(row);
   };
@@ -78,9 +78,16 @@ export function ReadingRow({ desk, row }: { readonly desk: SheetDesk; readonly r
           {state.word}
         </span>
         <div className="max-xl:col-start-4 max-xl:row-span-2 max-xl:row-start-1">
-          {!desk.locked && <RowMenu desk={desk} row={row} />}
+          {!desk.locked && <RowMenu desk={desk} row={row} onGap={() => setGapAsked(true)} />}
         </div>
       </div>
+      <HowTaken
+        desk={desk}
+        row={row}
+        id={row.key.replaceAll(':', '-')}
+        label={rowLabel(row)}
+        gapAsked={gapAsked}
+      />
       {mistake && <FieldError id={id.error}>{mistake}</FieldError>}
       {row.decision && <DecisionCard desk={desk} row={row} entry={row.decision} />}
     </li>
@@ -94,14 +101,17 @@ function says(row: SheetRow, state: RowState): string {
   if (
     reading &&
     reading.value !== null &&
-    (reading.unit !== 'mm' || reading.tapeCount > 0 || row.point.point.how === 'flat-doubled')
+    (reading.unit !== 'mm' || reading.tapeCount > 0 || reading.gapTyped !== '' || isDoubled(row))
   ) {
-    const doubled = row.point.point.how === 'flat-doubled' ? 'doubled, ' : '';
-    return `${doubled}${formatLength(reading.value, 'mm')}`;
+    const doubled = isDoubled(row) ? 'doubled, ' : '';
+    const gap = reading.gapTyped === '' ? '' : `, less a gap of ${reading.gapTyped} ${reading.unit}`;
+    return `${doubled}${formatLength(reading.value, 'mm')}${gap}`;
   }
   if (row.point.point.how === 'flat-doubled') return 'the half, as it lies flat';
   return reading?.note ?? '';
 }
+
+const isDoubled = (row: SheetRow): boolean => howOf(row, row.reading?.doubled ?? false) === 'flat-doubled';
 
 interface BoxesProps {
   readonly desk: SheetDesk;
@@ -182,9 +192,9 @@ function Boxes({ desk, row, id, mistake }: BoxesProps) {
 
 /** What the tapes and the rest come to, while they are keyed. */
 function TapeSum({ desk, row }: { readonly desk: SheetDesk; readonly row: SheetRow }) {
-  const { text, unit, count } = desk.draftOf(row);
-  const value = valueOf(text || '0', unit, Number(count) || 0, row.point.point.how, desk.tape);
-  if (value === null || !(Number(count) > 0)) return null;
+  const draft = desk.draftOf(row);
+  const value = draftValue(desk.sheet, row, draft);
+  if (value === null || !(Number(draft.count) > 0)) return null;
   return (
     <output className="figures whitespace-nowrap text-table font-medium max-sm:sr-only">
       = {formatLength(value, 'mm')}

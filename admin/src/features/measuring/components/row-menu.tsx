@@ -1,15 +1,29 @@
 import { Menu, MenuButton, MenuItem, MenuItems } from '@headlessui/react';
-import { useState } from 'react';
+import { useRef, useState } from 'react';
+import { today } from '../../../lib/moments.js';
 import { spreadOf, type SheetRow } from '../model/rows.js';
 import type { SheetDesk } from '../model/use-sheet-desk.js';
 import { NotTakenQuestion } from './not-taken-question.js';
-import { rowLabel } from './reading-row.js';
+import { rowLabel } from './row-label.js';
 
-/** What else can be done with a point: to say why it is not taken, or to read it once more. */
-export function RowMenu({ desk, row }: { readonly desk: SheetDesk; readonly row: SheetRow }) {
+interface RowMenuProps {
+  readonly desk: SheetDesk;
+  readonly row: SheetRow;
+  readonly onGap: () => void;
+}
+
+/** What else can be done with a point. */
+export function RowMenu({ desk, row, onGap }: RowMenuProps) {
   const [asking, setAsking] = useState(false);
-  const again = !row.covered && row.reading !== null && row.reading.reason === null && isLastRound(desk, row);
-  const apart = spreadOf(desk.rows, row.point.id);
+  const camera = useRef<HTMLInputElement>(null);
+  const { point, worn, reading, covered } = row;
+  const isRound = point.point.how === 'round';
+  const again = !covered && reading !== null && reading.reason === null && isLastRound(desk, row);
+  const photograph = (file: File) =>
+    void desk.outbox.photograph(
+      { garmentId: desk.sheet.garmentId, view: 'tape', pointId: point.id, takenOn: today() },
+      file,
+    );
   return (
     <>
       <Menu as="div" className="relative">
@@ -28,26 +42,32 @@ export function RowMenu({ desk, row }: { readonly desk: SheetDesk; readonly row:
           modal={false}
           className="absolute top-full right-0 z-20 mt-1 w-max rounded-sm border border-rule bg-sheet py-1 shadow-dialog focus:outline-none"
         >
-          <MenuItem>
-            <button
-              type="button"
-              onClick={() => setAsking(true)}
-              className="block min-h-12 w-full px-4 text-left text-table data-focus:bg-indigo-tint"
-            >
-              Cannot be taken
-            </button>
-          </MenuItem>
-          <MenuItem disabled={!again}>
-            <button
-              type="button"
-              onClick={() => desk.readAgain(row.point.id)}
-              className="block min-h-12 w-full px-4 text-left text-table data-disabled:text-ink-3 data-focus:bg-indigo-tint"
-            >
-              {apart ? 'Read once more' : 'Read a second time, blind'}
-            </button>
-          </MenuItem>
+          <Choice onChoose={() => setAsking(true)}>Cannot be taken</Choice>
+          <Choice disabled={!again} onChoose={() => desk.readAgain(row)}>
+            {spreadOf(desk.rows, row) ? 'Read once more' : 'Read a second time, blind'}
+          </Choice>
+          {point.point.paired && worn === null && (
+            <Choice onChoose={() => desk.tellSides(row)}>Tell left from right</Choice>
+          )}
+          {isRound && <Choice onChoose={onGap}>The tape crossed a gap</Choice>}
+          {isRound && <Choice onChoose={() => desk.type(row, { doubled: true })}>Read flat, doubled</Choice>}
+          <Choice onChoose={() => camera.current?.click()}>Photograph the tape here</Choice>
         </MenuItems>
       </Menu>
+      <input
+        ref={camera}
+        type="file"
+        accept="image/*"
+        capture="environment"
+        aria-label={`Picture of the tape at ${rowLabel(row)}`}
+        tabIndex={-1}
+        className="sr-only"
+        onChange={(event) => {
+          const [file] = event.target.files ?? [];
+          event.target.value = '';
+          if (file) photograph(file);
+        }}
+      />
       <NotTakenQuestion
         open={asking}
         label={rowLabel(row)}
@@ -55,11 +75,34 @@ export function RowMenu({ desk, row }: { readonly desk: SheetDesk; readonly row:
         onSaid={(reason, note) => {
           setAsking(false);
           desk.setAside(row, reason, note);
+          if (reason === 'stopped-damage-seen') desk.setPausing(`Damage seen: ${note}`);
         }}
       />
     </>
   );
 }
 
+interface ChoiceProps {
+  readonly disabled?: boolean;
+  readonly onChoose: () => void;
+  readonly children: string;
+}
+
+function Choice({ disabled = false, onChoose, children }: ChoiceProps) {
+  return (
+    <MenuItem disabled={disabled}>
+      <button
+        type="button"
+        onClick={onChoose}
+        className="block min-h-12 w-full px-4 text-left text-table data-disabled:text-ink-3 data-focus:bg-indigo-tint"
+      >
+        {children}
+      </button>
+    </MenuItem>
+  );
+}
+
 const isLastRound = (desk: SheetDesk, row: SheetRow): boolean =>
-  !desk.rows.some(({ point, round }) => point.id === row.point.id && round > row.round);
+  !desk.rows.some(
+    ({ point, worn, round }) => point.id === row.point.id && worn === row.worn && round > row.round,
+  );

@@ -1,15 +1,13 @@
 import { Link } from 'react-router-dom';
 import { PageTitle } from '../../../components/ui/page.js';
 import { paths, staffPicture } from '../../../config/paths.js';
+import { HandsBar } from './hands-bar.js';
 import { sheetUnits, type SheetDesk } from '../model/use-sheet-desk.js';
 
 /** What lies on the table, who reads, in which unit, and where the readings are. */
 export function SheetHeader({ desk }: { readonly desk: SheetDesk }) {
-  const { garment, garmentId, facts } = desk.sheet;
+  const { garment, garmentId } = desk.sheet;
   const number = `${garment.ownNumber}${garment.partSuffix}`;
-  const people = facts.people.map(
-    ({ name, duty }) => `${duty === 'read' ? 'Reads' : duty === 'held' ? 'Holds' : 'Writes'}: ${name}`,
-  );
   return (
     <header className="flex flex-wrap items-center gap-x-5 gap-y-2 border-b border-hair bg-sheet px-4 py-2">
       {garment.firstImageId && (
@@ -35,36 +33,13 @@ export function SheetHeader({ desk }: { readonly desk: SheetDesk }) {
         <p className="truncate text-table text-ink-2">
           {[garment.title, garment.date, garment.maker].filter(Boolean).join(', ')}
         </p>
-        <p className="truncate text-label text-ink-2">
-          {people.length > 0 ? people.join('. ') : 'Nobody is named yet'}
-        </p>
+        <HandsBar desk={desk} />
       </div>
       <div className="ml-auto flex flex-wrap items-center gap-3">
-        {desk.reader.readers.length > 1 && <ReaderChoice desk={desk} />}
         {!desk.locked && <UnitChoice desk={desk} />}
         <SendStatus desk={desk} />
       </div>
     </header>
-  );
-}
-
-function ReaderChoice({ desk }: { readonly desk: SheetDesk }) {
-  const { readers, readBy, setReadBy } = desk.reader;
-  return (
-    <label className="flex items-center gap-2 text-label text-ink-2">
-      Reading now
-      <select
-        value={readBy}
-        onChange={(event) => setReadBy(event.target.value)}
-        className="box min-h-11 w-auto py-1 text-table"
-      >
-        {readers.map(({ userId, name }) => (
-          <option key={userId} value={userId}>
-            {name}
-          </option>
-        ))}
-      </select>
-    </label>
   );
 }
 
@@ -99,7 +74,13 @@ function SendStatus({ desk }: { readonly desk: SheetDesk }) {
       role="status"
       className={`figures rounded-sm text-table font-medium ${desk.status ? `px-3 py-2 ${look}` : ''}`}
     >
-      {desk.status}
+      {desk.view.entries.length + desk.view.notes.length + desk.view.pictures.length > 0 ? (
+        <Link to={paths.tray()} className="underline underline-offset-4">
+          {desk.status || 'Kept on this tablet'}
+        </Link>
+      ) : (
+        desk.status
+      )}
     </p>
   );
 }

@@ -1,6 +1,6 @@
 import { Tab, TabGroup, TabList, TabPanel, TabPanels } from '@headlessui/react';
 import type { Sheet } from '@ellwand/shared/records/sheet';
-import { type ReactNode, useEffect, useRef } from 'react';
+import { type ReactNode, useEffect, useRef, useState } from 'react';
 import { useSearchParams } from 'react-router-dom';
 import { Button } from '../../../components/ui/button.js';
 import { Question } from '../../../components/ui/dialog.js';
@@ -8,16 +8,19 @@ import { stepWords } from '../model/sheet-points.js';
 import { useSheetDesk, type SheetDesk } from '../model/use-sheet-desk.js';
 import { BottomBar } from './bottom-bar.js';
 import { BoxList } from './box-list.js';
+import { DescribedPanel } from './described-panel.js';
 import { DerivedPanel } from './derived-panel.js';
 import { DiagramPanel } from './diagram-panel.js';
 import { FactsPanel } from './facts-panel.js';
 import { FindingsPanel } from './findings-panel.js';
 import { Keypad } from './keypad.js';
 import { NewestProtocol } from './newest-protocol.js';
+import { useTableKeys } from './keys-question.js';
+import { PausedNotice, PauseQuestion } from './pause.js';
 import { ReadingList } from './reading-list.js';
 import { SheetHeader } from './sheet-header.js';
 
-const tabs = ['readings', 'findings', 'worked-out', 'box', 'facts'] as const;
+const tabs = ['readings', 'findings', 'worked-out', 'noted', 'box', 'facts'] as const;
 type TabName = (typeof tabs)[number];
 
 /** The measuring table: diagram at the left, rows at the right, the work's own bar beneath. */
@@ -28,6 +31,12 @@ export function SheetScreen({ sheet }: { readonly sheet: Sheet }) {
   const show = (tab: TabName) => {
     if (tab !== tabs[shown]) setSearch(tab === 'readings' ? {} : { show: tab }, { replace: true });
   };
+  const [asking, setAsking] = useState(false);
+  const [keysShown, setKeysShown] = useState(false);
+  useTableKeys(desk, {
+    onNotTaken: () => setAsking(true),
+    onTab: (index) => show(tabs[index] ?? 'readings'),
+  });
   const chooseRow = (pointId: string) => {
     show('readings');
     const row =
@@ -58,6 +67,7 @@ export function SheetScreen({ sheet }: { readonly sheet: Sheet }) {
               <SheetTabs desk={desk} />
               <TabPanels className="grow md:relative md:min-h-0 md:overflow-y-auto">
                 <Panel>
+                  <PausedNotice desk={desk} />
                   <NewestProtocol desk={desk} />
                   <ReadingList desk={desk} />
                 </Panel>
@@ -68,10 +78,18 @@ export function SheetScreen({ sheet }: { readonly sheet: Sheet }) {
                   <DerivedPanel desk={desk} onPoint={chooseRow} />
                 </Panel>
                 <Panel>
-                  <BoxList desk={desk} onPoint={chooseRow} onFindings={() => show('findings')} />
+                  <DescribedPanel desk={desk} />
                 </Panel>
                 <Panel>
-                  <FactsPanel sheet={sheet} />
+                  <BoxList
+                    desk={desk}
+                    onPoint={chooseRow}
+                    onFindings={() => show('findings')}
+                    onNoted={() => show('noted')}
+                  />
+                </Panel>
+                <Panel>
+                  <FactsPanel sheet={sheet} points={desk.points} />
                 </Panel>
               </TabPanels>
             </TabGroup>
@@ -79,7 +97,12 @@ export function SheetScreen({ sheet }: { readonly sheet: Sheet }) {
           </div>
         </main>
       </div>
-      <BottomBar desk={desk} onReadings={() => show('readings')} />
+      <BottomBar
+        desk={desk}
+        ways={{ asking, setAsking, keysShown, setKeysShown }}
+        onReadings={() => show('readings')}
+      />
+      <PauseQuestion desk={desk} />
       <TurnQuestion desk={desk} />
     </div>
   );
@@ -93,7 +116,7 @@ function SheetTabs({ desk }: { readonly desk: SheetDesk }) {
   const open =
     desk.findings.data?.findings.filter(({ severity, answer }) => severity !== 'note' && answer === null)
       .length ?? 0;
-  const labels = ['Readings', 'Findings', 'Worked out', 'Box list', 'Facts'];
+  const labels = ['Readings', 'Findings', 'Worked out', 'Noted', 'Box list', 'Facts'];
   return (
     <TabList className="flex shrink-0 gap-1 overflow-x-auto border-b border-hair bg-sheet px-2">
       {labels.map((label, index) => (

@@ -1,4 +1,5 @@
 import type { FindingView } from '@ellwand/shared/records/sheet';
+import { wornSideLabels } from '@ellwand/shared/readings/worn-side';
 import { formatLength } from '@ellwand/shared/units/format-length';
 import type { OutboxEntry } from './outbox.js';
 import { type SheetRow, spreadOf } from './rows.js';
@@ -9,6 +10,7 @@ export interface BoxTask {
   readonly must: boolean;
   readonly pointId?: string;
   readonly finding?: boolean;
+  readonly describe?: boolean;
 }
 
 export interface BoxAsked {
@@ -17,19 +19,19 @@ export interface BoxAsked {
   readonly findings: readonly FindingView[];
   /** Views of the garment's pictures; null while they are not known. */
   readonly views: readonly string[] | null;
+  /** What was described at the table so far. */
+  readonly described: readonly string[];
 }
 
 /** Everything that must, and all that should, be done before the garment goes back. */
-export function boxTasks({ rows, entries, findings, views }: BoxAsked): readonly BoxTask[] {
+export function boxTasks({ rows, entries, findings, views, described }: BoxAsked): readonly BoxTask[] {
   const toTake = rows
     .filter(({ reading }) => reading === null)
-    .map(({ point, round }): BoxTask => ({
+    .map((row): BoxTask => ({
       sentence:
-        round === 1
-          ? `${point.point.name}: take it, or say why not`
-          : `${point.point.name}: read it again, blind`,
-      must: point.required || round > 1,
-      pointId: point.id,
+        row.round === 1 ? `${nameOf(row)}: take it, or say why not` : `${nameOf(row)}: read it again, blind`,
+      must: row.point.required || row.round > 1,
+      pointId: row.point.id,
     }));
   const toDecide = entries
     .filter(({ state }) => state === 'decision')
@@ -39,12 +41,13 @@ export function boxTasks({ rows, entries, findings, views }: BoxAsked): readonly
       pointId: reading.pointId,
     }));
   const firstRounds = rows.filter(({ round }) => round === 1);
-  const toReread = firstRounds.flatMap(({ point }): BoxTask[] => {
-    const spread = spreadOf(rows, point.id);
+  const toReread = firstRounds.flatMap((row): BoxTask[] => {
+    const { point } = row;
+    const spread = spreadOf(rows, row);
     if (!spread || spread.within) return [];
     return [
       {
-        sentence: `${point.point.name}: ${formatLength(spread.apart, 'mm')} apart, read it once more`,
+        sentence: `${nameOf(row)}: ${formatLength(spread.apart, 'mm')} apart, read it once more`,
         must: false,
         pointId: point.id,
       },
@@ -69,7 +72,29 @@ export function boxTasks({ rows, entries, findings, views }: BoxAsked): readonly
         pointIds.some((id) => firstRounds.some(({ point, reading }) => point.id === id && reading !== null)),
     )
     .map(({ sentence, severity }): BoxTask => ({ sentence, must: severity === 'stop', finding: true }));
-  return [...toDecide, ...toTake, ...toAnswer, ...toReread, ...noLevel, ...toPhotograph(views)];
+  return [
+    ...toDecide,
+    ...toTake,
+    ...toAnswer,
+    ...toReread,
+    ...noLevel,
+    ...toPhotograph(views),
+    ...toDescribe(described),
+  ];
+}
+
+const nameOf = ({ point, worn }: SheetRow): string =>
+  worn ? `${point.point.name}, ${wornSideLabels[worn]}` : point.point.name;
+
+function toDescribe(described: readonly string[]): BoxTask[] {
+  const wanted: readonly (readonly [string, string])[] = [
+    ['label', 'Say what the label says, or that there is none'],
+    ['fastenings', 'Say how it fastens'],
+    ['condition', 'Say what condition it is in'],
+  ];
+  return wanted
+    .filter(([thing]) => !described.includes(thing))
+    .map(([, sentence]) => ({ sentence, must: false, describe: true }));
 }
 
 function toPhotograph(views: readonly string[] | null): BoxTask[] {

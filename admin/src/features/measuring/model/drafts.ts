@@ -8,6 +8,10 @@ export const Draft = z.object({
   unit: TypedUnit,
   count: z.string(),
   level: LevelFoundBy.nullable(),
+  gap: z.string().default(''),
+  depth: z.string().default(''),
+  /** Read flat from fold to fold, where the point is a round. */
+  doubled: z.boolean().default(false),
 });
 export type Draft = z.infer<typeof Draft>;
 export type DraftsKept = Readonly<Record<string, Draft>>;

@@ -11,20 +11,21 @@ export type Keyed =
 export interface Keying {
   readonly row: SheetRow;
   readonly readBy: string;
+  readonly heldBy: string | null;
   readonly note?: string;
 }
 
-function base({ row, readBy, note }: Keying) {
+function base({ row, readBy, heldBy, note }: Keying) {
   return {
     id: newId(),
     pointId: row.point.id,
     round: row.round,
-    worn: null,
+    worn: row.worn,
     // A correction is a new reading that takes the old one's place; nothing is overwritten.
     replaces: row.reading?.id ?? null,
     note: note ?? row.reading?.note ?? '',
     readBy,
-    heldBy: null,
+    heldBy,
     device: deviceName(),
     keyedAt: new Date().toISOString(),
   };
@@ -40,18 +41,29 @@ export function keyedReading(keying: Keying, draft: Draft): Keyed {
   const text = draft.text.trim() === '' && Number(countText) > 0 ? '0' : draft.text.trim();
   const parsed = fromTyped({ text, unit: draft.unit });
   if (!parsed.ok) return { ok: false, sentence: lengthProblemSentence(parsed.problem) };
+  const gap = beside(draft.gap, draft.unit);
+  if (gap === false) return { ok: false, sentence: 'The gap cannot be read as a length.' };
+  const depth = beside(draft.depth, draft.unit);
+  if (depth === false)
+    return { ok: false, sentence: 'The depth below the waist cannot be read as a length.' };
   const reading: NewReading = {
     ...base(keying),
     state: 'taken',
     typed: text,
     unit: parsed.value.unit,
     tapeCount: Number(countText),
-    gapTyped: null,
-    method: null,
-    depthTyped: null,
+    gapTyped: gap,
+    method: draft.doubled ? 'flat-doubled' : null,
+    depthTyped: depth,
     levelFoundBy: draft.level,
   };
   return { ok: true, reading };
+}
+
+/** A length keyed beside the reading: null where there is none, false where it cannot be read. */
+function beside(text: string, unit: Draft['unit']): string | null | false {
+  if (text.trim() === '') return null;
+  return fromTyped({ text: text.trim(), unit }).ok && text.trim();
 }
 
 export function notTakenReading(
@@ -70,6 +82,9 @@ export function saysSomethingNew(draft: Draft, row: SheetRow): boolean {
     draft.text.trim() !== reading.typed ||
     draft.unit !== reading.unit ||
     count !== reading.tapeCount ||
-    draft.level !== reading.level
+    draft.level !== reading.level ||
+    draft.gap.trim() !== reading.gapTyped ||
+    draft.depth.trim() !== reading.depthTyped ||
+    draft.doubled !== reading.doubled
   );
 }

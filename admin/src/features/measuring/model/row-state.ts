@@ -18,7 +18,7 @@ export function rowState(row: SheetRow, rows: readonly SheetRow[], kind: Garment
   if (covered) return { word: 'covered', tone: 'open', sentence: 'Covered until the next reading is in.' };
   if (!reading) return { word: point.required ? 'to do' : 'if it applies', tone: 'open' };
   if (reading.reason !== null) return { word: 'not taken', tone: 'aside' };
-  const spread = spreadOf(rows, point.id);
+  const spread = spreadOf(rows, row);
   if (spread && row.round > 1) {
     const word = `${formatLength(spread.apart, 'mm')} apart`;
     if (spread.within) return { word, tone: 'good' };

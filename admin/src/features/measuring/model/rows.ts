@@ -1,10 +1,10 @@
 import { type MeasuringHow } from '@ellwand/shared/points/point';
 import { allowedSpreadAt } from '@ellwand/shared/points/tolerance';
-import { wholeValue } from '@ellwand/shared/readings/whole-value';
-import type { NewReading, StoredReading } from '@ellwand/shared/records/sheet';
+import { type WornSide } from '@ellwand/shared/readings/worn-side';
+import type { NewReading, Sheet, StoredReading } from '@ellwand/shared/records/sheet';
 import { isLonger, type Length, longestOf, mm, shortestOf, subtract } from '@ellwand/shared/units/length';
-import { fromTyped } from '@ellwand/shared/units/parse-length';
 import type { OutboxEntry } from './outbox.js';
+import { asStored } from './pending-reading.js';
 import type { SheetPoint } from './sheet-points.js';
 
 /** What the tape is like: its whole length and what it shows at nothing. */
@@ -20,16 +20,21 @@ export interface RowReading {
   readonly typed: string;
   readonly unit: 'mm' | 'cm' | 'in';
   readonly tapeCount: number;
+  readonly gapTyped: string;
+  readonly depthTyped: string;
+  /** Read flat and doubled where its point says otherwise. */
+  readonly doubled: boolean;
   readonly level: StoredReading['levelFoundBy'];
   readonly reason: StoredReading['reason'];
   readonly note: string;
   readonly sent: boolean;
 }
 
-/** One line of the sheet: a point in one round. */
+/** One line of the sheet: a point in one round, on one side where left and right are told apart. */
 export interface SheetRow {
   readonly key: string;
   readonly point: SheetPoint;
+  readonly worn: WornSide | null;
   readonly round: number;
   readonly reading: RowReading | null;
   readonly decision: OutboxEntry | null;
@@ -37,122 +42,122 @@ export interface SheetRow {
   readonly covered: boolean;
 }
 
-export const rowKey = (pointId: string, round: number): string => `${pointId}:${round}`;
+export const rowKey = (pointId: string, round: number, worn: WornSide | null = null): string =>
+  [pointId, round, ...(worn ? [worn] : [])].join(':');
 
-/** The whole value of what was typed; null where it cannot be read. */
-export function valueOf(
-  typed: string,
-  unit: RowReading['unit'],
-  tapeCount: number,
-  how: MeasuringHow,
-  tape: Tape,
-): Length | null {
-  const parsed = fromTyped({ text: typed, unit });
-  if (!parsed.ok) return null;
-  return wholeValue({
-    read: parsed.value.length,
-    how,
-    tapeCount,
-    tapeLength: tape.length,
-    tapeZero: tape.zero,
-  });
-}
+/** How a row's reading is laid: flat and doubled where that was said, else as its point says. */
+export const howOf = ({ point }: SheetRow, doubled: boolean): MeasuringHow =>
+  doubled ? 'flat-doubled' : point.point.how;
 
-function fromStored(reading: StoredReading): RowReading {
+function rowReading(reading: StoredReading, sent: boolean): RowReading {
   return {
     id: reading.id,
     value: reading.valueMm === null ? null : mm(reading.valueMm),
     typed: reading.typed ?? '',
     unit: reading.unit ?? 'mm',
     tapeCount: reading.tapeCount,
+    gapTyped: reading.gapTyped ?? '',
+    depthTyped: reading.depthTyped ?? '',
+    doubled: reading.method === 'flat-doubled',
     level: reading.levelFoundBy,
     reason: reading.reason,
     note: reading.note,
-    sent: true,
+    sent,
   };
 }
 
-function fromOutbox(reading: NewReading, how: MeasuringHow, tape: Tape): RowReading {
-  const { id, note } = reading;
-  if (reading.state === 'not-taken') {
-    return {
-      id,
-      value: null,
-      typed: '',
-      unit: 'mm',
-      tapeCount: 0,
-      level: null,
-      reason: reading.reason,
-      note,
-      sent: false,
-    };
-  }
-  const { typed, unit, tapeCount, levelFoundBy } = reading;
-  const value = valueOf(typed, unit, tapeCount, how, tape);
-  return { id, value, typed, unit, tapeCount, level: levelFoundBy, reason: null, note, sent: false };
-}
-
-/** What stands at each point and round: the API's readings, and over them what still waits here, in order. */
-function standing(
-  points: readonly SheetPoint[],
-  stored: readonly StoredReading[],
-  entries: readonly OutboxEntry[],
-  tape: Tape,
-) {
+/** What stands at each place: the API's readings, and over them what still waits here, in order. */
+function standing({ sheet, entries }: RowsAsked): ReadonlyMap<string, RowReading> {
   const found = new Map<string, RowReading>();
-  for (const reading of stored) {
-    if (reading.stands) found.set(rowKey(reading.pointId, reading.round), fromStored(reading));
+  const place = ({ pointId, round, worn }: StoredReading | NewReading) => rowKey(pointId, round, worn);
+  for (const reading of sheet.readings) {
+    if (reading.stands) found.set(place(reading), rowReading(reading, true));
   }
   for (const { reading, state } of entries) {
-    const how = points.find(({ id }) => id === reading.pointId)?.point.how ?? 'straight';
-    if (state === 'waiting')
-      found.set(rowKey(reading.pointId, reading.round), fromOutbox(reading, how, tape));
+    const kept = state === 'waiting' ? asStored(reading, sheet, reading.readBy) : null;
+    if (kept) found.set(place(reading), rowReading(kept, false));
   }
   return found;
 }
 
 export interface RowsAsked {
   readonly points: readonly SheetPoint[];
-  readonly stored: readonly StoredReading[];
+  readonly sheet: Sheet;
   readonly entries: readonly OutboxEntry[];
-  readonly tape: Tape;
-  /** How many rounds a person asked for, by point, where more than one. */
+  /** How many rounds a person asked for, by point, where more than the sheet does. */
   readonly rounds: Readonly<Record<string, number>>;
+  /** Points of which a person tells left from right. */
+  readonly sided: ReadonlySet<string>;
 }
 
-/** Every row of the sheet in handling order; a point has as many rows as it has rounds. */
-export function sheetRows({ points, stored, entries, tape, rounds }: RowsAsked): readonly SheetRow[] {
-  const found = standing(points, stored, entries, tape);
-  return points.flatMap((point) => {
-    const taken = [...stored, ...entries.map(({ reading }) => reading)].filter(
-      ({ pointId }) => pointId === point.id,
-    );
-    const last = Math.max(1, rounds[point.id] ?? 1, ...taken.map(({ round }) => round));
-    const blind = last > 1 && !found.has(rowKey(point.id, last));
-    return Array.from({ length: last }, (_, index): SheetRow => {
-      const round = index + 1;
-      const key = rowKey(point.id, round);
-      const decision = entries.find(
-        ({ reading, state }) => state === 'decision' && rowKey(reading.pointId, reading.round) === key,
-      );
-      return {
-        key,
-        point,
-        round,
-        reading: found.get(key) ?? null,
-        decision: decision ?? null,
-        covered: blind && round < last,
-      };
+/** Every row of the sheet in handling order; a point has as many rows as it has rounds, on each side. */
+export function sheetRows(asked: RowsAsked): readonly SheetRow[] {
+  const found = standing(asked);
+  const all = [...asked.sheet.readings, ...asked.entries.map(({ reading }) => reading)];
+  return asked.points.flatMap((point) => {
+    const own = all.filter(({ pointId }) => pointId === point.id);
+    return sidesOf(own, asked.sided.has(point.id)).flatMap((worn) => {
+      const rounds = own.filter((reading) => reading.worn === worn).map(({ round }) => round);
+      const last = Math.max(point.rounds, asked.rounds[point.id] ?? 1, ...rounds);
+      return rowsOf({ point, worn, last, found, entries: asked.entries });
     });
   });
 }
 
-/** How far a point's rounds lie apart and whether that is allowed; null with fewer than two. */
+/** One row for the point; two where left and right are told apart, and a third for what was read before that. */
+function sidesOf(
+  own: readonly { readonly worn: WornSide | null }[],
+  isSided: boolean,
+): readonly (WornSide | null)[] {
+  const told = isSided || own.some(({ worn }) => worn !== null);
+  if (!told) return [null];
+  return [...(own.some(({ worn }) => worn === null) ? [null] : []), 'right', 'left'];
+}
+
+interface OfSide {
+  readonly point: SheetPoint;
+  readonly worn: WornSide | null;
+  readonly last: number;
+  readonly found: ReadonlyMap<string, RowReading>;
+  readonly entries: readonly OutboxEntry[];
+}
+
+function rowsOf({ point, worn, last, found, entries }: OfSide): readonly SheetRow[] {
+  const isRead = (round: number) => found.has(rowKey(point.id, round, worn));
+  const begun = Array.from({ length: last }, (_, index) => index + 1).filter(isRead).length > 0;
+  // What was not taken at all is not asked for again; a second round shows once there is a first.
+  const first = found.get(rowKey(point.id, 1, worn));
+  const shown =
+    begun && first?.reason === null ? last : Math.max(1, ...roundsWithReading(found, point.id, worn));
+  const blind = shown > 1 && !isRead(shown);
+  return Array.from({ length: shown }, (_, index): SheetRow => {
+    const round = index + 1;
+    const key = rowKey(point.id, round, worn);
+    const decision = entries.find(
+      ({ reading, state }) =>
+        state === 'decision' && rowKey(reading.pointId, reading.round, reading.worn) === key,
+    );
+    const reading = found.get(key) ?? null;
+    const covered = blind && round < shown;
+    return { key, point, worn, round, reading, decision: decision ?? null, covered };
+  });
+}
+
+const roundsWithReading = (
+  found: ReadonlyMap<string, RowReading>,
+  pointId: string,
+  worn: WornSide | null,
+): readonly number[] =>
+  Array.from({ length: 9 }, (_, index) => index + 1).filter((round) =>
+    found.has(rowKey(pointId, round, worn)),
+  );
+
+/** How far the rounds of a row's place lie apart and whether that is allowed; null with fewer than two. */
 export function spreadOf(
   rows: readonly SheetRow[],
-  pointId: string,
+  { point: { id }, worn }: Pick<SheetRow, 'point' | 'worn'>,
 ): { readonly apart: Length; readonly allowed: Length; readonly within: boolean } | null {
-  const own = rows.filter(({ point }) => point.id === pointId);
+  const own = rows.filter((row) => row.point.id === id && row.worn === worn);
   const values = own.flatMap(({ reading }) =>
     reading === null || reading.value === null ? [] : [reading.value],
   );

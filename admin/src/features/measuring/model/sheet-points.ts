@@ -7,18 +7,23 @@ export interface SheetPoint {
   readonly id: string;
   readonly letter: string;
   readonly required: boolean;
+  /** How many rounds the sheet asks for; the second and later ones are read blind. */
+  readonly rounds: number;
   readonly point: MeasuringPoint;
   readonly step: HandlingStep;
 }
 
 /** The points of a sheet, in handling order. */
-export function sheetPoints(view: ProtocolView): readonly SheetPoint[] {
+export function sheetPoints(view: ProtocolView, repeatPoints: readonly string[] = []): readonly SheetPoint[] {
   const protocol = toProtocol(view);
   const letters = lettersFor(protocol);
-  return protocol.points.flatMap(({ pointId, required }) => {
+  return protocol.points.flatMap(({ pointId, required, rounds: asked }) => {
     const point = pointIn(protocol, pointId);
     if (!point) return [];
-    return [{ id: pointId, letter: letters.get(pointId) ?? '', required, point, step: point.handlingStep }];
+    const rounds = repeatPoints.includes(pointId) ? Math.max(2, asked) : asked;
+    return [
+      { id: pointId, letter: letters.get(pointId) ?? '', required, rounds, point, step: point.handlingStep },
+    ];
   });
 }
 

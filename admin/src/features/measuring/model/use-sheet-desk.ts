@@ -1,21 +1,22 @@
-import type { HandlingStep } from '@ellwand/shared/points/point';
 import type { NewReading, Sheet } from '@ellwand/shared/records/sheet';
 import { mm } from '@ellwand/shared/units/length';
 import { useQueryClient } from '@tanstack/react-query';
 import { useCallback, useMemo, useState } from 'react';
 import { useRemembered } from '../../../lib/remembered.js';
-import { useSession } from '../../../lib/session.js';
 import { sheetQuery } from '../api/sheet.js';
 import type { Draft } from './drafts.js';
 import { keyedReading, notTakenReading, saysSomethingNew } from './keyed-reading.js';
-import { isDone, sheetRows, type SheetRow } from './rows.js';
+import { isDone, rowKey, sheetRows, type SheetRow } from './rows.js';
 import { sayReading, useReadAloud } from './read-aloud.js';
 import { sendStatus } from './send-status.js';
 import { sheetPoints } from './sheet-points.js';
 import { useDrafts, useOutbox, useOutboxView } from './use-outbox.js';
 import { useKeypad } from './use-keypad.js';
 import { useFindings } from './use-findings.js';
-import { useTurning } from './use-turning.js';
+import { useHands } from './use-hands.js';
+import { usePlace } from './use-place.js';
+import { useSittings } from './use-sittings.js';
+import { useUndo } from './use-undo.js';
 
 export const sheetUnits = ['mm', 'cm', 'in'] as const;
 export type NotTakenReason = Extract<NewReading, { state: 'not-taken' }>['reason'];
@@ -24,7 +25,10 @@ export type NotTakenReason = Extract<NewReading, { state: 'not-taken' }>['reason
 export function useSheetDesk(shown: Sheet) {
   // What was just kept is in the cache before this screen is told of it; read there, it is never nowhere.
   const sheet = useQueryClient().getQueryData(sheetQuery(shown.id).queryKey) ?? shown;
-  const points = useMemo(() => sheetPoints(sheet.protocol), [sheet.protocol]);
+  const points = useMemo(
+    () => sheetPoints(sheet.protocol, sheet.facts.repeatPoints),
+    [sheet.protocol, sheet.facts.repeatPoints],
+  );
   const tape = useMemo(
     () => ({ length: mm(sheet.facts.tapeLengthMm), zero: mm(sheet.facts.tapeZeroMm) }),
     [sheet.facts],
@@ -33,16 +37,20 @@ export function useSheetDesk(shown: Sheet) {
   const view = useOutboxView(outbox);
   const [drafts, typed] = useDrafts(sheet.id);
   const [rounds, setRounds] = useState<Readonly<Record<string, number>>>({});
+  const [sided, setSided] = useState<ReadonlySet<string>>(new Set());
   const rows = useMemo(
-    () => sheetRows({ points, stored: sheet.readings, entries: view.entries, tape, rounds }),
-    [points, sheet.readings, view.entries, tape, rounds],
+    () => sheetRows({ points, sheet, entries: view.entries, rounds, sided }),
+    [points, sheet, view.entries, rounds, sided],
   );
   const [unit, setUnit] = useRemembered('sheet-unit', sheetUnits, 'mm');
   const [aloud, setAloud] = useReadAloud();
+  const [pausing, setPausing] = useState<string | null>(null);
   const [mistakes, setMistakes] = useState<Readonly<Record<string, string>>>({});
   const findings = useFindings(sheet);
-  const reader = useReader(sheet);
+  const hands = useHands(sheet, outbox, view);
+  const sittings = useSittings(sheet, outbox, view);
   const place = usePlace(sheet.id, rows);
+  const undoing = useUndo({ outbox, view, putBack: (row, draft) => drafts.set(row, draft), go: place.go });
   const keypad = useKeypad();
 
   const draftOf = useCallback(
@@ -52,6 +60,9 @@ export function useSheetDesk(shown: Sheet) {
         unit: row.reading && row.reading.reason === null ? row.reading.unit : unit,
         count: row.reading && row.reading.tapeCount > 0 ? String(row.reading.tapeCount) : '',
         level: usualLevel(rows, row),
+        gap: row.reading?.gapTyped ?? '',
+        depth: row.reading?.depthTyped ?? '',
+        doubled: row.reading?.doubled ?? false,
       },
     [rows, typed, unit],
   );
@@ -73,12 +84,13 @@ export function useSheetDesk(shown: Sheet) {
       if (draft.level === usualLevel(rows, row)) drafts.clear(row.key);
       return true;
     }
-    const keyed = keyedReading({ row, readBy: reader.readBy }, draft);
+    const keyed = keyedReading({ row, readBy: hands.readBy, heldBy: hands.heldBy }, draft);
     if (!keyed.ok) {
       say(row.key, keyed.sentence);
       return false;
     }
     void outbox.add(keyed.reading, row.key);
+    undoing.did(row, keyed.reading);
     if (aloud) sayReading(row.point.point.name, keyed.reading);
     return true;
   };
@@ -96,12 +108,20 @@ export function useSheetDesk(shown: Sheet) {
   };
   const setAside = (row: SheetRow, reason: NotTakenReason, note: string) => {
     say(row.key, null);
-    void outbox.add(notTakenReading({ row, readBy: reader.readBy, note }, reason), row.key);
+    const reading = notTakenReading({ row, readBy: hands.readBy, heldBy: hands.heldBy, note }, reason);
+    void outbox.add(reading, row.key);
+    undoing.did(row, reading);
   };
-  const readAgain = (pointId: string) => {
-    const last = Math.max(...rows.filter(({ point }) => point.id === pointId).map(({ round }) => round));
-    setRounds((all) => ({ ...all, [pointId]: last + 1 }));
-    place.go(`${pointId}:${last + 1}`);
+  const readAgain = ({ point, worn }: SheetRow) => {
+    const own = rows.filter((row) => row.point.id === point.id && row.worn === worn);
+    const last = Math.max(...own.map(({ round }) => round));
+    setRounds((all) => ({ ...all, [point.id]: last + 1 }));
+    place.go(rowKey(point.id, last + 1, worn));
+  };
+  /** Left and right are told apart from now on; what was read before keeps its row. */
+  const tellSides = ({ point }: SheetRow) => {
+    setSided((all) => new Set([...all, point.id]));
+    place.go(rowKey(point.id, 1, 'right'));
   };
 
   const answer = (key: string, reason: string) => void outbox.say({ about: 'answer', key, reason });
@@ -120,7 +140,13 @@ export function useSheetDesk(shown: Sheet) {
     setUnit,
     aloud,
     setAloud,
-    reader,
+    hands,
+    sittings,
+    pausing,
+    setPausing,
+    undo: undoing.undo,
+    canUndo: undoing.canUndo,
+    tellSides,
     outbox,
     view,
     mistakes,
@@ -145,45 +171,8 @@ export type SheetDesk = ReturnType<typeof useSheetDesk>;
 /** The level a row begins with: its own reading’s, else the one found for the point’s first reading. */
 function usualLevel(rows: readonly SheetRow[], row: SheetRow): Draft['level'] {
   if (row.reading) return row.reading.level;
-  return rows.find(({ point, round }) => point.id === row.point.id && round === 1)?.reading?.level ?? null;
-}
-
-/** Who reads the tape just now: one of those the sheet names, else whoever is signed in. */
-function useReader(sheet: Sheet) {
-  const { user } = useSession();
-  const named = sheet.facts.people.filter(({ duty }) => duty === 'read');
-  const readers =
-    named.length > 0
-      ? named.map(({ userId, name }) => ({ userId, name }))
-      : [{ userId: user.id, name: user.name }];
-  const [chosen, setReadBy] = useState<string | null>(null);
-  const readBy = readers.find(({ userId }) => userId === chosen)?.userId ?? readers[0]!.userId;
-  return { readers, readBy, setReadBy };
-}
-
-/** Where the work is: the current row, and the turning of the garment between steps. */
-function usePlace(sheetId: string, rows: readonly SheetRow[]) {
-  const [key, setKey] = useState(() => (rows.find((row) => !isDone(row)) ?? rows[0]!).key);
-  const [focusAsked, setFocusAsked] = useState({ key, times: 0 });
-  const current = rows.find((row) => row.key === key) ?? rows[0]!;
-  const turning = useTurning(sheetId);
-  const stepOf = (rowKey: string): HandlingStep | undefined =>
-    rows.find((row) => row.key === rowKey)?.point.step ??
-    rows.find((row) => rowKey.startsWith(`${row.point.id}:`))?.point.step;
-
-  /** Makes a row the current one; where the garment must be turned first, that is said, once. */
-  const enter = (to: string): boolean => {
-    setKey(to);
-    const step = stepOf(to);
-    return step === undefined || turning.mayGo(step, to);
-  };
-  const focus = (to: string) => setFocusAsked(({ times }) => ({ key: to, times: times + 1 }));
-  const go = (to: string) => {
-    if (enter(to)) focus(to);
-  };
-  const turned = () => {
-    const to = turning.done();
-    if (to) focus(to);
-  };
-  return { current, enter, go, focusAsked, turn: turning.asked, turned };
+  return (
+    rows.find((other) => other.point.id === row.point.id && other.worn === row.worn && other.round === 1)
+      ?.reading?.level ?? null
+  );
 }
