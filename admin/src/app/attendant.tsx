@@ -20,9 +20,10 @@ export function useAttendant(userId: string | null): void {
         void queries.invalidateQueries({ queryKey: findingsQuery(arrived.sheetId).queryKey });
       }),
       onPicture((garmentId) => void queries.invalidateQueries({ queryKey: ['garment', garmentId] })),
-      // Back after a silence: what was shown from this device may have changed at the museum meanwhile.
+      // Back after a silence: what was shown from this device may have changed at the museum meanwhile. What is being
+      // asked already is left to it: were one address silent and the others not, asking anew would never end.
       reach.subscribe(() => {
-        if (!reach.isSilent()) void queries.invalidateQueries();
+        if (!reach.isSilent()) void queries.invalidateQueries({}, { cancelRefetch: false });
       }),
     ];
     return () => {
