@@ -2,7 +2,7 @@ import { v7 as uuidv7 } from 'uuid';
 import type { Garment } from '@ellwand/shared/records/garment';
 import { type Agent, type House, openHouse } from './harness/house';
 import type { TestPerson } from './harness/people';
-import { factsWith, makeDress, openSheet, reading, type SheetShown } from './support/garments';
+import { factsWith, makeDress, openSheet, reading, type SheetShown, soundSheet } from './support/garments';
 
 describe('what is said at the table', () => {
   let house: House;
@@ -133,6 +133,40 @@ describe('what is said at the table', () => {
     ]);
     const after = (await findings()).body.findings.find(({ key }: { key: string }) => key === asked.key);
     expect(after.answer).toMatchObject({ reason: 'Read three times', by: 'Odile Marsh' });
+  });
+
+  it('is kept of a sheet that is complete where it was said before, and leaves what is published as it is', async () => {
+    const path = `/api/v1/workroom/sheets/${bodice.id}`;
+    const sent = await table.post(`${path}/readings`).send({ readings: soundSheet(bodice, reader.id) });
+    await table.post(`${path}/complete`).set('If-Match', `"${sent.body.sheetVersion}"`);
+    const third = await house.person('curator', 'Wenna Oddie');
+    const people = [{ userId: third.id, duty: 'held' }];
+    const verb = async (who: Agent, name: string) => {
+      const garment = `/api/v1/workroom/garments/${dress.id}`;
+      const { version } = (await table.get(garment)).body as Garment;
+      return who.post(`${garment}/${name}`).set('If-Match', `"${version}"`);
+    };
+    expect((await verb(table, 'submit')).status).toBe(200);
+
+    const later = new Date(house.clock.now().getTime() + 60_000).toISOString();
+    const late = note({ about: 'hands', people });
+    const after = note({ about: 'hands', people }, later);
+    const remark = note({ about: 'described', thing: 'remark', text: 'Boxed' }, later);
+    expect((await say([late, after, remark])).body.results).toMatchObject([
+      { outcome: 'kept' },
+      { outcome: 'refused', detail: 'This sheet is complete. Open it again to go on.' },
+      { outcome: 'kept' },
+    ]);
+    const own = await verb(await house.signInAs(third), 'approve');
+    expect(own.body).toMatchObject({ status: 403, code: 'review.own-edit' });
+
+    const other = await house.signInAs(await house.person('curator', 'Hal Brandreth'));
+    expect((await verb(other, 'approve')).status).toBe(200);
+    expect((await verb(other, 'publish')).status).toBe(200);
+    const paused = note({ about: 'paused', reason: 'Put away' });
+    expect((await say([paused])).body.results).toMatchObject([{ outcome: 'kept' }]);
+    const { stage } = (await table.get(`/api/v1/workroom/garments/${dress.id}`)).body as Garment;
+    expect(stage).toBe('published');
   });
 
   it('cannot be added to while the record is in review, and can be said again then without harm', async () => {

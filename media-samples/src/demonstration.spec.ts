@@ -9,10 +9,17 @@ import { toProtocol } from '@ellwand/shared/records/protocol';
 import { roles } from '@ellwand/shared/records/roles';
 import { mm } from '@ellwand/shared/units/length';
 import { describe, expect, it } from 'vitest';
-import { checkSheetOf, garments, house, protocolOf, protocols } from './testing/demonstration-records';
+import {
+  checkSheetOf,
+  garments,
+  house,
+  protocolOf,
+  protocols,
+  sheetsOf,
+} from './testing/demonstration-records';
 
 const parts = garments.flatMap((garment) =>
-  garment.parts.map((part) => ({ name: `${garment.record.ownNumber}${part.suffix}`, garment, part })),
+  sheetsOf(garment).map((part) => ({ name: `${garment.record.ownNumber}${part.suffix}`, garment, part })),
 );
 const findings = parts.flatMap(({ name, garment, part }) =>
   part.sheet.complete === false
@@ -66,6 +73,18 @@ describe('the garments together', () => {
     expect(having('draftBeside')).toEqual(['LH.1971.3']);
   });
 
+  it('show one skirt measured twice over the years, a dress laid together as worn, and a left beside its right', () => {
+    const twice = garments.flatMap(({ parts: own }) =>
+      own.filter(({ earlierSheets }) => earlierSheets?.length),
+    );
+    expect(twice.map(({ kind }) => kind)).toEqual(['skirt']);
+    expect(parts.filter(({ part }) => part.wornTogether).map(({ name }) => name)).toEqual(['LH.1971.3 worn']);
+    const sides = parts.filter(({ garment, part }) =>
+      checkSheetOf(garment, part).readings.some(({ worn }) => worn === 'left'),
+    );
+    expect(sides.map(({ name }) => name)).toEqual(['LH.1966.30.2']);
+  });
+
   it('let a search by waist find several, and leave more', () => {
     const waists = parts.flatMap(({ garment, part }) =>
       [...viewSheet(checkSheetOf(garment, part)).values.values()].filter(
@@ -104,7 +123,9 @@ describe('the garments together', () => {
 
 describe.each(garments.map((garment) => [garment.record.ownNumber, garment] as const))(
   '%s',
-  (_number, { record, parts: ownParts, madeBy, approvedBy }) => {
+  (_number, garment) => {
+    const { record, madeBy, approvedBy } = garment;
+
     it('is a record that the catalogue takes, with a date that can be read', () => {
       expect(GarmentRecord.safeParse(record).error).toBeUndefined();
       expect(readDate(record.date)).toBeDefined();
@@ -118,7 +139,7 @@ describe.each(garments.map((garment) => [garment.record.ownNumber, garment] as c
     });
 
     it('is approved by a curator who neither made nor measured it', () => {
-      const hands = ownParts.flatMap(({ sheet }) => [sheet.read, sheet.held, sheet.wrote]);
+      const hands = sheetsOf(garment).flatMap(({ sheet }) => [sheet.read, sheet.held, sheet.wrote]);
       const curator = house.people.find((person) => person.key === approvedBy);
       expect(curator?.roles).toContain('curator');
       expect([madeBy, ...hands]).not.toContain(approvedBy);

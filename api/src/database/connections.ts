@@ -25,6 +25,7 @@ import { Catalogue1764550000002 } from './migrations/1764550000002-catalogue';
 import { AtTheTable1764560000000 } from './migrations/1764560000000-at-the-table';
 import { Protocols1764560000001 } from './migrations/1764560000001-protocols';
 import { CutSheet1764560000002 } from './migrations/1764560000002-cut-sheet';
+import { OverTheYears1764560000003 } from './migrations/1764560000003-over-the-years';
 import { Workroom1764550000000 } from './migrations/1764550000000-workroom';
 
 const entities = [
@@ -57,6 +58,7 @@ export const migrations = [
   AtTheTable1764560000000,
   Protocols1764560000001,
   CutSheet1764560000002,
+  OverTheYears1764560000003,
 ];
 
 /** For the handshake; how long somebody waits for a free connection is the pool's own affair. */

@@ -28,6 +28,8 @@ const DemonstrationReading = z.union([
     /** How far below the waist, in the same unit. */
     depth: z.string().nullable().default(null),
     note: z.string().default(''),
+    /** The same on the left, as worn: the rest is of the right then. */
+    left: z.string().nullable().default(null),
     /** Further rounds, in the same unit. */
     rounds: z.array(z.string()).default([]),
   }),
@@ -67,8 +69,12 @@ export const DemonstrationGarment = z.strictObject({
       name: z.string(),
       suffix: z.string().default(''),
       sheet: DemonstrationSheet.nullable().default(null),
+      /** Sheets from before, oldest first: the one above speaks for the part. */
+      earlierSheets: z.array(DemonstrationSheet).default([]),
     }),
   ),
+  /** The sheet of the parts laid together as worn. */
+  wornTogether: DemonstrationSheet.nullable().default(null),
   stage: RecordStage,
   returnReason: z.string().nullable().default(null),
   withdrawal: z.strictObject({ notice: z.string(), innerReason: z.string() }).nullable().default(null),

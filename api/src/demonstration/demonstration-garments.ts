@@ -3,9 +3,10 @@ import { Injectable } from '@nestjs/common';
 import type { Garment } from '@ellwand/shared/records/garment';
 import type { Actor } from '../common/actor';
 import { GarmentsService } from '../garments/garments.service';
+import { WornTogetherService } from '../garments/worn-together.service';
 import { ImageIntake } from '../media/intake/image-intake';
 import { PublishingService } from '../publishing/publishing.service';
-import type { Demonstration, DemonstrationGarment } from './demonstration-data';
+import type { Demonstration, DemonstrationGarment, DemonstrationSheet } from './demonstration-data';
 import { DemonstrationSheets, type Staff, staffMember } from './demonstration-sheets';
 
 /** A garment whose record, pictures and sheets are in the house, not yet reviewed. */
@@ -19,6 +20,7 @@ export interface FilledGarment {
 export class DemonstrationGarments {
   constructor(
     private readonly garments: GarmentsService,
+    private readonly together: WornTogetherService,
     private readonly sheets: DemonstrationSheets,
     private readonly intake: ImageIntake,
     private readonly publishing: PublishingService,
@@ -42,9 +44,24 @@ export class DemonstrationGarments {
     }
     for (const [index, part] of data.parts.entries()) {
       const made = garment.parts[index];
-      if (part.sheet && made) await this.sheets.fill(made.id, part.sheet, staff);
+      if (!made) continue;
+      for (const earlier of part.earlierSheets) await this.sheets.fill(made.id, earlier, staff);
+      if (part.sheet) await this.sheets.fill(made.id, part.sheet, staff);
     }
+    if (data.wornTogether) await this.layTogether(garment.id, data.wornTogether, maker, staff);
     return { id: garment.id, data };
+  }
+
+  private async layTogether(
+    garmentId: string,
+    sheet: DemonstrationSheet,
+    maker: Actor,
+    staff: Staff,
+  ): Promise<void> {
+    const { version } = await this.garments.read(garmentId);
+    const { parts } = await this.together.make(garmentId, version, maker);
+    const part = parts.find(({ wornTogether }) => wornTogether);
+    if (part) await this.sheets.fill(part.id, sheet, staff);
   }
 
   /** Takes a filled garment to the stage that the demonstration shows it in. */

@@ -98,12 +98,13 @@ function readingsOf(
   if (typeof data === 'string') return readingsOf(pointId, plain(data), readBy, keyedAt);
   if ('notTaken' in data)
     return [NewReading.parse({ ...base, id: uuidv7(), round: 1, state: 'not-taken', reason: data.notTaken })];
-  const { unit, tapeCount, levelFoundBy, depth, note } = data;
-  return [data.typed, ...data.rounds].map((typed, index) =>
+  const { unit, tapeCount, levelFoundBy, depth, note, left } = data;
+  const of = (worn: 'left' | 'right' | null) => (typed: string, index: number) =>
     NewReading.parse({
       ...base,
       id: uuidv7(),
       round: index + 1,
+      worn,
       note: index === 0 ? note : '',
       state: 'taken',
       typed,
@@ -111,10 +112,20 @@ function readingsOf(
       tapeCount,
       levelFoundBy,
       depthTyped: depth,
-    }),
-  );
+    });
+  if (left === null) return [data.typed, ...data.rounds].map(of(null));
+  return [...[data.typed, ...data.rounds].map(of('right')), ...[left].map(of('left'))];
 }
 
 function plain(typed: string): Exclude<DemonstrationReading, string | { notTaken: unknown }> {
-  return { typed, unit: 'mm', tapeCount: 0, levelFoundBy: null, depth: null, note: '', rounds: [] };
+  return {
+    typed,
+    unit: 'mm',
+    tapeCount: 0,
+    levelFoundBy: null,
+    depth: null,
+    note: '',
+    left: null,
+    rounds: [],
+  };
 }

@@ -42,6 +42,7 @@ export class GarmentView {
         kind: PartKind.parse(part.kind),
         name: part.name,
         position: part.position,
+        wornTogether: part.wornTogether,
         sheets: sheets.filter((sheet) => sheet.partId === part.id),
       })),
       images: images.map(toImage),

@@ -15,6 +15,7 @@ import {
 } from './dto/garment.dto';
 import { GarmentListService } from './garment-list.service';
 import { GarmentsService } from './garments.service';
+import { WornTogetherService } from './worn-together.service';
 
 @ApiTags('Garments')
 @Controller('workroom')
@@ -22,6 +23,7 @@ export class GarmentsController {
   constructor(
     private readonly garments: GarmentsService,
     private readonly lists: GarmentListService,
+    private readonly together: WornTogetherService,
   ) {}
 
   @Get('garments')
@@ -67,6 +69,13 @@ export class GarmentsController {
     @CurrentActor() actor: Actor,
   ) {
     return this.garments.addPart(id, seen, part, actor);
+  }
+
+  @Post('garments/:id/worn-together')
+  @Requires('garment:write')
+  @ZodResponse({ status: 201, type: GarmentDto })
+  layTogether(@Param() { id }: IdParam, @IfMatch() seen: number, @CurrentActor() actor: Actor) {
+    return this.together.make(id, seen, actor);
   }
 
   @Delete('parts/:id')

@@ -105,11 +105,12 @@ export class GarmentsService {
     return this.work.run(async (tx) => {
       const garment = await this.edits.edit(tx, actor, await this.edits.lockAt(tx, id, seen), {});
       const parts = await tx.find(PartRow, { where: { garmentId: id } });
-      if (parts.length >= 12) throw conflict('part.too-many', 'A garment has at most twelve parts.');
+      const byThemselves = parts.filter(({ wornTogether }) => !wornTogether);
+      if (byThemselves.length >= 12) throw conflict('part.too-many', 'A garment has at most twelve parts.');
       if (parts.some((other) => isSameSuffix(other.suffix, part.suffix))) {
         throw conflict('part.number-used', `Part number "${part.suffix}" is used already on this garment.`);
       }
-      const position = Math.max(-1, ...parts.map((other) => other.position)) + 1;
+      const position = Math.max(-1, ...byThemselves.map((other) => other.position)) + 1;
       const partId = await insertPart(tx, id, part, position);
       await this.audit.note(tx, actor, {
         verb: 'add',
@@ -130,9 +131,7 @@ export class GarmentsService {
       if (await tx.existsBy(SheetRow, { partId })) {
         throw conflict('part.measured', `${part.name} has a measuring sheet and cannot be taken away.`);
       }
-      if ((await tx.countBy(PartRow, { garmentId: garment.id })) === 1) {
-        throw conflict('part.last', 'A garment has at least one part.');
-      }
+      await refuseTooFew(tx, part);
       await dropEmptyCutSheet(tx, part);
       await tx.delete(PartRow, { id: partId });
       await this.audit.note(tx, actor, {
@@ -168,6 +167,18 @@ async function refuseOtherRequest(tx: Tx, id: string, made: NewGarment): Promise
   const entry = await tx.findOneBy(AuditEntryRow, { subjectId: id, verb: 'make' });
   if (!entry || !('asked' in entry.facts) || entry.facts.asked === fingerprint(made)) return;
   throw new Refusal(422, 'garment.id-used', 'Another garment was made under this id before.');
+}
+
+/** A garment has a part, and what is laid together as worn are two or more. */
+async function refuseTooFew(tx: Tx, part: PartRow): Promise<void> {
+  if (part.wornTogether) return;
+  const parts = await tx.find(PartRow, { where: { garmentId: part.garmentId } });
+  const left = parts.filter(({ id, wornTogether }) => id !== part.id && !wornTogether);
+  if (left.length === 0) throw conflict('part.last', 'A garment has at least one part.');
+  if (left.length < 2 && parts.some(({ wornTogether }) => wornTogether)) {
+    const sentence = `Without ${part.name} nothing is left to lay together as worn: take that away first.`;
+    throw conflict('part.worn-together', sentence);
+  }
 }
 
 /** What lists need stands in columns of its own, always the same as in the record. */

@@ -4,6 +4,7 @@ import type { Tx } from '../common/work';
 import type { ProtocolBook } from '../measuring/protocols/protocol-book';
 import { ReadingRow } from '../measuring/readings/reading.entity';
 import { SheetRow } from '../measuring/sheets/sheet.entity';
+import { speakingOf } from '../measuring/sheets/speaking-sheet';
 import type { PartRow } from './part.entity';
 
 /** The sheets of some parts, newest first, each with how many of its own protocol's points are done. */
@@ -18,11 +19,22 @@ export async function sheetSummaries(
     order: { measuredOn: 'DESC', createdAt: 'DESC' },
   });
   const done = await pointsDone(tx, sheets);
+  const speaking = new Set(
+    parts.map(
+      (part) =>
+        speakingOf(
+          part,
+          sheets.filter(({ partId }) => partId === part.id),
+        )?.id,
+    ),
+  );
   return Promise.all(
     sheets.map(async (sheet) => ({
       id: sheet.id,
       partId: sheet.partId,
       state: sheet.state,
+      purpose: sheet.purpose,
+      speaks: speaking.has(sheet.id),
       measuredOn: sheet.measuredOn,
       pointsDone: done.get(sheet.id) ?? 0,
       pointsWanted: await pointsWanted(tx, sheet, parts, protocols),

@@ -4,6 +4,9 @@ import { CutSheetsController } from './cut-sheets/cut-sheets.controller';
 import { CutSheetsService } from './cut-sheets/cut-sheets.service';
 import { FindingsService } from './findings/findings.service';
 import { MeasuringController } from './measuring.controller';
+import { PartSheetsController } from './part-sheets/part-sheets.controller';
+import { PartSheetsService } from './part-sheets/part-sheets.service';
+import { PartSheetsView } from './part-sheets/part-sheets-view';
 import { ProtocolBookModule } from './protocols/protocol-book.module';
 import { ProtocolsController } from './protocols/protocols.controller';
 import { ProtocolsService } from './protocols/protocols.service';
@@ -18,7 +21,13 @@ import { TableNotesService } from './table-notes/table-notes.service';
 
 @Module({
   imports: [GarmentsModule, ProtocolBookModule],
-  controllers: [MeasuringController, ProtocolsController, CutSheetsController, RepeatabilityController],
+  controllers: [
+    MeasuringController,
+    ProtocolsController,
+    CutSheetsController,
+    RepeatabilityController,
+    PartSheetsController,
+  ],
   providers: [
     ProtocolsService,
     SheetProtocolService,
@@ -30,6 +39,8 @@ import { TableNotesService } from './table-notes/table-notes.service';
     TableNotesService,
     CutSheetsService,
     RepeatabilityService,
+    PartSheetsService,
+    PartSheetsView,
   ],
   exports: [
     ProtocolBookModule,
@@ -38,6 +49,7 @@ import { TableNotesService } from './table-notes/table-notes.service';
     ReadingsService,
     FindingsService,
     CutSheetsService,
+    PartSheetsService,
   ],
 })
 export class MeasuringModule {}

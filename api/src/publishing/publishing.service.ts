@@ -19,6 +19,7 @@ import { projectGarment } from './projection/project-garment';
 import { freePublicNumber } from './public-number';
 import { RevisionRow } from './revision.entity';
 import { mayNotApprove } from './review/approval';
+import { withLateHands } from './review/late-hands';
 import { ReviewService } from './review/review.service';
 import { takeSnapshot } from './snapshot-taker';
 
@@ -78,7 +79,7 @@ export class PublishingService {
     return this.verb(id, seen, actor, 'approve', async (tx, garment) => {
       refuseUnless(garment, ['in-review'], 'Only a record in review can be approved.');
       const revision = await openRevision(tx, id);
-      const refusal = mayNotApprove(revision.snapshot, actor.id);
+      const refusal = mayNotApprove(await withLateHands(tx, id, revision.snapshot), actor.id);
       if (refusal) throw refusal;
       await this.refuseUnready(tx, id, ['submit', 'approve']);
       await this.garments.move(tx, actor, garment, 'approved');

@@ -9,8 +9,9 @@ import { PartRow } from '../garments/part.entity';
 import { bodyOf, cutSheetRow } from '../measuring/cut-sheets/cut-sheet-view';
 import type { ProtocolBook } from '../measuring/protocols/protocol-book';
 import { toStored, trimmedMm } from '../measuring/readings/stored-reading';
-import { SheetRow } from '../measuring/sheets/sheet.entity';
+import { choiceOf } from '../measuring/part-sheets/choice';
 import { peopleOf, readingsOf } from '../measuring/sheets/sheet-view';
+import { sheetsOf, speakingOf } from '../measuring/sheets/speaking-sheet';
 import { ImageRow } from '../media/image.entity';
 import { toImage } from '../media/image-view';
 import type { Snapshot, SnapshotPart, SnapshotSheet } from './snapshot';
@@ -25,6 +26,7 @@ export async function takeSnapshot(tx: Tx, garment: GarmentRow, protocols: Proto
       suffix: part.suffix,
       kind: part.kind,
       name: part.name,
+      wornTogether: part.wornTogether,
       sheet: await speakingSheet(tx, part, protocols),
       cutSheet: bodyOf(await cutSheetRow(tx, part.id)),
     });
@@ -43,12 +45,8 @@ export async function takeSnapshot(tx: Tx, garment: GarmentRow, protocols: Proto
   };
 }
 
-/** Of several sheets over the years the newest complete one speaks for its part. */
 async function speakingSheet(tx: Tx, part: PartRow, protocols: ProtocolBook): Promise<SnapshotSheet | null> {
-  const sheet = await tx.findOne(SheetRow, {
-    where: { partId: part.id, state: 'complete' },
-    order: { measuredOn: 'DESC', createdAt: 'DESC' },
-  });
+  const sheet = speakingOf(part, await sheetsOf(tx, part.id));
   if (!sheet) return null;
   const support = supports.find((id) => id === sheet.support);
   const readings = await readingsOf(tx, sheet.id);
@@ -63,5 +61,6 @@ async function speakingSheet(tx: Tx, part: PartRow, protocols: ProtocolBook): Pr
     fasteningPair: sheet.fasteningPair,
     people: await peopleOf(tx, sheet.id),
     readings: readings.map(toStored),
+    chosen: part.speakingSheetId === sheet.id ? await choiceOf(tx, part) : null,
   };
 }

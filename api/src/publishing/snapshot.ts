@@ -7,7 +7,7 @@ import type { ProtocolView } from '@ellwand/shared/records/protocol';
 import type { StoredReading } from '@ellwand/shared/records/sheet';
 import type { z } from 'zod';
 
-/** The sheet that speaks for a part when a garment is published: the newest complete one. */
+/** The sheet that speaks for a part when a garment is published: the one that was chosen, else the newest complete one. */
 export interface SnapshotSheet {
   readonly id: string;
   readonly protocolVersion: number;
@@ -20,6 +20,8 @@ export interface SnapshotSheet {
   readonly fasteningPair: string;
   readonly people: readonly (z.infer<typeof SheetPerson> & { readonly name: string })[];
   readonly readings: readonly StoredReading[];
+  /** Why this one of several; null where the newest speaks by itself, absent from before one could be chosen. */
+  readonly chosen?: { readonly because: string; readonly by: string; readonly at: string } | null;
 }
 
 export interface SnapshotPart {
@@ -27,6 +29,8 @@ export interface SnapshotPart {
   readonly suffix: string;
   readonly kind: GarmentKind;
   readonly name: string;
+  /** Said of the parts laid together as worn. */
+  readonly wornTogether?: boolean;
   readonly sheet: SnapshotSheet | null;
   /** How it is cut; revisions frozen before cut sheets have none. */
   readonly cutSheet?: CutSheetBody | null;

@@ -55,6 +55,7 @@ export function publishedDocument(parts: Partial<PublishedDocument> = {}): Publi
         number: `${number}.1`,
         kind: 'bodice',
         name: 'Bodice',
+        wornTogether: false,
         measuredOn: '2026-03-02',
         support: 'flat',
         tape: 'Linen tape 3',

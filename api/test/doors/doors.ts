@@ -49,7 +49,11 @@ export const doors: Readonly<Record<string, Door>> = {
   'GET /api/v1/workroom/parts/:id/cut-sheet': 'garment:read',
   'PUT /api/v1/workroom/parts/:id/cut-sheet': 'garment:write',
 
+  'POST /api/v1/workroom/garments/:id/worn-together': 'garment:write',
+
   'POST /api/v1/workroom/parts/:id/sheets': 'sheet:write',
+  'GET /api/v1/workroom/parts/:id/sheets': 'garment:read',
+  'PUT /api/v1/workroom/parts/:id/speaking-sheet': 'garment:write',
   'GET /api/v1/workroom/sheets/:id': 'garment:read',
   'PUT /api/v1/workroom/sheets/:id/facts': 'sheet:write',
   'POST /api/v1/workroom/sheets/:id/readings': 'sheet:write',

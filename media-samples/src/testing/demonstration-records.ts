@@ -3,7 +3,7 @@ import { readdirSync, readFileSync } from 'node:fs';
 import { type CheckSheet } from '@ellwand/shared/checks/sheet-view';
 import { type GarmentKind } from '@ellwand/shared/points/kinds';
 import { pointIn, type Protocol } from '@ellwand/shared/protocols/protocol';
-import { protocolFor } from '@ellwand/shared/protocols/standard-protocols';
+import { protocolFor, wornTogetherProtocol } from '@ellwand/shared/protocols/standard-protocols';
 import { type LevelFoundBy, type NotTakenReason, type Reading } from '@ellwand/shared/readings/reading';
 import { wholeValue } from '@ellwand/shared/readings/whole-value';
 import { type supports } from '@ellwand/shared/records/sheet';
@@ -20,6 +20,7 @@ export type ReadingEntry =
       tapeCount?: number;
       levelFoundBy?: LevelFoundBy;
       depth?: string;
+      left?: string;
       rounds?: string[];
       note?: string;
     }
@@ -44,6 +45,9 @@ export interface PartEntry {
   name: string;
   suffix: string;
   sheet: SheetEntry;
+  earlierSheets?: SheetEntry[];
+  /** Said of all parts laid together. */
+  wornTogether?: true;
 }
 
 export interface GarmentEntry {
@@ -51,6 +55,7 @@ export interface GarmentEntry {
   madeBy: string;
   approvedBy: string;
   parts: PartEntry[];
+  wornTogether?: SheetEntry;
   stage: string;
   returnReason?: string;
   withdrawal?: { notice: string; innerReason: string };
@@ -75,8 +80,22 @@ export const protocols: readonly ProtocolView[] = ProtocolView.extend({
   .array()
   .parse(contentOf('protocols.json'));
 
+/** Every sheet of a garment with the part that it measures: those that speak, earlier ones, and of all laid together. */
+export function sheetsOf({ parts, wornTogether }: GarmentEntry): PartEntry[] {
+  const earlier = parts.flatMap((part) => (part.earlierSheets ?? []).map((sheet) => ({ ...part, sheet })));
+  if (!wornTogether) return [...parts, ...earlier];
+  const heading = {
+    kind: 'dress',
+    name: 'Laid together as worn',
+    suffix: ' worn',
+    wornTogether: true,
+  } as const;
+  return [...parts, ...earlier, { ...heading, sheet: wornTogether }];
+}
+
 /** The version that a part's sheet was taken by. */
-export function protocolOf({ kind, sheet: { protocolVersion = 1 } }: PartEntry): Protocol {
+export function protocolOf({ kind, wornTogether, sheet: { protocolVersion = 1 } }: PartEntry): Protocol {
+  if (wornTogether) return wornTogetherProtocol;
   const made = protocols.find((each) => each.kind === kind && each.version === protocolVersion);
   return made ? toProtocol(made) : protocolFor(kind);
 }
@@ -95,14 +114,21 @@ function readingsOf(pointId: string, entry: ReadingEntry, protocol: Protocol): R
     return [{ id: pointId, pointId, round: 1, state: 'not-taken', notTakenReason: entry.notTaken }];
   }
   const said = typeof entry === 'string' ? { typed: entry } : entry;
-  const { typed, tapeCount = 0, rounds = [], levelFoundBy, depth, note } = said;
+  const { typed, tapeCount = 0, rounds = [], levelFoundBy, depth, note, left } = said;
   const how = pointIn(protocol, pointId)?.how ?? 'curve';
-  return [typed, ...rounds].map((keyed, index) => {
+  const right = [typed, ...rounds].map((keyed, index) => ({
+    keyed,
+    round: index + 1,
+    side: left && 'right',
+  }));
+  const all = [...right, ...(left ? [{ keyed: left, round: 1, side: 'left' }] : [])];
+  return all.map(({ keyed, round, side }, index) => {
     const read = mm(keyed);
     return {
       id: `${pointId}-${index + 1}`,
       pointId,
-      round: index + 1,
+      round,
+      ...(side === 'left' || side === 'right' ? { worn: side } : {}),
       state: 'taken',
       typed: keyed,
       unit: 'mm',
@@ -122,7 +148,7 @@ const allReadings = (part: PartEntry): Reading[] =>
 
 /** A part's sheet with those of the other parts of its garment, as the checks want it. */
 export function checkSheetOf(garment: GarmentEntry, part: PartEntry): CheckSheet {
-  const others = garment.parts.filter((other) => other !== part);
+  const others = part.wornTogether ? [] : garment.parts.filter(({ suffix }) => suffix !== part.suffix);
   return {
     kind: part.kind,
     protocol: protocolOf(part),

@@ -133,6 +133,8 @@ export const Part = z.object({
   kind: PartKind,
   name: z.string(),
   position: z.number().int(),
+  /** Not a part by itself but all of them, laid together as worn; it has no number of its own in public. */
+  wornTogether: z.boolean(),
   sheets: z.array(SheetSummary),
 });
 export type Part = z.infer<typeof Part>;

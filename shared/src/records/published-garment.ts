@@ -39,6 +39,8 @@ export const PublishedPart = z.object({
   number: z.string(),
   kind: z.enum(kindIds),
   name: z.string(),
+  /** Not a part by itself but all of them, laid together as worn: its number is the garment's own. */
+  wornTogether: z.boolean().default(false),
   measuredOn: Day.nullable(),
   support: z.string().nullable(),
   tape: z.string().nullable(),

@@ -169,6 +169,9 @@ export const SheetSummary = z.object({
   id: Uuid,
   partId: Uuid,
   state: SheetState,
+  purpose: z.enum(sheetPurposes),
+  /** Whether it speaks for its part when the garment is next published. */
+  speaks: z.boolean(),
   measuredOn: Day,
   pointsDone: z.number().int(),
   pointsWanted: z.number().int(),

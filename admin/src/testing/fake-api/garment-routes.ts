@@ -10,6 +10,7 @@ import {
 import { ReturnReason, Withdrawal } from '@ellwand/shared/records/publishing';
 import { kindName } from './garments.js';
 import type { House } from './house.js';
+import { speakingSheet } from './part-sheets.js';
 import { publishedOf, reviewOf } from './publishing.js';
 import { Refusal, read } from './refuse.js';
 import { json, matched, type Routes } from './router.js';
@@ -18,8 +19,13 @@ import { summaryOf } from './sheets.js';
 const known = (house: House, id: string): Garment => {
   const garment = house.garment(id);
   if (!garment) throw new Refusal(404, 'garment.unknown', {}, 'There is no such garment.');
-  for (const part of garment.parts)
-    part.sheets = house.sheets.filter(({ partId }) => partId === part.id).map(summaryOf);
+  for (const part of garment.parts) {
+    const speaking = speakingSheet(house, part.id);
+    part.sheets = house.sheets
+      .filter(({ partId }) => partId === part.id)
+      .map((sheet) => summaryOf(sheet, sheet === speaking))
+      .toSorted((one, other) => other.measuredOn.localeCompare(one.measuredOn));
+  }
   return garment;
 };
 
@@ -51,6 +57,7 @@ function partOf(garment: Pick<Garment, 'id' | 'parts'>, { kind, name, suffix }: 
     kind,
     name: name || kindName(kind),
     position: garment.parts.length,
+    wornTogether: false,
     sheets: [],
   };
 }

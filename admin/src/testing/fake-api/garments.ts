@@ -99,6 +99,7 @@ function part(garmentNumber: number, kind: GarmentKind, index: number, of: numbe
     kind,
     name: kindName(kind),
     position: index,
+    wornTogether: false,
     sheets: [],
   };
 }

@@ -1,6 +1,7 @@
 import type { CutSheet } from '@ellwand/shared/records/cut-sheet';
 import type { Garment } from '@ellwand/shared/records/garment';
 import type { ProtocolVersion } from '@ellwand/shared/records/protocol';
+import type { PartSheets } from '@ellwand/shared/records/part-sheets';
 import type { Change } from '@ellwand/shared/records/publishing';
 import type { Invitation, Person } from '@ellwand/shared/records/session';
 import type { FindingView, Sheet } from '@ellwand/shared/records/sheet';
@@ -10,6 +11,7 @@ import { sampleGarments } from './garments.js';
 import { idOf, invitation, staff } from './people.js';
 import { sampleProtocols } from './protocols.js';
 import { sampleRepeated } from './repeatability-routes.js';
+import { sheetsOverTheYears } from './sheets-over-the-years.js';
 import { sampleSheets } from './sheets.js';
 
 type PersonShown = z.infer<typeof Person>;
@@ -26,6 +28,8 @@ export class House {
   /** By point, what was read more than once. */
   readonly repeated = new Map(sampleRepeated);
   readonly answers = new Map<string, NonNullable<FindingView['answer']>>();
+  /** Which sheet was chosen to speak for a part, by the part. */
+  readonly choices = new Map<string, NonNullable<PartSheets['chosen']>>();
   readonly changes: Change[] = [
     {
       kind: 'changed',
@@ -50,7 +54,7 @@ export class House {
 
   constructor(signedIn: PersonShown | null = staff.recorder) {
     this.signedIn = signedIn;
-    this.sheets = sampleSheets(this.garments);
+    this.sheets = [...sampleSheets(this.garments), ...sheetsOverTheYears(this.garments)];
   }
 
   newId(): string {

@@ -36,9 +36,10 @@ function publishedPart(house: House, garment: Garment, part: Garment['parts'][nu
     pointIn({ ownPoints: sheet ? toProtocol(sheet.protocol).ownPoints : [] }, pointId)?.name ?? pointId;
   const values = [...acceptedValues(readings.map(toReading)).values()];
   return {
-    number: garment.record.ownNumber + part.suffix,
+    number: garment.record.ownNumber + (part.wornTogether ? '' : part.suffix),
     kind: part.kind,
     name: part.name,
+    wornTogether: part.wornTogether,
     measuredOn: sheet?.facts.measuredOn ?? null,
     support: sheet ? 'Flat on the table' : null,
     tape: sheet?.facts.tape ?? null,

@@ -1,5 +1,5 @@
 import type { Garment } from '@ellwand/shared/records/garment';
-import { protocolFor } from '@ellwand/shared/protocols/standard-protocols';
+import { protocolFor, wornTogetherProtocol } from '@ellwand/shared/protocols/standard-protocols';
 import { toProtocolView } from '@ellwand/shared/records/protocol';
 import type { Sheet, SheetSummary, StoredReading } from '@ellwand/shared/records/sheet';
 import type { z } from 'zod';
@@ -44,12 +44,14 @@ export function reading(
   };
 }
 
-export function summaryOf(sheet: Sheet): z.infer<typeof SheetSummary> {
+export function summaryOf(sheet: Sheet, speaks = false): z.infer<typeof SheetSummary> {
   const standing = new Set(sheet.readings.filter(({ stands }) => stands).map(({ pointId }) => pointId));
   return {
     id: sheet.id,
     partId: sheet.partId,
     state: sheet.state,
+    purpose: sheet.facts.purpose,
+    speaks,
     measuredOn: sheet.facts.measuredOn,
     pointsDone: standing.size,
     pointsWanted: sheet.protocol.points.length,
@@ -67,9 +69,9 @@ export function sheetFor(garment: Garment, partIndex: number, id: string): Sheet
     garmentVersion: garment.version,
     kind: part.kind,
     protocolVersion: 1,
-    protocol: toProtocolView(protocolFor(part.kind)),
+    protocol: toProtocolView(part.wornTogether ? wornTogetherProtocol : protocolFor(part.kind)),
     newestProtocolVersion: 1,
-    wornTogether: false,
+    wornTogether: part.wornTogether,
     state: 'open',
     facts: {
       people: [

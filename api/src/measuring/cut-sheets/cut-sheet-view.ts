@@ -4,10 +4,11 @@ import { type CutSheet, CutSheetBody } from '@ellwand/shared/records/cut-sheet';
 import { toReading } from '@ellwand/shared/records/measured';
 import { toMmString } from '@ellwand/shared/units/length';
 import type { Tx } from '../../common/work';
+import { PartRow } from '../../garments/part.entity';
 import { UserRow } from '../../users/user.entity';
 import { toStored } from '../readings/stored-reading';
-import { SheetRow } from '../sheets/sheet.entity';
 import { readingsOf } from '../sheets/sheet-view';
+import { sheetsOf, speakingOf } from '../sheets/speaking-sheet';
 import { CutSheetRow } from './cut-sheet.entity';
 
 /** A row's content, with what has been added to the shape since it was written. */
@@ -22,22 +23,21 @@ export const cutSheetRow = (tx: Tx, partId: string): Promise<CutSheetRow | null>
 export async function viewCutSheet(tx: Tx, partId: string): Promise<CutSheet> {
   const row = await cutSheetRow(tx, partId);
   const by = row && (await tx.findOne(UserRow, { where: { id: row.updatedBy } }));
+  const part = await tx.findOneByOrFail(PartRow, { id: partId });
   return {
     partId,
     version: row?.version ?? 0,
     body: bodyOf(row),
-    rounds: await roundsOf(tx, partId),
+    rounds: await roundsOf(tx, part),
     updatedAt: row?.updatedAt.toISOString() ?? null,
     updatedBy: by?.name ?? null,
   };
 }
 
-/** Those of the newest complete sheet; while there is none, of the newest that is open. */
-async function roundsOf(tx: Tx, partId: string): Promise<CutSheet['rounds']> {
-  const sheet = await tx.findOne(SheetRow, {
-    where: { partId, purpose: 'record' },
-    order: { state: 'ASC', measuredOn: 'DESC', createdAt: 'DESC' },
-  });
+/** Those of the sheet that speaks for the part; while none does, of the newest that is open. */
+async function roundsOf(tx: Tx, part: PartRow): Promise<CutSheet['rounds']> {
+  const sheets = await sheetsOf(tx, part.id);
+  const sheet = speakingOf(part, sheets) ?? sheets.find(({ purpose }) => purpose === 'record');
   if (!sheet) return [];
   const readings = (await readingsOf(tx, sheet.id)).map(toStored).map(toReading);
   return roundsRead(readings).map(({ level, label, value }) => ({

@@ -17,6 +17,7 @@ import { ProtocolBook } from '../protocols/protocol-book';
 import { toStored } from '../readings/stored-reading';
 import { readingsOf } from '../sheets/sheet-view';
 import { SheetRow } from '../sheets/sheet.entity';
+import { currentSheet } from '../sheets/speaking-sheet';
 import { FindingAnswerRow } from './finding-answer.entity';
 import { ownGarments } from './own-garments';
 
@@ -128,15 +129,15 @@ export class FindingsService {
     };
   }
 
-  /** The newest sheet of each other part: a waist must agree between bodice and skirt. */
+  /** What each other part came to: a waist must agree between bodice and skirt. All together are no other part. */
   private async otherParts(tx: Tx, part: PartRow): Promise<OtherPartStored[]> {
-    const others = await tx.find(PartRow, { where: { garmentId: part.garmentId, id: Not(part.id) } });
+    if (part.wornTogether) return [];
+    const others = await tx.find(PartRow, {
+      where: { garmentId: part.garmentId, id: Not(part.id), wornTogether: false },
+    });
     const result: OtherPartStored[] = [];
     for (const other of others) {
-      const sheet = await tx.findOne(SheetRow, {
-        where: { partId: other.id, purpose: 'record' },
-        order: { measuredOn: 'DESC', createdAt: 'DESC' },
-      });
+      const sheet = await currentSheet(tx, other);
       if (!sheet) continue;
       const readings = (await readingsOf(tx, sheet.id)).map(toStored);
       result.push({ kind: other.kind, name: other.name, readings });

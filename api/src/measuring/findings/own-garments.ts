@@ -23,7 +23,7 @@ interface Candidate {
 
 /**
  * What the museum's other garments came to, point by point: parts of the same kind, dated within the same decade, each
- * by its newest complete sheet. Nothing where the garment's own date cannot be read or is too wide.
+ * by the sheet that speaks for it. Nothing where the garment's own date cannot be read or is too wide.
  */
 export async function ownGarments(tx: Tx, part: PartRow): Promise<readonly PeerValues[]> {
   const garment = await tx.findOneOrFail(GarmentRow, { where: { id: part.garmentId } });
@@ -48,7 +48,7 @@ async function candidates(tx: Tx, { kind, garmentId }: PartRow): Promise<Candida
        SELECT JSON_VALUE(g.record, '$.date') AS date, g.created_at AS made, g.id AS garment_id,
          (SELECT s.id FROM ellwand.sheet s
            WHERE s.part_id = p.id AND s.state = 'complete' AND s.purpose = 'record'
-           ORDER BY s.measured_on DESC, s.created_at DESC LIMIT 1) AS sheetId
+           ORDER BY (s.id <=> p.speaking_sheet_id) DESC, s.measured_on DESC, s.created_at DESC LIMIT 1) AS sheetId
        FROM ellwand.part p JOIN ellwand.garment g ON g.id = p.garment_id
        WHERE p.kind = ? AND p.garment_id <> ? AND NOT p.worn_together) found
      WHERE sheetId IS NOT NULL ORDER BY made DESC, garment_id LIMIT ?`,

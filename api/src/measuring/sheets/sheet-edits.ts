@@ -22,12 +22,38 @@ export class SheetEdits {
     private readonly clock: Clock,
   ) {}
 
-  /** The sheet, its garment noted as being measured. @throws Refusal 404, 409 where the record is locked */
+  /**
+   * The sheet, its garment noted as being measured. A study sheet is never published, so that it leaves the record
+   * alone. @throws Refusal 404, 409 where the record is locked
+   */
   async take(tx: Tx, actor: Actor, sheetId: string): Promise<SheetInHand> {
+    const inHand = await this.lock(tx, sheetId);
+    const { sheet, part } = inHand;
+    if (sheet.purpose === 'record') await this.garments.noteMeasuring(tx, actor, part.garmentId);
+    return inHand;
+  }
+
+  /**
+   * The same for what was said at the table: of a sheet that is complete it tells the past. The record stays as it is,
+   * in review or published; whoever is named counts as a hand in it all the same.
+   */
+  async takeToNote(tx: Tx, actor: Actor, sheetId: string): Promise<SheetInHand> {
+    const inHand = await this.lock(tx, sheetId);
+    if (inHand.sheet.state === 'open') return this.take(tx, actor, sheetId);
+    await this.noteHands(tx, inHand, [actor.id]);
+    return inHand;
+  }
+
+  /** Keeps in mind who had a hand in what a sheet measured, where that may be published. */
+  async noteHands(tx: Tx, { sheet, part }: SheetInHand, userIds: readonly string[]): Promise<void> {
+    if (sheet.purpose === 'record') await this.garments.noteHands(tx, part.garmentId, userIds);
+  }
+
+  private async lock(tx: Tx, sheetId: string): Promise<SheetInHand> {
     const found = await tx.findOne(SheetRow, { where: { id: sheetId } });
     if (!found) throw notFound('sheet.unknown', 'measuring sheet');
     const part = await tx.findOneOrFail(PartRow, { where: { id: found.partId } });
-    await this.garments.noteMeasuring(tx, actor, part.garmentId);
+    await this.garments.lock(tx, part.garmentId);
     const sheet = await tx.findOneOrFail(SheetRow, {
       where: { id: sheetId },
       lock: { mode: 'pessimistic_write' },

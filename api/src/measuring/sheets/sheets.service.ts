@@ -50,7 +50,8 @@ export class SheetsService {
       if (!part) throw notFound('part.unknown', 'part');
       if (await isOpened(tx, id, partId)) return this.view.of(tx, id);
       refuseFuture(facts.measuredOn, this.clock.now(), '/facts/measuredOn');
-      await this.garments.noteMeasuring(tx, actor, part.garmentId);
+      await this.garments.lock(tx, part.garmentId);
+      if (facts.purpose === 'record') await this.garments.noteMeasuring(tx, actor, part.garmentId);
       // Asked again now that the garment is locked: the same request may have been under way beside this one.
       if (await isOpened(tx, id, partId)) return this.view.of(tx, id);
       const now = this.clock.now();
@@ -78,8 +79,10 @@ export class SheetsService {
       refuseComplete(sheet);
       refuseFuture(facts.measuredOn, this.clock.now(), '/measuredOn');
       const dropped = await namePeople(tx, id, facts.people, '/people');
+      // What was for study is for the record from now on.
+      if (facts.purpose === 'record') await this.garments.noteMeasuring(tx, actor, part.garmentId);
       // Whoever held the tape held it, also when the sheet names them no more.
-      await this.garments.noteHands(tx, part.garmentId, dropped);
+      await this.sheets.noteHands(tx, { sheet, part }, dropped);
       const protocol = await this.protocols.at(tx, part, sheet.protocolVersion);
       const reworked = await workOutAgain(tx, id, protocol, { before: sheet, after: facts });
       await this.sheets.set(tx, actor, sheet, columnsOf(facts));

@@ -13,4 +13,8 @@ export class TableNoteRow {
   @Column({ name: 'said_at', type: 'datetime', precision: 3 }) saidAt: Date;
   @Column({ name: 'said_by', type: 'uuid' }) saidBy: string;
   @Column({ name: 'received_at', type: 'datetime', precision: 3 }) receivedAt: Date;
+  /** What became of it since: laid into the record, or set aside; null while it waits, or where nothing is to become of it. */
+  @Column({ type: 'varchar', length: 10, nullable: true }) settled: 'laid-in' | 'set-aside' | null;
+  @Column({ name: 'settled_by', type: 'uuid', nullable: true }) settledBy: string | null;
+  @Column({ name: 'settled_at', type: 'datetime', precision: 3, nullable: true }) settledAt: Date | null;
 }

@@ -7,7 +7,6 @@ import type { Actor } from '../../common/actor';
 import { Clock } from '../../common/clock';
 import { Refusal } from '../../common/refusal';
 import { type Tx, Work } from '../../common/work';
-import { GarmentEdits } from '../../garments/garment-edits';
 import { UserRow } from '../../users/user.entity';
 import { FindingsService } from '../findings/findings.service';
 import { SheetEdits, type SheetInHand } from '../sheets/sheet-edits';
@@ -27,7 +26,6 @@ export class TableNotesService {
   constructor(
     private readonly work: Work,
     private readonly sheets: SheetEdits,
-    private readonly garments: GarmentEdits,
     private readonly findings: FindingsService,
     private readonly audit: AuditService,
     private readonly clock: Clock,
@@ -37,7 +35,7 @@ export class TableNotesService {
     return this.work.run(async (tx) => {
       const again = await repeatedBatch(tx, sheetId, notes);
       if (again) return again;
-      const inHand = await this.sheets.take(tx, actor, sheetId);
+      const inHand = await this.sheets.takeToNote(tx, actor, sheetId);
       const results: Result[] = [];
       for (const note of notes) results.push(await this.takeOne(tx, inHand, note, actor));
       const kept = results.filter(({ outcome }) => outcome === 'kept');
@@ -57,7 +55,7 @@ export class TableNotesService {
   private async takeOne(tx: Tx, inHand: SheetInHand, note: NewTableNote, actor: Actor): Promise<Result> {
     const already = await tx.findOneBy(TableNoteRow, { id: note.id });
     if (already) return repeated(tx, already, inHand.sheet.id, note);
-    const effect = await this.effectOf(tx, inHand, note, actor);
+    const effect = saidTooLate(inHand.sheet, note) ?? (await this.effectOf(tx, inHand, note, actor));
     if (!effect.kept) return { id: note.id, outcome: 'refused', detail: effect.detail };
     const row = this.rowOf(inHand.sheet.id, note, actor);
     await tx.insert(TableNoteRow, row);
@@ -79,9 +77,10 @@ export class TableNotesService {
   /** Whoever had their hands at the garment is named on the sheet from then on, also when others take over. */
   private async nameHands(
     tx: Tx,
-    { sheet, part }: SheetInHand,
+    inHand: SheetInHand,
     { people }: Extract<NewTableNote, { about: 'hands' }>,
   ): Promise<Effect> {
+    const { sheet } = inHand;
     const named = await tx.find(SheetPersonRow, { where: { sheetId: sheet.id } });
     const ids = [...new Set(people.map(({ userId }) => userId))];
     const added = ids.filter((id) => !named.some(({ userId }) => userId === id));
@@ -95,7 +94,7 @@ export class TableNotesService {
       fresh.map(({ userId, duty }) => [`${userId} ${duty}`, { sheetId: sheet.id, userId, duty }]),
     );
     if (rows.size > 0) await tx.insert(SheetPersonRow, [...rows.values()]);
-    await this.garments.noteHands(tx, part.garmentId, ids);
+    await this.sheets.noteHands(tx, inHand, ids);
     return { kept: true };
   }
 
@@ -124,8 +123,16 @@ export class TableNotesService {
       saidAt: new Date(note.saidAt),
       saidBy: actor.id,
       receivedAt: this.clock.now(),
+      ...{ settled: null, settledBy: null, settledAt: null },
     };
   }
+}
+
+/** A sitting cannot begin on a sheet that was complete by then; whatever else is said of it is kept. */
+function saidTooLate({ completedAt }: SheetRow, { about, saidAt }: NewTableNote): Effect | null {
+  const opens = about === 'begun' || about === 'hands' || about === 'cautions';
+  if (!opens || completedAt === null || new Date(saidAt) <= completedAt) return null;
+  return { kept: false, detail: 'This sheet is complete. Open it again to go on.' };
 }
 
 const saidWords: Readonly<Record<NewTableNote['about'], string>> = {

@@ -1,8 +1,8 @@
 import type { MeasuringPoint } from '@ellwand/shared/points/point';
-import { acceptedValue, howTaken } from '@ellwand/shared/readings/accepted-value';
-import { isTaken, stands, type Reading, type TakenReading } from '@ellwand/shared/readings/reading';
+import { howTaken } from '@ellwand/shared/readings/accepted-value';
+import type { Reading, TakenReading } from '@ellwand/shared/readings/reading';
 import { shownUncertainty } from '@ellwand/shared/readings/uncertainty';
-import type { WornSide } from '@ellwand/shared/readings/worn-side';
+import { notTakenBySide, valuesBySide } from '@ellwand/shared/readings/values-by-side';
 import type { Image } from '@ellwand/shared/records/image';
 import type { PublishedMeasurement, PublishedPart } from '@ellwand/shared/records/published-garment';
 import { lengthOf, longestOf, toMmString } from '@ellwand/shared/units/length';
@@ -14,27 +14,20 @@ export interface Measured {
   readonly ownPoints: readonly MeasuringPoint[];
 }
 
-/** In which order sides are told: the first of them that was read speaks for the point, see `speakingReadings`. */
-const sides: readonly (WornSide | undefined)[] = [undefined, 'right', 'left'];
-
 /** A point as the public reads it: one measurement for each side that was read, the one that speaks for it first. */
 export function projectMeasurements(
   point: MeasuringPoint,
   { readings, ownPoints }: Measured,
   pictures: readonly Image[],
 ): PublishedMeasurement[] {
-  const taken = standingOf(point, readings).filter(isTaken);
   const imageId = pictures.find((picture) => picture.pointId === point.id)?.id ?? null;
-  return sides.flatMap((side) => {
-    const rounds = taken.filter(({ worn }) => worn === side);
-    const accepted = acceptedValue(rounds, point.id, side, ownPoints);
-    if (!accepted) return [];
+  return valuesBySide(readings, point.id, ownPoints).map(({ worn, accepted, rounds }) => {
     const half = lengthOf(Number(divideHalfUp(BigInt(accepted.value), 2n)));
     const doubled = rounds.every((reading) => howTaken(reading, ownPoints) === 'flat-doubled');
     return {
       pointId: point.id,
       label: point.name,
-      worn: side ?? null,
+      worn,
       valueMm: toMmString(accepted.value),
       uncertaintyMm: toMmString(shownUncertainty(accepted.uncertaintyMm)),
       rounds: accepted.n,
@@ -66,20 +59,13 @@ function howRead(
 
 /** Why a point, or one side of it, has no measurement. Where another round took it, no reason is left. */
 export function projectNotTaken(
-  point: MeasuringPoint,
+  { id: pointId, name }: MeasuringPoint,
   readings: readonly Reading[],
 ): PublishedPart['notTaken'] {
-  const standing = standingOf(point, readings);
-  return sides.flatMap((side) => {
-    const here = side === undefined ? standing : standing.filter(({ worn }) => worn === side);
-    if (here.some(isTaken)) return [];
-    const reason = here
-      .filter(({ worn }) => worn === side)
-      .find((reading) => reading.state === 'not-taken')?.notTakenReason;
-    return reason ? { pointId: point.id, label: point.name, worn: side ?? null, reason } : [];
-  });
-}
-
-function standingOf({ id }: MeasuringPoint, readings: readonly Reading[]): readonly Reading[] {
-  return readings.filter((reading) => reading.pointId === id && stands(reading));
+  return notTakenBySide(readings, pointId).map(({ worn, reason }) => ({
+    pointId,
+    label: name,
+    worn,
+    reason,
+  }));
 }

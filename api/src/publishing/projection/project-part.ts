@@ -1,7 +1,7 @@
 import { roundsRead } from '@ellwand/shared/cut-sheet/rounds-read';
 import { wholeFromHalf } from '@ellwand/shared/derivations/whole-from-half';
 import { type Protocol, pointsOf, protocolPointIds } from '@ellwand/shared/protocols/protocol';
-import { protocolFor } from '@ellwand/shared/protocols/standard-protocols';
+import { protocolFor, wornTogetherProtocol } from '@ellwand/shared/protocols/standard-protocols';
 import type { Image } from '@ellwand/shared/records/image';
 import { toProtocol, toProtocolView } from '@ellwand/shared/records/protocol';
 import { derivedViews, toReading } from '@ellwand/shared/records/measured';
@@ -20,12 +20,12 @@ interface PartContext {
 
 /** A part as the public reads it. A part without a complete sheet is shown, and says that it is not measured. */
 export function projectPart(part: SnapshotPart, context: PartContext): PublishedPart {
-  const heading = { number: `${context.ownNumber}${part.suffix}`, kind: part.kind, name: part.name };
+  const heading = headingOf(part, context);
   const { sheet } = part;
   const readings = (sheet?.readings ?? []).map(toReading);
   const cutSheet = projectCutSheet(part.cutSheet, roundsRead(readings), context.pictures);
   if (!sheet) return { ...heading, ...unmeasured, cutSheet };
-  const protocol = sheet.protocol ? toProtocol(sheet.protocol) : protocolFor(part.kind);
+  const protocol = protocolOf(part, sheet);
   const asked = pointsOf(protocol);
   const measured = { readings, ownPoints: protocol.ownPoints };
   return {
@@ -44,6 +44,20 @@ export function projectPart(part: SnapshotPart, context: PartContext): Published
   };
 }
 
+/** Revisions frozen before sheets carried their protocol were taken by the house's first. */
+function protocolOf({ kind, wornTogether }: SnapshotPart, { protocol }: SnapshotSheet): Protocol {
+  if (protocol) return toProtocol(protocol);
+  return wornTogether ? wornTogetherProtocol : protocolFor(kind);
+}
+
+/** All parts laid together as worn are the garment: they have no number but its own. */
+function headingOf(
+  { suffix, kind, name, wornTogether = false }: SnapshotPart,
+  { ownNumber }: PartContext,
+): Pick<PublishedPart, 'number' | 'kind' | 'name' | 'wornTogether'> {
+  return { number: wornTogether ? ownNumber : `${ownNumber}${suffix}`, kind, name, wornTogether };
+}
+
 /** A half is shown beside its measurement already; it is not told twice. */
 function derivedOf(
   part: SnapshotPart,
@@ -51,8 +65,11 @@ function derivedOf(
   ownPoints: Measured['ownPoints'],
   parts: readonly SnapshotPart[],
 ): PublishedPart['derived'] {
-  const otherParts = parts.flatMap(({ id, kind, name, sheet: theirs }) =>
-    theirs && id !== part.id ? [{ kind, name, readings: theirs.readings }] : [],
+  const others = part.wornTogether
+    ? []
+    : parts.filter(({ id, wornTogether }) => id !== part.id && !wornTogether);
+  const otherParts = others.flatMap(({ kind, name, sheet: theirs }) =>
+    theirs ? [{ kind, name, readings: theirs.readings }] : [],
   );
   return derivedViews(part.kind, sheet.readings, { ownPoints, otherParts }).filter(
     ({ id }) => !id.startsWith(`${wholeFromHalf.id}:`),

@@ -24,6 +24,7 @@ const bodice: PublishedDocument['parts'][number] = {
   number: 'LH.1958.6',
   kind: 'bodice',
   name: 'Bodice',
+  wornTogether: false,
   measuredOn: '2026-11-20',
   support: null,
   tape: null,

@@ -73,6 +73,9 @@ function compare(
   });
 }
 
+/** All parts laid together as worn have the garment's own number, which one of its parts may have too. */
+const placeOf = ({ number, wornTogether }: PublishedPart) => (wornTogether ? `${number} as worn` : number);
+
 /** What is said of how each part was measured, and by whom where the record names them. */
 function partFactsOf(document: PublishedDocument | null): Map<string, Entry> {
   const facts = (part: PublishedPart): [string, string | null][] => [
@@ -86,7 +89,7 @@ function partFactsOf(document: PublishedDocument | null): Map<string, Entry> {
   return new Map(
     (document?.parts ?? []).flatMap((part) =>
       facts(part).map(([label, text]) => [
-        `${part.number} ${label}`,
+        `${placeOf(part)} ${label}`,
         { label: `${label} (${part.name})`, text: text ?? '' },
       ]),
     ),
@@ -114,7 +117,7 @@ function notTaken(part: PublishedPart): [string, Entry][] {
 
 /** The same point of the same side, also beside a version from before sides were told apart. */
 function keyOf(part: PublishedPart, { pointId, worn }: Sided): string {
-  return `${part.number} ${pointId}${worn ? ` ${worn}` : ''}`;
+  return `${placeOf(part)} ${pointId}${worn ? ` ${worn}` : ''}`;
 }
 
 type Sided = Pick<PublishedMeasurement, 'pointId' | 'label' | 'worn'>;

@@ -36,7 +36,7 @@ const picture: Image = {
 const sound: ReadinessFacts = {
   garmentId: 'g1',
   record,
-  parts: [{ name: 'Dress', sheets: [{ id: 's1', state: 'complete' }] }],
+  parts: [{ name: 'Dress', sheets: [{ id: 's1', state: 'complete', purpose: 'record' }] }],
   images: [picture],
   openQuestions: [{ sheetId: 's1', partName: 'Dress', count: 0 }],
 };
@@ -52,8 +52,13 @@ describe('what keeps a record from its next step', () => {
   it.each<[string, Partial<ReadinessFacts>, string]>([
     ['no sheet at all', { parts: [{ name: 'Dress', sheets: [] }] }, 'submit: Nothing has been measured yet.'],
     [
+      'study sheets alone',
+      { parts: [{ name: 'Dress', sheets: [{ id: 's1', state: 'complete', purpose: 'study' }] }] },
+      'submit: Nothing has been measured yet.',
+    ],
+    [
       'an open sheet',
-      { parts: [{ name: 'Dress', sheets: [{ id: 's1', state: 'open' }] }] },
+      { parts: [{ name: 'Dress', sheets: [{ id: 's1', state: 'open', purpose: 'record' }] }] },
       'submit: Dress: the measuring sheet is still open.',
     ],
     [

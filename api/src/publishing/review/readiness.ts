@@ -12,7 +12,7 @@ export interface ReadinessFacts {
   readonly record: GarmentRecord;
   readonly parts: readonly {
     readonly name: string;
-    readonly sheets: readonly { readonly id: string; readonly state: string }[];
+    readonly sheets: readonly { readonly id: string; readonly state: string; readonly purpose: string }[];
   }[];
   readonly images: readonly Image[];
   /** Questions without an answer, by the sheet that speaks for each part. */
@@ -37,7 +37,10 @@ function aboutRecord(facts: ReadinessFacts): Entry[] {
 }
 
 function aboutSheets(facts: ReadinessFacts): Entry[] {
-  const sheets = facts.parts.flatMap((part) => part.sheets.map((sheet) => ({ ...sheet, part: part.name })));
+  const sheets = facts.parts.flatMap((part) =>
+    // A study sheet is never published: whether it is done is no matter of the record's.
+    part.sheets.filter(({ purpose }) => purpose === 'record').map((sheet) => ({ ...sheet, part: part.name })),
+  );
   const open = sheets.filter((sheet) => sheet.state === 'open');
   if (sheets.length === 0)
     return [{ blocks: 'submit', sentence: 'Nothing has been measured yet.', href: garmentHref(facts) }];

@@ -19,6 +19,7 @@ import { RevisionRow } from '../revision.entity';
 import type { Snapshot } from '../snapshot';
 import { takeSnapshot } from '../snapshot-taker';
 import { mayNotApprove } from './approval';
+import { withLateHands } from './late-hands';
 import { changesBetween } from './changes';
 import { readiness } from './readiness';
 
@@ -46,7 +47,7 @@ export class ReviewService {
       nextVersion: next.version,
       changes: changesBetween(await lastPublished(tx, garment), next),
       readiness: await this.readiness(tx, garmentId),
-      mayNotApprove: mayNotApprove(snapshot, actor.id)?.message ?? null,
+      mayNotApprove: mayNotApprove(await withLateHands(tx, garmentId, snapshot), actor.id)?.message ?? null,
       people: await this.people(tx, snapshot),
     };
   }
@@ -84,7 +85,7 @@ export class ReviewService {
     const garment = await this.view.of(tx, garmentId);
     const openQuestions = [];
     for (const part of garment.parts) {
-      const speaking = part.sheets.find((sheet) => sheet.state === 'complete');
+      const speaking = part.sheets.find((sheet) => sheet.speaks);
       if (!speaking) continue;
       const count = await this.findings.openQuestions(tx, speaking.id);
       openQuestions.push({ sheetId: speaking.id, partName: part.name, count });
