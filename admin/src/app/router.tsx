@@ -47,6 +47,12 @@ export const routes: RouteObject[] = [
                 }),
               },
               {
+                path: '/garments/:garmentId/parts/:partId/sheets',
+                lazy: async () => ({
+                  Component: (await import('./routes/part-sheets-page.js')).PartSheetsPage,
+                }),
+              },
+              {
                 path: '/garments/:garmentId/parts/:partId/cut-sheet',
                 lazy: async () => ({
                   Component: (await import('./routes/cut-sheet-page.js')).CutSheetPage,

@@ -27,7 +27,7 @@ export function Shell() {
         Skip to the content
       </a>
       <NewerNotice />
-      <header className="border-b border-hair bg-sheet">
+      <header className="border-b border-hair bg-sheet print:hidden">
         <div className="mx-auto flex max-w-page flex-wrap items-center gap-x-8 px-4 sm:px-6">
           <NavLink to={paths.garments()} className="title flex min-h-12 items-center text-title-25">
             Ellwand Workroom

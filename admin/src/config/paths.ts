@@ -7,6 +7,7 @@ export const paths = {
   garment: (id: string) => `/garments/${id}`,
   newSheet: (garmentId: string, partId: string) => `/garments/${garmentId}/parts/${partId}/sheets/new`,
   cutSheet: (garmentId: string, partId: string) => `/garments/${garmentId}/parts/${partId}/cut-sheet`,
+  partSheets: (garmentId: string, partId: string) => `/garments/${garmentId}/parts/${partId}/sheets`,
   reviewQueue: () => '/review',
   review: (garmentId: string) => `/garments/${garmentId}/review`,
   sheet: (id: string) => `/sheets/${id}`,

@@ -15,11 +15,11 @@ const sheetsOf = (house: House, partId: string): readonly Sheet[] =>
     .filter((sheet) => sheet.partId === partId)
     .toSorted((one, other) => one.facts.measuredOn.localeCompare(other.facts.measuredOn));
 
+const maySpeak = ({ state, facts }: Sheet) => state === 'complete' && facts.purpose === 'record';
+
 /** The sheet that speaks for a part, as the API finds it. */
 export function speakingSheet(house: House, partId: string): Sheet | undefined {
-  const candidates = sheetsOf(house, partId).filter(
-    ({ state, facts }) => state === 'complete' && facts.purpose === 'record',
-  );
+  const candidates = sheetsOf(house, partId).filter(maySpeak);
   return candidates.find(({ id }) => id === house.choices.get(partId)?.sheetId) ?? candidates.at(-1);
 }
 
@@ -27,6 +27,7 @@ export function partSheetsOf(house: House, garment: Garment, part: Part): PartSh
   const sheets = sheetsOf(house, part.id);
   const speaking = speakingSheet(house, part.id);
   const choice = house.choices.get(part.id);
+  const newest = sheets.filter(maySpeak).at(-1);
   const points = sheets
     .toReversed()
     .flatMap(({ protocol }) => pointsOf(toProtocol(protocol)))
@@ -45,9 +46,7 @@ export function partSheetsOf(house: House, garment: Garment, part: Part): PartSh
     speaking: speaking ? { sheetId: speaking.id } : null,
     chosen: choice && choice.sheetId === speaking?.id ? choice : null,
     published:
-      garment.isPublic && speaking
-        ? { sheetId: sheets.at(-1)?.id ?? speaking.id, version: garment.publishedVersion ?? 1 }
-        : null,
+      newest && garment.isPublic ? { sheetId: newest.id, version: garment.publishedVersion ?? 1 } : null,
     sheets: sheets.map(toSheetOfPart),
   };
 }
