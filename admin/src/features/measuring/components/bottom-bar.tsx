@@ -31,6 +31,7 @@ export function BottomBar({ desk, ways, onReadings }: BottomBarProps) {
     >
       <Button
         height="table"
+        className="max-sm:px-2"
         onClick={() => {
           onReadings();
           desk.step(-1);
@@ -38,16 +39,16 @@ export function BottomBar({ desk, ways, onReadings }: BottomBarProps) {
       >
         Back
       </Button>
-      <Button height="table" onClick={() => setAsking(true)}>
+      <Button height="table" className="max-sm:px-2" onClick={() => setAsking(true)}>
         Cannot be taken
       </Button>
-      <Button height="table" disabled={!desk.canUndo} onClick={desk.undo}>
+      <Button height="table" className="max-sm:px-2" disabled={!desk.canUndo} onClick={desk.undo}>
         Undo
       </Button>
       <Button height="table" onClick={() => desk.setPausing('')} className="max-md:hidden">
         Pause
       </Button>
-      <div className="min-w-0 grow max-sm:order-first max-sm:w-full">
+      <div className="min-w-0 grow max-xl:order-first max-xl:w-full">
         <TapeProgress done={desk.done} wanted={desk.points.length} />
       </div>
       <Button
@@ -74,7 +75,7 @@ export function BottomBar({ desk, ways, onReadings }: BottomBarProps) {
       <Button
         tone="action"
         height="table"
-        className="max-sm:ml-auto"
+        className="max-xl:ml-auto max-sm:px-3"
         onClick={() => {
           onReadings();
           desk.next();
