@@ -54,7 +54,10 @@ export function BottomBar({ desk, ways, onReadings }: BottomBarProps) {
       <Button
         height="table"
         aria-pressed={desk.keypad}
-        onClick={() => desk.setKeypad(!desk.keypad)}
+        onClick={() => {
+          desk.setKeypad(!desk.keypad);
+          desk.go(desk.current.key);
+        }}
         className="aria-pressed:bg-well max-sm:hidden"
       >
         Keypad

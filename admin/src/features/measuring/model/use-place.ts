@@ -3,6 +3,8 @@ import { useState } from 'react';
 import { isDone, type SheetRow } from './rows.js';
 import { useTurning } from './use-turning.js';
 
+const AFTER_THE_QUESTION_MS = 60;
+
 /** Where the work is: the current row, and the turning of the garment between steps. */
 export function usePlace(sheetId: string, rows: readonly SheetRow[]) {
   const [key, setKey] = useState(() => (rows.find((row) => !isDone(row)) ?? rows[0]!).key);
@@ -24,7 +26,8 @@ export function usePlace(sheetId: string, rows: readonly SheetRow[]) {
   };
   const turned = () => {
     const to = turning.done();
-    if (to) focus(to);
+    // The question gives the focus back to where it was asked from; the work goes on after that.
+    if (to) setTimeout(() => focus(to), AFTER_THE_QUESTION_MS);
   };
   return { current, enter, go, focusAsked, turn: turning.asked, turned };
 }
