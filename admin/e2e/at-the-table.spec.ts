@@ -33,6 +33,7 @@ const skirt: Keyed = [
   ['hip', '982'],
   ['hem', '742', '3'],
   ['hem-depth', '94'],
+  ['own-band-to-drapery-tapes', '312'],
   ['waist-to-hem-front', '1020'],
   ['waist-to-hem-side', '1048'],
   ['waist-to-hem-back', '1184'],
@@ -115,7 +116,7 @@ async function expectTaken(page: Page, keyed: Keyed): Promise<void> {
 
 test('a bodice and a skirt are keyed by keyboard alone', async ({ page }) => {
   await signIn(page, 'recorder');
-  const sheets = await newSheets(page, 'LH.2026.61');
+  const sheets = await newSheets(page);
   for (const [part, keyed] of [
     ['Bodice', bodice],
     ['Skirt', skirt],
@@ -136,7 +137,7 @@ test.describe('by touch alone', () => {
 
   test('a bodice and a skirt are keyed on the sheet’s own keypad', async ({ page }) => {
     await signIn(page, 'recorder');
-    const sheets = await newSheets(page, 'LH.2026.62');
+    const sheets = await newSheets(page);
     for (const [part, keyed] of [
       ['Bodice', bodice],
       ['Skirt', skirt],
@@ -153,7 +154,7 @@ test.describe('by touch alone', () => {
 
 test('axe finds nothing on the sheet, whatever it shows', async ({ page }) => {
   await signIn(page, 'recorder');
-  const sheets = await newSheets(page, 'LH.2026.63');
+  const sheets = await newSheets(page);
   await page.goto(sheetAddress(sheets['Skirt']));
   await expectAccessible(page, 'how the garment lies');
   await lies(page).click();
@@ -185,7 +186,7 @@ test('two browsers at one sheet: both arrive, and a true conflict is shown and d
   const [first, second] = await Promise.all([openAt(browser.newContext()), openAt(browser.newContext())]);
   await signIn(first, 'recorder');
   await signIn(second, 'curator');
-  const { Skirt } = await newSheets(first, 'LH.2026.64');
+  const { Skirt } = await newSheets(first);
   for (const page of [first, second]) {
     await page.goto(sheetAddress(Skirt));
     await lies(page).click();

@@ -28,7 +28,8 @@ interface Made {
 }
 
 /** A new dress of a bodice and a skirt, with an open sheet for each: their ids by the part's name. */
-export async function newSheets(page: Page, ownNumber: string): Promise<Readonly<Record<string, string>>> {
+export async function newSheets(page: Page): Promise<Readonly<Record<string, string>>> {
+  const ownNumber = `LH.2026.${Date.now()}`;
   const record = { ownNumber, title: 'Walking dress of brown wool', kind: 'dress', date: '1886~' };
   const garment = await ask<Made>(page, '/workroom/garments', {
     record: { ...record, creditLine: 'Larkmoor House Museum of Dress' },

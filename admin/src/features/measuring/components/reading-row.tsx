@@ -146,7 +146,7 @@ function Boxes({ desk, row, id, mistake }: BoxesProps) {
   };
   return (
     <div
-      className={`flex items-center gap-2 ${takesTapes ? 'max-xl:col-span-2 max-xl:col-start-2 max-xl:row-start-3 max-xl:mt-1' : 'max-xl:col-start-3 max-xl:row-span-2 max-xl:row-start-1'}`}
+      className={`flex flex-wrap items-center gap-2 ${takesTapes ? 'max-xl:col-span-2 max-xl:col-start-2 max-xl:row-start-3 max-xl:mt-1' : 'max-xl:col-start-3 max-xl:row-span-2 max-xl:row-start-1'}`}
     >
       {takesTapes && (
         <>
