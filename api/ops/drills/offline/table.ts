@@ -70,12 +70,11 @@ export class Tablet {
 
   async signIn(): Promise<void> {
     await this.page.goto(`${this.seat.url}/workroom/sign-in`);
-    await this.page.getByLabel('E-mail address').fill(reader.email);
-    await this.page.getByLabel('Password', { exact: true }).fill(reader.password);
-    await this.page.getByRole('button', { name: 'Sign in' }).click();
+    await sayWhoItIs(this.page);
     await this.page.getByRole('heading', { name: 'Garments', level: 1 }).waitFor();
     // The shell must be on this tablet before the network goes.
     await this.page.evaluate('navigator.serviceWorker.ready.then(() => true)');
+    await this.staySignedIn(this.page);
   }
 
   /** Opens the sheet, from the tablet alone where there is no network, and goes past what is said once. */
@@ -103,6 +102,8 @@ export class Tablet {
 
   /** Until everything that was keyed is at the museum. */
   async allSent(): Promise<void> {
+    // Reading a box lets whoever must sign in again do so first.
+    await this.box(points[0]!).click({ trial: true });
     const sent = this.page.getByText(/^All readings sent/);
     // A tablet that forgets may have nothing to send, and then never says so.
     if (this.seat.forgetful) await sent.waitFor({ timeout: SOON_MS / 4 }).catch(() => undefined);
@@ -115,6 +116,7 @@ export class Tablet {
     if (this.seat.forgetful) await dying.evaluate(forgetAll);
     this.page = await this.context.newPage();
     await this.attend(this.page);
+    await this.staySignedIn(this.page);
     const session = await this.context.newCDPSession(dying);
     // A renderer that has died answers nothing any more: nobody waits for it long.
     const dead = session.send('Page.crash').catch(() => undefined);
@@ -134,7 +136,19 @@ export class Tablet {
     await page.addLocatorHandler(lies, () => lies.click());
   }
 
+  /** Signs in again where a broken network has cost the session: what was keyed waits for that. */
+  private async staySignedIn(page: Page): Promise<void> {
+    await page.addLocatorHandler(page.getByLabel('Password', { exact: true }), () => sayWhoItIs(page));
+  }
+
   private box(point: string) {
     return this.page.locator(`#reading-${point}-1`);
   }
+}
+
+async function sayWhoItIs(page: Page): Promise<void> {
+  const email = page.getByLabel('E-mail address');
+  if (await email.isEditable().catch(() => false)) await email.fill(reader.email);
+  await page.getByLabel('Password', { exact: true }).fill(reader.password);
+  await page.getByRole('button', { name: 'Sign in' }).click();
 }
