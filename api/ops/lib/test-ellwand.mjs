@@ -7,6 +7,7 @@ import { root } from './places.mjs';
 import { runMain } from './plain-failure.mjs';
 import { stopRunningPrograms } from './programs.mjs';
 import { step } from './progress.mjs';
+import { drillRunner } from './runners/drill-runner.mjs';
 import { journeysRunner } from './runners/journeys-runner.mjs';
 import { runAll } from './runners/run-all.mjs';
 import { lintRunners, typeRunners } from './runners/static-runners.mjs';
@@ -37,7 +38,8 @@ const everything = (folder) => {
     after: together.map(({ name }) => name),
     env: () => startTestDatabase(path.join(folder, 'jest')),
   });
-  return [...together, api, journeysRunner(root, folder, [api.name])];
+  const journeys = journeysRunner(root, folder, [api.name]);
+  return [...together, api, journeys, drillRunner(root, [journeys.name])];
 };
 
 /** Parts of a check, by name. @type {Record<string, (folder: string) => Runner[]>} */
