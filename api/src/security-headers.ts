@@ -19,8 +19,7 @@ export function securityHeaders(application: INestApplication) {
         defaultSrc: ["'self'"],
         scriptSrc: [() => contentSecurity.scriptSources],
         styleSrc: ["'self'"],
-        // blob: is for pictures that a tablet keeps until they are sent.
-        imgSrc: ["'self'", 'data:', 'blob:'],
+        imgSrc: ["'self'", 'data:'],
         objectSrc: ["'none'"],
         baseUri: ["'none'"],
         frameAncestors: ["'none'"],
