@@ -226,7 +226,7 @@ describe('the cut sheet of a part', () => {
     const review = await curator.get(`/api/v1/workroom/garments/${dress.id}/review`);
     const changes = (review.body.changes as Change[]).map(({ kind, label }) => `${kind} ${label}`);
     expect(changes).toEqual([
-      'removed Piece Back (Bodice)',
+      'removed Piece Back, cut (Bodice)',
       'removed Piece Back, grain (Bodice)',
       'removed Piece Back, layer (Bodice)',
       'removed Piece Back, waist width (Bodice)',

@@ -157,6 +157,19 @@ describe('from the table to the public and back', () => {
     expect((await verb(recorder, 'submit')).body.returned).toBeNull();
   });
 
+  it('forgets why it came back once it was withdrawn and taken up again', async () => {
+    await measureAll();
+    await publish();
+    await verb(recorder, 'revise');
+    await verb(recorder, 'submit');
+    await verb(curator, 'return', { reason: 'Say where the label sits.' });
+    expect((await now()).returned).toMatchObject({ reason: 'Say where the label sits.' });
+    house.clock.advance({ minutes: 5 });
+    await verb(curator, 'withdraw', { notice: 'Withdrawn while its owner is asked.' });
+    await verb(recorder, 'revise');
+    expect(await now()).toMatchObject({ stage: 'draft', returned: null });
+  });
+
   it('leaves everything private behind when it is published', async () => {
     await measureAll();
     const { publicNumber, publishedVersion } = await publish();

@@ -1,6 +1,7 @@
 import { Injectable } from '@nestjs/common';
 import { GarmentRecord, PartKind, type Garment } from '@ellwand/shared/records/garment';
-import { IsNull } from 'typeorm';
+import { IsNull, MoreThan } from 'typeorm';
+import { AuditEntryRow } from '../audit/audit-entry.entity';
 import { notFound } from '../common/refusal';
 import type { Tx } from '../common/work';
 import { ProtocolBook } from '../measuring/protocols/protocol-book';
@@ -58,6 +59,9 @@ async function lastReturn(tx: Tx, garment: GarmentRow): Promise<Garment['returne
   if (garment.stage !== 'draft') return null;
   const last = await tx.findOne(RevisionRow, { where: { garmentId: garment.id }, order: { number: 'DESC' } });
   if (last?.outcome !== 'returned' || !last.decidedBy || !last.decidedAt) return null;
+  // Whoever withdrew the garment since, and took it up again, began anew.
+  const sinceReturned = { subjectId: garment.id, verb: 'withdraw', at: MoreThan(last.decidedAt) };
+  if (await tx.existsBy(AuditEntryRow, sinceReturned)) return null;
   const by = await tx.findOne(UserRow, { where: { id: last.decidedBy } });
   return { reason: last.reason ?? '', by: by?.name ?? '', at: last.decidedAt.toISOString() };
 }

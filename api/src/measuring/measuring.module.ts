@@ -2,8 +2,11 @@ import { Module } from '@nestjs/common';
 import { GarmentsModule } from '../garments/garments.module';
 import { CutSheetsController } from './cut-sheets/cut-sheets.controller';
 import { CutSheetsService } from './cut-sheets/cut-sheets.service';
+import { DamageService } from './damage/damage.service';
 import { FindingsService } from './findings/findings.service';
 import { MeasuringController } from './measuring.controller';
+import { NotedController } from './noted/noted.controller';
+import { NotedService } from './noted/noted.service';
 import { PartSheetsController } from './part-sheets/part-sheets.controller';
 import { PartSheetsService } from './part-sheets/part-sheets.service';
 import { PartSheetsView } from './part-sheets/part-sheets-view';
@@ -27,6 +30,7 @@ import { TableNotesService } from './table-notes/table-notes.service';
     CutSheetsController,
     RepeatabilityController,
     PartSheetsController,
+    NotedController,
   ],
   providers: [
     ProtocolsService,
@@ -41,6 +45,8 @@ import { TableNotesService } from './table-notes/table-notes.service';
     RepeatabilityService,
     PartSheetsService,
     PartSheetsView,
+    DamageService,
+    NotedService,
   ],
   exports: [
     ProtocolBookModule,

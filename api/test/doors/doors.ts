@@ -36,6 +36,8 @@ export const doors: Readonly<Record<string, Door>> = {
   'GET /api/v1/workroom/invitations': 'user:manage',
   'POST /api/v1/workroom/invitations': 'user:manage',
   'DELETE /api/v1/workroom/invitations/:id': 'user:manage',
+  'GET /api/v1/workroom/settings/damage-reports': 'user:manage',
+  'PUT /api/v1/workroom/settings/damage-reports': 'user:manage',
   'GET /api/v1/workroom/colleagues': 'garment:read',
   'GET /api/v1/workroom/audit': 'audit:read',
 
@@ -50,6 +52,8 @@ export const doors: Readonly<Record<string, Door>> = {
   'PUT /api/v1/workroom/parts/:id/cut-sheet': 'garment:write',
 
   'POST /api/v1/workroom/garments/:id/worn-together': 'garment:write',
+  'GET /api/v1/workroom/garments/:id/noted-at-table': 'garment:read',
+  'POST /api/v1/workroom/table-notes/:id/settle': 'garment:write',
 
   'POST /api/v1/workroom/parts/:id/sheets': 'sheet:write',
   'GET /api/v1/workroom/parts/:id/sheets': 'garment:read',

@@ -1,14 +1,7 @@
-import { type MeasuringWay, type ViewName } from '../drawings/diagram/model.js';
+import { type MeasuringWay } from '../drawings/diagram/model.js';
+import { type OwnLine } from '../drawings/diagram/own-line.js';
 import { type MeasuringHow } from '../points/point.js';
 import { type OwnPoint } from './protocol.js';
-
-/** A line that the kind's diagram does not have: through these places of a view, in its millimetres. */
-export interface ExtraLine {
-  readonly pointId: string;
-  readonly view: ViewName;
-  readonly way: MeasuringWay;
-  readonly along: readonly (readonly [number, number])[];
-}
 
 const wayOf: Readonly<Record<MeasuringHow, MeasuringWay>> = {
   round: 'round',
@@ -17,8 +10,9 @@ const wayOf: Readonly<Record<MeasuringHow, MeasuringWay>> = {
   'flat-doubled': 'doubled',
 };
 
+/** Own points' lines as the painter of diagrams takes them. */
 export function extraLinesOf(
   ownPoints: readonly Pick<OwnPoint, 'id' | 'how' | 'line'>[],
-): readonly ExtraLine[] {
+): readonly OwnLine[] {
   return ownPoints.map(({ id, how, line }) => ({ pointId: id, way: wayOf[how], ...line }));
 }

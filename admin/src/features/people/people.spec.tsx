@@ -60,3 +60,16 @@ describe('the audit trail', () => {
     expect(await screen.findByRole('alert')).toHaveTextContent('answered 500');
   });
 });
+
+describe('who is told of damage', () => {
+  it('is every curator, until somebody is named', async () => {
+    const house = new House(staff.administrator);
+    const { user } = renderWorkroom('/people', { house });
+    const group = await screen.findByRole('group', { name: /^Every curator is written to/ });
+    await user.click(within(group).getByRole('checkbox', { name: 'Pia Hollin' }));
+    expect(await screen.findByRole('group', { name: /^Written to when measuring stops/ })).toBeVisible();
+    expect(house.damageReportedTo).toEqual([staff.desk.id]);
+    await user.click(screen.getByRole('checkbox', { name: 'Pia Hollin' }));
+    expect(await screen.findByRole('group', { name: /^Every curator/ })).toBeVisible();
+  });
+});

@@ -3,6 +3,7 @@ import { garmentRoutes } from './garment-routes.js';
 import type { House } from './house.js';
 import { imageRoutes } from './image-routes.js';
 import { measuringRoutes } from './measuring-routes.js';
+import { notedRoutes } from './noted-routes.js';
 import { partSheetsRoutes } from './part-sheets-routes.js';
 import { peopleRoutes } from './people-routes.js';
 import { protocolRoutes } from './protocol-routes.js';
@@ -20,4 +21,5 @@ export const fakeApi = (house: House) =>
     ...cutSheetRoutes,
     ...repeatabilityRoutes,
     ...partSheetsRoutes,
+    ...notedRoutes,
   });

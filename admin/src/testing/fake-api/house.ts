@@ -1,6 +1,7 @@
 import type { CutSheet } from '@ellwand/shared/records/cut-sheet';
 import type { Garment } from '@ellwand/shared/records/garment';
 import type { ProtocolVersion } from '@ellwand/shared/records/protocol';
+import type { Settlement } from '@ellwand/shared/records/noted';
 import type { PartSheets } from '@ellwand/shared/records/part-sheets';
 import type { Change } from '@ellwand/shared/records/publishing';
 import type { Invitation, Person } from '@ellwand/shared/records/session';
@@ -28,6 +29,10 @@ export class House {
   /** By point, what was read more than once. */
   readonly repeated = new Map(sampleRepeated);
   readonly answers = new Map<string, NonNullable<FindingView['answer']>>();
+  /** What became of notes from the table, by the note. */
+  readonly settled = new Map<string, Settlement>();
+  /** Who is told of damage seen at the table. */
+  damageReportedTo: readonly string[] = [];
   /** Which sheet was chosen to speak for a part, by the part. */
   readonly choices = new Map<string, NonNullable<PartSheets['chosen']>>();
   readonly changes: Change[] = [

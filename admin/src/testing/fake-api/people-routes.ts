@@ -1,3 +1,4 @@
+import { DamageReports } from '@ellwand/shared/records/noted';
 import {
   AcceptInvitation,
   FirstAdministrator,
@@ -23,6 +24,11 @@ function enter(house: House, person: z.infer<typeof Person>): Response {
 }
 
 export const peopleRoutes: Routes = {
+  'GET /workroom/settings/damage-reports': ({ house }) => json({ userIds: house.damageReportedTo }),
+  'PUT /workroom/settings/damage-reports': ({ house, body }) => {
+    house.damageReportedTo = read(DamageReports, body).userIds;
+    return json({ userIds: house.damageReportedTo });
+  },
   'POST /session': ({ house, body }) => {
     const { email, password } = read(SignIn, body);
     const person = house.people.find((one) => one.email === email && one.active);

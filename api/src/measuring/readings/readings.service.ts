@@ -7,6 +7,7 @@ import type { Actor } from '../../common/actor';
 import { Clock } from '../../common/clock';
 import { conflict } from '../../common/refusal';
 import { type Tx, Work } from '../../common/work';
+import { DamageService } from '../damage/damage.service';
 import { ProtocolBook } from '../protocols/protocol-book';
 import { SheetEdits, type SheetInHand } from '../sheets/sheet-edits';
 import { SheetPersonRow } from '../sheets/sheet-person.entity';
@@ -28,6 +29,7 @@ export class ReadingsService {
     private readonly work: Work,
     private readonly sheets: SheetEdits,
     private readonly protocols: ProtocolBook,
+    private readonly damage: DamageService,
     private readonly audit: AuditService,
     private readonly clock: Clock,
   ) {}
@@ -40,16 +42,18 @@ export class ReadingsService {
       const facts = await this.tapeFacts(tx, inHand);
       const results: Result[] = [];
       for (const reading of readings) results.push(await this.takeOne(tx, inHand, facts, reading, actor));
-      const kept = results.filter((result) => result.outcome === 'kept').length;
-      if (kept === 0) return { sheetVersion: inHand.sheet.version, results };
+      const kept = results.filter(({ outcome }) => outcome === 'kept');
+      if (kept.length === 0) return { sheetVersion: inHand.sheet.version, results };
       const { version } = await this.sheets.set(tx, actor, inHand.sheet, {});
       await this.audit.note(tx, actor, {
         verb: 'read',
         subjectKind: 'sheet',
         subjectId: sheetId,
-        summary: `${actor.name} entered ${kept === 1 ? 'a reading' : `${kept} readings`} of ${inHand.part.name}`,
-        facts: { readings: results.filter((result) => result.outcome === 'kept').map((result) => result.id) },
+        summary: `${actor.name} entered ${kept.length === 1 ? 'a reading' : `${kept.length} readings`} of ${inHand.part.name}`,
+        facts: { readings: kept.map(({ id }) => id) },
       });
+      const stored = kept.flatMap(({ reading }) => reading ?? []);
+      await this.damage.tell(tx, actor, inHand, facts.protocol, stored);
       return { sheetVersion: version, results };
     });
   }

@@ -200,7 +200,7 @@ describe('what a new version changes', () => {
       ['changed', 'cut-sheet', 'Piece Front, grain (Bodice)', 'Not known', 'Bias'],
       ['changed', 'cut-sheet', 'Piece Front, waist width (Bodice)', '152 mm', '152.5 mm'],
       ['removed', 'cut-sheet', 'Dart 1, piece (Bodice)', 'Front', null],
-      ['removed', 'cut-sheet', 'Dart 1, count (Bodice)', '2', null],
+      ['removed', 'cut-sheet', 'Dart 1, how many (Bodice)', '2', null],
       ['removed', 'cut-sheet', 'Dart 1, tip (Bodice)', '92 mm above the waist', null],
     ]);
     const without = (name: string, value: unknown) => (name === 'cutSheet' ? undefined : value);

@@ -1,5 +1,6 @@
 import {
   endOf,
+  mirrored,
   parallel,
   pathLength,
   sampled,
@@ -33,8 +34,8 @@ const BEHIND_SHARE = 0.8;
 
 export function drawLine(line: MeasuringLine, anchors: Anchors, projection: Projection): DrawnLine {
   const toSheet = projected(projection);
-  const stretches = line.stretches.map((text) => {
-    const path = transformed(pathFrom(text, anchors), toSheet);
+  const stretches = stretchesOf(line, anchors).map((stretch) => {
+    const path = transformed(stretch, toSheet);
     return parallel(line.sag > 0 ? bowed(path, line.sag * projection.scale) : path, line.beside);
   });
   const behind = line.sag > 0 ? bowed(stretches[0]!, -line.sag * projection.scale * BEHIND_SHARE) : undefined;
@@ -49,6 +50,10 @@ export function drawLine(line: MeasuringLine, anchors: Anchors, projection: Proj
     length: stretches.reduce((sum, path) => sum + pathLength(path), 0),
   };
 }
+
+/** A line's solid paths in the view's millimetres. */
+export const stretchesOf = ({ stretches, onOtherHalf }: MeasuringLine, anchors: Anchors): CubicPath[] =>
+  stretches.map((text) => (onOtherHalf ? mirrored(pathFrom(text, anchors)) : pathFrom(text, anchors)));
 
 /** The tape between the path's two ends, hanging `sag` pixels below them (above, when negative). */
 function bowed(path: CubicPath, sag: number): CubicPath {

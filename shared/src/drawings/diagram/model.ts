@@ -42,8 +42,16 @@ export interface ButtonLayer {
 
 export type Layer = ShapeLayer | ButtonLayer;
 
+/**
+ * At which hand of somebody looking at the sheet the wearer's right side lies; `neither` where one shoe or glove
+ * stands for both.
+ */
+export type ViewersHand = 'left' | 'right' | 'neither';
+
 export interface View {
   readonly name: ViewName;
+  /** Where the wearer's right side lies; left out: where it always lies in views of this name. */
+  readonly wearersRight?: ViewersHand;
   /** Stands beneath the drawing. */
   readonly caption: string;
   readonly anchors: Anchors;
@@ -67,6 +75,8 @@ export interface MeasuringLine {
   readonly beside: number;
   /** For a round: millimetres by which the tape sags in front; behind, it is drawn thin. */
   readonly sag: number;
+  /** Drawn on the half of the view on which it is not written. */
+  readonly onOtherHalf?: boolean;
 }
 
 export interface GarmentDiagram {

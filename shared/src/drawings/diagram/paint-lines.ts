@@ -4,7 +4,7 @@ import { drawLine, type DrawnLine } from './drawn-line.js';
 import { LetterSheet } from './letter-sheet.js';
 import { type MeasuringLine, type View } from './model.js';
 import { CAPTION_SIZE } from './paint-view.js';
-import { placeLetters } from './place-letters.js';
+import { crowdedPlace, placeLetters } from './place-letters.js';
 import { pointMarks, type LetterStyle } from './point-marks.js';
 import { isNarrow, projected, type SheetLayout } from './projection.js';
 import { type ScenePoint } from './scene.js';
@@ -45,6 +45,9 @@ export function paintLines(
     : { radius: 10, size: 12 };
   const letterSheet = new LetterSheet(sheet.layout, style.radius, lines, inkOf(sheet), captionsOf(sheet));
   const places = placeLetters(lines, letterSheet, style.radius);
+  lines.forEach((drawn, index) => {
+    places[index] ??= crowdedPlace(drawn, places, style.radius);
+  });
   return lines.map((drawn, index) => {
     const letter = { text: letterOf(drawn.line.pointId), place: places[index] };
     return pointMarks(drawn, letter, style, drawn.line.pointId === current);

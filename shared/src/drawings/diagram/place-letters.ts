@@ -1,7 +1,8 @@
-import { distanceToSegment, type Point } from '../geometry/point.js';
+import { pathLength, placeAlong } from '../geometry/path.js';
+import { distance, distanceToSegment, type Point } from '../geometry/point.js';
 import { type DrawnLine } from './drawn-line.js';
 import { candidatesFor, type LetterPlace } from './letter-candidates.js';
-import { type LetterSheet } from './letter-sheet.js';
+import { CLEAR_OF_LETTERS, type LetterSheet } from './letter-sheet.js';
 
 const IMPROVING_PASSES = 6;
 
@@ -31,6 +32,25 @@ export function placeLetters(
     }
   }
   return chosen;
+}
+
+const ON_ITS_LINE = [0.5, 0.42, 0.58, 0.34, 0.66, 0.26, 0.74, 0.18, 0.82];
+
+/**
+ * Where a letter goes for which the rules leave no place, as may happen with a line that was not drawn for this
+ * sheet: on its own line, clear of the other letters if anywhere. Rather crowded than without a letter.
+ */
+export function crowdedPlace(
+  { stretches }: DrawnLine,
+  others: readonly (LetterPlace | undefined)[],
+  radius: number,
+): LetterPlace {
+  const longest = stretches.reduce((best, path) => (pathLength(path) > pathLength(best) ? path : best));
+  const places = ON_ITS_LINE.map((share) => placeAlong(longest, share).at);
+  const free = places.find((at) =>
+    others.every((other) => !other || distance(other.at, at) >= 2 * radius + CLEAR_OF_LETTERS),
+  );
+  return { at: free ?? placeAlong(longest, 0.5).at, cost: 0 };
 }
 
 /** Sends one neighbour elsewhere when that alone frees a place. */

@@ -11,6 +11,11 @@ export const projected =
   ({ scale, originX, originY }: Projection) =>
   ([x, y]: Point): Point => [originX + x * scale, originY + y * scale];
 
+/** Back again: the garment's millimetres beneath a place of the sheet. */
+export const unprojected =
+  ({ scale, originX, originY }: Projection) =>
+  ([x, y]: Point): Point => [(x - originX) / scale, (y - originY) / scale];
+
 export interface SheetView {
   /** The drawing's bounds in millimetres. */
   readonly bounds: Box;

@@ -43,10 +43,7 @@ it.each(halves)('the $kind, $view.name, has symmetrical outlines', ({ view }) =>
   for (const layer of joined) {
     const [outline] = drawView({ ...view, layers: [layer] }).silhouettes;
     const points = sampled(outline!, 15);
-    const back = points.map(([x, y]) => [-x, y] as const).reverse();
-    points.forEach(([x, y], index) => {
-      expect(back[index]![0]).toBeCloseTo(x, 6);
-      expect(back[index]![1]).toBeCloseTo(y, 6);
-    });
+    for (const [x, y] of points)
+      expect(points.some(([otherX, otherY]) => Math.hypot(otherX + x, otherY - y) < 1e-6)).toBe(true);
   }
 });

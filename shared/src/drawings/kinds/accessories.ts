@@ -80,6 +80,7 @@ export const glove: GarmentDiagram = {
 
 const shoeSole: View = {
   name: 'below',
+  wearersRight: 'neither',
   caption: 'Sole',
   anchors: { toe: [-128, 0], heel: [112, 0] },
   layers: [

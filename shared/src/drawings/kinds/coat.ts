@@ -12,6 +12,7 @@ import {
 } from '../diagram/layers.js';
 import { type GarmentDiagram, type View } from '../diagram/model.js';
 import { coat as coatOutline } from '../silhouettes/coats.js';
+import { coatInside } from './coat-inside.js';
 
 const front: View = {
   name: 'front',
@@ -89,10 +90,16 @@ export const coat: GarmentDiagram = {
   kind: 'coat',
   title: 'Coat',
   leastScale: 0.3,
-  views: [front, back],
+  views: [front, back, coatInside],
   lines: [
-    allRound('coat-chest', 'front', '-208,240--208,240', { sag: 12 }),
-    allRound('coat-waist', 'front', '~waistSide--waistSide', { sag: 12 }),
+    allRound('coat-chest', 'inside', ['~frontChest---248,240', '-184,240--184,240', '248,240--frontChest']),
+    allRound('coat-waist', 'inside', ['~frontWaist---291,434', '-146,434--146,434', '291,434--frontWaist']),
+    allRound(
+      'armscye',
+      'inside',
+      ['~frontTip{104}..~frontScye{90}..{44}~frontUnderarm', '~underarm{-44}..~scye{-90}..{-66}~tip'],
+      { beside: 8 },
+    ),
     flatDoubled('elbow', 'front', '249,440--322,432'),
     allRound('cuff', 'front', 'wristInner--wristOuter', { beside: -16, sag: 8 }),
     alongCurve('shoulder-seam', 'front', '~tip--~neck', { beside: 12 }),
@@ -101,7 +108,6 @@ export const coat: GarmentDiagram = {
       beside: -13,
     }),
     alongCurve('sleeve-under', 'front', '~underarm{108}..{94}-248,430..{92}~wristInner', { beside: 10 }),
-    allRound('armscye', 'back', '~tip{62}..~scye{92}..{138}~underarm', { beside: 9 }),
     straightLine('across-back', 'back', '~scye--scye'),
     straightLine('coat-back-waist', 'back', '-24,4---24,432'),
     straightLine('coat-full-back', 'back', '24,4--24,1010'),

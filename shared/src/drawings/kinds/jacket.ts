@@ -11,6 +11,7 @@ import {
 } from '../diagram/layers.js';
 import { type GarmentDiagram, type View } from '../diagram/model.js';
 import { jacket as jacketOutline } from '../silhouettes/coats.js';
+import { jacketInside } from './jacket-inside.js';
 
 const sleeveFolds = [
   fold('152,34{0}..{70}268,96', 'both', 'cloth'),
@@ -37,6 +38,8 @@ const front: View = {
     ...sleeveFolds,
     stitching('0,557{0}..{-14}192,540'),
     stitching('16,262--16,570', 'once'),
+    // Flapped pockets at the hip.
+    piece('92,448--152,438--156,462--95,472--92,448', 'both'),
   ],
 };
 
@@ -78,11 +81,31 @@ export const jacket: GarmentDiagram = {
   kind: 'jacket',
   title: 'Jacket',
   leastScale: 0.4,
-  views: [front, back],
+  views: [front, back, jacketInside],
   lines: [
-    allRound('bust', 'front', '-166,214--166,214', { sag: 12 }),
-    allRound('waist', 'front', '~waistSide--waistSide', { sag: 12 }),
-    alongCurve('side-seam', 'front', 'underarm{98}..{90}waistSide', { beside: 11 }),
+    allRound('bust', 'inside', [
+      '~frontBust---232,254',
+      '-152,254{4}..{0}0,260..{-4}152,254',
+      '232,254--frontBust',
+    ]),
+    allRound('waist', 'inside', [
+      '~frontWaist--~frontWaistSide',
+      '~waistSide--waistSide',
+      'frontWaistSide--frontWaist',
+    ]),
+    allRound(
+      'neck',
+      'inside',
+      ['-388,44--~frontNeck', '~neck{20}..{0}neckBack..{-20}neck', 'frontNeck--388,44'],
+      { beside: 7 },
+    ),
+    alongCurve('side-seam', 'inside', 'frontUnderarm{88}..frontBustSide..{90}frontWaistSide', { beside: -8 }),
+    allRound(
+      'armscye',
+      'inside',
+      ['~frontTip{104}..~frontScye{88}..{50}~frontUnderarm', '~underarm{-46}..~scye{-88}..{-68}~tip'],
+      { beside: 7 },
+    ),
     allRound('cuff', 'front', 'wristInner--wristOuter', { beside: -16, sag: 8 }),
     alongCurve('shoulder-seam', 'front', '~tip--~neck', { beside: 12 }),
     straightLine('across-front', 'front', '~scye--scye'),
@@ -92,8 +115,6 @@ export const jacket: GarmentDiagram = {
     alongCurve('sleeve-under', 'front', '~underarm{128}..{94}-242,380..{91}~wristInner', { beside: 10 }),
     flatDoubled('sleeve-widest', 'front', '190,214--338,170'),
     flatDoubled('elbow', 'front', '240,370--301,362'),
-    allRound('neck', 'back', '-66,2{8}..{0}0,12..{-8}66,2', { beside: -9 }),
-    allRound('armscye', 'back', '~tip{66}..~scye{92}..{138}~underarm', { beside: 9 }),
     straightLine('across-back', 'back', '~scye--scye'),
     alongCurve('underarm-to-underarm-back', 'back', '~underarm{8}..{0}0,206..{-8}underarm'),
     straightLine('neck-to-waist-back', 'back', '-26,14---26,394'),

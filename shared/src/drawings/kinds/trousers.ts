@@ -1,6 +1,10 @@
 import { allRound, alongCurve, buttons, cloth, flatDoubled, fold, row, seam } from '../diagram/layers.js';
 import { type GarmentDiagram, type View } from '../diagram/model.js';
+import { openedFall } from './trousers-inside.js';
 import { breeches as breechesOutline, trousers as trousersOutline } from '../silhouettes/legs.js';
+
+/** Along the middle of the opened band, from the button to the end of its hole. */
+const WAISTBAND = '~bandEnd..~bandSide..{0}bandBack..bandSide..bandEnd';
 
 const creases = [
   fold('8,322{30}..{18}78,338'),
@@ -70,21 +74,30 @@ const trousersBack: View = {
   ],
 };
 
+const trousersInside = openedFall({
+  waistHalf: 190,
+  fallHalf: 116,
+  fallFoot: 232,
+  leg: '{80}..{90}232,240..{96}200,640..{92}178,1046!{174}..70,1054!{-92}..{-112}0,322!',
+  fork: [0, 322],
+  legLayers: [fold('134,430{90}..{92}124,1040')],
+});
+
 /** A man's trousers with a fall front. */
 export const trousers: GarmentDiagram = {
   kind: 'trousers',
   title: 'Trousers',
   leastScale: 0.24,
-  views: [trousersFront, trousersBack],
+  views: [trousersFront, trousersBack, trousersInside],
   lines: [
-    allRound('trouser-waistband', 'front', '-190,22--190,22', { sag: 10 }),
+    allRound('trouser-waistband', 'inside', WAISTBAND),
     alongCurve('outside-leg', 'front', '190,-4--194,42{78}..{91}232,240..{96}200,640..{92}hemOuter', {
       beside: 16,
     }),
     alongCurve('inside-leg', 'front', '~fork{112}..{92}~hemInner', { beside: -10 }),
     flatDoubled('trouser-knee', 'front', 'kneeInner--kneeOuter'),
     flatDoubled('leg-hem', 'front', 'hemInner--hemOuter', { beside: -18 }),
-    flatDoubled('seat', 'back', '-236,252--236,252'),
+    flatDoubled('seat', 'front', '-233,250--233,250'),
   ],
 };
 
@@ -116,20 +129,29 @@ const breechesBack: View = {
   ],
 };
 
+const breechesInside = openedFall({
+  waistHalf: 184,
+  fallHalf: 102,
+  fallFoot: 220,
+  leg: '{78}..{92}246,220..{106}178,566!--176,632!--74,638!--72,572!{-84}..{-118}0,332!',
+  fork: [0, 332],
+  legLayers: [seam('60,574{-4}..{-4}190,566'), seam('146,420{86}..{84}156,570')],
+});
+
 /** A man's breeches to below the knee. */
 export const breeches: GarmentDiagram = {
   kind: 'breeches',
   title: 'Breeches',
   leastScale: 0.24,
-  views: [breechesFront, breechesBack],
+  views: [breechesFront, breechesBack, breechesInside],
   lines: [
-    allRound('trouser-waistband', 'front', '-186,22--186,22', { sag: 10 }),
+    allRound('trouser-waistband', 'inside', WAISTBAND),
     alongCurve('outside-leg', 'front', '184,-4--188,40{74}..{92}246,220..{106}178,566!--hemOuter', {
       beside: 16,
     }),
     alongCurve('inside-leg', 'front', '~fork{118}..{84}-72,572!--~hemInner', { beside: -10 }),
     flatDoubled('trouser-knee', 'front', '70,530--190,524'),
     flatDoubled('leg-hem', 'front', 'hemInner--hemOuter', { beside: -18 }),
-    flatDoubled('seat', 'back', '-249,236--249,236'),
+    flatDoubled('seat', 'front', '-246,240--246,240'),
   ],
 };

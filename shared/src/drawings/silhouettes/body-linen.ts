@@ -3,7 +3,7 @@ import { silhouette } from './silhouette.js';
 
 /** A man's shirt cut in rectangles: square gussets at the underarm, gathered sleeves. */
 export const shirt = silhouette(
-  lining('80,-62!{195}..{180}0,-76!--0,24!--70,0!--80,-62!', 'both'),
+  lining('0,-76!{0}..{15}80,-62!--70,0!--0,24!'),
   cloth(
     '0,930!--284,930!{-10}..{-82}316,894!--312,300!--262,250!{-90}..250,36!{186}..{196}76,0!{128}..{180}0,24!',
   ),
@@ -21,7 +21,7 @@ export const shirt = silhouette(
 
 /** A woman's chemise: wide neck, short sleeves, gores to the knee. */
 export const chemise = silhouette(
-  lining('122,-4!{204}..{180}0,2!--0,90!--118,24!--122,-4!', 'both'),
+  lining('0,2!{0}..{24}122,-4!--118,24!--0,90!'),
   cloth('0,82!{0}..{-54}122,-4!{14}..172,10!{98}..190,160!{86}..{81}296,960!{168}..{180}0,990!'),
   cloth('172,10!{22}..{44}300,96!{112}..262,196!{198}..{196}190,160!--172,10!', 'both'),
   seam('0,96{0}..{-52}132,8'),
@@ -54,7 +54,7 @@ export const bustle = silhouette(
 
 /** A child's dress: low neck, puffed sleeves, tucks to be let down. */
 export const childDress = silhouette(
-  lining('112,-188!{198}..{180}0,-176!--0,-128!--110,-156!--112,-188!', 'both'),
+  lining('0,-176!{0}..{18}112,-188!--110,-156!--0,-128!'),
   cloth('0,0!--112,0!{22}..{64}184,84..{77}256,386!{167}..{180}0,410!'),
   seam('0,300{0}..{-9}250,280'),
   seam('0,322{0}..{-9}256,302'),

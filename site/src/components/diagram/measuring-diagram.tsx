@@ -1,5 +1,5 @@
 import { type GarmentKind } from '@ellwand/shared/points/kinds';
-import { type ExtraLine } from '@ellwand/shared/protocols/extra-lines';
+import { type OwnLine } from '@ellwand/shared/drawings/diagram/own-line';
 import { LitDrawing } from './lit-drawing';
 import { type LitPoints } from './lit-points';
 
@@ -9,7 +9,7 @@ interface MeasuringDiagramProps {
   readonly points: readonly string[];
   readonly letters: ReadonlyMap<string, string>;
   /** Lines of points that the museum made for itself. */
-  readonly ownLines?: readonly ExtraLine[];
+  readonly ownLines?: readonly OwnLine[];
   readonly lit: LitPoints;
   /** Keeps the ids of this drawing apart from others on the page. */
   readonly prefix: string;

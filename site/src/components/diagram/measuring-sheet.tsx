@@ -1,6 +1,6 @@
 import { type ViewName } from '@ellwand/shared/drawings/diagram/model';
 import { type GarmentKind } from '@ellwand/shared/points/kinds';
-import { type ExtraLine } from '@ellwand/shared/protocols/extra-lines';
+import { type OwnLine } from '@ellwand/shared/drawings/diagram/own-line';
 import { paintProtocol } from '@ellwand/shared/protocols/own-lines';
 import { remembering } from '../../lib/remember';
 import { SceneDrawing } from './scene-drawing';
@@ -12,7 +12,7 @@ export interface MeasuringSheetProps {
   readonly points: readonly string[];
   readonly letters: ReadonlyMap<string, string>;
   /** Lines of points that the museum made for itself. */
-  readonly ownLines?: readonly ExtraLine[];
+  readonly ownLines?: readonly OwnLine[];
   readonly views?: readonly ViewName[];
   readonly widthPx: number;
   /** Keeps the ids of this drawing apart from others on the page. */

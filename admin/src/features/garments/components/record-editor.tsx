@@ -12,6 +12,7 @@ import { garmentQuery } from '../api/garment.js';
 import { saveRecord, staleOf } from '../api/save-record.js';
 import { changesBehind, mergedUnder } from '../record-changes.js';
 import { boxLabels, RecordForm, type RecordTyped, typedRecord } from '../record-form.js';
+import { NotedPanel, useNoted } from './noted-panel.js';
 import { RecordFields } from './record-fields.js';
 import { type Meanwhile, StaleNotice } from './stale-notice.js';
 
@@ -22,7 +23,8 @@ const isBox = (name: string) => (name.split('.')[0] ?? '') in boxLabels;
  * typed here and nothing of either is lost.
  */
 export function RecordEditor({ garment }: { readonly garment: Garment }) {
-  const editing = useRecordEditing(garment);
+  const noted = useNoted(garment.id);
+  const editing = useRecordEditing(garment, noted.saved);
   const { form, meanwhile, savedAt, save } = editing;
   const { errors, isSubmitting, submitCount, isDirty } = form.formState;
   useWarningOnLeave(isDirty);
@@ -31,6 +33,7 @@ export function RecordEditor({ garment }: { readonly garment: Garment }) {
       <form noValidate onSubmit={(event) => void save(event)} className="space-y-6" aria-label="Record">
         <ErrorSummary mistakes={mistakesOf(errors)} attempt={isSubmitting ? 0 : submitCount} />
         {meanwhile && <StaleNotice meanwhile={meanwhile} onTake={editing.takeTheirs} />}
+        <NotedPanel {...noted} />
         <RecordFields />
         <div className="sticky bottom-0 flex flex-wrap items-center gap-4 border-t border-hair bg-paper py-3">
           <Button type="submit" tone="action" disabled={isSubmitting}>
@@ -45,7 +48,7 @@ export function RecordEditor({ garment }: { readonly garment: Garment }) {
   );
 }
 
-function useRecordEditing(garment: Garment) {
+function useRecordEditing(garment: Garment, onSaved: () => Promise<void>) {
   const queries = useQueryClient();
   const [opened, setOpened] = useState(() => ({
     typed: typedRecord(garment.record),
@@ -94,6 +97,8 @@ function useRecordEditing(garment: Garment) {
   const save = form.handleSubmit(async (record) => {
     try {
       settle(await saveRecord(garment.id, version, record));
+      // The record is kept by now: what the notes have to say of it is said beside them.
+      await onSaved().catch(() => undefined);
     } catch (error) {
       if (isProblem(error) && error.status === 412) await meetOther(error);
       else showProblem(error, form.setError, { prefix: '/record', known: isBox });

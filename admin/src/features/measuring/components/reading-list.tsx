@@ -5,18 +5,22 @@ import { firstBoxId, ReadingRow } from './reading-row.js';
 
 /** Every row in handling order, under the step in which the garment lies. */
 export function ReadingList({ desk }: { readonly desk: SheetDesk }) {
-  const { focusAsked, rows } = desk;
+  const { focusAsked, rows, turn } = desk;
   const followed = useRef(0);
   useEffect(() => {
-    // Each asking is followed once: a reading that arrives later must not pull the focus back.
-    if (focusAsked.times === followed.current) return;
+    // Each asking is followed once, and after the garment has been turned: a reading that arrives
+    // later must not pull the focus back.
+    if (turn !== null || focusAsked.times === followed.current) return;
     const row = rows.find(({ key }) => key === focusAsked.key);
     const box = row && document.getElementById(firstBoxId(row));
     if (!box) return;
     followed.current = focusAsked.times;
-    box.focus();
-    box.closest('li')?.scrollIntoView({ block: 'nearest' });
-  }, [focusAsked, rows]);
+    // A question that closes gives the focus back in a microtask of its own: the work goes on after that.
+    queueMicrotask(() => {
+      box.focus();
+      box.closest('li')?.scrollIntoView({ block: 'nearest' });
+    });
+  }, [turn, focusAsked, rows]);
   return (
     <div>
       {handlingSteps.map((step) => {

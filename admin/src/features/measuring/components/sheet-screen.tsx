@@ -139,15 +139,15 @@ function SheetTabs({ desk }: { readonly desk: SheetDesk }) {
 /** "Turn over: two people", said once when the work comes to a new handling step. */
 function TurnQuestion({ desk }: { readonly desk: SheetDesk }) {
   const go = useRef<HTMLButtonElement>(null);
-  const { locked, enter, current, rows } = desk;
+  const { locked, go: goTo, current, rows } = desk;
   const started = useRef(false);
   useEffect(() => {
     // Opening the garment is the first handling step, and is said as soon as the sheet is.
     if (started.current || locked || rows.every(({ reading }) => reading !== null)) return;
     started.current = true;
-    enter(current.key);
-  }, [locked, enter, current.key, rows]);
-  const words = desk.turn && stepWords[desk.turn.step];
+    goTo(current.key);
+  }, [locked, goTo, current.key, rows]);
+  const words = desk.turn && stepWords[desk.turn];
   return (
     <Question
       open={words !== null && !locked}

@@ -3,8 +3,6 @@ import { useState } from 'react';
 import { isDone, type SheetRow } from './rows.js';
 import { useTurning } from './use-turning.js';
 
-const AFTER_THE_QUESTION_MS = 60;
-
 /** Where the work is: the current row, and the turning of the garment between steps. */
 export function usePlace(sheetId: string, rows: readonly SheetRow[]) {
   const [key, setKey] = useState(() => (rows.find((row) => !isDone(row)) ?? rows[0]!).key);
@@ -15,19 +13,14 @@ export function usePlace(sheetId: string, rows: readonly SheetRow[]) {
     rows.find((row) => row.key === rowKey)?.point.step ??
     rows.find((row) => rowKey.startsWith(`${row.point.id}:`))?.point.step;
   /** Makes a row the current one; where the garment must be turned first, that is said, once. */
-  const enter = (to: string): boolean => {
+  const enter = (to: string) => {
     setKey(to);
     const step = stepOf(to);
-    return step === undefined || turning.mayGo(step, to);
+    if (step !== undefined) turning.askFor(step);
   };
-  const focus = (to: string) => setFocusAsked(({ times }) => ({ key: to, times: times + 1 }));
   const go = (to: string) => {
-    if (enter(to)) focus(to);
+    enter(to);
+    setFocusAsked(({ times }) => ({ key: to, times: times + 1 }));
   };
-  const turned = () => {
-    const to = turning.done();
-    // The question gives the focus back to where it was asked from; the work goes on after that.
-    if (to) setTimeout(() => focus(to), AFTER_THE_QUESTION_MS);
-  };
-  return { current, enter, go, focusAsked, turn: turning.asked, turned };
+  return { current, enter, go, focusAsked, turn: turning.asked, turned: turning.done };
 }

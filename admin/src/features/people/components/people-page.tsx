@@ -4,6 +4,7 @@ import { Page } from '../../../components/ui/page.js';
 import { Paging } from '../../../components/ui/paging.js';
 import { Failed, Waiting } from '../../../components/ui/states.js';
 import { peopleQuery } from '../api/people.js';
+import { DamageReportsSetting } from './damage-reports.js';
 import { InvitationList } from './invitation-list.js';
 import { InviteForm } from './invite-form.js';
 import { PersonRow } from './person-row.js';
@@ -52,6 +53,7 @@ export function PeoplePage() {
             </div>
           )}
           <InvitationList />
+          <DamageReportsSetting />
         </div>
         <InviteForm />
       </div>
