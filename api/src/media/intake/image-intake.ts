@@ -8,7 +8,7 @@ import type { Actor } from '../../common/actor';
 import { Clock } from '../../common/clock';
 import { Disk } from '../../common/disk';
 import { Refusal } from '../../common/refusal';
-import { isDuplicate, type Tx, Work } from '../../common/work';
+import { type Tx, Work } from '../../common/work';
 import { GarmentEdits } from '../../garments/garment-edits';
 import type { ImageFields } from '../dto/image.dto';
 import { ImageEngine, type PictureSize } from '../engine/image-engine';
@@ -97,7 +97,7 @@ export class ImageIntake {
       return row;
     } catch (fault) {
       // The same picture came twice at once: the files are the other's by now, and so is the answer.
-      const other = isDuplicate(fault) ? await takenBefore(this.work.reader, garmentId, fields) : null;
+      const other = await takenBefore(this.work.reader, garmentId, fields);
       if (other) return other;
       await this.forget(accepted);
       throw fault;
@@ -117,8 +117,10 @@ export class ImageIntake {
   /** Decodes the picture whole, once, and stores the original and the master that the forms are made of. */
   private async keep({ path }: ReceivedFile, id: string): Promise<Accepted> {
     const type = await sniffPictureFile(path);
-    const master = await this.store.incoming(`${id}.master.tif`);
-    const scratch = await this.store.incoming(`${id}.scratch`);
+    // Names of their own: the same picture may come twice at once, under one id.
+    const work = uuidv7();
+    const master = await this.store.incoming(`${work}.master.tif`);
+    const scratch = await this.store.incoming(`${work}.scratch`);
     try {
       const size = await this.gate.pass(() =>
         this.engine.use((session) => session.inspect({ source: path, type, master, scratch })),
