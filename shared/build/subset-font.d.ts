@@ -1,7 +1,7 @@
 /** The part of subset-font that is used here; it ships no types of its own. */
 declare module 'subset-font' {
-  interface SubsetOptions {
-    readonly targetFormat: 'woff2';
+  export interface SubsetOptions {
+    readonly targetFormat: 'woff2' | 'truetype';
     readonly variationAxes?: Readonly<
       Record<string, number | { readonly min: number; readonly max: number }>
     >;

@@ -12,6 +12,12 @@ export const MARIADB = { program: 'mariadbd', package: 'mariadb-server' };
 /** @type {Need} */
 export const CHROMIUM = { program: 'chromium', package: 'chromium' };
 
+/** Read back what is printed, in tests. @type {Need[]} */
+export const PDF_READERS = [
+  { program: 'pdftotext', package: 'poppler-utils' },
+  { program: 'qpdf', package: 'qpdf' },
+];
+
 /** @type {System} */
 const thisSystem = {
   findProgram,
@@ -30,7 +36,7 @@ const thisSystem = {
 export async function installDebianPackages(needs, step, system = thisSystem) {
   const missing = needs.filter((need) => !system.findProgram(need.program)).map((need) => need.package);
   if (missing.length === 0) return;
-  const names = missing.join(' and ');
+  const names = missing.join(', ').replace(/, ([^,]+)$/, ' and $1');
   const byHand = `sudo apt-get install ${missing.join(' ')}`;
   if (!system.findProgram('apt-get')) {
     throw new PlainFailure(

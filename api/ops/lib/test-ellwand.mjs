@@ -1,7 +1,7 @@
 // @ts-check
 import path from 'node:path';
 import { buildWhatChanged, builds } from './builds.mjs';
-import { CHROMIUM, installDebianPackages, MARIADB } from './debian-packages.mjs';
+import { CHROMIUM, installDebianPackages, MARIADB, PDF_READERS } from './debian-packages.mjs';
 import { installNpmPackages } from './npm-packages.mjs';
 import { root } from './places.mjs';
 import { runMain } from './plain-failure.mjs';
@@ -61,7 +61,7 @@ const parts = {
 /** `npm test`: everything, with database folder and ports of its own. */
 export function testEllwand() {
   return runMain(async () => {
-    await installDebianPackages([MARIADB, CHROMIUM], step);
+    await installDebianPackages([MARIADB, CHROMIUM, ...PDF_READERS], step);
     await installNpmPackages(root, step);
     return runInFolder(everything);
   });

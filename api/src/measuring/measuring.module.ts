@@ -10,6 +10,8 @@ import { NotedService } from './noted/noted.service';
 import { PartSheetsController } from './part-sheets/part-sheets.controller';
 import { PartSheetsService } from './part-sheets/part-sheets.service';
 import { PartSheetsView } from './part-sheets/part-sheets-view';
+import { PrintedSheetsController } from './printed/printed-sheets.controller';
+import { PrintedSheetsService } from './printed/printed-sheets.service';
 import { ProtocolBookModule } from './protocols/protocol-book.module';
 import { ProtocolsController } from './protocols/protocols.controller';
 import { ProtocolsService } from './protocols/protocols.service';
@@ -31,6 +33,7 @@ import { TableNotesService } from './table-notes/table-notes.service';
     RepeatabilityController,
     PartSheetsController,
     NotedController,
+    PrintedSheetsController,
   ],
   providers: [
     ProtocolsService,
@@ -47,6 +50,7 @@ import { TableNotesService } from './table-notes/table-notes.service';
     PartSheetsView,
     DamageService,
     NotedService,
+    PrintedSheetsService,
   ],
   exports: [
     ProtocolBookModule,

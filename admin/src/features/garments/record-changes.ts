@@ -1,6 +1,6 @@
 import { hazardIds } from '@ellwand/shared/records/garment';
 import { boxLabels, type RecordTyped } from './record-form.js';
-import { hazardLabels } from '../../lib/words/hazard-words.js';
+import { hazardLabels } from '@ellwand/shared/records/hazard-words';
 
 export interface BoxChange {
   readonly box: keyof RecordTyped;

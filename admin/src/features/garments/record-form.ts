@@ -5,7 +5,7 @@ import {
   OtherNumber,
 } from '@ellwand/shared/records/garment';
 import { z } from 'zod';
-import type { HazardId } from '../../lib/words/hazard-words.js';
+import type { HazardId } from '@ellwand/shared/records/hazard-words';
 
 const HazardTyped = z.object({ standing: z.string(), note: z.string() });
 

@@ -7,7 +7,7 @@ import {
   type HazardId,
   hazardLabels,
   standingLabels,
-} from '../../../lib/words/hazard-words.js';
+} from '@ellwand/shared/records/hazard-words';
 import type { RecordTyped } from '../record-form.js';
 import { useBox } from './record-fields.js';
 

@@ -1,5 +1,5 @@
 import type { GarmentRecord } from '@ellwand/shared/records/garment';
-import { hazardLabels, standingLabels } from '../../../lib/words/hazard-words.js';
+import { hazardLabels, standingLabels } from '@ellwand/shared/records/hazard-words';
 import { kindWord } from '../../../lib/words/kind-word.js';
 
 /** The record to read, where it cannot be written: only what was said. */

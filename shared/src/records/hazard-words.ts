@@ -1,4 +1,4 @@
-import { hazardIds } from '@ellwand/shared/records/garment';
+import { hazardIds } from './garment.js';
 
 export type HazardId = (typeof hazardIds)[number];
 
