@@ -55,6 +55,19 @@ async function answerText(method: string, path: string, options: SendOptions): P
   return text;
 }
 
+/** A file and the name that the API gives it. */
+export interface NamedFile {
+  readonly name: string;
+  readonly content: Blob;
+}
+
+async function askFile(path: string, options: SendOptions = {}): Promise<NamedFile> {
+  const answer = await askSignedIn('GET', path, options);
+  if (!answer.ok) throw problemOf(answer.status, await answer.text());
+  const named = /filename="([^"]+)"/.exec(answer.headers.get('Content-Disposition') ?? '');
+  return { name: named?.[1] ?? 'file', content: await answer.blob() };
+}
+
 async function request<T extends z.ZodType>(
   method: string,
   path: string,
@@ -79,6 +92,7 @@ export const api = {
     request('PATCH', path, schema, options),
   delete: <T extends z.ZodType>(path: string, schema: T, options?: SendOptions) =>
     request('DELETE', path, schema, options),
+  file: askFile,
   /** For answers without a body (204). */
   deleteQuietly: async (path: string, options: SendOptions = {}): Promise<void> => {
     await answerText('DELETE', path, options);

@@ -1,6 +1,7 @@
 import type { Garment, Part } from '@ellwand/shared/records/garment';
 import { useMutation, useQueryClient } from '@tanstack/react-query';
 import { Link } from 'react-router-dom';
+import { PrintSheet } from '../../../components/print-sheet.js';
 import { Button, ButtonLink } from '../../../components/ui/button.js';
 import { Refused } from '../../../components/ui/states.js';
 import { paths } from '../../../config/paths.js';
@@ -73,6 +74,13 @@ export function PartCard({
             Remove <span className="sr-only">{part.name}</span>
           </Button>
         )}
+      </div>
+      <div className="mt-2">
+        <PrintSheet
+          path={`/workroom/parts/${part.id}/blank-sheet.pdf`}
+          label="Blank sheet to print"
+          of={part.name}
+        />
       </div>
       <Refused error={remove.error} />
     </li>

@@ -1,6 +1,7 @@
 import { dutyLabels } from '@ellwand/shared/records/hands';
 import { type Sheet, type SheetFactsInput, supportLabels } from '@ellwand/shared/records/sheet';
 import { useQueryClient } from '@tanstack/react-query';
+import { PrintSheet } from '../../../components/print-sheet.js';
 import { dayText } from '../../../lib/moments.js';
 import { isProblem } from '../../../lib/problem-error.js';
 import { saveFacts } from '../api/save-facts.js';
@@ -23,10 +24,25 @@ export function FactsPanel({
   readonly points: readonly SheetPoint[];
 }) {
   const queries = useQueryClient();
-  if (sheet.state === 'complete') return <FactsShown sheet={sheet} />;
+  const print = (
+    <PrintSheet
+      path={`/workroom/sheets/${sheet.id}/sheet.pdf`}
+      label="This sheet to print"
+      of={sheet.garment.partName}
+      height="table"
+    />
+  );
+  if (sheet.state === 'complete')
+    return (
+      <div className="p-4">
+        {print}
+        <FactsShown sheet={sheet} />
+      </div>
+    );
   return (
     <div className="space-y-6 p-4">
       <PrepareButton sheetId={sheet.id} />
+      {print}
       <FactsForm
         facts={typedFacts(sheet.facts)}
         verb="Save the facts"
@@ -62,7 +78,7 @@ function FactsShown({ sheet: { facts } }: { readonly sheet: Sheet }) {
     ['Note', facts.note] as const,
   ];
   return (
-    <dl className="p-4 text-table">
+    <dl className="mt-4 text-table">
       {rows
         .filter(([, value]) => value !== '')
         .map(([label, value]) => (

@@ -7,7 +7,12 @@ import { today } from '../../../lib/moments.js';
 import { readRemembered, remember } from '../../../lib/remembered.js';
 import { useOutbox } from '../model/use-outbox.js';
 import { useSession } from '../../../lib/session.js';
-import { hazardCautions, hazardLabels, isHazardId, standingLabels } from '@ellwand/shared/records/hazard-words';
+import {
+  hazardCautions,
+  hazardLabels,
+  isHazardId,
+  standingLabels,
+} from '@ellwand/shared/records/hazard-words';
 
 /** Hazards and handling notes, read and acknowledged before the box is opened: each person, each day. */
 export function HazardGate({ sheet, children }: { readonly sheet: Sheet; readonly children: ReactNode }) {

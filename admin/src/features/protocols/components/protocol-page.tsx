@@ -2,6 +2,7 @@ import { isGarmentKind } from '@ellwand/shared/points/kinds';
 import type { ProtocolHistory } from '@ellwand/shared/records/protocol';
 import { useQuery } from '@tanstack/react-query';
 import { useParams, useSearchParams } from 'react-router-dom';
+import { PrintSheet } from '../../../components/print-sheet.js';
 import { ButtonLink } from '../../../components/ui/button.js';
 import { Page } from '../../../components/ui/page.js';
 import { Empty, Failed, Waiting } from '../../../components/ui/states.js';
@@ -73,6 +74,13 @@ function Versions({
             Go to version {history.version}
           </ButtonLink>
         </p>
+      )}
+      {isNewest && !history.wornTogether && (
+        <PrintSheet
+          path={`/workroom/kinds/${history.kind}/blank-sheet.pdf`}
+          label="Blank sheet to print"
+          of={protocolTitle(history)}
+        />
       )}
       {writes && isNewest ? (
         <ProtocolEditor key={history.kind} history={history} />

@@ -1,5 +1,6 @@
 import { useRef, useState } from 'react';
 import { Button } from '../../../components/ui/button.js';
+import { offerFile } from '../../../lib/offer-file.js';
 import { useOffline } from '../../../offline/context.js';
 import { deviceName } from '../../../offline/device.js';
 import { bringIn, readingsFile, readReadingsFile } from '../../../offline/readings-file.js';
@@ -17,7 +18,7 @@ export function FileWays() {
     await offline.drafts.flush();
     const { operations } = offline.outbox.snapshot();
     const file = readingsFile(operations, offline.drafts.all(), { device: deviceName() });
-    offer(file.name, file.text);
+    offerFile(file.name, new Blob([file.text], { type: 'application/json' }));
     setSaid({ tone: 'good', sentence: `Saved as ${file.name}. It stays here as well until it is sent.` });
   };
   const take = async (file: File) => {
@@ -63,13 +64,4 @@ export function FileWays() {
       </p>
     </section>
   );
-}
-
-function offer(name: string, text: string): void {
-  const address = URL.createObjectURL(new Blob([text], { type: 'application/json' }));
-  const link = document.createElement('a');
-  link.href = address;
-  link.download = name;
-  link.click();
-  URL.revokeObjectURL(address);
 }
