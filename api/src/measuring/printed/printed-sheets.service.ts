@@ -1,5 +1,6 @@
 import type { GarmentKind } from '@ellwand/shared/points/kinds';
 import { GarmentRecord } from '@ellwand/shared/records/garment';
+import { readDate } from '@ellwand/shared/records/edtf-date';
 import type { Sheet } from '@ellwand/shared/records/sheet';
 import { Inject, Injectable } from '@nestjs/common';
 import { Clock } from '../../common/clock';
@@ -90,7 +91,8 @@ export class PrintedSheetsService {
     return {
       number: wornTogether ? ownNumber : `${ownNumber}${partSuffix}`,
       part: wornTogether ? 'Parts laid together as worn' : partName,
-      ...{ title, date, maker, handling, hazards },
+      date: readDate(date)?.display ?? date,
+      ...{ title, maker, handling, hazards },
       link: `${this.environment.publicUrl}/workroom/garments/${garmentId}`,
     };
   }

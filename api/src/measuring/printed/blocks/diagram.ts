@@ -8,7 +8,7 @@ import { ink, styles } from '../paper/styles';
 
 /** A CSS pixel is a 96th of an inch, a point a 72nd. */
 const pointsPerPixel = 72 / 96;
-const mostHeightPx = 420;
+const mostHeightPx = 380;
 
 /** The kind's measuring diagram with the letters of the table; nothing where a kind is not drawn. */
 export function drawDiagram(paper: SheetPaper, protocol: Protocol): void {
@@ -37,7 +37,7 @@ export function drawDiagram(paper: SheetPaper, protocol: Protocol): void {
 /** A bar of 100 mm: whoever lays a tape or rule on it knows whether the print is true, and the tape too. */
 export function drawBar(paper: SheetPaper): void {
   const length = points(100);
-  paper.room(points(12));
+  paper.room(points(13));
   const { edge: x, y } = paper;
   paper.ornament((doc) => {
     doc.lineWidth(0.75).strokeColor(ink);
@@ -53,5 +53,5 @@ export function drawBar(paper: SheetPaper): void {
   paper.tag('P', () =>
     paper.set(words, styles.small, { x: x + length + points(5), y, width: paper.width - length - points(5) }),
   );
-  paper.y += points(10);
+  paper.y += points(13);
 }

@@ -42,7 +42,12 @@ function rowOf({ letter, point, required, keyed, values, remarks }: PointOnPaper
         ],
       },
       keyed.length > 0 ? lines(keyed, styles.body) : cell(nothing, styles.small),
-      lines(values, styles.strong),
+      {
+        lines: values.flatMap(({ value, trust }) => [
+          { text: value, style: styles.strong },
+          { text: trust, style: styles.small },
+        ]),
+      },
       lines(remarks, styles.body),
     ],
   };

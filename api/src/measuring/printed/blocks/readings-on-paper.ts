@@ -1,7 +1,7 @@
 import type { MeasuringPoint } from '@ellwand/shared/points/point';
 import { lettersFor, pointIn } from '@ellwand/shared/protocols/protocol';
 import { levelLabels, notTakenReasons } from '@ellwand/shared/readings/reading';
-import { valuesBySide } from '@ellwand/shared/readings/values-by-side';
+import { type SideValue, valuesBySide } from '@ellwand/shared/readings/values-by-side';
 import { shownUncertainty } from '@ellwand/shared/readings/uncertainty';
 import { wornSideLabels } from '@ellwand/shared/readings/worn-side';
 import { toReading } from '@ellwand/shared/records/measured';
@@ -9,6 +9,12 @@ import { toProtocol } from '@ellwand/shared/records/protocol';
 import type { Sheet, StoredReading } from '@ellwand/shared/records/sheet';
 import { formatBoth } from '@ellwand/shared/units/format-length';
 import { toMmString } from '@ellwand/shared/units/length';
+
+/** "612 mm (24 1/8 in)", and how far it can be trusted: "± 2.1 mm, mean of 2". */
+export interface ValueOnPaper {
+  readonly value: string;
+  readonly trust: string;
+}
 
 /** What a filled sheet says of one point. */
 export interface PointOnPaper {
@@ -18,7 +24,7 @@ export interface PointOnPaper {
   /** Each reading as it was keyed, corrected ones among them, in the order in which they were keyed. */
   readonly keyed: readonly string[];
   /** The value, or that of each side; empty where there is none. */
-  readonly values: readonly string[];
+  readonly values: readonly ValueOnPaper[];
   /** How the level was found, and what was remarked. */
   readonly remarks: readonly string[];
 }
@@ -42,7 +48,7 @@ export function pointsOnPaper(sheet: Sheet): readonly PointOnPaper[] {
         keyed: own.map((reading) =>
           keyedText(reading, point, severalRead ? names.get(reading.readBy) : undefined),
         ),
-        values: valuesBySide(readings, pointId, protocol.ownPoints).map(valueText),
+        values: valuesBySide(readings, pointId, protocol.ownPoints).map(valueOnPaper),
         remarks: remarksOf(own.filter(({ stands }) => stands)),
       },
     ];
@@ -74,10 +80,13 @@ function figureOf(reading: StoredReading, how: MeasuringPoint['how']): string {
   return `${tapes}${typed} ${unit}${half}${gap}${depth}`;
 }
 
-function valueText({ worn, accepted }: ReturnType<typeof valuesBySide>[number]): string {
+function valueOnPaper({ worn, accepted }: SideValue): ValueOnPaper {
   const side = worn ? `${wornSideLabels[worn]}: ` : '';
   const mean = accepted.n > 1 ? `, mean of ${accepted.n}` : '';
-  return `${side}${formatBoth(accepted.value)} ± ${toMmString(shownUncertainty(accepted.uncertaintyMm))} mm${mean}`;
+  return {
+    value: `${side}${formatBoth(accepted.value)}`,
+    trust: `± ${toMmString(shownUncertainty(accepted.uncertaintyMm))} mm${mean}`,
+  };
 }
 
 function remarksOf(standing: readonly StoredReading[]): readonly string[] {
