@@ -3,6 +3,7 @@ import type { CutSheet } from '@ellwand/shared/records/cut-sheet';
 import type { Garment } from '@ellwand/shared/records/garment';
 import type { PublishedGarment } from '@ellwand/shared/records/published-garment';
 import type { Change } from '@ellwand/shared/records/publishing';
+import type { SheetFindings } from '@ellwand/shared/records/sheet';
 import { piece, typedCutSheet } from '@ellwand/shared/testing/sample-cut-sheets';
 import { type Agent, type House, openHouse } from './harness/house';
 import type { TestPerson } from './harness/people';
@@ -70,6 +71,17 @@ describe('the cut sheet of a part', () => {
     });
     const nowhere = await recorder.get(`/api/v1/workroom/parts/${dress.id}/cut-sheet`);
     expect(nowhere.body).toMatchObject({ status: 404, code: 'part.unknown' });
+  });
+
+  it('gives the measuring sheet the sum of its panels', async () => {
+    await write(0);
+    const sheet = await openSheet(recorder, partId(), factsWith(odile, ines));
+    const { derived } = (await recorder.get(`/api/v1/workroom/sheets/${sheet.id}/findings`))
+      .body as SheetFindings;
+    expect(derived).toMatchObject([
+      { id: 'sum-of-panels:waist', valueMm: '614', worked: '204 mm + 204 mm + 206 mm = 614 mm' },
+      { id: 'sum-of-panels:hem', valueMm: '1040' },
+    ]);
   });
 
   it('keeps what was typed beside its exact millimetres, and leaves the record’s version alone', async () => {

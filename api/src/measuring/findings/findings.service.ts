@@ -13,6 +13,7 @@ import { conflict, notFound } from '../../common/refusal';
 import { type Tx, Work } from '../../common/work';
 import { PartRow } from '../../garments/part.entity';
 import { UserRow } from '../../users/user.entity';
+import { bodyOf, cutSheetRow } from '../cut-sheets/cut-sheet-view';
 import { ProtocolBook } from '../protocols/protocol-book';
 import { toStored } from '../readings/stored-reading';
 import { readingsOf } from '../sheets/sheet-view';
@@ -125,7 +126,11 @@ export class FindingsService {
     const answers = await this.answers(tx, sheetId);
     return {
       findings: findings.map((finding) => toView(finding, answers)),
-      derived: derivedViews(part.kind, stored, { ownPoints: protocol.ownPoints, otherParts }),
+      derived: derivedViews(part.kind, stored, {
+        ownPoints: protocol.ownPoints,
+        otherParts,
+        cutSheet: bodyOf(await cutSheetRow(tx, part.id)),
+      }),
     };
   }
 

@@ -3,6 +3,7 @@ import { type ViewName, viewOfPoint } from '@ellwand/shared/drawings/diagram/mod
 import type { GarmentKind } from '@ellwand/shared/points/kinds';
 import { extraLinesOf } from '@ellwand/shared/protocols/extra-lines';
 import { paintProtocol } from '@ellwand/shared/protocols/own-lines';
+import type { WornSide } from '@ellwand/shared/readings/worn-side';
 import type { OwnPointView } from '@ellwand/shared/records/protocol';
 import { useMemo, useState } from 'react';
 import { mannerOf, type SheetPoint } from '../model/sheet-points.js';
@@ -14,11 +15,13 @@ interface DiagramPanelProps {
   /** The museum's own points of the sheet's protocol, for their lines. */
   readonly ownPoints: readonly OwnPointView[];
   readonly current: SheetPoint;
+  /** The wearer's side that is being read, where left and right are told apart: the line lies there. */
+  readonly worn: WornSide | null;
   readonly onChoose: (pointId: string) => void;
 }
 
 /** The view on which the current point lies, its line lit, and beneath it the one instruction that matters now. */
-export function DiagramPanel({ kind, points, ownPoints, current, onChoose }: DiagramPanelProps) {
+export function DiagramPanel({ kind, points, ownPoints, current, worn, onChoose }: DiagramPanelProps) {
   const diagram = diagramFor(kind);
   const ownLine = ownPoints.find(({ id }) => id === current.id)?.line;
   const own = ownLine?.view ?? (diagram && viewOfPoint(diagram, current.id));
@@ -34,12 +37,13 @@ export function DiagramPanel({ kind, points, ownPoints, current, onChoose }: Dia
           views: [view],
           widthPx: 368,
           current: current.id,
+          ...(worn ? { wornSide: worn } : {}),
           points: points.map(({ id }) => id),
           letters: new Map(points.map(({ id, letter }) => [id, letter])),
         },
         extraLinesOf(ownPoints),
       )?.scene,
-    [kind, view, current.id, points, ownPoints],
+    [kind, view, current.id, worn, points, ownPoints],
   );
   return (
     <section

@@ -55,6 +55,7 @@ export function SheetScreen({ sheet }: { readonly sheet: Sheet }) {
               points={desk.points}
               ownPoints={desk.sheet.protocol.ownPoints}
               current={desk.current.point}
+              worn={desk.current.worn}
               onChoose={chooseRow}
             />
           </div>

@@ -32,9 +32,10 @@ export function localFindings(
   },
 ): SheetFindings {
   const readings = readingsSoFar(sheet, pending, by);
+  const protocol = toProtocol(sheet.protocol);
   const found = runChecks({
     kind: sheet.kind,
-    protocol: toProtocol(sheet.protocol),
+    protocol,
     readings: readings.map(toReading),
     support: sheet.facts.support,
     tapeLength: mm(sheet.facts.tapeLengthMm),
@@ -47,6 +48,6 @@ export function localFindings(
       pointIds: [...pointIds],
       answer: answered.get(key) ?? null,
     })),
-    derived: derivedViews(sheet.kind, readings),
+    derived: derivedViews(sheet.kind, readings, { ownPoints: protocol.ownPoints }),
   };
 }

@@ -4,7 +4,7 @@ import { useRemembered } from '../../../lib/remembered.js';
 
 export const canReadAloud = (): boolean => 'speechSynthesis' in window;
 
-/** Says each committed reading, so that whoever holds the tape hears what was keyed. */
+/** Says each committed reading and what comes next, so that whoever holds the tape need not look up. */
 export function useReadAloud(): readonly [boolean, (on: boolean) => void] {
   const [value, set] = useRemembered('read-aloud', ['on', 'off'] as const, 'off');
   return [value === 'on' && canReadAloud(), (on) => set(on ? 'on' : 'off')];
@@ -21,4 +21,9 @@ export function readingAloud(point: string, reading: NewReading): string {
 export function sayReading(point: string, reading: NewReading): void {
   window.speechSynthesis.cancel();
   window.speechSynthesis.speak(new SpeechSynthesisUtterance(readingAloud(point, reading)));
+}
+
+/** After what is being said, not in place of it. */
+export function sayNext(point: string): void {
+  window.speechSynthesis.speak(new SpeechSynthesisUtterance(`Next: ${point}`));
 }

@@ -7,7 +7,7 @@ import { sheetQuery } from '../api/sheet.js';
 import type { Draft } from './drafts.js';
 import { keyedReading, notTakenReading, saysSomethingNew } from './keyed-reading.js';
 import { isDone, rowKey, sheetRows, type SheetRow } from './rows.js';
-import { sayReading, useReadAloud } from './read-aloud.js';
+import { sayNext, sayReading, useReadAloud } from './read-aloud.js';
 import { sendStatus } from './send-status.js';
 import { sheetPoints } from './sheet-points.js';
 import { useDrafts, useOutbox, useOutboxView } from './use-outbox.js';
@@ -99,7 +99,9 @@ export function useSheetDesk(shown: Sheet) {
     const at = rows.findIndex(({ key }) => key === place.current.key);
     const open = (row: SheetRow) => row.key !== place.current.key && !isDone(row);
     const target = rows.slice(at + 1).find(open) ?? rows.find(open) ?? rows[at + 1];
-    if (target) place.go(target.key);
+    if (!target) return;
+    if (aloud) sayNext(target.point.point.name);
+    place.go(target.key);
   };
   const step = (by: 1 | -1) => {
     if (!commit(place.current)) return;

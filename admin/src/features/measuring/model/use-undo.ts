@@ -24,7 +24,7 @@ export interface UndoWays {
 
 /**
  * Takes back what was committed last. What has not been sent goes back into its box; in place of what was sent the
- * earlier reading is entered again. Nothing is ever deleted.
+ * earlier reading is entered again, or the box is filled to be keyed over. What the museum holds is never deleted.
  */
 export function useUndo({ outbox, view, putBack, go }: UndoWays) {
   const [steps, setSteps] = useState<readonly Step[]>([]);
