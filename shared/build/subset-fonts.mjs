@@ -76,12 +76,17 @@ for (const { name, alphabets, weight } of printed) {
     });
   }
 }
-await make(faces[1].source, 'print/title.ttf', alphabet.latin, {
-  targetFormat: 'truetype',
-  variationAxes: { wght: 600 },
-  keepFeatures: ['kern', 'lnum', 'liga'],
-  noHinting: true,
-});
+await make(
+  '@fontsource-variable/cormorant-garamond/files/cormorant-garamond-latin-wght-normal.woff2',
+  'print/title.ttf',
+  alphabet.latin,
+  {
+    targetFormat: 'truetype',
+    variationAxes: { wght: 600 },
+    keepFeatures: ['kern', 'lnum', 'liga'],
+    noHinting: true,
+  },
+);
 
 /** @param {string} source @param {string} file @param {string} text @param {import('subset-font').SubsetOptions} options */
 async function make(source, file, text, options) {

@@ -1,7 +1,7 @@
 import './styles/site.css';
 import { hydrateRoot } from 'react-dom/client';
 import { createBrowserRouter, matchRoutes, RouterProvider } from 'react-router-dom';
-import { type Hydration } from './app/document';
+import type { Hydration } from './app/document';
 import { siteRoutes } from './app/routes';
 import { beginTakingOver } from './components/diagram/hydration';
 import { httpCatalogue } from './lib/http-catalogue';

@@ -1,5 +1,5 @@
 import { createHash } from 'node:crypto';
-import { type SiteCatalogue } from '@ellwand/shared/records/site-catalogue';
+import type { SiteCatalogue } from '@ellwand/shared/records/site-catalogue';
 import { describe, expect, it } from 'vitest';
 import { inlineScriptHashes, render, siteAssets } from './entry-server';
 import { askPage, testAssets } from './testing/ask-page';

@@ -1,5 +1,5 @@
 import { createHash } from 'node:crypto';
-import { type SiteCatalogue } from '@ellwand/shared/records/site-catalogue';
+import type { SiteCatalogue } from '@ellwand/shared/records/site-catalogue';
 import { renderToString } from 'react-dom/server';
 import {
   createStaticHandler,

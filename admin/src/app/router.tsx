@@ -2,9 +2,6 @@ import { createBrowserRouter, type RouteObject } from 'react-router-dom';
 import { Door } from './door.js';
 import { Shell } from './shell.js';
 import { Astray, Broken, Opening } from './astray.js';
-import { FirstAdministratorPage } from '../features/sign-in/components/first-administrator-page.js';
-import { InvitationPage } from '../features/sign-in/components/invitation-page.js';
-import { SignInPage } from '../features/sign-in/components/sign-in-page.js';
 
 /** The floor plan. What the table does not need at once is fetched when it is opened. */
 export const routes: RouteObject[] = [
@@ -12,9 +9,25 @@ export const routes: RouteObject[] = [
     errorElement: <Broken />,
     hydrateFallbackElement: <Opening />,
     children: [
-      { path: '/sign-in', element: <SignInPage /> },
-      { path: '/invitation', element: <InvitationPage /> },
-      { path: '/first-administrator', element: <FirstAdministratorPage /> },
+      {
+        path: '/sign-in',
+        lazy: async () => ({
+          Component: (await import('../features/sign-in/components/sign-in-page.js')).SignInPage,
+        }),
+      },
+      {
+        path: '/invitation',
+        lazy: async () => ({
+          Component: (await import('../features/sign-in/components/invitation-page.js')).InvitationPage,
+        }),
+      },
+      {
+        path: '/first-administrator',
+        lazy: async () => ({
+          Component: (await import('../features/sign-in/components/first-administrator-page.js'))
+            .FirstAdministratorPage,
+        }),
+      },
       {
         element: <Door />,
         children: [

@@ -1,4 +1,4 @@
-import { type AddressInfo } from 'node:net';
+import type { AddressInfo } from 'node:net';
 import { simpleParser, type ParsedMail } from 'mailparser';
 import { SMTPServer } from 'smtp-server';
 

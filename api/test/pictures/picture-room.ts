@@ -3,7 +3,7 @@ import { join } from 'node:path';
 import { v7 as uuidv7 } from 'uuid';
 import { Work } from '../../src/common/work';
 import { FormsMaker } from '../../src/media/forms/forms-maker';
-import { type Agent, type House } from '../harness/house';
+import type { Agent, House } from '../harness/house';
 
 /** A recorder signed in, and a draft garment to send pictures to. */
 export class PictureRoom {

@@ -2,8 +2,8 @@ import { dye, plain, type Cloth, type Rgb } from '../cloths/cloth';
 import { lining, metal, ribbon, thread } from '../cloths/cloths';
 import { leaf } from '../motifs/motifs';
 import { bell, ease, mix } from '../renderer/numbers';
-import { type Noise } from '../renderer/noise';
-import { type Scene } from '../renderer/scene';
+import type { Noise } from '../renderer/noise';
+import type { Scene } from '../renderer/scene';
 import { line, tube, type Vec3 } from '../renderer/tube';
 
 /**

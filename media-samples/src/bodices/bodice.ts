@@ -1,8 +1,8 @@
-import { type Cloth } from '../cloths/cloth';
-import { type Loft } from '../renderer/loft';
+import type { Cloth } from '../cloths/cloth';
+import type { Loft } from '../renderer/loft';
 import { bell, ease, mix } from '../renderer/numbers';
-import { type Noise } from '../renderer/noise';
-import { type Layer, type Scene } from '../renderer/scene';
+import type { Noise } from '../renderer/noise';
+import type { Layer, Scene } from '../renderer/scene';
 
 /** The cut of a bodice: on what form, from which neck to which lower edge (heights by angle), and how it creases. */
 export interface BodiceCut {

@@ -1,4 +1,4 @@
-import { type Cloth } from '../cloths/cloth';
+import type { Cloth } from '../cloths/cloth';
 
 /** The same cloth cut away where `open` says so. The cut is made pixel by pixel, so that its edge is clean. */
 export const cutAway = (cloth: Cloth, open: (u: number, v: number) => boolean): Cloth => ({

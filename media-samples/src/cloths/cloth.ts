@@ -1,4 +1,4 @@
-import { type Weave } from './weave';
+import type { Weave } from './weave';
 
 /** Linear light, 0–1 each. */
 export type Rgb = [number, number, number];

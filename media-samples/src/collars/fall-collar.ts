@@ -1,8 +1,8 @@
-import { type Cloth } from '../cloths/cloth';
+import type { Cloth } from '../cloths/cloth';
 import { loft } from '../renderer/loft';
 import { mix } from '../renderer/numbers';
-import { type Noise } from '../renderer/noise';
-import { type Layer, type Scene } from '../renderer/scene';
+import type { Noise } from '../renderer/noise';
+import type { Layer, Scene } from '../renderer/scene';
 
 export interface FallCollar {
   /** Heights of the foot, of the roll at the back and of the fallen edge at the back, cm. */

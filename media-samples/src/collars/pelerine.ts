@@ -1,7 +1,7 @@
-import { type Cloth } from '../cloths/cloth';
+import type { Cloth } from '../cloths/cloth';
 import { thetaOf } from '../bodices/bodice';
-import { type Noise } from '../renderer/noise';
-import { type Layer, type Scene } from '../renderer/scene';
+import type { Noise } from '../renderer/noise';
+import type { Layer, Scene } from '../renderer/scene';
 
 export interface Pelerine {
   /** Heights of the neck edge and of the lower edge before, at the shoulder and behind, cm. */

@@ -1,7 +1,7 @@
-import { type Cloth } from '../cloths/cloth';
-import { type Loft } from '../renderer/loft';
+import type { Cloth } from '../cloths/cloth';
+import type { Loft } from '../renderer/loft';
 import { clamp, curve, ease, mix } from '../renderer/numbers';
-import { type Layer, type Scene } from '../renderer/scene';
+import type { Layer, Scene } from '../renderer/scene';
 
 export interface Shawl {
   form: Loft;

@@ -1,8 +1,8 @@
-import { type Cloth } from '../cloths/cloth';
+import type { Cloth } from '../cloths/cloth';
 import { thetaOf } from '../bodices/bodice';
 import { loft } from '../renderer/loft';
 import { mix } from '../renderer/numbers';
-import { type Layer, type Scene } from '../renderer/scene';
+import type { Layer, Scene } from '../renderer/scene';
 
 export interface StandCollar {
   /** Heights of its foot and its upper edge, cm. */

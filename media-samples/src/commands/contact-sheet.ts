@@ -1,7 +1,7 @@
 import { existsSync } from 'node:fs';
 import { mkdir } from 'node:fs/promises';
 import sharp from 'sharp';
-import { type PictureFile } from './picture-list';
+import type { PictureFile } from './picture-list';
 
 const CELL = { width: 420, height: 480 };
 const COLUMNS = 6;

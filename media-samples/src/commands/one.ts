@@ -1,6 +1,6 @@
 import { mkdir } from 'node:fs/promises';
 import { dirname } from 'node:path';
-import { type Garment, type GarmentPicture } from '../garments/garment';
+import type { Garment, GarmentPicture } from '../garments/garment';
 import { takePicture } from '../renderer/picture';
 import { Scene } from '../renderer/scene';
 

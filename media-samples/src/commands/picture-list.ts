@@ -1,7 +1,7 @@
 import { existsSync } from 'node:fs';
 import { writeFile } from 'node:fs/promises';
 import sharp from 'sharp';
-import { type Garment, type GarmentPicture, type View } from '../garments/garment';
+import type { Garment, GarmentPicture, View } from '../garments/garment';
 
 export interface PictureFile {
   garment: Garment;

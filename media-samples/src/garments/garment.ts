@@ -1,5 +1,5 @@
-import { type Scene } from '../renderer/scene';
-import { type Shot } from '../renderer/picture';
+import type { Scene } from '../renderer/scene';
+import type { Shot } from '../renderer/picture';
 
 export type View = 'front' | 'back' | 'side' | 'inside' | 'detail' | 'label';
 

@@ -7,7 +7,7 @@ import { neckline } from '../collars/neckline';
 import { loft } from '../renderer/loft';
 import { bell, ease, mix } from '../renderer/numbers';
 import { seededNoise } from '../renderer/noise';
-import { type Vec3 } from '../renderer/tube';
+import type { Vec3 } from '../renderer/tube';
 import { gathered, laySkirt } from '../skirts/skirt';
 import { closeSleeve, laySleeves } from '../sleeves/sleeve';
 import { sewButtons } from '../trims/buttons';

@@ -8,7 +8,7 @@ import { loft } from '../renderer/loft';
 import { bell, clamp, curve, ease, mix } from '../renderer/numbers';
 import { seededNoise } from '../renderer/noise';
 import { newPoint, type Layer, type Scene } from '../renderer/scene';
-import { type Vec3 } from '../renderer/tube';
+import type { Vec3 } from '../renderer/tube';
 import { closeSleeve, laySleeves } from '../sleeves/sleeve';
 import { faceOf, sewButton, sewButtons } from '../trims/buttons';
 import { sewBand } from '../trims/sewn';

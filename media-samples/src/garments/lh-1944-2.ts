@@ -6,7 +6,7 @@ import { layShawl } from '../collars/shawl';
 import { wovenSprig } from '../motifs/motifs';
 import { bell, ease, mix } from '../renderer/numbers';
 import { seededNoise } from '../renderer/noise';
-import { type Layer } from '../renderer/scene';
+import type { Layer } from '../renderer/scene';
 import { sewButtons } from '../trims/buttons';
 import { sewCord } from '../trims/sewn';
 import { closeUp, hung, type Garment } from './garment';

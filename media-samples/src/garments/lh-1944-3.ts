@@ -3,7 +3,7 @@ import { lining, metal, woolTwill } from '../cloths/cloths';
 import { loft } from '../renderer/loft';
 import { bell, curve, ease, mix } from '../renderer/numbers';
 import { seededNoise } from '../renderer/noise';
-import { type Layer } from '../renderer/scene';
+import type { Layer } from '../renderer/scene';
 import { sewButtons } from '../trims/buttons';
 import { round, sewCord } from '../trims/sewn';
 import { hung, type Garment } from './garment';

@@ -8,7 +8,7 @@ import { neckline } from '../collars/neckline';
 import { loft } from '../renderer/loft';
 import { bell, clamp, ease, mix } from '../renderer/numbers';
 import { seededNoise } from '../renderer/noise';
-import { type Layer, type Scene } from '../renderer/scene';
+import type { Layer, Scene } from '../renderer/scene';
 import { gathered, knifePleats, laySkirt, skirtLayer } from '../skirts/skirt';
 import { closeSleeve, laySleeves, POSES } from '../sleeves/sleeve';
 import { sewButtons } from '../trims/buttons';

@@ -4,7 +4,7 @@ import { lining, ribbon, woolTwill } from '../cloths/cloths';
 import { loft } from '../renderer/loft';
 import { clamp, ease, mix } from '../renderer/numbers';
 import { seededNoise } from '../renderer/noise';
-import { type Layer } from '../renderer/scene';
+import type { Layer } from '../renderer/scene';
 import { gathered, knifePleats, laySkirt, skirtLayer } from '../skirts/skirt';
 import { sewBand } from '../trims/sewn';
 import { standing, type Garment } from './garment';

@@ -1,11 +1,11 @@
-import { type Cloth, type Rgb } from '../cloths/cloth';
+import type { Cloth, Rgb } from '../cloths/cloth';
 import { patternedSilk } from '../cloths/cloths';
 import { fringe } from '../cloths/lace';
 import { stripes } from '../motifs/motifs';
 import { loft } from '../renderer/loft';
 import { bell, clamp, ease, mix } from '../renderer/numbers';
 import { seededNoise } from '../renderer/noise';
-import { type Layer, type Scene } from '../renderer/scene';
+import type { Layer, Scene } from '../renderer/scene';
 import { knifePleats, skirtLayer } from '../skirts/skirt';
 import { round, sewBand, sewFrill } from '../trims/sewn';
 

@@ -7,7 +7,7 @@ import { laceEdging } from '../cloths/lace';
 import { layStandCollar } from '../collars/stand-collar';
 import { ease, mix } from '../renderer/numbers';
 import { seededNoise } from '../renderer/noise';
-import { type Scene } from '../renderer/scene';
+import type { Scene } from '../renderer/scene';
 import { closeSleeve, laySleeves, POSES } from '../sleeves/sleeve';
 import { sewButtons } from '../trims/buttons';
 import { round, sewBand, sewCord, sewFrill } from '../trims/sewn';

@@ -6,7 +6,7 @@ import { part } from '../motifs/motifs';
 import { loft } from '../renderer/loft';
 import { mix } from '../renderer/numbers';
 import { seededNoise } from '../renderer/noise';
-import { type Layer, type Scene } from '../renderer/scene';
+import type { Layer, Scene } from '../renderer/scene';
 import { faceOf, sewButton } from '../trims/buttons';
 import { sewCord, sewFrill } from '../trims/sewn';
 import { closeUp, hung, type Garment } from './garment';

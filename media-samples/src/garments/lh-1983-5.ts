@@ -9,7 +9,7 @@ import { layStandCollar } from '../collars/stand-collar';
 import { loft } from '../renderer/loft';
 import { bell, ease, mix } from '../renderer/numbers';
 import { seededNoise } from '../renderer/noise';
-import { type Vec3 } from '../renderer/tube';
+import type { Vec3 } from '../renderer/tube';
 import { laySkirt } from '../skirts/skirt';
 import { fullSleeve, laySleeves } from '../sleeves/sleeve';
 import { round, sewBand, sewFrill } from '../trims/sewn';

@@ -7,7 +7,7 @@ import { neckline } from '../collars/neckline';
 import { loft } from '../renderer/loft';
 import { ease } from '../renderer/numbers';
 import { seededNoise } from '../renderer/noise';
-import { type Vec3 } from '../renderer/tube';
+import type { Vec3 } from '../renderer/tube';
 import { gathered, laySkirt, tuck } from '../skirts/skirt';
 import { fullSleeve, laySleeves } from '../sleeves/sleeve';
 import { round, sewBand, sewFrill } from '../trims/sewn';

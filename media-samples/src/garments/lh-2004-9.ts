@@ -5,7 +5,7 @@ import { part } from '../motifs/motifs';
 import { loft } from '../renderer/loft';
 import { bell, ease, mix } from '../renderer/numbers';
 import { seededNoise } from '../renderer/noise';
-import { type Layer, type Scene } from '../renderer/scene';
+import type { Layer, Scene } from '../renderer/scene';
 import { sewCord } from '../trims/sewn';
 import { closeUp, standing, type Garment } from './garment';
 

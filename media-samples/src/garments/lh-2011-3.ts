@@ -3,7 +3,7 @@ import { lining, ribbon } from '../cloths/cloths';
 import { noise as plushNoise } from '../motifs/motifs';
 import { bell, curve, ease, mix } from '../renderer/numbers';
 import { seededNoise } from '../renderer/noise';
-import { type Layer } from '../renderer/scene';
+import type { Layer } from '../renderer/scene';
 import { standing, type Garment, closeUp } from './garment';
 
 const noise = seededNoise(1845);

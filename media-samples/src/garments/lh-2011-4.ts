@@ -3,7 +3,7 @@ import { lining, patternedSilk, ribbon, silkTaffeta } from '../cloths/cloths';
 import { wovenSprig } from '../motifs/motifs';
 import { bell, clamp, curve, ease, mix } from '../renderer/numbers';
 import { seededNoise } from '../renderer/noise';
-import { type Layer, type Scene } from '../renderer/scene';
+import type { Layer, Scene } from '../renderer/scene';
 import { sewCord } from '../trims/sewn';
 import { closeUp, type Garment } from './garment';
 

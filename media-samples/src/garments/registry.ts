@@ -1,4 +1,4 @@
-import { type Garment } from './garment';
+import type { Garment } from './garment';
 import { lh1931n4 } from './lh-1931-4';
 import { lh1938n22 } from './lh-1938-22';
 import { lh1944n1 } from './lh-1944-1';

@@ -1,7 +1,7 @@
 import { clamp, ease } from './numbers';
-import { type Projection } from './camera';
-import { type Film } from './film';
-import { type Seen } from './normals';
+import type { Projection } from './camera';
+import type { Film } from './film';
+import type { Seen } from './normals';
 
 /** A grey board behind the garment: it stands on it, or hangs a little before it, or fills the picture. */
 export type Backdrop = 'floor' | 'wall' | 'none';

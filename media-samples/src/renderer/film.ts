@@ -1,6 +1,6 @@
-import { type Cloth } from '../cloths/cloth';
-import { type Projection } from './camera';
-import { type Seen } from './normals';
+import type { Cloth } from '../cloths/cloth';
+import type { Projection } from './camera';
+import type { Seen } from './normals';
 
 /** Values kept for each pixel: normal (3), cloth coordinates (2), key and fill light. */
 export const PER_PIXEL = 7;

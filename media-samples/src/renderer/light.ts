@@ -1,5 +1,5 @@
 import { cross, unit, type Vec3 } from './tube';
-import { type Seen } from './normals';
+import type { Seen } from './normals';
 import { shadeTriangle, type DepthMap } from './depth-map';
 
 /** One sample of the studio's light: where it stands, which lamp it belongs to and its share of that lamp. */

@@ -1,5 +1,5 @@
 import { curve } from './numbers';
-import { type Point } from './scene';
+import type { Point } from './scene';
 
 /** A cross-section of a figure: half its width, its depth before and behind its middle, and how square it is. */
 export interface Station {

@@ -1,4 +1,4 @@
-import { type Sheet } from './scene';
+import type { Sheet } from './scene';
 
 /** A sheet turned to face the camera: places and directions off the cloth in the camera's own space. */
 export interface Seen {

@@ -1,14 +1,14 @@
 import sharp, { type Sharp } from 'sharp';
-import { type Rgb } from '../cloths/cloth';
+import type { Rgb } from '../cloths/cloth';
 import { floorLight, wallLight, type Backdrop, type BoardLight } from './backdrop';
 import { projection, type Camera, type Projection } from './camera';
 import { expose, PER_PIXEL, type Film } from './film';
 import { lightScene } from './light';
 import { see } from './normals';
 import { seededNoise } from './noise';
-import { type Scene } from './scene';
+import type { Scene } from './scene';
 import { shade, standpoint } from './shade';
-import { type Vec3 } from './tube';
+import type { Vec3 } from './tube';
 
 /** One picture to take of a scene. */
 export interface Shot {

@@ -1,4 +1,4 @@
-import { type Cloth } from '../cloths/cloth';
+import type { Cloth } from '../cloths/cloth';
 
 /** One point of a layer of cloth: place in cm (y up, z towards the wearer's front) and cloth coordinates in cm. */
 export interface Point {

@@ -1,5 +1,5 @@
 import { evenCurve, mix } from './numbers';
-import { type Layer } from './scene';
+import type { Layer } from './scene';
 
 export type Vec3 = readonly [number, number, number];
 

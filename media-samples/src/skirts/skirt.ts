@@ -1,8 +1,8 @@
-import { type Cloth } from '../cloths/cloth';
+import type { Cloth } from '../cloths/cloth';
 import { evenRound, type Loft } from '../renderer/loft';
 import { ease, mix } from '../renderer/numbers';
-import { type Noise } from '../renderer/noise';
-import { type Layer, type Scene } from '../renderer/scene';
+import type { Noise } from '../renderer/noise';
+import type { Layer, Scene } from '../renderer/scene';
 
 /** The cut of a skirt: over what form, from what height to what hem, and how its cloth folds. */
 export interface SkirtCut {

@@ -1,7 +1,7 @@
-import { type Cloth } from '../cloths/cloth';
+import type { Cloth } from '../cloths/cloth';
 import { bell, curve, ease } from '../renderer/numbers';
-import { type Noise } from '../renderer/noise';
-import { type Layer, type Scene } from '../renderer/scene';
+import type { Noise } from '../renderer/noise';
+import type { Layer, Scene } from '../renderer/scene';
 import { line, tube, type Vec3 } from '../renderer/tube';
 
 /** The cut of a sleeve: how the arm is held (points of the wearer's left, from inside the shoulder) and how wide. */

@@ -1,15 +1,15 @@
 /** The demonstration's records as they lie in `demonstration/`, and their readings as the checks take them. */
 import { readdirSync, readFileSync } from 'node:fs';
-import { type CheckSheet } from '@ellwand/shared/checks/sheet-view';
-import { type GarmentKind } from '@ellwand/shared/points/kinds';
+import type { CheckSheet } from '@ellwand/shared/checks/sheet-view';
+import type { GarmentKind } from '@ellwand/shared/points/kinds';
 import { pointIn, type Protocol } from '@ellwand/shared/protocols/protocol';
 import { protocolFor, wornTogetherProtocol } from '@ellwand/shared/protocols/standard-protocols';
-import { type LevelFoundBy, type NotTakenReason, type Reading } from '@ellwand/shared/readings/reading';
+import type { LevelFoundBy, NotTakenReason, Reading } from '@ellwand/shared/readings/reading';
 import { wholeValue } from '@ellwand/shared/readings/whole-value';
-import { type supports } from '@ellwand/shared/records/sheet';
-import { type GarmentRecordInput } from '@ellwand/shared/records/garment';
+import type { supports } from '@ellwand/shared/records/sheet';
+import type { GarmentRecordInput } from '@ellwand/shared/records/garment';
 import { ProtocolView, toProtocol } from '@ellwand/shared/records/protocol';
-import { type Role } from '@ellwand/shared/records/roles';
+import type { Role } from '@ellwand/shared/records/roles';
 import { mm } from '@ellwand/shared/units/length';
 
 /** Whole millimetres as keyed; or with tapes, level and further rounds; or why there is none. */

@@ -1,8 +1,8 @@
-import { type Cloth } from '../cloths/cloth';
+import type { Cloth } from '../cloths/cloth';
 import { mix } from '../renderer/numbers';
 import { newPoint, type Layer, type Scene } from '../renderer/scene';
 import { cross, unit, type Vec3 } from '../renderer/tube';
-import { type Line } from './sewn';
+import type { Line } from './sewn';
 
 /** A domed button (or stud, bead, clasp end) at `at`, facing `facing`; `height` is the dome's height over its radius. */
 export function sewButton(

@@ -1,4 +1,4 @@
-import { type Cloth } from '../cloths/cloth';
+import type { Cloth } from '../cloths/cloth';
 import { mix } from '../renderer/numbers';
 import { newPoint, type Layer, type Point, type Scene } from '../renderer/scene';
 

@@ -2,12 +2,12 @@
  * A check: one rule about a measuring sheet, in one file, with its wording. It raises findings and never
  * throws; it says what it saw in figures and leaves the judgement to the people at the table.
  */
-import { type PointId } from '../points/measuring-points.js';
-import { type AcceptedValue } from '../readings/accepted-value.js';
+import type { PointId } from '../points/measuring-points.js';
+import type { AcceptedValue } from '../readings/accepted-value.js';
 import { wornSides } from '../readings/worn-side.js';
-import { type Finding, type Severity } from './finding.js';
+import type { Finding, Severity } from './finding.js';
 import { type Figures, findingOf } from './finding-text.js';
-import { type SheetView } from './sheet-view.js';
+import type { SheetView } from './sheet-view.js';
 
 export type Raise<Message extends string> = (message: Message, figures: Figures) => void;
 

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { protocolFor } from '../protocols/standard-protocols.js';
-import { type OwnPoint } from '../protocols/protocol.js';
+import type { OwnPoint } from '../protocols/protocol.js';
 import { measuringPoint } from '../points/measuring-points.js';
 import { read } from '../testing/sample-readings.js';
 import { sheetOf } from '../testing/test-check.js';

@@ -1,10 +1,10 @@
 /** From a check's wording and its figures to a finding: the sentence, the key that an answer holds to, the points named. */
 import { type Protocol, pointIn } from '../protocols/protocol.js';
-import { type AcceptedValue } from '../readings/accepted-value.js';
+import type { AcceptedValue } from '../readings/accepted-value.js';
 import { type WornSide, wornSideLabels } from '../readings/worn-side.js';
 import { readMm } from '../units/format-length.js';
 import { type Length, toMmString } from '../units/length.js';
-import { type Finding, type Severity } from './finding.js';
+import type { Finding, Severity } from './finding.js';
 
 /** A point that is named in the sentence; `{point}` becomes its name. */
 export interface Mention {

@@ -1,4 +1,4 @@
-import { type Length } from '../units/length.js';
+import type { Length } from '../units/length.js';
 
 /**
  * How much a finding weighs. An open stop keeps a sheet from being completed, an open question keeps a

@@ -1,4 +1,4 @@
-import { type AcceptedValue } from '../readings/accepted-value.js';
+import type { AcceptedValue } from '../readings/accepted-value.js';
 import { isLonger } from '../units/length.js';
 import { sheetCheck } from './check.js';
 

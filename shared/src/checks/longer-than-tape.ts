@@ -1,5 +1,5 @@
 import { howTaken } from '../readings/accepted-value.js';
-import { type TakenReading } from '../readings/reading.js';
+import type { TakenReading } from '../readings/reading.js';
 import { isLonger, times } from '../units/length.js';
 import { sheetCheck } from './check.js';
 import { readPoints } from './sheet-view.js';

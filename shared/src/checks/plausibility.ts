@@ -1,6 +1,6 @@
 /** What could explain a reading that lies outside its point's usual range. */
-import { type MeasuringHow, type MeasuringPoint, type SoftRange } from '../points/point.js';
-import { type TakenReading } from '../readings/reading.js';
+import type { MeasuringHow, MeasuringPoint, SoftRange } from '../points/point.js';
+import type { TakenReading } from '../readings/reading.js';
 import { type Length, lengthOf } from '../units/length.js';
 import { divideHalfUp } from '../units/rounding.js';
 

@@ -2,7 +2,7 @@ import { acrossBackOverUnderarmToUnderarm } from './across-back-over-underarm-to
 import { acrossFrontAgainstBack } from './across-front-against-back.js';
 import { backWaistOverFullBack } from './back-waist-over-full-back.js';
 import { brimSidesDiffer } from './brim-sides-differ.js';
-import { type Check } from './check.js';
+import type { Check } from './check.js';
 import { corsetWaistOverBottom } from './corset-waist-over-bottom.js';
 import { cuffOverSleeveWidest } from './cuff-over-sleeve-widest.js';
 import { derivedAgainstMeasured } from './derived-against-measured.js';

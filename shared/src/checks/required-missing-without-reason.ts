@@ -1,5 +1,5 @@
 import { sheetCheck } from './check.js';
-import { type SheetView } from './sheet-view.js';
+import type { SheetView } from './sheet-view.js';
 
 function wasRead({ taken, impossible }: SheetView, pointId: string): boolean {
   return [...taken, ...impossible].some((reading) => reading.pointId === pointId);

@@ -1,7 +1,7 @@
 /** What checks see of a sheet: the readings that stand and can be a length of dress, and their accepted values. */
-import { type GarmentKind } from '../points/kinds.js';
+import type { GarmentKind } from '../points/kinds.js';
 import { softRangeFor } from '../points/measuring-points.js';
-import { type MeasuringPoint, type SoftRange } from '../points/point.js';
+import type { MeasuringPoint, SoftRange } from '../points/point.js';
 import { pointIn, type Protocol } from '../protocols/protocol.js';
 import {
   acceptedValue,
@@ -11,9 +11,9 @@ import {
 } from '../readings/accepted-value.js';
 import { isTaken, type Reading, stands, type TakenReading } from '../readings/reading.js';
 import { type WornSide, wornSides } from '../readings/worn-side.js';
-import { type supports } from '../records/sheet.js';
+import type { supports } from '../records/sheet.js';
 import { type Length, mm } from '../units/length.js';
-import { type Mention } from './finding-text.js';
+import type { Mention } from './finding-text.js';
 
 export interface OtherPart {
   readonly kind: GarmentKind;

@@ -1,4 +1,4 @@
-import { type TakenReading } from '../readings/reading.js';
+import type { TakenReading } from '../readings/reading.js';
 import { inTapeLengths, rounds } from '../testing/sample-readings.js';
 import { testCheck } from '../testing/test-check.js';
 import { tapeOffsetForgotten } from './tape-offset-forgotten.js';

@@ -1,5 +1,5 @@
 import { howTaken } from '../readings/accepted-value.js';
-import { type TakenReading } from '../readings/reading.js';
+import type { TakenReading } from '../readings/reading.js';
 import { medianOf } from '../repeatability/robust.js';
 import { lengthOf, toMm, UNITS_PER_MM } from '../units/length.js';
 import { sheetCheck } from './check.js';

@@ -1,5 +1,5 @@
 import { keyedFigure } from '../readings/keyed-figure.js';
-import { type TakenReading } from '../readings/reading.js';
+import type { TakenReading } from '../readings/reading.js';
 import { readingStep } from '../readings/reading-step.js';
 import { type Length, mm, UNITS_PER_INCH } from '../units/length.js';
 import { sheetCheck } from './check.js';

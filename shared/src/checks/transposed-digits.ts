@@ -1,6 +1,6 @@
 import { allowedSpreadAt } from '../points/tolerance.js';
 import { howTaken } from '../readings/accepted-value.js';
-import { type TakenReading } from '../readings/reading.js';
+import type { TakenReading } from '../readings/reading.js';
 import { absolute, isLonger, subtract, toMmString } from '../units/length.js';
 import { sheetCheck } from './check.js';
 import { type ReadPoint, readPoints } from './sheet-view.js';

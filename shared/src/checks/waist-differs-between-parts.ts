@@ -1,9 +1,9 @@
-import { type GarmentKind } from '../points/kinds.js';
-import { type PointId } from '../points/measuring-points.js';
-import { type AcceptedValue } from '../readings/accepted-value.js';
+import type { GarmentKind } from '../points/kinds.js';
+import type { PointId } from '../points/measuring-points.js';
+import type { AcceptedValue } from '../readings/accepted-value.js';
 import { absolute, isLonger, mm, subtract } from '../units/length.js';
 import { sheetCheck } from './check.js';
-import { type SheetView } from './sheet-view.js';
+import type { SheetView } from './sheet-view.js';
 
 /** A bodice worn over the band is some centimetres larger, and one worn under it smaller. A house setting. */
 const ALLOWED = mm(60);

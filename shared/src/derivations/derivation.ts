@@ -1,13 +1,13 @@
 /** Derived values: worked out from readings by a formula that is shown, never typed. */
-import { type GarmentKind } from '../points/kinds.js';
+import type { GarmentKind } from '../points/kinds.js';
 import { measuringPoint, type PointId } from '../points/measuring-points.js';
-import { type AcceptedValue } from '../readings/accepted-value.js';
+import type { AcceptedValue } from '../readings/accepted-value.js';
 import { rootOfSquares } from '../readings/uncertainty.js';
 import { wornSideLabels } from '../readings/worn-side.js';
 import { readMm } from '../units/format-length.js';
 import { type Length, subtract, toMm } from '../units/length.js';
 import { divideHalfUp } from '../units/rounding.js';
-import { type PartFigures } from './part-figures.js';
+import type { PartFigures } from './part-figures.js';
 
 /** A figure that a derivation needs: the first of these points that has a value. */
 export type Need = readonly [PointId, ...PointId[]];

@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
-import { type GarmentKind } from '../points/kinds.js';
+import type { GarmentKind } from '../points/kinds.js';
 import { read } from '../testing/sample-readings.js';
-import { type OtherPartRead } from './part-figures.js';
+import type { OtherPartRead } from './part-figures.js';
 import { deriveFromReadings } from './registry.js';
 
 const bodice: OtherPartRead = {

@@ -1,6 +1,6 @@
 import { type GarmentKind, lowerKind } from '../points/kinds.js';
 import { measuringPoint, type PointId } from '../points/measuring-points.js';
-import { type AcceptedValue } from '../readings/accepted-value.js';
+import type { AcceptedValue } from '../readings/accepted-value.js';
 import { readMm } from '../units/format-length.js';
 import { type Derivation, type DerivedValue, difference, type TraceEntry, traceEntry } from './derivation.js';
 

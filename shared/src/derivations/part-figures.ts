@@ -1,8 +1,8 @@
 /** What a derivation sees of a part: its values, those of the garment's other parts, the panels of its cut sheet. */
-import { type PanelledSheet } from '../cut-sheet/panel-sum.js';
-import { type GarmentKind } from '../points/kinds.js';
+import type { PanelledSheet } from '../cut-sheet/panel-sum.js';
+import type { GarmentKind } from '../points/kinds.js';
 import { findMeasuringPoint } from '../points/measuring-points.js';
-import { type MeasuringPoint } from '../points/point.js';
+import type { MeasuringPoint } from '../points/point.js';
 import {
   acceptedValues,
   acceptedValuesOn,
@@ -10,7 +10,7 @@ import {
   howTaken,
 } from '../readings/accepted-value.js';
 import { isTaken, type Reading, stands } from '../readings/reading.js';
-import { type WornSide } from '../readings/worn-side.js';
+import type { WornSide } from '../readings/worn-side.js';
 
 type Values = ReadonlyMap<string, AcceptedValue>;
 

@@ -1,8 +1,8 @@
-import { type GarmentKind } from '../points/kinds.js';
-import { type Reading } from '../readings/reading.js';
+import type { GarmentKind } from '../points/kinds.js';
+import type { Reading } from '../readings/reading.js';
 import { backOverFrontExcess } from './back-over-front-excess.js';
 import { bustMinusWaist } from './bust-minus-waist.js';
-import { type Derivation, type DerivedValue } from './derivation.js';
+import type { Derivation, DerivedValue } from './derivation.js';
 import { easeBetweenLayers } from './ease-between-layers.js';
 import { hemToWaistRatio } from './hem-to-waist-ratio.js';
 import { neckToWaistBack } from './neck-to-waist-back.js';

@@ -3,7 +3,7 @@ import { measuringPoint, type PointId } from '../points/measuring-points.js';
 import { readMm } from '../units/format-length.js';
 import { compareLengths } from '../units/length.js';
 import { type Derivation, type TraceEntry, traceEntry } from './derivation.js';
-import { type OtherPartFigures } from './part-figures.js';
+import type { OtherPartFigures } from './part-figures.js';
 
 const worn: readonly GarmentKind[] = ['bodice', 'jacket', 'dress', 'skirt'];
 const girths: readonly PointId[] = ['waist', 'inner-waist-band', 'waistband'];

@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
-import { type PanelledSheet } from '../cut-sheet/panel-sum.js';
+import type { PanelledSheet } from '../cut-sheet/panel-sum.js';
 import { mm, subtract } from '../units/length.js';
-import { type DerivedValue } from './derivation.js';
+import type { DerivedValue } from './derivation.js';
 import { deriveFromReadings } from './registry.js';
 
 const sheetOf = (...widthsMm: readonly (number | null)[]): PanelledSheet => ({

@@ -2,7 +2,7 @@ import { type PanelledSheet, panelSum, panelWidths } from '../cut-sheet/panel-su
 import { levelNames, type PanelLevel, panelLevels } from '../cut-sheet/words.js';
 import { kindIds } from '../points/kinds.js';
 import { readMm } from '../units/format-length.js';
-import { type Derivation, type DerivedValue } from './derivation.js';
+import type { Derivation, DerivedValue } from './derivation.js';
 
 const FORMULA = 'panel + panel + …';
 

@@ -1,10 +1,10 @@
 import { kindIds } from '../points/kinds.js';
-import { type AcceptedValue } from '../readings/accepted-value.js';
+import type { AcceptedValue } from '../readings/accepted-value.js';
 import { wornSideLabels } from '../readings/worn-side.js';
 import { readMm } from '../units/format-length.js';
 import { lengthOf } from '../units/length.js';
 import { divideHalfUp } from '../units/rounding.js';
-import { type Derivation, type DerivedValue } from './derivation.js';
+import type { Derivation, DerivedValue } from './derivation.js';
 
 const FORMULA = '2 × the half that was read';
 

@@ -2,10 +2,10 @@
 import { accessoryPoints } from './accessory-points.js';
 import { bodicePoints } from './bodice-points.js';
 import { foundationPoints } from './foundation-points.js';
-import { type PointGroup } from './groups.js';
-import { type GarmentKind } from './kinds.js';
+import type { PointGroup } from './groups.js';
+import type { GarmentKind } from './kinds.js';
 import { linenPoints } from './linen-points.js';
-import { type MeasuringPoint, type SoftRange } from './point.js';
+import type { MeasuringPoint, SoftRange } from './point.js';
 import { skirtPoints } from './skirt-points.js';
 import { sleevePoints } from './sleeve-points.js';
 import { tailoringPoints } from './tailoring-points.js';

@@ -1,6 +1,6 @@
 import { type Length, mm } from '../units/length.js';
-import { type PointGroup } from './groups.js';
-import { type GarmentKind } from './kinds.js';
+import type { PointGroup } from './groups.js';
+import type { GarmentKind } from './kinds.js';
 import { houseTolerance, type ToleranceRule } from './tolerance.js';
 
 /** Whether the tape lies within the opened garment or on its outer face. */

@@ -1,4 +1,4 @@
-import { type MeasuringHow } from './point.js';
+import type { MeasuringHow } from './point.js';
 import { add, isLonger, type Length, mm, times } from '../units/length.js';
 
 /** How far two rounds of one point may lie apart before it is read again. */

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { toMm } from '../units/length.js';
-import { type GarmentKind } from './kinds.js';
+import type { GarmentKind } from './kinds.js';
 import { measuringPoint, measuringPoints, type PointId, softRangeFor } from './measuring-points.js';
 import { handlingSteps, type MeasuringHow } from './point.js';
 

@@ -1,7 +1,7 @@
-import { type MeasuringWay } from '../drawings/diagram/model.js';
-import { type OwnLine } from '../drawings/diagram/own-line.js';
-import { type MeasuringHow } from '../points/point.js';
-import { type OwnPoint } from './protocol.js';
+import type { MeasuringWay } from '../drawings/diagram/model.js';
+import type { OwnLine } from '../drawings/diagram/own-line.js';
+import type { MeasuringHow } from '../points/point.js';
+import type { OwnPoint } from './protocol.js';
 
 const wayOf: Readonly<Record<MeasuringHow, MeasuringWay>> = {
   round: 'round',

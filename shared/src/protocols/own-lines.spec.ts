@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { paintDiagram } from '../drawings/diagram/paint-diagram.js';
-import { type Scene, type ScenePoint } from '../drawings/diagram/scene.js';
+import type { Scene, ScenePoint } from '../drawings/diagram/scene.js';
 import { sampleOwnPoint } from '../testing/sample-own-point.js';
 import { extraLinesOf } from './extra-lines.js';
 import { paintProtocol, placeUnder } from './own-lines.js';

@@ -1,9 +1,9 @@
 /** The lines of a museum's own points on its diagram, and where a tap on the drawing lies on the garment. */
-import { type ViewName } from '../drawings/diagram/model.js';
-import { type OwnLine } from '../drawings/diagram/own-line.js';
+import type { ViewName } from '../drawings/diagram/model.js';
+import type { OwnLine } from '../drawings/diagram/own-line.js';
 import { paintDiagram, type DiagramRequest } from '../drawings/diagram/paint-diagram.js';
 import { type Projection, unprojected } from '../drawings/diagram/projection.js';
-import { type Scene } from '../drawings/diagram/scene.js';
+import type { Scene } from '../drawings/diagram/scene.js';
 import { viewPlaces } from '../drawings/diagram/sheet-of.js';
 
 export interface ProtocolScene {

@@ -3,7 +3,7 @@ import { kindLabels } from '../points/kinds.js';
 import { isPointId } from '../points/measuring-points.js';
 import { isLonger } from '../units/length.js';
 import { askablePoints, type OwnPoint, type Protocol } from './protocol.js';
-import { type ProtocolFault } from './protocol-fault.js';
+import type { ProtocolFault } from './protocol-fault.js';
 import { viewBounds, viewsOf } from './view-bounds.js';
 
 /** @param made see `protocolFaults` */

@@ -1,6 +1,6 @@
 import { derivations } from '../derivations/registry.js';
 import { findMeasuringPoint } from '../points/measuring-points.js';
-import { type Protocol } from './protocol.js';
+import type { Protocol } from './protocol.js';
 
 /** Sentences that a new version is answered with. They refuse nothing: every reading more is handling more. */
 export function protocolAdvice({ kind, points }: Protocol): readonly string[] {

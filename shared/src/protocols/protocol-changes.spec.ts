@@ -3,7 +3,7 @@ import { describe, expect, it } from 'vitest';
 import { sampleOwnPoint } from '../testing/sample-own-point.js';
 import { mm } from '../units/length.js';
 import { ownPointIdFor } from './own-point-id.js';
-import { type Protocol } from './protocol.js';
+import type { Protocol } from './protocol.js';
 import { protocolChanges } from './protocol-changes.js';
 import { protocolFor } from './standard-protocols.js';
 

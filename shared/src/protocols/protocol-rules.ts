@@ -3,7 +3,7 @@ import { lowerKind } from '../points/kinds.js';
 import { handlingStepLabels, handlingSteps, type MeasuringPoint } from '../points/point.js';
 import { ownPointFaults } from './own-point-rules.js';
 import { askablePoints, pointIn, type Protocol } from './protocol.js';
-import { type ProtocolFault } from './protocol-fault.js';
+import type { ProtocolFault } from './protocol-fault.js';
 
 /** More would not be read in one sitting. */
 export const MOST_POINTS = 40;

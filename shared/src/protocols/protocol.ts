@@ -1,7 +1,7 @@
-import { type GarmentKind } from '../points/kinds.js';
+import type { GarmentKind } from '../points/kinds.js';
 import { findMeasuringPoint, measuringPoints, pointsForKind } from '../points/measuring-points.js';
-import { type MeasuringPoint } from '../points/point.js';
-import { type ViewName } from '../drawings/diagram/model.js';
+import type { MeasuringPoint } from '../points/point.js';
+import type { ViewName } from '../drawings/diagram/model.js';
 
 export interface ProtocolPoint {
   /** A point of the catalogue, or one of the protocol's own. */

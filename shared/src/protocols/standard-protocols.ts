@@ -3,9 +3,9 @@
  * up, back up, so that the garment is turned over once. What can be worked out is not asked: neck to waist
  * follows from neck to hem and waist to hem.
  */
-import { type GarmentKind } from '../points/kinds.js';
-import { type PointId } from '../points/measuring-points.js';
-import { type Protocol, type ProtocolPoint } from './protocol.js';
+import type { GarmentKind } from '../points/kinds.js';
+import type { PointId } from '../points/measuring-points.js';
+import type { Protocol, ProtocolPoint } from './protocol.js';
 
 interface Steps {
   readonly inside: readonly ProtocolPoint[];

@@ -1,8 +1,8 @@
-import { type ViewName } from '../drawings/diagram/model.js';
+import type { ViewName } from '../drawings/diagram/model.js';
 import { drawView } from '../drawings/diagram/view-shapes.js';
-import { type Box } from '../drawings/geometry/point.js';
+import type { Box } from '../drawings/geometry/point.js';
 import { diagramFor } from '../drawings/kinds/diagram-for.js';
-import { type GarmentKind } from '../points/kinds.js';
+import type { GarmentKind } from '../points/kinds.js';
 
 /** The views of a kind's diagram, in their order. */
 export function viewsOf(kind: GarmentKind): readonly ViewName[] {

@@ -1,6 +1,6 @@
 /** The value of a point: the mean of the rounds that stand, and how far it can be trusted. */
 import { findMeasuringPoint } from '../points/measuring-points.js';
-import { type MeasuringHow, type MeasuringPoint } from '../points/point.js';
+import type { MeasuringHow, MeasuringPoint } from '../points/point.js';
 import { type Length, lengthOf, longestOf, shortestOf, subtract } from '../units/length.js';
 import { divideHalfUp } from '../units/rounding.js';
 import { standingReadings, type Reading, type TakenReading } from './reading.js';

@@ -1,6 +1,6 @@
-import { type Length } from '../units/length.js';
+import type { Length } from '../units/length.js';
 import { fromTyped } from '../units/parse-length.js';
-import { type TakenReading } from './reading.js';
+import type { TakenReading } from './reading.js';
 
 /** What the tape showed, as it was keyed: the rest where tapes were counted, the half where it was laid flat. */
 export function keyedFigure({ typed, unit }: TakenReading): Length | undefined {

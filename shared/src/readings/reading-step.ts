@@ -3,7 +3,7 @@
  * whole numbers or fractions count as read to an eighth, unless a finer fraction was keyed.
  */
 import { type Length, lengthOf, mm, UNITS_PER_INCH } from '../units/length.js';
-import { type TakenReading } from './reading.js';
+import type { TakenReading } from './reading.js';
 
 const WHOLE_MM = mm(1);
 const EIGHTH = lengthOf(UNITS_PER_INCH / 8);

@@ -2,10 +2,10 @@
  * Readings as the domain knows them, without schemas or storage. Blank, zero and "not taken" differ: a point
  * without a reading has none at all, a reading of zero is taken, and a point left out has a reason.
  */
-import { type MeasuringHow } from '../points/point.js';
-import { type LengthUnit } from '../units/format-length.js';
-import { type Length } from '../units/length.js';
-import { type WornSide } from './worn-side.js';
+import type { MeasuringHow } from '../points/point.js';
+import type { LengthUnit } from '../units/format-length.js';
+import type { Length } from '../units/length.js';
+import type { WornSide } from './worn-side.js';
 
 /** Why a point was not taken. */
 export const notTakenReasons = {

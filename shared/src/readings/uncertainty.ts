@@ -2,7 +2,7 @@
  * Standard uncertainties, in millimetres as plain numbers: they are estimates and are shown with two digits.
  * Parts that have nothing to do with one another are combined by the root of the sum of squares.
  */
-import { type MeasuringHow } from '../points/point.js';
+import type { MeasuringHow } from '../points/point.js';
 import { lengthOf, mm, type Length, toMm, UNITS_PER_MM } from '../units/length.js';
 
 /** House settings without a published source: how well a tape can be laid, in mm. */

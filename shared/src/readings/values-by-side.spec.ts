@@ -3,7 +3,7 @@ import { describe, expect, it } from 'vitest';
 import { notTaken, read } from '../testing/sample-readings.js';
 import { toMm } from '../units/length.js';
 import { acceptedValue } from './accepted-value.js';
-import { type Reading } from './reading.js';
+import type { Reading } from './reading.js';
 import { valuesBySide } from './values-by-side.js';
 
 const told = (readings: readonly Reading[]) =>

@@ -7,7 +7,7 @@ import {
   stands,
   type TakenReading,
 } from './reading.js';
-import { type WornSide } from './worn-side.js';
+import type { WornSide } from './worn-side.js';
 
 /** What was read on one side of a point, or without saying on which. */
 export interface SideValue {

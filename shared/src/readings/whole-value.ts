@@ -1,7 +1,7 @@
 /** From what was read off the tape to the whole value of a point. Every step is exact. */
-import { type MeasuringHow } from '../points/point.js';
+import type { MeasuringHow } from '../points/point.js';
 import { add, type Length, subtract, times, ZERO_LENGTH } from '../units/length.js';
-import { type TapeLengths } from './reading.js';
+import type { TapeLengths } from './reading.js';
 
 export function tapeLengthsTotal({ count, tape, rest }: TapeLengths): Length {
   return add(times(tape, count), rest);

@@ -4,7 +4,7 @@ import { groupLabels, type PointGroup } from '../points/groups.js';
 import { type GarmentKind, kindIds } from '../points/kinds.js';
 import { handlingSteps, type MeasuringHow, PRACTICE } from '../points/point.js';
 import { houseTolerance } from '../points/tolerance.js';
-import { type OwnPoint, type Protocol } from '../protocols/protocol.js';
+import type { OwnPoint, Protocol } from '../protocols/protocol.js';
 import { fromMmString, mm, toMmString } from '../units/length.js';
 import { LengthMm, line, Moment, prose } from './common.js';
 

@@ -1,7 +1,7 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { toMm } from '../units/length.js';
-import { type PartSheets, type SheetOfPart, type SheetValue } from './part-sheets.js';
+import type { PartSheets, SheetOfPart, SheetValue } from './part-sheets.js';
 import { sheetRows } from './sheet-differences.js';
 
 const id = (number: number) => `0190a0a0-0000-7000-8000-${String(number).padStart(12, '0')}`;

@@ -1,10 +1,10 @@
 import { findMeasuringPoint } from '../points/measuring-points.js';
 import { allowedSpreadAt, houseTolerance } from '../points/tolerance.js';
-import { type NotTakenReason } from '../readings/reading.js';
+import type { NotTakenReason } from '../readings/reading.js';
 import { sidesInOrder } from '../readings/values-by-side.js';
-import { type WornSide } from '../readings/worn-side.js';
+import type { WornSide } from '../readings/worn-side.js';
 import { absolute, fromMmString, isLonger, type Length, longestOf, subtract } from '../units/length.js';
-import { type PartSheets, type SheetOfPart, type SheetValue } from './part-sheets.js';
+import type { PartSheets, SheetOfPart, SheetValue } from './part-sheets.js';
 
 /** What one sheet says of a point, or of one side of it. */
 export interface SheetCell {

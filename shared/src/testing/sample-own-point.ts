@@ -1,5 +1,5 @@
 import { houseTolerance } from '../points/tolerance.js';
-import { type OwnPoint } from '../protocols/protocol.js';
+import type { OwnPoint } from '../protocols/protocol.js';
 import { mm } from '../units/length.js';
 
 /** A skirt's train loop, measured by a house that cares for trains: down the centre back, inside. */

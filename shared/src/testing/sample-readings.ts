@@ -1,5 +1,5 @@
 /** Readings for tests, written the way a sheet is read aloud: `read('waist', 612)`. */
-import { type NotTakenReading, type NotTakenReason, type TakenReading } from '../readings/reading.js';
+import type { NotTakenReading, NotTakenReason, TakenReading } from '../readings/reading.js';
 import { tapeLengthsTotal } from '../readings/whole-value.js';
 import { mm } from '../units/length.js';
 

@@ -1,7 +1,7 @@
 /** One sound set of readings (whole mm) for every kind of part, invented and coherent, for tests. */
-import { type GarmentKind } from '../points/kinds.js';
+import type { GarmentKind } from '../points/kinds.js';
 import { findMeasuringPoint, type PointId } from '../points/measuring-points.js';
-import { type TakenReading } from '../readings/reading.js';
+import type { TakenReading } from '../readings/reading.js';
 import { mm } from '../units/length.js';
 import { read } from './sample-readings.js';
 

@@ -1,12 +1,12 @@
 /** A check is tested as two lists: sheets on which it is quiet, and sheets on which it raises, to the sentence. */
 import { describe, expect, it } from 'vitest';
-import { type Check } from '../checks/check.js';
-import { type Severity } from '../checks/finding.js';
+import type { Check } from '../checks/check.js';
+import type { Severity } from '../checks/finding.js';
 import { type CheckSheet, type OtherPart, viewSheet } from '../checks/sheet-view.js';
-import { type GarmentKind } from '../points/kinds.js';
-import { type Protocol } from '../protocols/protocol.js';
+import type { GarmentKind } from '../points/kinds.js';
+import type { Protocol } from '../protocols/protocol.js';
 import { protocolFor } from '../protocols/standard-protocols.js';
-import { type Reading } from '../readings/reading.js';
+import type { Reading } from '../readings/reading.js';
 import { read } from './sample-readings.js';
 
 interface QuietCase {

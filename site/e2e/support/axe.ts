@@ -1,5 +1,5 @@
 import AxeBuilder from '@axe-core/playwright';
-import { type Page } from '@playwright/test';
+import type { Page } from '@playwright/test';
 
 /** WCAG 2.2 AA, and what axe's makers call best practice; a default run leaves the size of targets out. */
 const tags = ['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa', 'best-practice'];

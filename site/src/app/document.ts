@@ -4,7 +4,7 @@ import { escapeHtml } from '../lib/escape-html';
 import { jsonForScript } from '../lib/json-script';
 import { unitScript } from '../components/units/unit-script';
 import { documentTitle } from './document-title';
-import { type PageHead } from './page-handle';
+import type { PageHead } from './page-handle';
 
 /** What the built site consists of, as the API reads it from the manifest. */
 export interface SiteAssets {

@@ -1,4 +1,4 @@
-import { type PublishedImage } from '@ellwand/shared/records/published-garment';
+import type { PublishedImage } from '@ellwand/shared/records/published-garment';
 
 /** What a page says of itself in the head of the document. */
 export interface PageHead {

@@ -1,5 +1,5 @@
-import { type SiteCatalogue } from '@ellwand/shared/records/site-catalogue';
-import { type LoaderFunctionArgs, type RouteObject } from 'react-router-dom';
+import type { SiteCatalogue } from '@ellwand/shared/records/site-catalogue';
+import type { LoaderFunctionArgs, RouteObject } from 'react-router-dom';
 import { garmentLoader } from '../features/garment/garment-loader';
 import { homeLoader } from '../features/home/home-loader';
 import { searchLoader } from '../features/search/search-loader';

@@ -1,4 +1,4 @@
-import { type SiteAssets } from './document';
+import type { SiteAssets } from './document';
 
 /** The part of a Vite manifest that is read here. */
 export type SiteManifest = Readonly<

@@ -1,12 +1,8 @@
-import {
-  type CatalogueFront,
-  type GarmentFound,
-  type SiteCatalogue,
-} from '@ellwand/shared/records/site-catalogue';
-import {
-  type PublishedGarment,
-  type SearchAnswer,
-  type WithdrawalNotice,
+import type { CatalogueFront, GarmentFound, SiteCatalogue } from '@ellwand/shared/records/site-catalogue';
+import type {
+  PublishedGarment,
+  SearchAnswer,
+  WithdrawalNotice,
 } from '@ellwand/shared/records/published-garment';
 import { searchParams } from './search-address';
 

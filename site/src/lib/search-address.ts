@@ -1,5 +1,5 @@
 import { formatMeasure, type MeasureFilter, parseMeasure } from '@ellwand/shared/records/measure-filter';
-import { type SearchQuery } from '@ellwand/shared/records/search-query';
+import type { SearchQuery } from '@ellwand/shared/records/search-query';
 
 export type SearchSort = SearchQuery['sort'];
 

@@ -1,4 +1,4 @@
-import { type SiteCatalogue } from '@ellwand/shared/records/site-catalogue';
+import type { SiteCatalogue } from '@ellwand/shared/records/site-catalogue';
 import { JSDOM } from 'jsdom';
 import { render, type SiteAssets, type SiteResponse } from '../entry-server';
 import { fixtureCatalogue } from './fixture-catalogue';

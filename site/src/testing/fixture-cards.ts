@@ -1,5 +1,5 @@
 import { measuringPoint, type PointId } from '@ellwand/shared/points/measuring-points';
-import { type CatalogueCard } from '@ellwand/shared/records/published-garment';
+import type { CatalogueCard } from '@ellwand/shared/records/published-garment';
 import { picture } from './fixture-dress';
 
 export interface FixtureGarment {

@@ -1,9 +1,9 @@
 import { groupLabels } from '@ellwand/shared/points/groups';
 import { findMeasuringPoint } from '@ellwand/shared/points/measuring-points';
 import { kindLabels } from '@ellwand/shared/points/kinds';
-import { type CatalogueCard, type SearchAnswer } from '@ellwand/shared/records/published-garment';
-import { type SearchQuery } from '@ellwand/shared/records/search-query';
-import { type SiteCatalogue } from '@ellwand/shared/records/site-catalogue';
+import type { CatalogueCard, SearchAnswer } from '@ellwand/shared/records/published-garment';
+import type { SearchQuery } from '@ellwand/shared/records/search-query';
+import type { SiteCatalogue } from '@ellwand/shared/records/site-catalogue';
 import { changed, searchParams } from '../lib/search-address';
 import { isKind } from '../lib/words';
 import { fixtureGarments, type FixtureGarment } from './fixture-cards';

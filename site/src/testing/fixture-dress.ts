@@ -1,4 +1,4 @@
-import { type PublishedGarment, type PublishedMeasurement } from '@ellwand/shared/records/published-garment';
+import type { PublishedGarment, PublishedMeasurement } from '@ellwand/shared/records/published-garment';
 import { measuringPoint, type PointId } from '@ellwand/shared/points/measuring-points';
 
 type Extra = Partial<Omit<PublishedMeasurement, 'pointId' | 'label' | 'valueMm'>>;

@@ -7,7 +7,7 @@ import { readdir, readFile } from 'node:fs/promises';
 import { extname, join, normalize } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import type * as Site from '../entry-server';
-import { type SiteManifest } from '../app/site-assets';
+import type { SiteManifest } from '../app/site-assets';
 import { readSearch } from '../lib/search-address';
 import { fixtureCatalogue } from './fixture-catalogue';
 

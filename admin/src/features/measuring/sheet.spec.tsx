@@ -260,9 +260,9 @@ describe('findings and the box list', () => {
     const { user } = await openSheet(skirtSheetId, { house });
     await user.click(screen.getByRole('tab', { name: /Findings/ }));
     const panel = await screen.findByRole('tabpanel', { name: /Findings/ });
-    const finding = within(panel)
-      .getAllByRole('listitem')
-      .find((item) => /hem/i.test(item.textContent ?? '') && within(item).queryByRole('textbox'))!;
+    const finding = (await within(panel).findAllByRole('listitem')).find(
+      (item) => /hem/i.test(item.textContent ?? '') && within(item).queryByRole('textbox'),
+    )!;
     await user.click(within(finding).getByRole('button', { name: 'Keep the reason' }));
     expect(finding).toHaveTextContent('Write the reason, or read the point again.');
     await user.type(within(finding).getByRole('textbox'), 'Read twice; it is so');

@@ -2,7 +2,8 @@ import { type BrowserContext, chromium, type Page } from 'playwright-core';
 import type { Entry } from './ledger.js';
 import { reader } from './museum.js';
 
-const flags = [
+/** A Chromium that speaks to nobody but the house. */
+export const flags = [
   '--no-sandbox',
   '--disable-gpu',
   '--disable-background-networking',
@@ -146,7 +147,8 @@ export class Tablet {
   }
 }
 
-async function sayWhoItIs(page: Page): Promise<void> {
+/** Signs in as the reader, also where only the password is asked for again. */
+export async function sayWhoItIs(page: Page): Promise<void> {
   const email = page.getByLabel('E-mail address');
   if (await email.isEditable().catch(() => false)) await email.fill(reader.email);
   await page.getByLabel('Password', { exact: true }).fill(reader.password);

@@ -1,4 +1,4 @@
-import { type FileHandle } from 'node:fs/promises';
+import type { FileHandle } from 'node:fs/promises';
 import { inflateSync } from 'node:zlib';
 
 /** W3C PNG (third edition), 5.2: signature, then chunks of length, type, data, CRC. */

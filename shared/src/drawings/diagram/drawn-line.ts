@@ -9,9 +9,9 @@ import {
   type CubicPath,
 } from '../geometry/path.js';
 import { pathFrom, type Anchors } from '../geometry/path-language.js';
-import { type Point } from '../geometry/point.js';
+import type { Point } from '../geometry/point.js';
 import { smoothThrough } from '../geometry/spline.js';
-import { type MeasuringLine } from './model.js';
+import type { MeasuringLine } from './model.js';
 import { projected, type Projection } from './projection.js';
 
 /** A measuring line on the sheet, in pixels. */

@@ -1,14 +1,14 @@
-import { type PointId } from '../../points/measuring-points.js';
-import { type Point } from '../geometry/point.js';
-import {
-  type ButtonLayer,
-  type LayerRole,
-  type MeasuringLine,
-  type MeasuringWay,
-  type ShapeLayer,
-  type Symmetry,
-  type ViewName,
-  type Within,
+import type { PointId } from '../../points/measuring-points.js';
+import type { Point } from '../geometry/point.js';
+import type {
+  ButtonLayer,
+  LayerRole,
+  MeasuringLine,
+  MeasuringWay,
+  ShapeLayer,
+  Symmetry,
+  ViewName,
+  Within,
 } from './model.js';
 
 /* Short words for writing garments as data. */

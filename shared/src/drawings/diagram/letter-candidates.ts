@@ -1,7 +1,7 @@
 import { placeAlong, type PathPlace } from '../geometry/path.js';
 import { leftOf, stepped, type Point } from '../geometry/point.js';
-import { type DrawnLine } from './drawn-line.js';
-import { type LetterSheet } from './letter-sheet.js';
+import type { DrawnLine } from './drawn-line.js';
+import type { LetterSheet } from './letter-sheet.js';
 
 /** A place where a line's letter could stand. */
 export interface LetterPlace {

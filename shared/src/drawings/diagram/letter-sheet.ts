@@ -6,7 +6,7 @@ import {
   type Box,
   type Point,
 } from '../geometry/point.js';
-import { type DrawnLine } from './drawn-line.js';
+import type { DrawnLine } from './drawn-line.js';
 
 /** A letter needs this much white, in pixels, to every measuring line but its own… */
 export const CLEAR_OF_LINES = 2.5;

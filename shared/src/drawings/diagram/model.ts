@@ -1,6 +1,6 @@
-import { type Anchors } from '../geometry/path-language.js';
-import { type GarmentKind } from '../../points/kinds.js';
-import { type Point } from '../geometry/point.js';
+import type { Anchors } from '../geometry/path-language.js';
+import type { GarmentKind } from '../../points/kinds.js';
+import type { Point } from '../geometry/point.js';
 
 /** How the garment lies while these lines are read. */
 export type ViewName = 'front' | 'back' | 'inside' | 'side' | 'below';

@@ -3,7 +3,7 @@ import { describe, expect, it } from 'vitest';
 import { diagramFor } from '../kinds/diagram-for.js';
 import { measuringLineOf, MOST_PLACES, type OwnLine } from './own-line.js';
 import { paintDiagram } from './paint-diagram.js';
-import { type ScenePoint } from './scene.js';
+import type { ScenePoint } from './scene.js';
 import { onGarment, onSheet, viewPlaces } from './sheet-of.js';
 
 const loop: OwnLine = {

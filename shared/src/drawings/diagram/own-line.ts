@@ -1,5 +1,5 @@
 import { distance, type Point } from '../geometry/point.js';
-import { type MeasuringLine, type MeasuringWay, type ViewName } from './model.js';
+import type { MeasuringLine, MeasuringWay, ViewName } from './model.js';
 
 /** A measuring line that the kind's diagram does not have: it comes with a point a museum made for itself. */
 export interface OwnLine {

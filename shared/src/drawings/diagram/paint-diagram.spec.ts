@@ -6,7 +6,7 @@ import { distanceToPolyline, distanceToSegment, type Point } from '../geometry/p
 import { diagramFor, drawnKinds } from '../kinds/diagram-for.js';
 import { viewOfPoint } from './model.js';
 import { paintDiagram, type DiagramRequest } from './paint-diagram.js';
-import { type Scene, type SceneCircle, type ScenePath, type ScenePoint } from './scene.js';
+import type { Scene, SceneCircle, ScenePath, ScenePoint } from './scene.js';
 
 const letters = new Map(
   drawnKinds.flatMap((kind) =>

@@ -1,11 +1,11 @@
-import { type WornSide } from '../../readings/worn-side.js';
+import type { WornSide } from '../../readings/worn-side.js';
 import { boundsOf } from '../geometry/path.js';
 import { stretchesOf } from './drawn-line.js';
-import { type MeasuringLine, type View } from './model.js';
+import type { MeasuringLine, View } from './model.js';
 import { measuringLineOf, type OwnLine } from './own-line.js';
 import { linesOn, paintLines, type LetterOf, type Sheet } from './paint-lines.js';
 import { paintView } from './paint-view.js';
-import { type Scene } from './scene.js';
+import type { Scene } from './scene.js';
 import { sheetOf, type SheetRequest } from './sheet-of.js';
 import { mirroredLine, wornSideAt } from './worn-side.js';
 

@@ -1,14 +1,14 @@
 import { sampled, transformed } from '../geometry/path.js';
-import { type Point } from '../geometry/point.js';
+import type { Point } from '../geometry/point.js';
 import { drawLine, type DrawnLine } from './drawn-line.js';
 import { LetterSheet } from './letter-sheet.js';
-import { type MeasuringLine, type View } from './model.js';
+import type { MeasuringLine, View } from './model.js';
 import { CAPTION_SIZE } from './paint-view.js';
 import { crowdedPlace, placeLetters } from './place-letters.js';
 import { pointMarks, type LetterStyle } from './point-marks.js';
 import { isNarrow, projected, type SheetLayout } from './projection.js';
-import { type ScenePoint } from './scene.js';
-import { type ViewDrawing } from './view-shapes.js';
+import type { ScenePoint } from './scene.js';
+import type { ViewDrawing } from './view-shapes.js';
 
 /** Half the width of a character of the caption, on average, as a share of its size. */
 const CAPTION_HALF_CHARACTER = 0.27;

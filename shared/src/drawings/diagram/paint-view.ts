@@ -1,8 +1,8 @@
 import { pathData, transformed } from '../geometry/path.js';
-import { type View } from './model.js';
+import type { View } from './model.js';
 import { projected, type Projection, type SheetPlace } from './projection.js';
-import { type SceneClip, type SceneMark } from './scene.js';
-import { type ViewButton, type ViewDrawing, type ViewShape } from './view-shapes.js';
+import type { SceneClip, SceneMark } from './scene.js';
+import type { ViewButton, ViewDrawing, ViewShape } from './view-shapes.js';
 
 /** Pixels: outline and seam as the look asks, folds finer, and one that follows the size of the button. */
 const STROKE = {

@@ -1,6 +1,6 @@
 import { pathLength, placeAlong } from '../geometry/path.js';
 import { distance, distanceToSegment, type Point } from '../geometry/point.js';
-import { type DrawnLine } from './drawn-line.js';
+import type { DrawnLine } from './drawn-line.js';
 import { candidatesFor, type LetterPlace } from './letter-candidates.js';
 import { CLEAR_OF_LETTERS, type LetterSheet } from './letter-sheet.js';
 

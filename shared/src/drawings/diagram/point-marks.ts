@@ -1,9 +1,9 @@
 import { directionOn } from '../geometry/cubic.js';
 import { endOf, pathData, startOf, type CubicPath } from '../geometry/path.js';
 import { leftOf, stepped, type Point } from '../geometry/point.js';
-import { type DrawnLine } from './drawn-line.js';
-import { type LetterPlace } from './letter-candidates.js';
-import { type SceneMark, type ScenePath, type ScenePoint } from './scene.js';
+import type { DrawnLine } from './drawn-line.js';
+import type { LetterPlace } from './letter-candidates.js';
+import type { SceneMark, ScenePath, ScenePoint } from './scene.js';
 
 /** Pixels, the same at every size of sheet. */
 const WIDTH = { line: 1.6, current: 2.4, halo: 4.4, behind: 0.9, leader: 0.9, hit: 24, tick: 1.5 } as const;

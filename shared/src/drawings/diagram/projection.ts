@@ -1,4 +1,4 @@
-import { type Box, type Point } from '../geometry/point.js';
+import type { Box, Point } from '../geometry/point.js';
 
 /** From the garment's millimetres to the sheet's pixels. */
 export interface Projection {

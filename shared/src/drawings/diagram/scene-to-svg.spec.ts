@@ -3,7 +3,7 @@ import { describe, expect, it } from 'vitest';
 import { kindIds } from '../../points/kinds.js';
 import { paintSilhouette } from '../silhouettes/silhouette-for.js';
 import { paintDiagram } from './paint-diagram.js';
-import { type Scene } from './scene.js';
+import type { Scene } from './scene.js';
 import { paperPalette, sceneToSvg } from './scene-to-svg.js';
 
 const scene: Scene = {

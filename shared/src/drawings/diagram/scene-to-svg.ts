@@ -1,4 +1,4 @@
-import { type Scene, type SceneMark, type ScenePrimitive, type SceneRole } from './scene.js';
+import type { Scene, SceneMark, ScenePrimitive, SceneRole } from './scene.js';
 
 /** SVG attributes per role, for where no style sheet reaches: files, prints, previews. */
 export type ScenePalette = Readonly<Partial<Record<SceneRole, Readonly<Record<string, string>>>>>;

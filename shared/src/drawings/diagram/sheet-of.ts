@@ -1,7 +1,7 @@
-import { type Box, type Point } from '../geometry/point.js';
+import type { Box, Point } from '../geometry/point.js';
 import { diagramFor } from '../kinds/diagram-for.js';
-import { type GarmentDiagram, type ViewName } from './model.js';
-import { type Sheet } from './paint-lines.js';
+import type { GarmentDiagram, ViewName } from './model.js';
+import type { Sheet } from './paint-lines.js';
 import { layOut, projected, unprojected, type Projection } from './projection.js';
 import { drawView } from './view-shapes.js';
 

@@ -2,7 +2,7 @@ import { describe, expect, it } from 'vitest';
 import { sampled } from '../geometry/path.js';
 import { diagramFor, drawnKinds } from '../kinds/diagram-for.js';
 import { cloth, seam } from './layers.js';
-import { type View } from './model.js';
+import type { View } from './model.js';
 import { drawView } from './view-shapes.js';
 
 const square: View = {

@@ -1,7 +1,7 @@
 import { joinedWithMirror, mirrored, boundsOf, type CubicPath } from '../geometry/path.js';
 import { pathFrom } from '../geometry/path-language.js';
-import { type Box, type Point } from '../geometry/point.js';
-import { type ButtonLayer, type LayerRole, type ShapeLayer, type View, type Within } from './model.js';
+import type { Box, Point } from '../geometry/point.js';
+import type { ButtonLayer, LayerRole, ShapeLayer, View, Within } from './model.js';
 
 /** One shape of a view as it stands on the garment, in millimetres. */
 export interface ViewShape {

@@ -4,9 +4,9 @@ import { wornSides } from '../../readings/worn-side.js';
 import { boundsOf } from '../geometry/path.js';
 import { diagramFor, drawnKinds } from '../kinds/diagram-for.js';
 import { stretchesOf } from './drawn-line.js';
-import { type View } from './model.js';
+import type { View } from './model.js';
 import { paintDiagram, wornSideOf } from './paint-diagram.js';
-import { type ScenePoint } from './scene.js';
+import type { ScenePoint } from './scene.js';
 import { mirroredLine, wearersRightIn, wornSideAt } from './worn-side.js';
 
 const view = (kind: string, name: string): View => {

@@ -1,5 +1,5 @@
-import { type WornSide } from '../../readings/worn-side.js';
-import { type MeasuringLine, type View, type ViewersHand, type ViewName } from './model.js';
+import type { WornSide } from '../../readings/worn-side.js';
+import type { MeasuringLine, View, ViewersHand, ViewName } from './model.js';
 
 /**
  * Where the wearer's right side lies, for somebody looking at the sheet.

@@ -1,6 +1,6 @@
 import { straight, type Cubic } from './cubic.js';
-import { type CubicPath } from './path.js';
-import { type Point } from './point.js';
+import type { CubicPath } from './path.js';
+import type { Point } from './point.js';
 import { smoothThrough } from './spline.js';
 
 /** Named places of a view that its outlines, seams and measuring lines share. */

@@ -9,7 +9,7 @@ import {
   stitching,
   straightLine,
 } from '../diagram/layers.js';
-import { type GarmentDiagram, type View } from '../diagram/model.js';
+import type { GarmentDiagram, View } from '../diagram/model.js';
 import { glove as gloveOutline, hat as hatOutline, shoe as shoeOutline } from '../silhouettes/accessories.js';
 
 const hatFront: View = {

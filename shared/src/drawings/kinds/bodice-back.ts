@@ -1,5 +1,5 @@
 import { buttons, cloth, fold, seam, stitching } from '../diagram/layers.js';
-import { type View } from '../diagram/model.js';
+import type { View } from '../diagram/model.js';
 
 /** The back of the same bodice: curved side-back seams, a pleated tail. */
 export const bodiceBack: View = {

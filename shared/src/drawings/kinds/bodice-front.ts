@@ -1,5 +1,5 @@
 import { buttons, cloth, fold, pieceLining, row, seam, stitching } from '../diagram/layers.js';
-import { type View } from '../diagram/model.js';
+import type { View } from '../diagram/model.js';
 
 /** A day bodice of the 1880s: stand collar, two darts a side, a point in front. A woman's: right over left. */
 export const bodiceFront: View = {

@@ -1,5 +1,5 @@
 import { buttons, lining, piece, row, seam, stitching } from '../diagram/layers.js';
-import { type View } from '../diagram/model.js';
+import type { View } from '../diagram/model.js';
 
 const buttonholes = row(15, [-374, -328], [-374, 122]).map(([x, y]) =>
   seam(`${x - 6},${y.toFixed(1)}--${x + 7},${y.toFixed(1)}`, 'once'),

@@ -1,5 +1,5 @@
 import { allRound, alongCurve, flatDoubled, straightLine } from '../diagram/layers.js';
-import { type GarmentDiagram } from '../diagram/model.js';
+import type { GarmentDiagram } from '../diagram/model.js';
 import { bodiceBack } from './bodice-back.js';
 import { bodiceFront } from './bodice-front.js';
 import { bodiceInside } from './bodice-inside.js';

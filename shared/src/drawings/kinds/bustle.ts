@@ -1,5 +1,5 @@
 import { allRound, alongCurve, cloth, piece, seam, straightLine } from '../diagram/layers.js';
-import { type GarmentDiagram, type View } from '../diagram/model.js';
+import type { GarmentDiagram, View } from '../diagram/model.js';
 import { bustle as bustleOutline } from '../silhouettes/body-linen.js';
 
 const behind: View = { name: 'back', caption: 'From behind', anchors: {}, layers: bustleOutline.layers };

@@ -1,5 +1,5 @@
 import { allRound, cloth, fold, piece, seam, stitching, straightLine } from '../diagram/layers.js';
-import { type GarmentDiagram, type View } from '../diagram/model.js';
+import type { GarmentDiagram, View } from '../diagram/model.js';
 import { cape as capeOutline } from '../silhouettes/coats.js';
 
 const front: View = {

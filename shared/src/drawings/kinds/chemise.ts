@@ -8,7 +8,7 @@ import {
   stitching,
   straightLine,
 } from '../diagram/layers.js';
-import { type GarmentDiagram, type View } from '../diagram/model.js';
+import type { GarmentDiagram, View } from '../diagram/model.js';
 import { chemise as chemiseOutline } from '../silhouettes/body-linen.js';
 
 const front: View = {

@@ -1,5 +1,5 @@
 import { cloth, fold, lining, piece, seam, stitching } from '../diagram/layers.js';
-import { type View } from '../diagram/model.js';
+import type { View } from '../diagram/model.js';
 import { fasteningsInside } from './opened-front.js';
 
 /** Opened in front, the lining up: quilted foreparts, the tails with their pockets hanging from the waist. */

@@ -10,7 +10,7 @@ import {
   stitching,
   straightLine,
 } from '../diagram/layers.js';
-import { type GarmentDiagram, type View } from '../diagram/model.js';
+import type { GarmentDiagram, View } from '../diagram/model.js';
 import { coat as coatOutline } from '../silhouettes/coats.js';
 import { coatInside } from './coat-inside.js';
 

@@ -1,5 +1,5 @@
 import { allRound, buttons, cloth, fold, row, seam, stitching, straightLine } from '../diagram/layers.js';
-import { type GarmentDiagram, type View } from '../diagram/model.js';
+import type { GarmentDiagram, View } from '../diagram/model.js';
 import { corset as corsetOutline } from '../silhouettes/body-linen.js';
 
 const front: View = {

@@ -1,5 +1,5 @@
 import { allRound, alongCurve, cloth, piece, seam, straightLine } from '../diagram/layers.js';
-import { type GarmentDiagram, type View } from '../diagram/model.js';
+import type { GarmentDiagram, View } from '../diagram/model.js';
 import { crinoline as crinolineOutline } from '../silhouettes/legs.js';
 
 const front: View = { name: 'front', caption: 'Front', anchors: {}, layers: crinolineOutline.layers };

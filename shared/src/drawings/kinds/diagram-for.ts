@@ -1,5 +1,5 @@
-import { type GarmentKind } from '../../points/kinds.js';
-import { type GarmentDiagram } from '../diagram/model.js';
+import type { GarmentKind } from '../../points/kinds.js';
+import type { GarmentDiagram } from '../diagram/model.js';
 import { glove, hat, shoe } from './accessories.js';
 import { bodice } from './bodice.js';
 import { bustle } from './bustle.js';

@@ -1,5 +1,5 @@
 import { buttons, cloth, fold, row, seam, stitching } from '../diagram/layers.js';
-import { type View } from '../diagram/model.js';
+import type { View } from '../diagram/model.js';
 
 /** The same dress, back up: it closes with hooks down the centre back, and the skirt's placket below. */
 export const dressBack: View = {

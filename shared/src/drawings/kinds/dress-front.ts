@@ -1,5 +1,5 @@
 import { cloth, fold, lining, seam, stitching } from '../diagram/layers.js';
-import { type View } from '../diagram/model.js';
+import type { View } from '../diagram/model.js';
 
 /** A dress of the middle 1830s, in one: wide neck, great sleeves, a point in front, a gathered skirt to the ankle. */
 export const dressFront: View = {

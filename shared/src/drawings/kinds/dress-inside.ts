@@ -1,5 +1,5 @@
 import { cloth, fold, lining, piece, row, seam, stitching } from '../diagram/layers.js';
-import { type View } from '../diagram/model.js';
+import type { View } from '../diagram/model.js';
 
 const hooks = row(8, [24, -298], [24, -60]).map(([x, y]) => {
   const edgeX = 34 + (y + 318) * 0.02;

@@ -1,5 +1,5 @@
 import { allRound, alongCurve, flatDoubled, straightLine } from '../diagram/layers.js';
-import { type GarmentDiagram } from '../diagram/model.js';
+import type { GarmentDiagram } from '../diagram/model.js';
 import { dressBack } from './dress-back.js';
 import { dressFront } from './dress-front.js';
 import { dressInside } from './dress-inside.js';

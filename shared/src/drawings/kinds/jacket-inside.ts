@@ -1,5 +1,5 @@
 import { cloth, lining, piece, seam, stitching } from '../diagram/layers.js';
-import { type View } from '../diagram/model.js';
+import type { View } from '../diagram/model.js';
 import { fasteningsInside } from './opened-front.js';
 
 /** Opened in front, the lining up: lined to the edge of the facings, a waist tape across the back. */

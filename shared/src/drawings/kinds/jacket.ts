@@ -9,7 +9,7 @@ import {
   stitching,
   straightLine,
 } from '../diagram/layers.js';
-import { type GarmentDiagram, type View } from '../diagram/model.js';
+import type { GarmentDiagram, View } from '../diagram/model.js';
 import { jacket as jacketOutline } from '../silhouettes/coats.js';
 import { jacketInside } from './jacket-inside.js';
 

@@ -1,6 +1,6 @@
 import { buttons, row, seam } from '../diagram/layers.js';
-import { type Layer } from '../diagram/model.js';
-import { type Point } from '../geometry/point.js';
+import type { Layer } from '../diagram/model.js';
+import type { Point } from '../geometry/point.js';
 
 /** Which of the wearer's fronts lies on top when it is closed: women's right over left, men's left over right. */
 export type FrontOnTop = 'right' | 'left';

@@ -10,7 +10,7 @@ import {
   stitching,
   straightLine,
 } from '../diagram/layers.js';
-import { type GarmentDiagram, type View } from '../diagram/model.js';
+import type { GarmentDiagram, View } from '../diagram/model.js';
 import { petticoat as petticoatOutline } from '../silhouettes/legs.js';
 
 const HEM =

@@ -9,7 +9,7 @@ import {
   seam,
   straightLine,
 } from '../diagram/layers.js';
-import { type GarmentDiagram, type View } from '../diagram/model.js';
+import type { GarmentDiagram, View } from '../diagram/model.js';
 import { shirt as shirtOutline } from '../silhouettes/body-linen.js';
 
 const cuffGathers = [

@@ -1,5 +1,5 @@
 import { buttons, cloth, fold, piece, seam, stitching } from '../diagram/layers.js';
-import { type View } from '../diagram/model.js';
+import type { View } from '../diagram/model.js';
 import { pleatsBetween } from './pleats.js';
 
 const FLOUNCE_TOP = '0,1242{0}..{-14}170,1220..{-46}384,1040';

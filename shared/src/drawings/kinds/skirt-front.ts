@@ -1,5 +1,5 @@
 import { cloth, fold, lining, piece, seam, stitching } from '../diagram/layers.js';
-import { type View } from '../diagram/model.js';
+import type { View } from '../diagram/model.js';
 import { pleatsBetween } from './pleats.js';
 
 const FLOUNCE_TOP = '0,898{0}..{22}190,924..{46}380,1046';

@@ -1,5 +1,5 @@
 import { cloth, fold, lining, piece, pieceLining, seam, stitching } from '../diagram/layers.js';
-import { type View } from '../diagram/model.js';
+import type { View } from '../diagram/model.js';
 
 const HEM_FACING = '0,1286{0}..{-12}200,1262..{-46}352,1166..{-96}392,1064';
 

@@ -1,5 +1,5 @@
 import { allRound, alongCurve, straightLine } from '../diagram/layers.js';
-import { type GarmentDiagram } from '../diagram/model.js';
+import type { GarmentDiagram } from '../diagram/model.js';
 import { skirtBack } from './skirt-back.js';
 import { skirtFront } from './skirt-front.js';
 import { skirtInside } from './skirt-inside.js';

@@ -1,5 +1,5 @@
 import { buttons, cloth, edge, lining, piece, pieceLining, seam, stitching } from '../diagram/layers.js';
-import { type Layer, type View } from '../diagram/model.js';
+import type { Layer, View } from '../diagram/model.js';
 
 export interface OpenedFall {
   /** Half the waistband, and how far down its side the bearers are cut. */

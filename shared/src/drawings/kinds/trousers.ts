@@ -1,5 +1,5 @@
 import { allRound, alongCurve, buttons, cloth, flatDoubled, fold, row, seam } from '../diagram/layers.js';
-import { type GarmentDiagram, type View } from '../diagram/model.js';
+import type { GarmentDiagram, View } from '../diagram/model.js';
 import { openedFall } from './trousers-inside.js';
 import { breeches as breechesOutline, trousers as trousersOutline } from '../silhouettes/legs.js';
 

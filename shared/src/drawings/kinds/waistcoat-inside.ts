@@ -1,5 +1,5 @@
 import { cloth, lining, piece, seam, stitching } from '../diagram/layers.js';
-import { type View } from '../diagram/model.js';
+import type { View } from '../diagram/model.js';
 import { fasteningsInside } from './opened-front.js';
 
 /** Opened in front, the lining up: a cotton back, the fronts faced with their own cloth along the edge. */

@@ -9,7 +9,7 @@ import {
   stitching,
   straightLine,
 } from '../diagram/layers.js';
-import { type GarmentDiagram, type View } from '../diagram/model.js';
+import type { GarmentDiagram, View } from '../diagram/model.js';
 import { waistcoat as waistcoatOutline } from '../silhouettes/coats.js';
 import { waistcoatInside } from './waistcoat-inside.js';
 

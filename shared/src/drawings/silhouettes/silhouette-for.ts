@@ -1,9 +1,9 @@
-import { type GarmentKind } from '../../points/kinds.js';
+import type { GarmentKind } from '../../points/kinds.js';
 import { buttons, row, seam } from '../diagram/layers.js';
-import { type Scene, type ScenePrimitive } from '../diagram/scene.js';
+import type { Scene, ScenePrimitive } from '../diagram/scene.js';
 import { ClipsOfView } from '../diagram/paint-view.js';
 import { drawView } from '../diagram/view-shapes.js';
-import { type View } from '../diagram/model.js';
+import type { View } from '../diagram/model.js';
 import { projected, type Projection } from '../diagram/projection.js';
 import { pathData, transformed } from '../geometry/path.js';
 import { bodiceFront } from '../kinds/bodice-front.js';

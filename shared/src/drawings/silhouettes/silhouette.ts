@@ -1,4 +1,4 @@
-import { type Layer, type View } from '../diagram/model.js';
+import type { Layer, View } from '../diagram/model.js';
 
 /** A kind's front in few lines, in millimetres: small, and at one scale with all the others. */
 export const silhouette = (...layers: readonly Layer[]): View => ({

@@ -1,6 +1,6 @@
 import { type ComponentType, lazy } from 'react';
-import { type MeasuringSheetProps } from './measuring-sheet';
-import { type OutlineShapesProps } from './outline-shapes';
+import type { MeasuringSheetProps } from './measuring-sheet';
+import type { OutlineShapesProps } from './outline-shapes';
 
 /** What draws. */
 export interface Drawings {

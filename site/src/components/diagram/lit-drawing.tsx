@@ -1,8 +1,8 @@
 import { type SyntheticEvent, useEffect, useRef } from 'react';
 import { useDrawings } from './drawings';
 import { LeftAsDrawn } from './left-as-drawn';
-import { type LitPoints } from './lit-points';
-import { type MeasuringSheetProps } from './measuring-sheet';
+import type { LitPoints } from './lit-points';
+import type { MeasuringSheetProps } from './measuring-sheet';
 
 interface LitDrawingProps {
   readonly sheet: MeasuringSheetProps;

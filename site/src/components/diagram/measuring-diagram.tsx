@@ -1,7 +1,7 @@
-import { type GarmentKind } from '@ellwand/shared/points/kinds';
-import { type OwnLine } from '@ellwand/shared/drawings/diagram/own-line';
+import type { GarmentKind } from '@ellwand/shared/points/kinds';
+import type { OwnLine } from '@ellwand/shared/drawings/diagram/own-line';
 import { LitDrawing } from './lit-drawing';
-import { type LitPoints } from './lit-points';
+import type { LitPoints } from './lit-points';
 
 interface MeasuringDiagramProps {
   readonly kind: GarmentKind;

@@ -1,6 +1,6 @@
-import { type ViewName } from '@ellwand/shared/drawings/diagram/model';
-import { type GarmentKind } from '@ellwand/shared/points/kinds';
-import { type OwnLine } from '@ellwand/shared/drawings/diagram/own-line';
+import type { ViewName } from '@ellwand/shared/drawings/diagram/model';
+import type { GarmentKind } from '@ellwand/shared/points/kinds';
+import type { OwnLine } from '@ellwand/shared/drawings/diagram/own-line';
 import { paintProtocol } from '@ellwand/shared/protocols/own-lines';
 import { remembering } from '../../lib/remember';
 import { SceneDrawing } from './scene-drawing';

@@ -1,5 +1,5 @@
 import { paintSilhouette } from '@ellwand/shared/drawings/silhouettes/silhouette-for';
-import { type GarmentKind } from '@ellwand/shared/points/kinds';
+import type { GarmentKind } from '@ellwand/shared/points/kinds';
 import { SceneShapes } from './scene-drawing';
 
 export interface OutlineShapesProps {

@@ -1,4 +1,4 @@
-import { type Scene, type SceneMark, type ScenePoint } from '@ellwand/shared/drawings/diagram/scene';
+import type { Scene, SceneMark, ScenePoint } from '@ellwand/shared/drawings/diagram/scene';
 import { classOfRole } from '@ellwand/shared/drawings/diagram/scene-to-svg';
 import { TAPE_BREADTH, TapeMarks } from './tape';
 

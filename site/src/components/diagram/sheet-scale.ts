@@ -1,8 +1,8 @@
-import { type ViewName } from '@ellwand/shared/drawings/diagram/model';
+import type { ViewName } from '@ellwand/shared/drawings/diagram/model';
 import { layOut } from '@ellwand/shared/drawings/diagram/projection';
 import { drawView } from '@ellwand/shared/drawings/diagram/view-shapes';
 import { diagramFor } from '@ellwand/shared/drawings/kinds/diagram-for';
-import { type GarmentKind } from '@ellwand/shared/points/kinds';
+import type { GarmentKind } from '@ellwand/shared/points/kinds';
 
 /** Pixels to the millimetre of a kind's diagram on a sheet of this width: what the tape beside it needs. */
 export function sheetScale(

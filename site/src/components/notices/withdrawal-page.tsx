@@ -1,4 +1,4 @@
-import { type WithdrawalNotice } from '@ellwand/shared/records/published-garment';
+import type { WithdrawalNotice } from '@ellwand/shared/records/published-garment';
 import { SiteLink } from '../ui/site-link';
 import { paths } from '../../config/paths';
 import { museum } from '../../config/museum';

@@ -1,4 +1,4 @@
-import { type CatalogueCard } from '@ellwand/shared/records/published-garment';
+import type { CatalogueCard } from '@ellwand/shared/records/published-garment';
 import { Picture } from './picture';
 import { SiteLink } from './site-link';
 import { Length } from '../units/length';

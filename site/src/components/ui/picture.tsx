@@ -1,4 +1,4 @@
-import { type PublishedImage } from '@ellwand/shared/records/published-garment';
+import type { PublishedImage } from '@ellwand/shared/records/published-garment';
 import { paths } from '../../config/paths';
 
 interface PictureProps {

@@ -1,4 +1,4 @@
-import { type LengthUnit } from '@ellwand/shared/units/format-length';
+import type { LengthUnit } from '@ellwand/shared/units/format-length';
 import { isUnit } from '../../lib/range-boxes';
 import { UNIT_KEY } from './unit-script';
 

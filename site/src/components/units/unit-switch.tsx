@@ -1,5 +1,5 @@
 import { type LengthUnit, lengthUnits, unitLabels } from '@ellwand/shared/units/format-length';
-import { type MouseEvent } from 'react';
+import type { MouseEvent } from 'react';
 import { useLocation, useNavigate } from 'react-router-dom';
 import { chooseUnit } from './unit-store';
 import { useUnit } from './use-unit';

@@ -1,4 +1,4 @@
-import { type LengthUnit } from '@ellwand/shared/units/format-length';
+import type { LengthUnit } from '@ellwand/shared/units/format-length';
 import { useSyncExternalStore } from 'react';
 import { useSearchParams } from 'react-router-dom';
 import { isUnit } from '../../lib/range-boxes';

@@ -1,4 +1,4 @@
-import { type PublishedPart } from '@ellwand/shared/records/published-garment';
+import type { PublishedPart } from '@ellwand/shared/records/published-garment';
 import { formatLength, type LengthUnit } from '@ellwand/shared/units/format-length';
 import { fromMmString } from '@ellwand/shared/units/length';
 import { InEachUnit, Length, Uncertainty } from '../../components/units/length';

@@ -1,4 +1,4 @@
-import { type PublishedGarment, type PublishedImage } from '@ellwand/shared/records/published-garment';
+import type { PublishedGarment, PublishedImage } from '@ellwand/shared/records/published-garment';
 import { Picture } from '../../components/ui/picture';
 import { SiteLink } from '../../components/ui/site-link';
 import { paths } from '../../config/paths';

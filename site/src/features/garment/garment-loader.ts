@@ -1,4 +1,4 @@
-import { type GarmentFound, type SiteCatalogue } from '@ellwand/shared/records/site-catalogue';
+import type { GarmentFound, SiteCatalogue } from '@ellwand/shared/records/site-catalogue';
 import { knownOrigin } from '../../lib/origin';
 
 export interface GarmentPageData {

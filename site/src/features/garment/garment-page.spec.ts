@@ -1,4 +1,4 @@
-import { type SiteCatalogue } from '@ellwand/shared/records/site-catalogue';
+import type { SiteCatalogue } from '@ellwand/shared/records/site-catalogue';
 import { describe, expect, it } from 'vitest';
 import { askPage } from '../../testing/ask-page';
 import { fixtureCatalogue } from '../../testing/fixture-catalogue';

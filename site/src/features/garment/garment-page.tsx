@@ -1,7 +1,7 @@
 import { useLoaderData } from 'react-router-dom';
 import { NotFoundPage } from '../../components/notices/not-found-page';
 import { WithdrawalPage } from '../../components/notices/withdrawal-page';
-import { type GarmentPageData } from './garment-loader';
+import type { GarmentPageData } from './garment-loader';
 import { GarmentView } from './garment-view';
 
 /** A garment, the notice that it was withdrawn, or nothing at all. */

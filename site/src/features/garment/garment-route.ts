@@ -1,6 +1,6 @@
-import { type PublishedGarment } from '@ellwand/shared/records/published-garment';
+import type { PublishedGarment } from '@ellwand/shared/records/published-garment';
 import { type PageHead, pageHandle } from '../../app/page-handle';
-import { type GarmentPageData } from './garment-loader';
+import type { GarmentPageData } from './garment-loader';
 import { paths } from '../../config/paths';
 import { kindName } from '../../lib/words';
 

@@ -1,4 +1,4 @@
-import { type PublishedGarment } from '@ellwand/shared/records/published-garment';
+import type { PublishedGarment } from '@ellwand/shared/records/published-garment';
 import { Citation } from './citation';
 import { GarmentHeading } from './garment-heading';
 import { GarmentPictures } from './garment-pictures';

@@ -1,4 +1,4 @@
-import { type PublishedGarment } from '@ellwand/shared/records/published-garment';
+import type { PublishedGarment } from '@ellwand/shared/records/published-garment';
 
 const hazardWords: Readonly<Record<string, string>> = {
   arsenic: 'Arsenic',

@@ -1,6 +1,6 @@
 import { Fragment, type ReactNode } from 'react';
-import { type PublishedMeasurement, type PublishedPart } from '@ellwand/shared/records/published-garment';
-import { type LitPoints } from '../../components/diagram/lit-points';
+import type { PublishedMeasurement, PublishedPart } from '@ellwand/shared/records/published-garment';
+import type { LitPoints } from '../../components/diagram/lit-points';
 import { Length, Spread, Uncertainty, UnitName } from '../../components/units/length';
 import { howHeld, levelText, roundsText, sidedKey, sidedLabel } from './measuring-words';
 import { PointName } from './point-name';

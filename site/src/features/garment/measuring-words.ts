@@ -1,4 +1,4 @@
-import { type PublishedMeasurement, type PublishedPart } from '@ellwand/shared/records/published-garment';
+import type { PublishedMeasurement, PublishedPart } from '@ellwand/shared/records/published-garment';
 import { findMeasuringPoint } from '@ellwand/shared/points/measuring-points';
 import { type MeasuringHow, sideLabels } from '@ellwand/shared/points/point';
 import { wornSideLabels } from '@ellwand/shared/readings/worn-side';

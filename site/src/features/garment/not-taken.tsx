@@ -1,4 +1,4 @@
-import { type PublishedPart } from '@ellwand/shared/records/published-garment';
+import type { PublishedPart } from '@ellwand/shared/records/published-garment';
 import { reasonWords, sidedKey } from './measuring-words';
 import { PointName } from './point-name';
 

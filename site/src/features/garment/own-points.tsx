@@ -1,4 +1,4 @@
-import { type PublishedPart } from '@ellwand/shared/records/published-garment';
+import type { PublishedPart } from '@ellwand/shared/records/published-garment';
 
 /** Where the museum measured what the catalogue's points do not: each in words, for those that have a figure. */
 export function OwnPoints({ part }: { readonly part: PublishedPart }) {

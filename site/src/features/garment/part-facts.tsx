@@ -1,4 +1,4 @@
-import { type PublishedPart } from '@ellwand/shared/records/published-garment';
+import type { PublishedPart } from '@ellwand/shared/records/published-garment';
 import { counted, dayText } from '../../lib/words';
 import { supportText } from './measuring-words';
 

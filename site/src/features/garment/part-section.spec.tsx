@@ -2,7 +2,7 @@
 import { act, cleanup, fireEvent, render, screen } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { createMemoryRouter, RouterProvider } from 'react-router-dom';
-import { type PublishedPart } from '@ellwand/shared/records/published-garment';
+import type { PublishedPart } from '@ellwand/shared/records/published-garment';
 import { afterEach, beforeEach, describe, expect, it } from 'vitest';
 import { provideDrawings } from '../../components/diagram/drawings';
 import MeasuringSheet from '../../components/diagram/measuring-sheet';

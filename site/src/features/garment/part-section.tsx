@@ -1,4 +1,4 @@
-import { type PublishedImage, type PublishedPart } from '@ellwand/shared/records/published-garment';
+import type { PublishedImage, PublishedPart } from '@ellwand/shared/records/published-garment';
 import { extraLinesOf } from '@ellwand/shared/protocols/extra-lines';
 import { lettersInOrder, protocolPointIds } from '@ellwand/shared/protocols/protocol';
 import { protocolFor } from '@ellwand/shared/protocols/standard-protocols';

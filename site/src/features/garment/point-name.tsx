@@ -1,4 +1,4 @@
-import { type PublishedPart } from '@ellwand/shared/records/published-garment';
+import type { PublishedPart } from '@ellwand/shared/records/published-garment';
 import { wornSideLabels } from '@ellwand/shared/readings/worn-side';
 import { SiteLink } from '../../components/ui/site-link';
 import { paths } from '../../config/paths';

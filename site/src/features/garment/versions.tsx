@@ -1,4 +1,4 @@
-import { type PublishedGarment } from '@ellwand/shared/records/published-garment';
+import type { PublishedGarment } from '@ellwand/shared/records/published-garment';
 import { SiteLink } from '../../components/ui/site-link';
 import { paths } from '../../config/paths';
 import { dayText } from '../../lib/words';

@@ -1,8 +1,8 @@
-import { type ViewName } from '@ellwand/shared/drawings/diagram/model';
+import type { ViewName } from '@ellwand/shared/drawings/diagram/model';
 import { diagramFor } from '@ellwand/shared/drawings/kinds/diagram-for';
 import { findMeasuringPoint } from '@ellwand/shared/points/measuring-points';
-import { type GarmentKind } from '@ellwand/shared/points/kinds';
-import { type CatalogueCard } from '@ellwand/shared/records/published-garment';
+import type { GarmentKind } from '@ellwand/shared/points/kinds';
+import type { CatalogueCard } from '@ellwand/shared/records/published-garment';
 import { isKind } from '../../lib/words';
 
 export interface DrawnMeasure {

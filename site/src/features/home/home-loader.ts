@@ -1,5 +1,5 @@
-import { type CatalogueFront, type SiteCatalogue } from '@ellwand/shared/records/site-catalogue';
-import { type DrawnSubject } from './drawn-subject';
+import type { CatalogueFront, SiteCatalogue } from '@ellwand/shared/records/site-catalogue';
+import type { DrawnSubject } from './drawn-subject';
 
 export interface HomeFound extends CatalogueFront {
   readonly subject: DrawnSubject;

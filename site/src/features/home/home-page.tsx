@@ -4,7 +4,7 @@ import { paths } from '../../config/paths';
 import { isUnit } from '../../lib/range-boxes';
 import { counted } from '../../lib/words';
 import { GarmentCard } from '../../components/ui/garment-card';
-import { type HomeFound } from './home-loader';
+import type { HomeFound } from './home-loader';
 import { KindEntries } from './kind-entries';
 import { LivingDrawing } from './living-drawing';
 

@@ -1,4 +1,4 @@
-import { type CatalogueFront } from '@ellwand/shared/records/site-catalogue';
+import type { CatalogueFront } from '@ellwand/shared/records/site-catalogue';
 import { pageHandle } from '../../app/page-handle';
 import { museum } from '../../config/museum';
 import { paths } from '../../config/paths';

@@ -1,5 +1,5 @@
-import { type CatalogueFront } from '@ellwand/shared/records/site-catalogue';
-import { type GarmentKind } from '@ellwand/shared/points/kinds';
+import type { CatalogueFront } from '@ellwand/shared/records/site-catalogue';
+import type { GarmentKind } from '@ellwand/shared/points/kinds';
 import { Outline } from '../../components/diagram/outline';
 import { Tape } from '../../components/diagram/tape';
 import { SiteLink } from '../../components/ui/site-link';

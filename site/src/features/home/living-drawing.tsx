@@ -1,10 +1,10 @@
-import { type ViewName } from '@ellwand/shared/drawings/diagram/model';
+import type { ViewName } from '@ellwand/shared/drawings/diagram/model';
 import { LitDrawing } from '../../components/diagram/lit-drawing';
 import { type LitPoints, useLitPoints } from '../../components/diagram/lit-points';
 import { SiteLink } from '../../components/ui/site-link';
 import { Length } from '../../components/units/length';
 import { paths } from '../../config/paths';
-import { type DrawnMeasure, type DrawnSubject } from './drawn-subject';
+import type { DrawnMeasure, DrawnSubject } from './drawn-subject';
 
 const PREFIX = 'opening';
 /** With the tape beside it: what stands in half a page, and on a phone. */

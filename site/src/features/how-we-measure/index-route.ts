@@ -1,4 +1,4 @@
-import { type GarmentKind } from '@ellwand/shared/points/kinds';
+import type { GarmentKind } from '@ellwand/shared/points/kinds';
 import { pageHandle } from '../../app/page-handle';
 import { paths } from '../../config/paths';
 import { kindsName } from '../../lib/words';

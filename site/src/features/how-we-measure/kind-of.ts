@@ -1,4 +1,4 @@
-import { type GarmentKind } from '@ellwand/shared/points/kinds';
+import type { GarmentKind } from '@ellwand/shared/points/kinds';
 import { isKind } from '../../lib/words';
 
 /** The kind that an address asks for; the bodice, which has the most to show, where it names none. */

@@ -1,4 +1,4 @@
-import { type GarmentKind } from '@ellwand/shared/points/kinds';
+import type { GarmentKind } from '@ellwand/shared/points/kinds';
 import { handlingStepLabels, handlingSteps } from '@ellwand/shared/points/point';
 import { lettersFor, pointsOf as protocolPoints } from '@ellwand/shared/protocols/protocol';
 import { protocolFor } from '@ellwand/shared/protocols/standard-protocols';

@@ -1,4 +1,4 @@
-import { type CataloguedPoint } from '@ellwand/shared/points/measuring-points';
+import type { CataloguedPoint } from '@ellwand/shared/points/measuring-points';
 import { SiteLink } from '../../components/ui/site-link';
 import { paths } from '../../config/paths';
 import { PointFacts } from './point-facts';

@@ -1,4 +1,4 @@
-import { type CataloguedPoint } from '@ellwand/shared/points/measuring-points';
+import type { CataloguedPoint } from '@ellwand/shared/points/measuring-points';
 import { handlingStepLabels, howLabels, sideLabels } from '@ellwand/shared/points/point';
 
 /** From where to where, how the tape lies, and what goes wrong. */

@@ -1,4 +1,4 @@
-import { type GarmentKind } from '@ellwand/shared/points/kinds';
+import type { GarmentKind } from '@ellwand/shared/points/kinds';
 import { findMeasuringPoint } from '@ellwand/shared/points/measuring-points';
 import { groupLabels } from '@ellwand/shared/points/groups';
 import { lettersFor } from '@ellwand/shared/protocols/protocol';

@@ -1,5 +1,5 @@
-import { type SearchAnswer } from '@ellwand/shared/records/published-garment';
-import { type SearchQuery } from '@ellwand/shared/records/search-query';
+import type { SearchAnswer } from '@ellwand/shared/records/published-garment';
+import type { SearchQuery } from '@ellwand/shared/records/search-query';
 import { useFollowingTick } from '../../components/ui/use-following';
 import { listFilters } from '../../lib/search-address';
 import { capitalised } from '../../lib/words';

@@ -1,4 +1,4 @@
-import { type SearchQuery } from '@ellwand/shared/records/search-query';
+import type { SearchQuery } from '@ellwand/shared/records/search-query';
 import { SiteLink } from '../../components/ui/site-link';
 import { paths } from '../../config/paths';
 import { searchAddress, type SearchView } from './search-loader';

@@ -1,4 +1,4 @@
-import { type SearchAnswer } from '@ellwand/shared/records/published-garment';
+import type { SearchAnswer } from '@ellwand/shared/records/published-garment';
 import { figureText, type LengthUnit, lengthUnits } from '@ellwand/shared/units/format-length';
 import { fromMmString, toMm } from '@ellwand/shared/units/length';
 import { tapeMarks } from './tape-marks';

@@ -1,7 +1,7 @@
 import { formatMeasure, type MeasureFilter } from '@ellwand/shared/records/measure-filter';
-import { type SearchAnswer } from '@ellwand/shared/records/published-garment';
-import { type SearchQuery } from '@ellwand/shared/records/search-query';
-import { type LengthUnit } from '@ellwand/shared/units/format-length';
+import type { SearchAnswer } from '@ellwand/shared/records/published-garment';
+import type { SearchQuery } from '@ellwand/shared/records/search-query';
+import type { LengthUnit } from '@ellwand/shared/units/format-length';
 import { fromMmString, toMm } from '@ellwand/shared/units/length';
 import { groups } from '@ellwand/shared/points/groups';
 import { useUnit } from '../../components/units/use-unit';

@@ -1,4 +1,4 @@
-import { type CatalogueCard } from '@ellwand/shared/records/published-garment';
+import type { CatalogueCard } from '@ellwand/shared/records/published-garment';
 import { SiteLink } from '../../components/ui/site-link';
 import { Length, UnitName } from '../../components/units/length';
 import { paths } from '../../config/paths';

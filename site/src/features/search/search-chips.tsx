@@ -1,9 +1,9 @@
-import { type SearchAnswer } from '@ellwand/shared/records/published-garment';
-import { type MeasureFilter } from '@ellwand/shared/records/measure-filter';
-import { type SearchQuery } from '@ellwand/shared/records/search-query';
+import type { SearchAnswer } from '@ellwand/shared/records/published-garment';
+import type { MeasureFilter } from '@ellwand/shared/records/measure-filter';
+import type { SearchQuery } from '@ellwand/shared/records/search-query';
 import { formatLength, type LengthUnit } from '@ellwand/shared/units/format-length';
 import { fromMmString } from '@ellwand/shared/units/length';
-import { type ReactNode } from 'react';
+import type { ReactNode } from 'react';
 import { SiteLink } from '../../components/ui/site-link';
 import { InEachUnit } from '../../components/units/length';
 import { paths } from '../../config/paths';

@@ -6,7 +6,7 @@ import { isUnit } from '../../lib/range-boxes';
 import { PAGE_SIZE, sortLabels } from '../../lib/search-address';
 import { Facets } from './facets';
 import { RangeFields } from './range-fields';
-import { type SearchFound } from './search-loader';
+import type { SearchFound } from './search-loader';
 
 /**
  * Everything that narrows and orders a search, in one form that also works without a script: the server reads

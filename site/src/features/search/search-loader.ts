@@ -1,6 +1,6 @@
-import { type SearchAnswer } from '@ellwand/shared/records/published-garment';
-import { type SearchQuery } from '@ellwand/shared/records/search-query';
-import { type SiteCatalogue } from '@ellwand/shared/records/site-catalogue';
+import type { SearchAnswer } from '@ellwand/shared/records/published-garment';
+import type { SearchQuery } from '@ellwand/shared/records/search-query';
+import type { SiteCatalogue } from '@ellwand/shared/records/site-catalogue';
 import { redirect } from 'react-router-dom';
 import { paths } from '../../config/paths';
 import { type BoxProblem, boxPoints, isUnit, readBoxes } from '../../lib/range-boxes';

@@ -2,7 +2,7 @@ import { useEffect, useRef } from 'react';
 import { useLoaderData } from 'react-router-dom';
 import { SiteLink } from '../../components/ui/site-link';
 import { paths } from '../../config/paths';
-import { type BoxProblem } from '../../lib/range-boxes';
+import type { BoxProblem } from '../../lib/range-boxes';
 import { isNarrowed } from '../../lib/search-address';
 import { counted } from '../../lib/words';
 import { GarmentCard } from '../../components/ui/garment-card';

@@ -2,7 +2,7 @@ import { paths } from '../../config/paths';
 import { isNarrowed, searchParams } from '../../lib/search-address';
 import { counted } from '../../lib/words';
 import { pageHandle } from '../../app/page-handle';
-import { type SearchFound } from './search-loader';
+import type { SearchFound } from './search-loader';
 
 export { SearchPage as Component } from './search-page';
 

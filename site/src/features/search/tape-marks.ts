@@ -1,4 +1,4 @@
-import { type LengthUnit } from '@ellwand/shared/units/format-length';
+import type { LengthUnit } from '@ellwand/shared/units/format-length';
 import { fromInchSteps } from '@ellwand/shared/units/fractions';
 import { type Length, mm as millimetres, toMm } from '@ellwand/shared/units/length';
 

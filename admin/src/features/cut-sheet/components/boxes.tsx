@@ -1,5 +1,5 @@
 import { unitLabels } from '@ellwand/shared/units/format-length';
-import { type ReactNode } from 'react';
+import type { ReactNode } from 'react';
 import { type FieldPath, useFormContext, useWatch } from 'react-hook-form';
 import { Field, type FieldProps, Select, TextField } from '../../../components/ui/field.js';
 import { fieldId } from '../../../lib/form-mistakes.js';

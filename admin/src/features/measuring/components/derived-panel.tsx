@@ -1,4 +1,4 @@
-import { type DerivedView } from '@ellwand/shared/records/sheet';
+import type { DerivedView } from '@ellwand/shared/records/sheet';
 import { formatBoth, formatLength } from '@ellwand/shared/units/format-length';
 import { mm } from '@ellwand/shared/units/length';
 import { Empty, Failed, Waiting } from '../../../components/ui/states.js';

@@ -1,24 +1,28 @@
 import { Tab, TabGroup, TabList, TabPanel, TabPanels } from '@headlessui/react';
 import type { Sheet } from '@ellwand/shared/records/sheet';
-import { type ReactNode, useEffect, useRef, useState } from 'react';
+import { lazy, type ReactNode, Suspense, useEffect, useRef, useState } from 'react';
 import { useSearchParams } from 'react-router-dom';
 import { Button } from '../../../components/ui/button.js';
 import { Question } from '../../../components/ui/dialog.js';
+import { Waiting } from '../../../components/ui/states.js';
 import { stepWords } from '../model/sheet-points.js';
 import { useSheetDesk, type SheetDesk } from '../model/use-sheet-desk.js';
 import { BottomBar } from './bottom-bar.js';
-import { BoxList } from './box-list.js';
-import { DescribedPanel } from './described-panel.js';
-import { DerivedPanel } from './derived-panel.js';
 import { DiagramPanel } from './diagram-panel.js';
-import { FactsPanel } from './facts-panel.js';
-import { FindingsPanel } from './findings-panel.js';
 import { Keypad } from './keypad.js';
 import { NewestProtocol } from './newest-protocol.js';
 import { useTableKeys } from './keys-question.js';
 import { PausedNotice, PauseQuestion } from './pause.js';
 import { ReadingList } from './reading-list.js';
 import { SheetHeader } from './sheet-header.js';
+
+// What the first figure does not wait for: the other tabs come when they are looked at.
+const other = () => import('./other-panels.js');
+const BoxList = lazy(async () => ({ default: (await other()).BoxList }));
+const DescribedPanel = lazy(async () => ({ default: (await other()).DescribedPanel }));
+const DerivedPanel = lazy(async () => ({ default: (await other()).DerivedPanel }));
+const FactsPanel = lazy(async () => ({ default: (await other()).FactsPanel }));
+const FindingsPanel = lazy(async () => ({ default: (await other()).FindingsPanel }));
 
 const tabs = ['readings', 'findings', 'worked-out', 'noted', 'box', 'facts'] as const;
 type TabName = (typeof tabs)[number];
@@ -110,7 +114,9 @@ export function SheetScreen({ sheet }: { readonly sheet: Sheet }) {
 }
 
 const Panel = ({ children }: { readonly children: ReactNode }) => (
-  <TabPanel className="pb-24 focus:outline-none">{children}</TabPanel>
+  <TabPanel className="pb-24 focus:outline-none">
+    <Suspense fallback={<Waiting label="Opening" rows={3} />}>{children}</Suspense>
+  </TabPanel>
 );
 
 function SheetTabs({ desk }: { readonly desk: SheetDesk }) {

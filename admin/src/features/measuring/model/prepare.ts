@@ -1,4 +1,4 @@
-import { type Sheet } from '@ellwand/shared/records/sheet';
+import type { Sheet } from '@ellwand/shared/records/sheet';
 import type { QueryClient } from '@tanstack/react-query';
 import { z } from 'zod';
 import { staffPicture } from '../../../config/paths.js';

@@ -1,6 +1,6 @@
-import { type MeasuringHow } from '@ellwand/shared/points/point';
+import type { MeasuringHow } from '@ellwand/shared/points/point';
 import { allowedSpreadAt } from '@ellwand/shared/points/tolerance';
-import { type WornSide } from '@ellwand/shared/readings/worn-side';
+import type { WornSide } from '@ellwand/shared/readings/worn-side';
 import type { NewReading, Sheet, StoredReading } from '@ellwand/shared/records/sheet';
 import { isLonger, type Length, longestOf, mm, shortestOf, subtract } from '@ellwand/shared/units/length';
 import type { OutboxEntry } from './outbox.js';

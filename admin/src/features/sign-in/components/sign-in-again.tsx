@@ -1,8 +1,7 @@
 import { useQueryClient } from '@tanstack/react-query';
-import { useEffect, useState } from 'react';
 import { Button } from '../../../components/ui/button.js';
 import { Question } from '../../../components/ui/dialog.js';
-import { gaveUpSigningIn, onSignInNeeded, signedInAgain } from '../../../lib/session-gate.js';
+import { gaveUpSigningIn, signedInAgain } from '../../../lib/session-gate.js';
 import type { SessionShown } from '../../../lib/session.js';
 import { sessionQuery } from '../api/session.js';
 import { SignInForm } from './sign-in-form.js';
@@ -13,8 +12,6 @@ import { SignInForm } from './sign-in-form.js';
  */
 export function SignInAgain({ session }: { readonly session: SessionShown }) {
   const queries = useQueryClient();
-  const [needed, setNeeded] = useState(false);
-  useEffect(() => onSignInNeeded(setNeeded), []);
 
   const goOn = (next: SessionShown) => {
     // Somebody else sits down: what the first person was shown is not theirs.
@@ -28,7 +25,7 @@ export function SignInAgain({ session }: { readonly session: SessionShown }) {
   };
   return (
     <Question
-      open={needed}
+      open
       onClose={() => undefined}
       title="Sign in again"
       actions={
@@ -38,7 +35,7 @@ export function SignInAgain({ session }: { readonly session: SessionShown }) {
       }
     >
       <p className="text-ink-2">Your time here ran out. Everything on this page stays as it is.</p>
-      {needed && <SignInForm email={session.user.email} onSignedIn={goOn} />}
+      <SignInForm email={session.user.email} onSignedIn={goOn} />
     </Question>
   );
 }

@@ -1,0 +1,55 @@
+import { type BrowserContext, chromium, type Page } from 'playwright-core';
+import { flags, points, sayWhoItIs } from '../../drills/offline/table.js';
+import { watchCommits } from './commits.js';
+
+export interface Seat {
+  readonly chromium: string;
+  readonly profile: string;
+  readonly url: string;
+  readonly sheetId: string;
+}
+
+/** A tablet's browser, with a profile that outlives it. */
+export async function wake({ chromium: executablePath, profile }: Seat): Promise<BrowserContext> {
+  const context = await chromium.launchPersistentContext(profile, {
+    executablePath,
+    args: flags,
+    viewport: { width: 1024, height: 768 },
+    locale: 'en-GB',
+  });
+  await context.addInitScript(watchCommits);
+  return context;
+}
+
+const pageOf = async (context: BrowserContext): Promise<Page> => context.pages()[0] ?? context.newPage();
+
+/** Signs in, opens the sheet, and puts on the tablet all that it needs where there is no network. */
+export async function prepare(context: BrowserContext, { url, sheetId }: Seat): Promise<Page> {
+  const page = await pageOf(context);
+  await page.goto(`${url}/workroom/sign-in`);
+  await sayWhoItIs(page);
+  await page.getByRole('heading', { name: 'Garments', level: 1 }).waitFor();
+  await page.evaluate('navigator.serviceWorker.ready.then(() => true)');
+  await page.goto(`${url}/workroom/sheets/${sheetId}`);
+  await page.getByRole('button', { name: /It lies so/ }).click();
+  await page.getByRole('tab', { name: 'Facts' }).click();
+  await page.getByRole('button', { name: 'Prepare for the table' }).click();
+  await page.getByText(/^Ready on this tablet since/).waitFor();
+  await page.getByRole('tab', { name: 'Readings' }).click();
+  return page;
+}
+
+/** How long, in ms, until the sheet's first box takes a figure, in a browser just woken and without network. */
+export async function coldStart(seat: Seat): Promise<number> {
+  const context = await wake(seat);
+  try {
+    await context.setOffline(true);
+    const page = await pageOf(context);
+    const from = performance.now();
+    await page.goto(`${seat.url}/workroom/sheets/${seat.sheetId}`, { waitUntil: 'commit' });
+    await page.locator(`#reading-${points[0]}-1`).click();
+    return performance.now() - from;
+  } finally {
+    await context.close();
+  }
+}
