@@ -19,7 +19,11 @@ export default defineConfig({
       output: {
         codeSplitting: {
           // The setting that keeps schemas from writing code must lie before the first schema.
-          groups: [{ name: 'schemas', test: /plain-schemas|node_modules[\\/]zod/ }],
+          groups: [
+            { name: 'schemas', test: /plain-schemas|node_modules[\\/]zod/, priority: 2 },
+            // Each file costs the service worker a turn: what every page needs comes in one.
+            { name: 'shell', tags: ['$initial'], priority: 1 },
+          ],
         },
       },
     },

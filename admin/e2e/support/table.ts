@@ -17,7 +17,7 @@ export async function keySheet(page: Page, keyed: Readonly<Record<string, Keyed>
     await turnWhenAsked(page);
     await keyPoint(page, point, value);
   }
-  await expect(page.getByText(/^All readings sent/)).toBeVisible();
+  await expect(page.getByRole('banner').getByRole('status')).toHaveText(/^All readings sent/);
 }
 
 async function keyPoint(page: Page, point: string, value: Keyed): Promise<void> {

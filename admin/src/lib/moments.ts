@@ -1,19 +1,39 @@
-const time = new Intl.DateTimeFormat('en-GB', { hour: '2-digit', minute: '2-digit', hour12: false });
-const day = new Intl.DateTimeFormat('en-GB', { day: 'numeric', month: 'long', year: 'numeric' });
-const shortDay = new Intl.DateTimeFormat('en-GB', { day: 'numeric', month: 'short', year: 'numeric' });
+// Written out: the browser's own calendar takes longer to be read in than the sheet to be drawn.
+const months = [
+  'January',
+  'February',
+  'March',
+  'April',
+  'May',
+  'June',
+  'July',
+  'August',
+  'September',
+  'October',
+  'November',
+  'December',
+];
+const twoDigits = (value: number) => String(value).padStart(2, '0');
 
 /** "14:32" where the reader sits. */
-export const timeText = (moment: string | number | Date): string => time.format(new Date(moment));
+export function timeText(moment: string | number | Date): string {
+  const at = new Date(moment);
+  return `${twoDigits(at.getHours())}:${twoDigits(at.getMinutes())}`;
+}
 
 /** "1 December 2026". */
-export const dayText = (moment: string | number | Date): string => day.format(new Date(moment));
+export function dayText(moment: string | number | Date): string {
+  const at = new Date(moment);
+  return `${at.getDate()} ${months[at.getMonth()]} ${at.getFullYear()}`;
+}
 
 /** "1 Dec 2026, 14:32". */
-export const momentText = (moment: string): string =>
-  `${shortDay.format(new Date(moment))}, ${timeText(moment)}`;
+export function momentText(moment: string): string {
+  const at = new Date(moment);
+  return `${at.getDate()} ${months[at.getMonth()]?.slice(0, 3)} ${at.getFullYear()}, ${timeText(at)}`;
+}
 
 /** Today as the table's calendar says it, `2026-12-01`; not the day in Greenwich. */
 export function today(now = new Date()): string {
-  const pad = (value: number) => String(value).padStart(2, '0');
-  return `${now.getFullYear()}-${pad(now.getMonth() + 1)}-${pad(now.getDate())}`;
+  return `${now.getFullYear()}-${twoDigits(now.getMonth() + 1)}-${twoDigits(now.getDate())}`;
 }

@@ -31,8 +31,8 @@ describe('a newer version of the protocol', () => {
     await user.click(screen.getByLabelText(/^Band to train loop,/));
     const diagram = within(screen.getByRole('region', { name: 'Diagram' }));
     expect(diagram.getByRole('button', { name: 'Inside' })).toHaveAttribute('aria-pressed', 'true');
-    const line = document.querySelector(`[data-point="${trainLoop.id}"]`);
-    expect(line?.querySelector('.drawing-letter-current')?.textContent).toBe('D');
+    const letter = `[data-point="${trainLoop.id}"] .drawing-letter-current`;
+    await waitFor(() => expect(document.querySelector(letter)?.textContent).toBe('D'));
     expect(diagram.getByText(/From the lower edge of the waistband at centre back/)).toBeVisible();
   });
 

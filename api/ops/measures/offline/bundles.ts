@@ -1,5 +1,5 @@
 import { brotliCompressSync, constants } from 'node:zlib';
-import type { Browser, Page } from 'playwright-core';
+import type { Browser, BrowserContext, Page } from 'playwright-core';
 import { sayWhoItIs } from '../../drills/offline/table.js';
 
 const KILOBYTE = 1024;
@@ -27,10 +27,18 @@ const packed = (script: Buffer): number =>
 export interface Weights {
   /** The public front page. */
   readonly site: number;
-  /** The Workroom until its first page stands. */
+  /** The Workroom's list of garments. */
   readonly shell: number;
-  /** The same and a measuring sheet, all in all. */
+  /** A measuring sheet, until it can be typed into. */
   readonly sheet: number;
+}
+
+/** What a page fetches for whoever is signed in already. */
+async function scriptsOf(context: BrowserContext, address: string): Promise<number> {
+  const page = await context.newPage();
+  const scripts = new Scripts(page);
+  await page.goto(address, { waitUntil: 'networkidle' });
+  return scripts.kilobytes();
 }
 
 /** Fetches each page in a browser that has kept nothing, and weighs its scripts. */
@@ -40,15 +48,13 @@ export async function weigh(browser: Browser, url: string, sheetId: string): Pro
     const front = await context.newPage();
     const ofSite = new Scripts(front);
     await front.goto(url, { waitUntil: 'networkidle' });
-    const page = await context.newPage();
-    const ofWorkroom = new Scripts(page);
-    await page.goto(`${url}/workroom/sign-in`);
-    await sayWhoItIs(page);
-    await page.getByRole('heading', { name: 'Garments', level: 1 }).waitFor();
-    await page.waitForLoadState('networkidle');
-    const shell = await ofWorkroom.kilobytes();
-    await page.goto(`${url}/workroom/sheets/${sheetId}`, { waitUntil: 'networkidle' });
-    return { site: await ofSite.kilobytes(), shell, sheet: await ofWorkroom.kilobytes() };
+    const door = await context.newPage();
+    await door.goto(`${url}/workroom/sign-in`);
+    await sayWhoItIs(door);
+    await door.getByRole('heading', { name: 'Garments', level: 1 }).waitFor();
+    const shell = await scriptsOf(context, `${url}/workroom/`);
+    const sheet = await scriptsOf(context, `${url}/workroom/sheets/${sheetId}`);
+    return { site: await ofSite.kilobytes(), shell, sheet };
   } finally {
     await context.close();
   }

@@ -40,13 +40,13 @@ async function weights({ chromium: executablePath, url, sheetId }: Seat): Promis
     return [
       { what: 'scripts of the public front page, brotli', value: site, most: 115, unit: 'KB' },
       {
-        what: 'scripts of the Workroom until its first page stands, brotli',
+        what: 'scripts of the Workroom’s list of garments, brotli',
         value: shell,
         most: 160,
         unit: 'KB',
       },
       {
-        what: 'scripts of the Workroom and a sheet, all in all, brotli',
+        what: 'scripts of a measuring sheet, brotli',
         value: sheet,
         most: 230,
         unit: 'KB',

@@ -5,7 +5,7 @@ import { extraLinesOf } from '@ellwand/shared/protocols/extra-lines';
 import { paintProtocol } from '@ellwand/shared/protocols/own-lines';
 import type { WornSide } from '@ellwand/shared/readings/worn-side';
 import type { OwnPointView } from '@ellwand/shared/records/protocol';
-import { useMemo, useState } from 'react';
+import { memo, useMemo, useState } from 'react';
 import { mannerOf, type SheetPoint } from '../model/sheet-points.js';
 import { SceneDrawing } from '../../../components/drawing/scene-drawing.js';
 
@@ -21,7 +21,9 @@ interface DiagramPanelProps {
 }
 
 /** The view on which the current point lies, its line lit, and beneath it the one instruction that matters now. */
-export function DiagramPanel({ kind, points, ownPoints, current, worn, onChoose }: DiagramPanelProps) {
+export const DiagramPanel = memo(Diagram);
+
+function Diagram({ kind, points, ownPoints, current, worn, onChoose }: DiagramPanelProps) {
   const diagram = diagramFor(kind);
   const ownLine = ownPoints.find(({ id }) => id === current.id)?.line;
   const own = ownLine?.view ?? (diagram && viewOfPoint(diagram, current.id));

@@ -1,9 +1,11 @@
+import type { Draft } from '../model/drafts.js';
 import type { SheetRow } from '../model/rows.js';
 import type { SheetDesk } from '../model/use-sheet-desk.js';
 
 interface HowTakenProps {
   readonly desk: SheetDesk;
   readonly row: SheetRow;
+  readonly draft: Draft;
   readonly id: string;
   readonly label: string;
   /** Asked for by hand, before anything stands in its box. */
@@ -11,8 +13,7 @@ interface HowTakenProps {
 }
 
 /** What is out of the usual about one reading: a gap taken off, read flat and doubled, how deep the level lay. */
-export function HowTaken({ desk, row, id, label, gapAsked }: HowTakenProps) {
-  const draft = desk.draftOf(row);
+export function HowTaken({ desk, row, draft, id, label, gapAsked }: HowTakenProps) {
   const asksDepth = row.point.point.group === 'hip' && row.point.point.levelRecorded;
   const showsGap = gapAsked || draft.gap !== '';
   if (row.covered || (!asksDepth && !showsGap && !draft.doubled)) return null;

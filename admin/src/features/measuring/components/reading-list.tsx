@@ -1,5 +1,7 @@
 import { handlingStepLabels, handlingSteps } from '@ellwand/shared/points/point';
 import { useEffect, useRef } from 'react';
+import { rowState } from '../model/row-state.js';
+import { againOf } from '../model/rows.js';
 import type { SheetDesk } from '../model/use-sheet-desk.js';
 import { firstBoxId, ReadingRow } from './reading-row.js';
 
@@ -36,7 +38,16 @@ export function ReadingList({ desk }: { readonly desk: SheetDesk }) {
             </h3>
             <ul>
               {own.map((row) => (
-                <ReadingRow key={row.key} desk={desk} row={row} />
+                <ReadingRow
+                  key={row.key}
+                  desk={desk}
+                  row={row}
+                  current={desk.current.key === row.key}
+                  draft={desk.draftOf(row)}
+                  state={rowState(row, rows, desk.sheet.kind)}
+                  mistake={desk.mistakes[row.key]}
+                  again={againOf(row, rows)}
+                />
               ))}
             </ul>
           </section>

@@ -1,11 +1,13 @@
 import { levelLabels, notTakenReasons } from '@ellwand/shared/readings/reading';
 import { LevelFoundBy } from '@ellwand/shared/records/sheet';
 import { formatLength, unitLabels } from '@ellwand/shared/units/format-length';
-import { type KeyboardEvent, useState } from 'react';
+import { replaceEqualDeep } from '@tanstack/react-query';
+import { type KeyboardEvent, memo, useState } from 'react';
 import { FieldError } from '../../../components/ui/field.js';
-import { rowState, type RowState } from '../model/row-state.js';
+import type { Draft } from '../model/drafts.js';
+import type { RowState } from '../model/row-state.js';
 import { draftValue } from '../model/draft-value.js';
-import { howOf, type SheetRow } from '../model/rows.js';
+import { type Again, howOf, type SheetRow } from '../model/rows.js';
 import type { SheetDesk } from '../model/use-sheet-desk.js';
 import { DecisionCard } from './decision-card.js';
 import { HowTaken } from './how-taken.js';
@@ -35,12 +37,38 @@ const tones: Readonly<Record<RowState['tone'], string>> = {
   aside: 'bg-well text-ink-2 italic',
 };
 
-/** One point in one round: its letter, its name, its boxes, its state. */
-export function ReadingRow({ desk, row }: { readonly desk: SheetDesk; readonly row: SheetRow }) {
+interface ReadingRowProps {
+  readonly desk: SheetDesk;
+  readonly row: SheetRow;
+  readonly current: boolean;
+  readonly draft: Draft;
+  readonly state: RowState;
+  readonly mistake: string | undefined;
+  readonly again: Again;
+}
+
+/** One point in one round: its letter, its name, its boxes, its state. Drawn anew only when something of it changes. */
+export const ReadingRow = memo(RowOfReading, looksTheSame);
+
+const same = <T,>(one: T, other: T) => replaceEqualDeep(one, other) === one;
+
+/** A hand types into one row; the other twenty-five stay as they are. What the desk can do never changes. */
+function looksTheSame(one: ReadingRowProps, other: ReadingRowProps): boolean {
+  if (other.row.decision) return false;
+  const { desk: before } = one;
+  const { desk: after } = other;
+  return (
+    one.current === other.current &&
+    one.mistake === other.mistake &&
+    before.locked === after.locked &&
+    before.keypad === after.keypad &&
+    same(before.tape, after.tape) &&
+    same([one.row, one.draft, one.state, one.again], [other.row, other.draft, other.state, other.again])
+  );
+}
+
+function RowOfReading({ desk, row, current, draft, state, mistake, again }: ReadingRowProps) {
   const id = ids(row);
-  const current = desk.current.key === row.key;
-  const state = rowState(row, desk.rows, desk.sheet.kind);
-  const mistake = desk.mistakes[row.key];
   const [gapAsked, setGapAsked] = useState(false);
   const leave = (event: { relatedTarget: EventTarget | null; currentTarget: Element }) => {
     if (!event.currentTarget.contains(event.relatedTarget as Node | null)) desk.commit(row);
@@ -60,30 +88,31 @@ export function ReadingRow({ desk, row }: { readonly desk: SheetDesk; readonly r
         <div className="min-w-0 max-xl:self-end">
           <label htmlFor={id.rest} className="block text-body font-medium leading-5">
             {rowLabel(row)}
-            <span className="sr-only">, {unitLabels[desk.draftOf(row).unit]}</span>
+            <span className="sr-only">, {unitLabels[draft.unit]}</span>
           </label>
           <p id={id.says} className="text-label text-ink-2">
             {says(row, state)}
           </p>
         </div>
         {row.point.point.levelRecorded && !row.covered ? (
-          <LevelBox desk={desk} row={row} id={id.level} />
+          <LevelBox desk={desk} row={row} level={draft.level} id={id.level} />
         ) : (
           <span className="max-xl:hidden" />
         )}
-        <Boxes desk={desk} row={row} id={id} mistake={mistake} />
+        <Boxes desk={desk} row={row} draft={draft} id={id} mistake={mistake} />
         <span
           className={`rounded-sm px-2 py-1 text-center text-label font-medium max-xl:col-start-2 max-xl:row-start-2 max-xl:w-fit max-xl:self-start max-xl:py-0 ${tones[state.tone]}`}
         >
           {state.word}
         </span>
         <div className="max-xl:col-start-4 max-xl:row-span-2 max-xl:row-start-1">
-          {!desk.locked && <RowMenu desk={desk} row={row} onGap={() => setGapAsked(true)} />}
+          {!desk.locked && <RowMenu desk={desk} row={row} again={again} onGap={() => setGapAsked(true)} />}
         </div>
       </div>
       <HowTaken
         desk={desk}
         row={row}
+        draft={draft}
         id={row.key.replaceAll(':', '-')}
         label={rowLabel(row)}
         gapAsked={gapAsked}
@@ -116,14 +145,14 @@ const isDoubled = (row: SheetRow): boolean => howOf(row, row.reading?.doubled ??
 interface BoxesProps {
   readonly desk: SheetDesk;
   readonly row: SheetRow;
+  readonly draft: Draft;
   readonly id: ReturnType<typeof ids>;
   readonly mistake: string | undefined;
 }
 
-function Boxes({ desk, row, id, mistake }: BoxesProps) {
+function Boxes({ desk, row, draft, id, mistake }: BoxesProps) {
   if (row.covered)
     return <span className="h-12 w-36 rounded-sm border border-hair bg-well" aria-hidden="true" />;
-  const draft = desk.draftOf(row);
   const takesTapes = row.point.point.takesTapeLengths;
   const onKeyDown = (event: KeyboardEvent<HTMLInputElement>) => {
     const inCount = event.currentTarget.id === id.count;
@@ -205,13 +234,14 @@ function TapeSum({ desk, row }: { readonly desk: SheetDesk; readonly row: SheetR
 function LevelBox({
   desk,
   row,
+  level,
   id,
 }: {
   readonly desk: SheetDesk;
   readonly row: SheetRow;
+  readonly level: Draft['level'];
   readonly id: string;
 }) {
-  const { level } = desk.draftOf(row);
   return (
     <div className="flex flex-wrap items-center gap-x-3 max-xl:col-span-3 max-xl:col-start-2 max-xl:row-start-4 max-xl:mt-1">
       <label htmlFor={id} className="text-label text-ink-2">

@@ -1,7 +1,7 @@
 import { Menu, MenuButton, MenuItem, MenuItems } from '@headlessui/react';
 import { useRef, useState } from 'react';
 import { today } from '../../../lib/moments.js';
-import { spreadOf, type SheetRow } from '../model/rows.js';
+import type { Again, SheetRow } from '../model/rows.js';
 import type { SheetDesk } from '../model/use-sheet-desk.js';
 import { NotTakenQuestion } from './not-taken-question.js';
 import { rowLabel } from './row-label.js';
@@ -9,16 +9,17 @@ import { rowLabel } from './row-label.js';
 interface RowMenuProps {
   readonly desk: SheetDesk;
   readonly row: SheetRow;
+  /** Whether the point may be read again here, and whether that settles two that lie apart. */
+  readonly again: Again;
   readonly onGap: () => void;
 }
 
 /** What else can be done with a point. */
-export function RowMenu({ desk, row, onGap }: RowMenuProps) {
+export function RowMenu({ desk, row, again, onGap }: RowMenuProps) {
   const [asking, setAsking] = useState(false);
   const camera = useRef<HTMLInputElement>(null);
-  const { point, worn, reading, covered } = row;
+  const { point, worn } = row;
   const isRound = point.point.how === 'round';
-  const again = !covered && reading !== null && reading.reason === null && isLastRound(desk, row);
   const photograph = (file: File) =>
     void desk.outbox.photograph(
       { garmentId: desk.sheet.garmentId, view: 'tape', pointId: point.id, takenOn: today() },
@@ -43,8 +44,8 @@ export function RowMenu({ desk, row, onGap }: RowMenuProps) {
           className="absolute top-full right-0 z-20 mt-1 w-max rounded-sm border border-rule bg-sheet py-1 shadow-dialog focus:outline-none"
         >
           <Choice onChoose={() => setAsking(true)}>Cannot be taken</Choice>
-          <Choice disabled={!again} onChoose={() => desk.readAgain(row)}>
-            {spreadOf(desk.rows, row) ? 'Read once more' : 'Read a second time, blind'}
+          <Choice disabled={again === 'no'} onChoose={() => desk.readAgain(row)}>
+            {again === 'once-more' ? 'Read once more' : 'Read a second time, blind'}
           </Choice>
           {point.point.paired && worn === null && (
             <Choice onChoose={() => desk.tellSides(row)}>Tell left from right</Choice>
@@ -101,8 +102,3 @@ function Choice({ disabled = false, onChoose, children }: ChoiceProps) {
     </MenuItem>
   );
 }
-
-const isLastRound = (desk: SheetDesk, row: SheetRow): boolean =>
-  !desk.rows.some(
-    ({ point, worn, round }) => point.id === row.point.id && worn === row.worn && round > row.round,
-  );

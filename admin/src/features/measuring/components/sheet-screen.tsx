@@ -5,7 +5,9 @@ import { useSearchParams } from 'react-router-dom';
 import { Button } from '../../../components/ui/button.js';
 import { Question } from '../../../components/ui/dialog.js';
 import { Waiting } from '../../../components/ui/states.js';
+import { useSettled } from '../../../lib/use-settled.js';
 import { stepWords } from '../model/sheet-points.js';
+import { useLatest } from '../model/use-latest.js';
 import { useSheetDesk, type SheetDesk } from '../model/use-sheet-desk.js';
 import { BottomBar } from './bottom-bar.js';
 import { DiagramPanel } from './diagram-panel.js';
@@ -35,33 +37,39 @@ export function SheetScreen({ sheet }: { readonly sheet: Sheet }) {
   const show = (tab: TabName) => {
     if (tab !== tabs[shown]) setSearch(tab === 'readings' ? {} : { show: tab }, { replace: true });
   };
+  // The next row takes its figure before its line is lit.
+  const lit = useSettled(desk.current);
   const [asking, setAsking] = useState(false);
   const [keysShown, setKeysShown] = useState(false);
   useTableKeys(desk, {
     onNotTaken: () => setAsking(true),
     onTab: (index) => show(tabs[index] ?? 'readings'),
   });
-  const chooseRow = (pointId: string) => {
-    show('readings');
-    const row =
-      desk.rows.find(({ point, reading }) => point.id === pointId && !reading) ??
-      desk.rows.find(({ point }) => point.id === pointId);
-    if (row) desk.go(row.key);
-  };
+  const { chooseRow } = useLatest({
+    chooseRow: (pointId: string) => {
+      show('readings');
+      const row =
+        desk.rows.find(({ point, reading }) => point.id === pointId && !reading) ??
+        desk.rows.find(({ point }) => point.id === pointId);
+      if (row) desk.go(row.key);
+    },
+  });
   return (
     <div className="flex h-dvh flex-col">
       <div className="relative flex min-h-0 grow flex-col max-md:overflow-y-auto">
         <SheetHeader desk={desk} />
         <main className="grid grow grid-cols-[minmax(0,1fr)] max-md:content-start md:min-h-0 md:grid-cols-[20rem_minmax(0,1fr)] lg:grid-cols-[25rem_minmax(0,1fr)]">
           <div className="min-h-0 border-hair max-md:border-b md:relative md:overflow-y-auto md:border-r">
-            <DiagramPanel
-              kind={sheet.kind}
-              points={desk.points}
-              ownPoints={desk.sheet.protocol.ownPoints}
-              current={desk.current.point}
-              worn={desk.current.worn}
-              onChoose={chooseRow}
-            />
+            {lit && (
+              <DiagramPanel
+                kind={sheet.kind}
+                points={desk.points}
+                ownPoints={desk.sheet.protocol.ownPoints}
+                current={lit.point}
+                worn={lit.worn}
+                onChoose={chooseRow}
+              />
+            )}
           </div>
           <div className="flex min-w-0 flex-col md:min-h-0">
             <TabGroup

@@ -171,3 +171,17 @@ export function spreadOf(
 
 /** A point is done when its first round was read, or when it was said why not. */
 export const isDone = ({ reading }: SheetRow): boolean => reading !== null;
+
+/** Whether a point can be read again at this row: a first time blind, or once more where two lie apart already. */
+export type Again = 'no' | 'blind' | 'once-more';
+
+/** Only after its last reading, and only one that was taken and may be seen. */
+export function againOf(row: SheetRow, rows: readonly SheetRow[]): Again {
+  const { point, worn, round, reading, covered } = row;
+  const isTaken = !covered && reading !== null && reading.reason === null;
+  const isLast = !rows.some(
+    (other) => other.point.id === point.id && other.worn === worn && other.round > round,
+  );
+  if (!isTaken || !isLast) return 'no';
+  return spreadOf(rows, row) ? 'once-more' : 'blind';
+}

@@ -1,6 +1,7 @@
 import type { FindingView, Sheet, SheetFindings } from '@ellwand/shared/records/sheet';
 import { useQuery } from '@tanstack/react-query';
 import { useEffect, useMemo, useState } from 'react';
+import { useSettled } from '../../../lib/use-settled.js';
 import { useReachable } from '../../../offline/context.js';
 import { findingsQuery } from '../api/findings.js';
 import type * as LocalFindings from './local-findings.js';
@@ -41,7 +42,9 @@ function useRules(wanted: boolean): Rules | null {
 export function useFindings(sheet: Sheet): FindingsSeen {
   const asked = useQuery(findingsQuery(sheet.id));
   const outbox = useOutbox(sheet.id);
-  const view = useOutboxView(outbox);
+  // The checks wait until the row that was typed into is drawn.
+  const now = useOutboxView(outbox);
+  const view = useSettled(now) ?? now;
   const reachable = useReachable();
   const pending = view.entries.filter(({ state }) => state === 'waiting');
   const isLocal = pending.length > 0 || view.notes.length > 0 || !reachable || asked.isError;

@@ -14,6 +14,7 @@ import { useDrafts, useOutbox, useOutboxView } from './use-outbox.js';
 import { useKeypad } from './use-keypad.js';
 import { useFindings } from './use-findings.js';
 import { useHands } from './use-hands.js';
+import { useLatest } from './use-latest.js';
 import { usePlace } from './use-place.js';
 import { useSittings } from './use-sittings.js';
 import { useUndo } from './use-undo.js';
@@ -126,6 +127,8 @@ export function useSheetDesk(shown: Sheet) {
     place.go(rowKey(point.id, 1, 'right'));
   };
 
+  const { current, focusAsked, turn, enter, go, turned } = place;
+  const ways = useLatest({ type, commit, next, step, setAside, readAgain, tellSides, enter, go });
   const answer = (key: string, reason: string) => void outbox.say({ about: 'answer', key, reason });
   const received =
     sheet.readings
@@ -148,21 +151,18 @@ export function useSheetDesk(shown: Sheet) {
     setPausing,
     undo: undoing.undo,
     canUndo: undoing.canUndo,
-    tellSides,
     outbox,
     view,
     mistakes,
     done,
     draftOf,
-    type,
-    commit,
-    next,
-    step,
-    setAside,
-    readAgain,
     answer,
     findings,
-    ...place,
+    current,
+    focusAsked,
+    turn,
+    turned,
+    ...ways,
     ...keypad,
     locked: sheet.state === 'complete',
     status: sendStatus(view, Object.keys(typed).length, received),
