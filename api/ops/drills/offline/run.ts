@@ -71,6 +71,9 @@ async function drill({ rounds, control, folder }: Drill): Promise<boolean> {
     console.log(`${typed.length} figures typed, ${proxy.lost} answers lost on their way`);
     console.log(`${rounds} rounds: ${lost.length} lost, ${doubled.length} doubled`);
     return lost.length + doubled.length + strange.length === 0;
+  } catch (fault) {
+    console.log(await tablet.shown());
+    throw fault;
   } finally {
     await tablet.close();
     await proxy.close();

@@ -126,6 +126,15 @@ export class Tablet {
     await Promise.race([gone, this.page.waitForTimeout(DIES_WITHIN_MS)]);
   }
 
+  /** What the tablet shows just now, for whoever must find out why a round came to a halt. */
+  async shown(): Promise<string> {
+    const text = await this.page
+      .locator('body')
+      .innerText({ timeout: REST_MS })
+      .catch(() => 'a page that is dead');
+    return `${this.page.url()} shows: ${text.replace(/\s+/g, ' ').slice(0, 600)}`;
+  }
+
   async close(): Promise<void> {
     await this.context.close();
   }
