@@ -53,7 +53,9 @@ function tracesOf(d: string): Point[][] {
 const outerRadius = (ring: SceneCircle): number => ring.r + ring.strokeWidth / 2;
 
 const sheets = drawnKinds.flatMap((kind) => {
-  const views = diagramFor(kind)!.views.map((view) => view.name);
+  const { lines, views: all } = diagramFor(kind)!;
+  // A view without measuring lines, such as the back of breeches, is there to be looked at.
+  const views = all.map(({ name }) => name).filter((name) => lines.some(({ view }) => view === name));
   return [360, 400, 560, 800].flatMap((widthPx) =>
     [views, ...views.map((view) => [view])].map((chosen) => ({ kind, widthPx, views: chosen })),
   );

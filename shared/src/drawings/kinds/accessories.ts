@@ -103,12 +103,20 @@ export const shoe: GarmentDiagram = {
       name: 'side',
       caption: 'From the side',
       anchors: {},
-      layers: [...shoeOutline.layers, stitching('12,-64{44}..{8}58,-33..{-32}104,-56', 'once', 'all')],
+      layers: [
+        ...shoeOutline.layers,
+        stitching('8,-50{42}..{4}58,-24..{-38}108,-60', 'once', 'cloth'),
+        // A ribbon drawn up at the throat.
+        piece('-6,-50!{200}..{260}-30,-66{-60}..{0}-14,-74{20}..{80}-2,-52!---6,-50!', 'once'),
+        piece('2,-54!{-60}..{-10}22,-78{10}..{90}30,-66{110}..{190}4,-50!--2,-54!', 'once'),
+        seam('-14,-62---6,-52', 'once', 'all'),
+        seam('18,-66--4,-53', 'once', 'all'),
+      ],
     },
     shoeSole,
   ],
   lines: [
-    straightLine('heel', 'side', '128,2--128,46'),
+    straightLine('heel', 'side', '126,4--126,48'),
     straightLine('sole', 'below', 'heel--toe'),
     straightLine('tread', 'below', '-58,-37---58,37'),
   ],

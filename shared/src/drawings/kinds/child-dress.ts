@@ -11,6 +11,7 @@ import {
   straightLine,
 } from '../diagram/layers.js';
 import type { GarmentDiagram, View } from '../diagram/model.js';
+import { childDressInside } from './child-dress-inside.js';
 import { childDress as childDressOutline } from '../silhouettes/body-linen.js';
 
 const skirtFolds = [
@@ -32,9 +33,6 @@ const front: View = {
   anchors: {
     neck: [112, -188],
     tip: [138, -178],
-    neckFront: [0, -140],
-    hemSide: [256, 386],
-    hemFront: [0, 410],
   },
   layers: [
     ...childDressOutline.layers,
@@ -85,12 +83,17 @@ export const childDress: GarmentDiagram = {
   kind: 'child-dress',
   title: 'Child’s dress',
   leastScale: 0.4,
-  views: [front, back],
+  views: [front, back, childDressInside],
   lines: [
-    allRound('child-chest', 'front', '-126,-80--126,-80', { sag: 8 }),
-    allRound('child-waist', 'front', '-113,-7--113,-7', { sag: 8 }),
-    allRound('neck', 'front', '~neck{40}..{0}neckFront..{-40}neck', { beside: 9 }),
-    allRound('hem', 'front', '~hemSide{13}..{0}hemFront..{-13}hemSide', { beside: -16 }),
+    allRound('child-chest', 'inside', ['-21,-80---127,-80', '127,-80--21,-80']),
+    allRound('child-waist', 'inside', ['-22,-4---113,-4', '113,-4--22,-4']),
+    allRound(
+      'neck',
+      'inside',
+      ['~neckOpen{184}..{204}~neck', '~neck{40}..{0}0,-140..{-40}neck', 'neck{156}..{176}neckOpen'],
+      { beside: -7 },
+    ),
+    allRound('hem', 'inside', '~hemSide{13}..{0}hemBack..{-13}hemSide', { beside: -16 }),
     alongCurve('shoulder-seam', 'front', '~tip--~neck', { beside: 12 }),
     alongCurve('sleeve-outer', 'front', '138,-178{-34}..{54}208,-150..{104}204,-76', { beside: 13 }),
     straightLine('across-back', 'back', '~scye--scye'),

@@ -1,17 +1,12 @@
 import { allRound, buttons, cloth, fold, row, seam, stitching, straightLine } from '../diagram/layers.js';
 import type { GarmentDiagram, View } from '../diagram/model.js';
+import { corsetInside } from './corset-inside.js';
 import { corset as corsetOutline } from '../silhouettes/body-linen.js';
 
 const front: View = {
   name: 'front',
   caption: 'Front',
-  anchors: {
-    topSide: [174, -140],
-    waistSide: [112, 0],
-    bottomSide: [170, 132],
-    topFront: [0, -150],
-    bottomFront: [0, 222],
-  },
+  anchors: {},
   layers: [
     ...corsetOutline.layers,
     stitching('58,-204{93}..{90}44,0{90}..{78}69,212'),
@@ -48,18 +43,21 @@ export const corset: GarmentDiagram = {
   kind: 'corset',
   title: 'Corset',
   leastScale: 0.42,
-  views: [front, back],
+  views: [front, back, corsetInside],
   lines: [
-    allRound('corset-waist-closed', 'front', '~waistSide--waistSide', { sag: 10 }),
+    allRound('corset-waist-closed', 'inside', '~buskWaist--buskWaist', { sag: 8 }),
     allRound(
       'corset-top',
-      'front',
-      '~topSide{-42}..-108,-204{4}..-46,-184..{10}topFront!{-10}..46,-184..{4}108,-204..{42}topSide',
+      'inside',
+      '~buskTop{-34}..{22}~bust..{10}~side..{4}~laceTop--laceTop{-4}..{-10}side..{-22}bust..{34}buskTop',
       { beside: 15 },
     ),
-    allRound('corset-bottom', 'front', '~bottomSide{16}..-54,200..{0}bottomFront..54,200..{-16}bottomSide', {
-      beside: -16,
-    }),
+    allRound(
+      'corset-bottom',
+      'inside',
+      '~buskBottom{-26}..{-10}~bottomSide..{0}~laceBottom--laceBottom{0}..{10}bottomSide..{26}buskBottom',
+      { beside: -16 },
+    ),
     straightLine('busk', 'front', '-26,-152---26,214'),
     straightLine('lacing-gap', 'back', '~gap--gap'),
   ],

@@ -11,6 +11,7 @@ import {
   straightLine,
 } from '../diagram/layers.js';
 import type { GarmentDiagram, View } from '../diagram/model.js';
+import { petticoatInside } from './petticoat-inside.js';
 import { petticoat as petticoatOutline } from '../silhouettes/legs.js';
 
 const HEM =
@@ -23,7 +24,7 @@ const openwork = [buttons(eyelets, 4, 'both'), stitching('0,940{0}..{-8}420,905'
 const front: View = {
   name: 'front',
   caption: 'Front',
-  anchors: { waistSide: [129, 0], hip: [204, 170], hemSide: [424, 940] },
+  anchors: { waistSide: [129, 0], hemSide: [424, 940] },
   layers: [
     ...petticoatOutline.layers,
     fold('14,8{88}..{89}26,640'),
@@ -68,15 +69,15 @@ export const petticoat: GarmentDiagram = {
   kind: 'petticoat',
   title: 'Petticoat',
   leastScale: 0.24,
-  views: [front, back],
+  views: [front, back, petticoatInside],
   lines: [
-    allRound('waistband', 'front', '-127,-17--127,-17', { sag: 8 }),
-    allRound('hip', 'front', '~hip--hip', { sag: 16 }),
-    allRound('hem', 'front', '-424,940{14}..{0}0,990..{-14}424,940', { beside: -18 }),
+    allRound('waistband', 'inside', ['-24,-15---128,-17', '128,-17--24,-15']),
+    allRound('hip', 'inside', '~hip--hip', { sag: 16 }),
+    allRound('hem', 'inside', '-424,940{14}..{0}0,990..{-14}424,940', { beside: -18 }),
     straightLine('waist-to-hem-front', 'front', '0,10--0,986'),
     alongCurve('waist-to-hem-side', 'front', 'waistSide{36}..{72}236,230..{79}hemSide', { beside: 13 }),
     straightLine('waist-to-hem-back', 'back', '26,8--26,982'),
-    straightLine('hem-depth', 'back', '-90,941---90,984'),
+    straightLine('hem-depth', 'inside', '-90,922---90,984'),
     straightLine('cloth-width', 'back', '-229,690--229,690'),
     straightLine('opening', 'back', '-26,6---26,250'),
   ],

@@ -1,4 +1,4 @@
-import { buttons, cloth, piece, seam } from '../diagram/layers.js';
+import { cloth, lining, piece, seam } from '../diagram/layers.js';
 import { silhouette } from './silhouette.js';
 
 /** A man's top hat. */
@@ -22,14 +22,21 @@ export const glove = silhouette(
   seam('100,60{-92}..{-88}103,-6', 'both', 'last'),
 );
 
-/** A woman's shoe of the 1790s, from its side. */
+/** A woman's shoe of the 1790s, from its side: low vamp, ribbon at the throat, a small set-in heel. */
 export const shoe = silhouette(
+  // Within the opening the lining of the far side shows.
+  lining('4,-58!{-30}..{6}56,-52..{-24}108,-64!{150}..{186}58,-34..{212}4,-58!', 'once'),
   cloth(
-    '-128,34!{-44}..-66,0..{-36}0,-46!{-64}..10,-72!{40}..{8}58,-40..{-34}112,-66!{98}..{112}106,2!{178}..{162}52,10' +
-      '..0,36..{180}-62,44..{192}-128,34!',
+    '-126,30!{-58}..{-22}-96,10..{-28}-44,-18..{-44}-8,-46!{-58}..{-20}4,-58!{42}..{4}58,-30..{-38}109,-68!{94}..{96}112,-20' +
+      '..{104}106,6!{176}..{160}52,14..{176}-10,38..{182}-70,42..{196}-126,30!',
     'once',
   ),
-  piece('107,0!{100}..{86}98,46!--70,46!{-80}..{-112}56,8!{-12}..{-6}107,0!', 'once'),
-  seam('0,-46{70}..{100}-4,-14{140}..{150}-40,14', 'once', 'last'),
-  buttons([[-6, -26]], 5),
+  // The sole's edge, from the toe to the breast of the heel.
+  piece(
+    '-126,30!{16}..{2}-70,42..{-4}-10,38..{-20}52,14!--56,20!{158}..{176}-8,45..{182}-72,49..{196}-126,36!---126,30!',
+    'once',
+  ),
+  piece('109,4!{100}..{84}102,48!--74,48!{-84}..{-112}56,14!{-18}..{-6}109,4!', 'once'),
+  seam('-8,-46{84}..{108}-14,-10{120}..{140}-40,40', 'once', 'last'),
+  seam('96,-60{96}..{92}98,8', 'once', 'last'),
 );
