@@ -1,3 +1,4 @@
+import { bodiceCutSheet } from './fixture-cut-sheet';
 import type { PublishedGarment, PublishedMeasurement } from '@ellwand/shared/records/published-garment';
 import { measuringPoint, type PointId } from '@ellwand/shared/points/measuring-points';
 
@@ -141,7 +142,7 @@ export const dressInTwoParts: PublishedGarment = {
       ],
       protocol: null,
       ownPoints: [],
-      cutSheet: null,
+      cutSheet: bodiceCutSheet,
     },
     {
       number: 'LH.1966.30.2',

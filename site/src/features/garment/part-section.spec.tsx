@@ -163,3 +163,17 @@ describe('a part of which both sides were read', () => {
     );
   });
 });
+
+it('says how a part is cut, in the tables that have something to say, and nothing of one that has none', () => {
+  expect(screen.queryByRole('heading', { name: /is cut$/ })).toBeNull();
+  const [bodice] = dressInTwoParts.parts;
+  cleanup();
+  if (bodice) show(bodice);
+  expect(screen.getByRole('heading', { name: 'How the bodice is cut' })).toBeTruthy();
+  const panels = screen.getByRole('region', { name: 'Panel widths' });
+  expect(panels.querySelectorAll('thead th').length).toBe(3);
+  const sum = [...panels.querySelectorAll('tfoot tr')][0];
+  expect(sum?.textContent).toContain('872 mm');
+  expect(sum?.textContent).toContain('± 3.2');
+  expect(screen.queryByRole('region', { name: /Pleats|Fullness/ })).toBeNull();
+});

@@ -6,6 +6,7 @@ import { type ReactNode, useMemo } from 'react';
 import { useLitPoints } from '../../components/diagram/lit-points';
 import { MeasuringDiagram } from '../../components/diagram/measuring-diagram';
 import { Picture } from '../../components/ui/picture';
+import { CutSheet } from './cut-sheet';
 import { DerivedValues } from './derived-values';
 import { MeasurementTable } from './measurement-table';
 import { NotTaken } from './not-taken';
@@ -59,6 +60,7 @@ export function PartSection({ part, index, alone, picture, heading }: PartSectio
         <DerivedValues part={part} />
         <PartFacts part={part} />
       </div>
+      <CutSheet part={part} id={`part-${index + 1}-cut`} />
     </section>
   );
 }
