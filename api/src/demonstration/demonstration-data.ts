@@ -1,6 +1,7 @@
 import { readdir, readFile } from 'node:fs/promises';
 import { join } from 'node:path';
 import { GarmentRecord, PartKind } from '@ellwand/shared/records/garment';
+import { NewCutSheet } from '@ellwand/shared/records/cut-sheet';
 import { imageViews } from '@ellwand/shared/records/image';
 import { kindIds } from '@ellwand/shared/points/kinds';
 import { NewProtocol } from '@ellwand/shared/records/protocol';
@@ -71,6 +72,7 @@ export const DemonstrationGarment = z.strictObject({
       sheet: DemonstrationSheet.nullable().default(null),
       /** Sheets from before, oldest first: the one above speaks for the part. */
       earlierSheets: z.array(DemonstrationSheet).default([]),
+      cutSheet: NewCutSheet.nullable().default(null),
     }),
   ),
   /** The sheet of the parts laid together as worn. */

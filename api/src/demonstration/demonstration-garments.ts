@@ -4,6 +4,7 @@ import type { Garment } from '@ellwand/shared/records/garment';
 import type { Actor } from '../common/actor';
 import { GarmentsService } from '../garments/garments.service';
 import { WornTogetherService } from '../garments/worn-together.service';
+import { CutSheetsService } from '../measuring/cut-sheets/cut-sheets.service';
 import { ImageIntake } from '../media/intake/image-intake';
 import { PublishingService } from '../publishing/publishing.service';
 import type { Demonstration, DemonstrationGarment, DemonstrationSheet } from './demonstration-data';
@@ -22,6 +23,7 @@ export class DemonstrationGarments {
     private readonly garments: GarmentsService,
     private readonly together: WornTogetherService,
     private readonly sheets: DemonstrationSheets,
+    private readonly cutSheets: CutSheetsService,
     private readonly intake: ImageIntake,
     private readonly publishing: PublishingService,
   ) {}
@@ -47,6 +49,7 @@ export class DemonstrationGarments {
       if (!made) continue;
       for (const earlier of part.earlierSheets) await this.sheets.fill(made.id, earlier, staff);
       if (part.sheet) await this.sheets.fill(made.id, part.sheet, staff);
+      if (part.cutSheet) await this.cutSheets.write(made.id, 0, part.cutSheet, maker);
     }
     if (data.wornTogether) await this.layTogether(garment.id, data.wornTogether, maker, staff);
     return { id: garment.id, data };
