@@ -39,13 +39,10 @@ export class DatabaseStore implements OfflineStore {
   constructor(private readonly database: Database) {}
 
   async operations(): Promise<readonly Placed[]> {
-    const found: Placed[] = [];
-    let cursor = await this.database.transaction('outbox').store.openCursor();
-    while (cursor) {
-      found.push({ place: cursor.key, operation: cursor.value });
-      cursor = await cursor.continue();
-    }
-    return found;
+    // Both of one transaction, and each in one step: a cursor would take a turn of the page for every operation.
+    const { store } = this.database.transaction('outbox');
+    const [places, operations] = await Promise.all([store.getAllKeys(), store.getAll()]);
+    return operations.map((operation, index) => ({ place: places[index]!, operation }));
   }
 
   async append({ operation, clears, picture }: Commit): Promise<void> {
