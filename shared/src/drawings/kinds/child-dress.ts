@@ -11,8 +11,8 @@ import {
   straightLine,
 } from '../diagram/layers.js';
 import type { GarmentDiagram, View } from '../diagram/model.js';
-import { childDressInside } from './child-dress-inside.js';
 import { childDress as childDressOutline } from '../silhouettes/body-linen.js';
+import { childDressInside } from './child-dress-inside.js';
 
 const skirtFolds = [
   fold('10,8{88}..{88}18,260'),
@@ -33,6 +33,9 @@ const front: View = {
   anchors: {
     neck: [112, -188],
     tip: [138, -178],
+    neckFront: [0, -140],
+    hemSide: [256, 386],
+    hemFront: [0, 410],
   },
   layers: [
     ...childDressOutline.layers,
@@ -85,14 +88,9 @@ export const childDress: GarmentDiagram = {
   leastScale: 0.4,
   views: [front, back, childDressInside],
   lines: [
-    allRound('child-chest', 'inside', ['-21,-80---127,-80', '127,-80--21,-80']),
-    allRound('child-waist', 'inside', ['-22,-4---113,-4', '113,-4--22,-4']),
-    allRound(
-      'neck',
-      'inside',
-      ['~neckOpen{184}..{204}~neck', '~neck{40}..{0}0,-140..{-40}neck', 'neck{156}..{176}neckOpen'],
-      { beside: -7 },
-    ),
+    allRound('child-chest', 'inside', ['~chestOpen--~chestSide', 'chestSide--chestOpen']),
+    allRound('child-waist', 'inside', ['~bandOpen--~bandSide', 'bandSide--bandOpen']),
+    allRound('neck', 'inside', ['~neck{26}..{0}~neckOpen', 'neckOpen{0}..{-26}neck'], { beside: 9 }),
     allRound('hem', 'inside', '~hemSide{13}..{0}hemBack..{-13}hemSide', { beside: -16 }),
     alongCurve('shoulder-seam', 'front', '~tip--~neck', { beside: 12 }),
     alongCurve('sleeve-outer', 'front', '138,-178{-34}..{54}208,-150..{104}204,-76', { beside: 13 }),

@@ -45,7 +45,7 @@ export const corset: GarmentDiagram = {
   leastScale: 0.42,
   views: [front, back, corsetInside],
   lines: [
-    allRound('corset-waist-closed', 'inside', '~buskWaist--buskWaist', { sag: 8 }),
+    allRound('corset-waist-closed', 'inside', '~buskWaist--buskWaist'),
     allRound(
       'corset-top',
       'inside',

@@ -11,11 +11,8 @@ import {
   straightLine,
 } from '../diagram/layers.js';
 import type { GarmentDiagram, View } from '../diagram/model.js';
+import { PETTICOAT_EDGE, petticoat as petticoatOutline } from '../silhouettes/legs.js';
 import { petticoatInside } from './petticoat-inside.js';
-import { petticoat as petticoatOutline } from '../silhouettes/legs.js';
-
-const HEM =
-  '424,940{156}..{190}366,950!{150}..{192}294,962!{150}..{190}222,972!{150}..{188}148,980!{150}..{186}74,984!{152}..{180}0,990';
 
 const eyelets = [...row(5, [34, 956], [190, 946]), ...row(5, [230, 943], [386, 918])];
 
@@ -24,7 +21,7 @@ const openwork = [buttons(eyelets, 4, 'both'), stitching('0,940{0}..{-8}420,905'
 const front: View = {
   name: 'front',
   caption: 'Front',
-  anchors: { waistSide: [129, 0], hemSide: [424, 940] },
+  anchors: { waistSide: [129, 0], hip: [204, 170], hemSide: [424, 940] },
   layers: [
     ...petticoatOutline.layers,
     fold('14,8{88}..{89}26,640'),
@@ -40,7 +37,7 @@ const back: View = {
   caption: 'Back',
   anchors: { waistSide: [129, 0], hemBack: [0, 990] },
   layers: [
-    cloth(`0,4!--129,0!{36}..{72}236,230..{79}424,940!${HEM.slice('424,940'.length)}!`),
+    cloth(`0,4!--129,0!{36}..{72}236,230..{79}424,940!${PETTICOAT_EDGE}..{180}0,990!`),
     ...[
       [12, 88, 24, 88, 380],
       [22, 85, 54, 86, 640],
@@ -71,14 +68,14 @@ export const petticoat: GarmentDiagram = {
   leastScale: 0.24,
   views: [front, back, petticoatInside],
   lines: [
-    allRound('waistband', 'inside', ['-24,-15---128,-17', '128,-17--24,-15']),
+    allRound('waistband', 'inside', ['~bandEnd--~band', 'band--bandEnd']),
     allRound('hip', 'inside', '~hip--hip', { sag: 16 }),
-    allRound('hem', 'inside', '-424,940{14}..{0}0,990..{-14}424,940', { beside: -18 }),
+    allRound('hem', 'inside', '~hemSide{14}..{0}hemBack..{-14}hemSide', { beside: -18 }),
+    straightLine('hem-depth', 'inside', '-90,937---90,986'),
+    straightLine('cloth-width', 'inside', '~seamAtTuck--seamAtTuck'),
     straightLine('waist-to-hem-front', 'front', '0,10--0,986'),
     alongCurve('waist-to-hem-side', 'front', 'waistSide{36}..{72}236,230..{79}hemSide', { beside: 13 }),
     straightLine('waist-to-hem-back', 'back', '26,8--26,982'),
-    straightLine('hem-depth', 'inside', '-90,922---90,984'),
-    straightLine('cloth-width', 'back', '-229,690--229,690'),
     straightLine('opening', 'back', '-26,6---26,250'),
   ],
 };

@@ -11,6 +11,7 @@ import {
 } from '../diagram/layers.js';
 import type { GarmentDiagram, View } from '../diagram/model.js';
 import { shirt as shirtOutline } from '../silhouettes/body-linen.js';
+import { shirtInside } from './shirt-inside.js';
 
 const cuffGathers = [
   fold('526,564{-118}..{-118}486,486', 'both', 'all'),
@@ -77,10 +78,10 @@ export const shirt: GarmentDiagram = {
   kind: 'shirt',
   title: 'Shirt',
   leastScale: 0.3,
-  views: [front, back],
+  views: [front, back, shirtInside],
   lines: [
-    straightLine('neckband', 'front', '-64,-74--64,-74'),
-    allRound('cuff', 'front', 'wristInner--wristOuter', { beside: -16, sag: 6 }),
+    straightLine('neckband', 'inside', '-194,-44--200,-44'),
+    allRound('cuff', 'inside', 'cuffHole--cuffButton', { beside: -16 }),
     alongCurve('shoulder-seam', 'front', '~tip--~neck', { beside: 14 }),
     flatDoubled('shirt-body', 'front', '-314,430--314,430'),
     straightLine('shirt-front', 'front', '-200,26---200,926'),
@@ -88,7 +89,7 @@ export const shirt: GarmentDiagram = {
       beside: -14,
     }),
     flatDoubled('sleeve-widest', 'front', '330,340--440,290'),
-    straightLine('cloth-width', 'front', '-314,740--314,740'),
+    straightLine('cloth-width', 'inside', '~sideAt--sideAt'),
     straightLine('across-back', 'back', '-238,130--238,130'),
     alongCurve('centre-back-to-cuff', 'back', '0,30!--{12}232,66{12}..{63}388,232..{67}540,612'),
     straightLine('shirt-back', 'back', '-200,28---200,960'),

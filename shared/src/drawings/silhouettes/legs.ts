@@ -36,11 +36,13 @@ export const breeches = silhouette(
   piece('150,588!--178,586!--178,612!--150,614!--150,588!', 'both'),
 );
 
+/** The scallops of a petticoat's edge, from its corner to the last before the centre. */
+export const PETTICOAT_EDGE =
+  '{156}..{190}366,950!{150}..{192}294,962!{150}..{190}222,972!{150}..{188}148,980!{150}..{186}74,984!{152}';
+
 /** A woman's petticoat: a gathered width, tucks above a shaped edge. */
 export const petticoat = silhouette(
-  cloth(
-    '0,6!--128,0!{36}..{72}236,230..{79}424,940!{156}..{190}366,950!{150}..{192}294,962!{150}..{190}222,972!{150}..{188}148,980!{150}..{186}74,984!{152}..{180}0,990!',
-  ),
+  cloth(`0,6!--128,0!{36}..{72}236,230..{79}424,940!${PETTICOAT_EDGE}..{180}0,990!`),
   seam('0,760{0}..{-8}400,728'),
   seam('0,790{0}..{-8}410,758'),
   seam('0,820{0}..{-8}420,788'),
