@@ -21,7 +21,7 @@ const openwork = [buttons(eyelets, 4, 'both'), stitching('0,940{0}..{-8}420,905'
 const front: View = {
   name: 'front',
   caption: 'Front',
-  anchors: { waistSide: [129, 0], hip: [204, 170], hemSide: [424, 940] },
+  anchors: { waistSide: [129, 0], hemSide: [424, 940] },
   layers: [
     ...petticoatOutline.layers,
     fold('14,8{88}..{89}26,640'),
