@@ -33,9 +33,6 @@ const front: View = {
   anchors: {
     neck: [112, -188],
     tip: [138, -178],
-    neckFront: [0, -140],
-    hemSide: [256, 386],
-    hemFront: [0, 410],
   },
   layers: [
     ...childDressOutline.layers,
@@ -90,7 +87,12 @@ export const childDress: GarmentDiagram = {
   lines: [
     allRound('child-chest', 'inside', ['~chestOpen--~chestSide', 'chestSide--chestOpen']),
     allRound('child-waist', 'inside', ['~bandOpen--~bandSide', 'bandSide--bandOpen']),
-    allRound('neck', 'inside', ['~neck{26}..{0}~neckOpen', 'neckOpen{0}..{-26}neck'], { beside: 9 }),
+    allRound(
+      'neck',
+      'inside',
+      ['~neckOpen{180}..{206}~neck', '~neck{38}..{0}0,-140..{-38}neck', 'neck{154}..{180}neckOpen'],
+      { beside: -7 },
+    ),
     allRound('hem', 'inside', '~hemSide{13}..{0}hemBack..{-13}hemSide', { beside: -16 }),
     alongCurve('shoulder-seam', 'front', '~tip--~neck', { beside: 12 }),
     alongCurve('sleeve-outer', 'front', '138,-178{-34}..{54}208,-150..{104}204,-76', { beside: 13 }),
