@@ -55,14 +55,18 @@ async function keyIn(
 ): Promise<void> {
   typed.push(entry);
   await tablet.type(entry);
-  if (blow === 'typed') await revive(tablet, proxy);
+  if (blow === 'typed') {
+    await revive(tablet, proxy);
+    await tablet.comesBack(entry);
+  }
   const committing = tablet.enter(entry.point);
   await meanwhile();
   await committing.catch(() => undefined);
   if (blow !== 'entered') return;
   await revive(tablet, proxy);
-  // Killed so soon after Enter, the figure may still have been a draft: it must then be in its box.
-  if ((await tablet.figureIn(entry.point)) === entry.figure) await tablet.enter(entry.point);
+  // Killed so soon after Enter, the figure may still have been a draft: it must then come back in its box, as it
+  // does where it was committed. Entered once more, what was committed stays as it is.
+  if (await tablet.comesBack(entry)) await tablet.enter(entry.point);
 }
 
 /** A killed tab is opened again; where answers are being lost, pages must at least arrive. */

@@ -15,6 +15,8 @@ const SOON_MS = 20_000;
 /** Longer than a hand rests before a draft is written (150 ms). */
 const REST_MS = 350;
 const SETTLES_MS = 250;
+/** How often a box is looked at for a figure that a dying tab may still be writing. */
+const LOOKS = 12;
 const SENT_WITHIN_MS = 90_000;
 /** As if nothing of it had ever reached the disk. */
 const forgetAll = `new Promise((resolve, reject) => {
@@ -25,6 +27,17 @@ const forgetAll = `new Promise((resolve, reject) => {
     clearing.objectStore('outbox').clear();
     clearing.objectStore('drafts').clear();
     clearing.oncomplete = () => resolve(true);
+  };
+})`;
+/** What is on the tablet's own disk. */
+const countAll = `new Promise((resolve, reject) => {
+  const opening = indexedDB.open('ellwand-workroom');
+  opening.onerror = reject;
+  opening.onsuccess = () => {
+    const looking = opening.result.transaction(['outbox', 'drafts']);
+    const outbox = looking.objectStore('outbox').getAll();
+    const drafts = looking.objectStore('drafts').getAll();
+    looking.oncomplete = () => resolve(JSON.stringify({ outbox: outbox.result, drafts: drafts.result }));
   };
 })`;
 const DIES_WITHIN_MS = 300;
@@ -97,8 +110,13 @@ export class Tablet {
     await this.box(point).press('Enter');
   }
 
-  figureIn(point: string): Promise<string> {
-    return this.box(point).inputValue();
+  /** Whether a figure stands in its box, also where the tab that died wrote it down a moment late. */
+  async comesBack({ point, figure }: Entry): Promise<boolean> {
+    for (let look = 0; look < LOOKS; look++) {
+      if ((await this.box(point).inputValue()) === figure) return true;
+      await this.page.waitForTimeout(SETTLES_MS);
+    }
+    return false;
   }
 
   /** Until everything that was keyed is at the museum. */
@@ -132,7 +150,8 @@ export class Tablet {
       .locator('body')
       .innerText({ timeout: REST_MS })
       .catch(() => 'a page that is dead');
-    return `${this.page.url()} shows: ${text.replace(/\s+/g, ' ').slice(0, 600)}`;
+    const waits = await this.page.evaluate<string>(countAll).catch(() => 'nobody knows what');
+    return `${this.page.url()} holds ${waits} and shows: ${text.replace(/\s+/g, ' ').slice(0, 400)}`;
   }
 
   async close(): Promise<void> {
