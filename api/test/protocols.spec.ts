@@ -141,11 +141,12 @@ describe('protocols, as an administrator keeps them', () => {
         },
       ],
     });
+    const besides = { ...otherEnd, line: { ...otherEnd.line, view: 'side' as const } };
     const elsewhere = await makeProtocol(
       administrator,
       'petticoat',
       1,
-      skirtWithLoop({ ownPoints: [otherEnd] }),
+      skirtWithLoop({ ownPoints: [besides] }),
     );
     expect(elsewhere.body).toMatchObject({
       status: 400,
@@ -156,7 +157,7 @@ describe('protocols, as an administrator keeps them', () => {
         },
         {
           pointer: '/ownPoints/0/line/view',
-          detail: 'The diagram has no view “inside”; it has front, back.',
+          detail: 'The diagram has no view “side”; it has front, back, inside.',
         },
       ],
     });
