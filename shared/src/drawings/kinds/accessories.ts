@@ -1,5 +1,6 @@
 import {
   allRound,
+  buttons,
   cloth,
   flatDoubled,
   fold,
@@ -18,10 +19,12 @@ const hatFront: View = {
   anchors: {},
   layers: [
     ...hatOutline.layers,
-    seam('-16,-36---16,6--16,6--16,-36', 'once', 'cloth'),
-    fold('60,-150{96}..{88}56,-50'),
-    fold('74,-146{98}..{88}68,-60'),
-    stitching('0,26{0}..{-18}96,14..{-54}136,-28', 'both', 'cloth'),
+    seam('0,-161{0}..{7}100,-155', 'both', 'cloth'),
+    // The sheen of the brushed silk.
+    fold('62,-152{99}..{90}52,-48'),
+    fold('74,-151{100}..{90}64,-52'),
+    fold('86,-148{99}..{90}76,-90'),
+    stitching('0,27{0}..{-18}98,14..{-46}142,-30', 'both', 'last'),
   ],
 };
 
@@ -51,7 +54,7 @@ export const hat: GarmentDiagram = {
   leastScale: 0.6,
   views: [hatFront, hatBelow],
   lines: [
-    straightLine('crown-height', 'front', '40,-164--40,6'),
+    straightLine('crown-height', 'front', '36,-170--36,4'),
     allRound('head-opening', 'below', '0,-84{180}..{90}-67,0{90}..{0}0,84{0}..{-90}67,0{-90}..{200}14,-82'),
     straightLine('brim-front', 'below', 'openFront--front'),
     straightLine('brim-back', 'below', 'openBack--back'),
@@ -69,11 +72,18 @@ export const glove: GarmentDiagram = {
       name: 'front',
       caption: 'Backs of the hands',
       anchors: {},
-      layers: [...gloveOutline.layers, stitching('40,226{6}..{-6}132,226')],
+      layers: [
+        ...gloveOutline.layers,
+        stitching('40,226{6}..{-6}132,226'),
+        stitching('40,218{6}..{-6}132,218'),
+        fold('56,126{20}..{10}84,136', 'both', 'last'),
+        fold('118,118{166}..{176}92,122', 'both', 'last'),
+        fold('54,150{14}..{4}80,156', 'both', 'last'),
+      ],
     },
   ],
   lines: [
-    flatDoubled('palm', 'front', '47,24--127,24'),
+    flatDoubled('palm', 'front', '51,8--129,8'),
     straightLine('glove-length', 'front', '-81,-137---81,236'),
   ],
 };
@@ -105,12 +115,15 @@ export const shoe: GarmentDiagram = {
       anchors: {},
       layers: [
         ...shoeOutline.layers,
-        stitching('8,-50{42}..{4}58,-24..{-38}108,-60', 'once', 'cloth'),
-        // A ribbon drawn up at the throat.
-        piece('-6,-50!{200}..{260}-30,-66{-60}..{0}-14,-74{20}..{80}-2,-52!---6,-50!', 'once'),
-        piece('2,-54!{-60}..{-10}22,-78{10}..{90}30,-66{110}..{190}4,-50!--2,-54!', 'once'),
-        seam('-14,-62---6,-52', 'once', 'all'),
-        seam('18,-66--4,-53', 'once', 'all'),
+        // The throat and top edge are bound; a string in the binding is tied in front.
+        stitching('-38,-13{34}..{6}15,-10..{-20}73,-21..{-40}110,-54', 'once', 'cloth'),
+        piece('-46,-20!{200}..{270}-64,-24{-90}..{10}-56,-32{20}..{60}-44,-22!---46,-20!', 'once'),
+        piece('-40,-22!{-60}..{10}-30,-36{20}..{90}-18,-30{100}..{190}-40,-20!---40,-22!', 'once'),
+        buttons([[-43, -21]], 3),
+        seam('-44,-19{130}..{100}-60,-2', 'once', 'all'),
+        seam('-41,-18{80}..{60}-34,0', 'once', 'all'),
+        // Quarters meet behind.
+        stitching('102,-50{92}..{100}98,4', 'once', 'cloth'),
       ],
     },
     shoeSole,

@@ -1,44 +1,102 @@
 import {
   allRound,
   alongCurve,
+  buttons,
   cloth,
   flatDoubled,
   fold,
+  piece,
   seam,
   stitching,
   straightLine,
 } from '../diagram/layers.js';
-import type { GarmentDiagram, View } from '../diagram/model.js';
-import { chemise as chemiseOutline } from '../silhouettes/body-linen.js';
+import type { GarmentDiagram, Layer, View } from '../diagram/model.js';
+import {
+  CHEMISE_BODY_SIDE,
+  CHEMISE_GUSSET,
+  CHEMISE_SLEEVE,
+  CHEMISE_SLEEVE_BAND,
+  chemise as chemiseOutline,
+  chemiseAnchors,
+} from '../silhouettes/body-linen.js';
+
+const sleeves: readonly Layer[] = [
+  cloth(CHEMISE_SLEEVE, 'both'),
+  ...[
+    [181, 30, -4, 262, 66],
+    [183, 52, 4, 244, 82],
+    [185, 74, 10, 248, 108],
+    [186, 96, 16, 230, 118],
+    [312, 148, -128, 276, 96],
+    [300, 157, -130, 262, 116],
+    [286, 168, -132, 246, 122],
+    [272, 179, -134, 240, 148],
+  ].map(([x, y, leaving, toX, toY]) => fold(`${x},${y}{${leaving}}..${toX},${toY}`, 'both', 'last')),
+  piece(CHEMISE_SLEEVE_BAND, 'both'),
+  stitching('330,150--258,207', 'both', 'last'),
+  stitching('326,145--254,202', 'both', 'last'),
+  cloth(CHEMISE_GUSSET, 'both'),
+];
+
+/** Below the gusset, the gore's seam and the side's, felled; the hem. */
+const skirt: readonly Layer[] = [
+  seam('228,260{102}..{95}142,1010'),
+  stitching('220,270{102}..{95}136,1010'),
+  stitching('0,978{0}..{-10}294,948'),
+];
 
 const front: View = {
   name: 'front',
   caption: 'Front',
-  anchors: { neck: [122, -4], neckFront: [0, 82], hemSide: [296, 960], hemFront: [0, 990], tip: [172, 10] },
+  anchors: { ...chemiseAnchors, neckFront: [0, 82], hemSide: [298, 960], hemFront: [0, 990] },
   layers: [
-    ...chemiseOutline.layers,
-    fold('38,94{84}..{87}56,280'),
-    fold('0,100--0,250', 'once'),
-    stitching('0,978{0}..{-10}292,948'),
-    stitching('296,100{112}..{112}264,182', 'both', 'all'),
+    ...chemiseOutline.layers.slice(0, 2),
+    ...skirt,
+    // A band binds the neck; the fullness is gathered into it either side of the opening.
+    seam('0,98{0}..{-52}134,8'),
+    stitching('0,92{0}..{-53}130,4'),
+    ...[
+      [14, 100, 89, 18, 290],
+      [26, 98, 88, 34, 220],
+      [38, 94, 86, 50, 300],
+      [50, 89, 84, 68, 210],
+      [62, 82, 82, 86, 270],
+      [74, 73, 80, 104, 190],
+      [86, 62, 78, 120, 230],
+    ].map(([x, y, leaving, toX, toY]) => fold(`${x},${y}{${leaving}}..{89}${toX},${toY}`)),
+    seam('-6,84---6,246', 'once'),
+    stitching('6,84--6,246', 'once'),
+    piece('-11,246!--11,246!--11,258!---11,258!---11,246!', 'once'),
+    buttons(
+      [
+        [0, 91],
+        [0, 160],
+      ],
+      4.4,
+    ),
+    stitching('180,14{96}..{86}194,148'),
+    ...sleeves,
   ],
 };
 
 const back: View = {
   name: 'back',
   caption: 'Back',
-  anchors: { neckBack: [0, 36] },
+  anchors: { ...chemiseAnchors, neckBack: [0, 36] },
   layers: [
-    cloth('neckBack!{0}..{-32}122,-4!{14}..172,10!{98}..190,160!{86}..{81}296,960!{168}..{180}0,992!'),
-    cloth('172,10!{22}..{44}300,96!{112}..262,196!{198}..{196}190,160!--172,10!', 'both'),
-    seam('0,50{0}..{-32}132,8'),
-    fold('0,54--0,220', 'once'),
-    fold('20,52{87}..{88}28,250'),
-    fold('44,48{84}..{87}60,210'),
-    fold('68,40{82}..{86}90,240'),
-    seam('196,330{92}..{96}130,1000'),
-    stitching('0,980{0}..{-10}292,948'),
-    stitching('296,100{112}..{112}264,182', 'both', 'all'),
+    cloth(`neckBack!{0}..{-32}neck!{14}..${CHEMISE_BODY_SIDE}{168}..{180}0,992!`),
+    ...skirt,
+    seam('0,52{0}..{-32}134,10'),
+    stitching('0,46{0}..{-32}130,5'),
+    ...[
+      [8, 54, 89, 10, 250],
+      [22, 53, 88, 28, 190],
+      [36, 51, 86, 46, 270],
+      [50, 48, 84, 66, 200],
+      [64, 44, 82, 86, 240],
+      [78, 39, 80, 106, 180],
+    ].map(([x, y, leaving, toX, toY]) => fold(`${x},${y}{${leaving}}..{89}${toX},${toY}`)),
+    ...sleeves,
   ],
 };
 
@@ -50,10 +108,10 @@ export const chemise: GarmentDiagram = {
   lines: [
     allRound('neck', 'front', '~neck{54}..{0}neckFront..{-54}neck', { beside: 9 }),
     allRound('hem', 'front', '~hemSide{11}..{0}hemFront..{-11}hemSide', { beside: -16 }),
-    flatDoubled('shirt-body', 'front', '-208,300--208,300'),
+    flatDoubled('shirt-body', 'front', '-217,280--217,280'),
     straightLine('shirt-front', 'front', '-146,8---146,972'),
-    alongCurve('sleeve-outer', 'front', 'tip{22}..{44}300,96', { beside: 13 }),
+    alongCurve('sleeve-outer', 'front', 'tip{-6}..{40}262,40..{66}edgeOuter', { beside: 13 }),
     straightLine('shirt-back', 'back', '-146,8---146,974'),
-    straightLine('cloth-width', 'back', '-250,640--250,640'),
+    straightLine('cloth-width', 'back', '-167,700--167,700'),
   ],
 };

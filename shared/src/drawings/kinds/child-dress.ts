@@ -11,7 +11,11 @@ import {
   straightLine,
 } from '../diagram/layers.js';
 import type { GarmentDiagram, View } from '../diagram/model.js';
-import { childDress as childDressOutline } from '../silhouettes/body-linen.js';
+import {
+  CHILD_SLEEVE,
+  CHILD_SLEEVE_BAND,
+  childDress as childDressOutline,
+} from '../silhouettes/body-linen.js';
 import { childDressInside } from './child-dress-inside.js';
 
 const skirtFolds = [
@@ -21,10 +25,17 @@ const skirtFolds = [
   fold('98,4{46}..{76}184,180'),
 ] as const;
 
+/** Gathers from the head of the puff, and up from its band. */
 const sleeveFolds = [
-  fold('140,-166{0}..{70}184,-104', 'both', 'cloth'),
-  fold('134,-148{18}..{60}168,-102', 'both', 'cloth'),
-  fold('148,-172{-14}..{76}196,-118', 'both', 'cloth'),
+  fold('139,-168{-14}..{40}178,-164', 'both', 'cloth'),
+  fold('136,-156{-4}..{44}182,-140', 'both', 'cloth'),
+  fold('133,-142{6}..{50}172,-120', 'both', 'cloth'),
+  fold('194,-92{-50}..{-88}212,-132', 'both', 'cloth'),
+  fold('182,-98{-54}..{-92}196,-140', 'both', 'cloth'),
+  fold('170,-104{-60}..{-96}180,-136', 'both', 'cloth'),
+  fold('160,-108{-66}..{-104}164,-128', 'both', 'cloth'),
+  piece(CHILD_SLEEVE_BAND, 'both'),
+  stitching('198,-82--142,-108', 'both', 'last'),
 ] as const;
 
 const front: View = {
@@ -69,10 +80,7 @@ const back: View = {
     seam('0,-158--0,0', 'once'),
     seam('9,-157--9,0', 'once'),
     buttons(row(5, [4.5, -144], [4.5, -34]), 3.4),
-    cloth(
-      '138,-178!{-34}..{54}208,-150..{104}204,-76!--150,-96!--130,-92!{-134}..scye{-92}..{-70}138,-178!',
-      'both',
-    ),
+    cloth(`${CHILD_SLEEVE}{-134}..scye{-92}..{-70}138,-178!`, 'both'),
     ...sleeveFolds,
     piece('0,-18!{0}..{-4}114,-22!--112,6!{177}..{180}0,8!'),
   ],
@@ -95,7 +103,9 @@ export const childDress: GarmentDiagram = {
     ),
     allRound('hem', 'inside', '~hemSide{13}..{0}hemBack..{-13}hemSide', { beside: -16 }),
     alongCurve('shoulder-seam', 'front', '~tip--~neck', { beside: 12 }),
-    alongCurve('sleeve-outer', 'front', '138,-178{-34}..{54}208,-150..{104}204,-76', { beside: 13 }),
+    alongCurve('sleeve-outer', 'front', '138,-178{-44}..{20}176,-186..{76}226,-132..{128}202,-86--192,-62', {
+      beside: 13,
+    }),
     straightLine('across-back', 'back', '~scye--scye'),
     straightLine('child-length', 'back', '-20,-156---20,408'),
   ],

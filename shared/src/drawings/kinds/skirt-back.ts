@@ -2,7 +2,7 @@ import { buttons, cloth, fold, piece, seam, stitching } from '../diagram/layers.
 import type { View } from '../diagram/model.js';
 import { pleatsBetween } from './pleats.js';
 
-const FLOUNCE_TOP = '0,1242{0}..{-14}170,1220..{-46}384,1040';
+const FLOUNCE_TOP = '0,1242{0}..{-14}170,1220..{-46}400,1030';
 const FLOUNCE_FOOT = '0,1392{0}..{-12}220,1366..{-52}404,1312..{-84}438,1216';
 
 /** The same skirt, back up: gathered at the placket, the fullness falling into the train. */
@@ -38,7 +38,7 @@ export const skirtBack: View = {
     fold('190,720{70}..{58}298,1080'),
     fold('240,640{72}..{58}330,920'),
     seam(FLOUNCE_TOP),
-    stitching('0,1253{0}..{-14}174,1230..{-46}390,1048'),
+    stitching('0,1253{0}..{-14}174,1230..{-46}404,1040'),
     ...pleatsBetween(FLOUNCE_TOP, FLOUNCE_FOOT, 19, 0.012).map((pleat) => fold(pleat)),
     piece('0,-34!{0}..{-3}bandTop!--waistSide!{177}..{180}centre!'),
     seam('8,-36--8,6', 'once', 'last'),

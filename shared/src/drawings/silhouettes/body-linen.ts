@@ -1,34 +1,43 @@
 import { buttons, cloth, lining, piece, row, seam } from '../diagram/layers.js';
+import type { View } from '../diagram/model.js';
+import type { Anchors } from '../geometry/path-language.js';
 import { silhouette } from './silhouette.js';
 
-/** A man's shirt cut in rectangles: square gussets at the underarm, gathered sleeves. */
-export const shirt = silhouette(
-  lining('0,-76!{0}..{15}80,-62!--70,0!--0,24!'),
-  cloth(
-    '0,930!--284,930!{-10}..{-82}316,894!--312,300!--262,250!{-90}..250,36!{186}..{196}76,0!{128}..{180}0,24!',
-  ),
-  cloth(
-    '250,36!{14}..{64}398,220..{68}534,566!{140}..472,602!{-114}..{-122}312,300!--262,250!--250,36!',
-    'both',
-  ),
-  piece('534,566!--552,606!--490,642!--472,602!--534,566!', 'both'),
-  seam('262,250--288,212--312,300', 'both'),
-  piece('0,34!--6,-2!{-6}..{-80}80,-62!{104}..{112}76,0!{126}..{180}0,34!'),
-  seam('0,34--0,330', 'once'),
-  seam('30,40{84}..{88}40,190'),
-  seam('54,26{78}..{86}78,150'),
-);
+/** Where a chemise's sleeve, its band and the square gusset under the arm meet. */
+export const chemiseAnchors = {
+  neck: [124, -4],
+  tip: [176, 10],
+  scyeFoot: [188, 150],
+  gussetBody: [206, 196],
+  gussetSleeve: [232, 166],
+  bandOuter: [322, 140],
+  bandInner: [250, 196],
+  edgeOuter: [335, 156],
+  edgeInner: [263, 213],
+} satisfies Anchors;
+
+/** A short sleeve, gathered at its head and into a band. */
+export const CHEMISE_SLEEVE =
+  'tip!{-6}..{40}262,40..{70}328,124..{140}bandOuter!--bandInner!{190}..{250}gussetSleeve!--scyeFoot!{-94}..{-85}tip!';
+export const CHEMISE_SLEEVE_BAND = 'bandOuter!--edgeOuter!--edgeInner!--bandInner!--bandOuter!';
+export const CHEMISE_GUSSET = 'scyeFoot!--gussetSleeve!--gussetBody!--scyeFoot!';
+export const CHEMISE_BODY_SIDE = 'tip!{95}..{86}scyeFoot!--gussetBody!{84}..{82}298,960!';
 
 /** A woman's chemise: wide neck, short sleeves, gores to the knee. */
-export const chemise = silhouette(
-  lining('0,2!{0}..{24}122,-4!--118,24!--0,90!'),
-  cloth('0,82!{0}..{-54}122,-4!{14}..172,10!{98}..190,160!{86}..{81}296,960!{168}..{180}0,990!'),
-  cloth('172,10!{22}..{44}300,96!{112}..262,196!{198}..{196}190,160!--172,10!', 'both'),
-  seam('0,96{0}..{-52}132,8'),
-  seam('20,100{86}..{88}32,240'),
-  seam('60,86{82}..{86}84,210'),
-  seam('196,330{92}..{96}130,1000'),
-);
+export const chemise: View = {
+  ...silhouette(
+    lining('0,2!{0}..{24}neck!--118,24!--0,90!'),
+    cloth(`0,82!{0}..{-54}neck!{14}..${CHEMISE_BODY_SIDE}{168}..{180}0,990!`),
+    cloth(CHEMISE_SLEEVE, 'both'),
+    piece(CHEMISE_SLEEVE_BAND, 'both'),
+    cloth(CHEMISE_GUSSET, 'both'),
+    seam('0,98{0}..{-52}134,8'),
+    seam('20,102{86}..{88}32,240'),
+    seam('60,88{82}..{86}84,210'),
+    seam('206,330{92}..{96}140,1000'),
+  ),
+  anchors: chemiseAnchors,
+};
 
 /** A corset of the 1880s with a busk. */
 export const corset = silhouette(
@@ -43,14 +52,10 @@ export const corset = silhouette(
   buttons(row(5, [0, -118], [0, 172]), 4.6),
 );
 
-/** A bustle of the 1880s: steels on a band that ties in front, seen from behind. */
-export const bustle = silhouette(
-  seam('112,-14{10}..{80}214,70{80}..{60}226,190', 'both', 'all'),
-  cloth('0,0!--96,-4!{44}..{84}168,120..{94}172,290..{150}120,372..{180}0,384!'),
-  ...[70, 138, 206, 274].map((y) => seam(`0,${y + 22}{0}..{-26}230,${y - 24}`)),
-  seam('46,0{82}..{90}70,400'),
-  piece('0,-28!--116,-30!--116,-4!--0,4!'),
-);
+/** A puffed sleeve, its head and its foot gathered, and the band that holds it. */
+export const CHILD_SLEEVE =
+  '138,-178!{-44}..{20}176,-186..{76}226,-132..{128}200,-82!--148,-108!{196}..{150}130,-92!';
+export const CHILD_SLEEVE_BAND = '202,-86!--192,-62!--138,-90!--148,-112!--202,-86!';
 
 /** A child's dress: low neck, puffed sleeves, tucks to be let down. */
 export const childDress = silhouette(
@@ -64,9 +69,7 @@ export const childDress = silhouette(
   cloth(
     '0,-140!{0}..{-40}112,-188!{14}..138,-178!{100}..126,-130..{56}130,-92!{104}..112,0!{177}..{180}0,6!',
   ),
-  cloth(
-    '138,-178!{-34}..{54}208,-150..{104}204,-76!--150,-96!--130,-92!{-126}..126,-130..{-80}138,-178!',
-    'both',
-  ),
+  cloth(`${CHILD_SLEEVE}{-126}..126,-130..{-80}138,-178!`, 'both'),
+  piece(CHILD_SLEEVE_BAND, 'both'),
   piece('0,-18!{0}..{-4}114,-22!--112,6!{177}..{180}0,10!'),
 );

@@ -10,9 +10,11 @@ import { bodiceFront } from '../kinds/bodice-front.js';
 import { dressFront } from '../kinds/dress-front.js';
 import { skirtFront } from '../kinds/skirt-front.js';
 import { glove, hat, shoe } from './accessories.js';
-import { bustle, chemise, childDress, corset, shirt } from './body-linen.js';
+import { chemise, childDress, corset } from './body-linen.js';
+import { bustle, crinoline } from './cages.js';
 import { cape, coat, jacket, waistcoat } from './coats.js';
-import { breeches, crinoline, petticoat, trousers } from './legs.js';
+import { breeches, petticoat, trousers } from './legs.js';
+import { shirt } from './shirt.js';
 import { outlinesOf } from './silhouette.js';
 
 const silhouettes: Readonly<Record<GarmentKind, View>> = {
@@ -34,8 +36,8 @@ const silhouettes: Readonly<Record<GarmentKind, View>> = {
   ),
   skirt: outlinesOf(
     skirtFront,
-    seam('0,898{0}..{22}190,924..{46}380,1046', 'both', 'cloth'),
-    seam('50,6{80}..{82}96,300{82}..{84}146,910'),
+    seam('0,898{0}..{22}190,924..{46}404,1068', 'both', 'cloth'),
+    seam('50,6{80}..{82}96,300{82}..{84}147,905'),
   ),
   coat,
   jacket,
