@@ -48,7 +48,8 @@ export async function showTab(page: Page, name: string | RegExp): Promise<void> 
 /** Answers the first open finding that says this. */
 export async function answerFinding(page: Page, says: RegExp, reason: string): Promise<void> {
   await showTab(page, /^Findings/);
-  const finding = page.getByRole('listitem').filter({ hasText: says });
+  // Questions stand before notes, which may name the same points.
+  const finding = page.getByRole('listitem').filter({ hasText: says }).first();
   await finding.getByLabel('Or say why it is right').fill(reason);
   await finding.getByRole('button', { name: 'Keep the reason' }).click();
   await expect(finding).toContainText(reason);

@@ -18,7 +18,7 @@ export function CutSheet({ part, id }: { readonly part: PublishedPart; readonly 
       {part.cutSheet.note && <p className="cut-said">{part.cutSheet.note}</p>}
       <div className="cut-tables">
         {tables.map((table) => (
-          <CutTableShown key={table.id} table={table} id={`${id}-${table.id}`} />
+          <CutTableShown key={table.id} table={table} of={part.name.toLowerCase()} id={`${id}-${table.id}`} />
         ))}
       </div>
     </div>
@@ -26,12 +26,21 @@ export function CutSheet({ part, id }: { readonly part: PublishedPart; readonly 
 }
 
 /** Only the columns in which anything is said. A wide one is scrolled by itself, also by keyboard. */
-function CutTableShown({ table, id }: { readonly table: CutTable; readonly id: string }) {
+function CutTableShown({
+  table,
+  of,
+  id,
+}: {
+  readonly table: CutTable;
+  /** The part, for whoever jumps from table to table without seeing where they stand. */
+  readonly of: string;
+  readonly id: string;
+}) {
   const places = saidColumns(table);
   return (
     <div className="cut-table">
       <h3 id={id}>{table.title}</h3>
-      <div className="cut-table-room" role="region" aria-labelledby={id} tabIndex={0}>
+      <div className="cut-table-room" role="region" aria-label={`${table.title} of the ${of}`} tabIndex={0}>
         <table>
           <thead>
             <tr>

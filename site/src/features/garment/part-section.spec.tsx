@@ -170,7 +170,7 @@ it('says how a part is cut, in the tables that have something to say, and nothin
   cleanup();
   if (bodice) show(bodice);
   expect(screen.getByRole('heading', { name: 'How the bodice is cut' })).toBeTruthy();
-  const panels = screen.getByRole('region', { name: 'Panel widths' });
+  const panels = screen.getByRole('region', { name: 'Panel widths of the bodice' });
   expect(panels.querySelectorAll('thead th').length).toBe(3);
   const sum = [...panels.querySelectorAll('tfoot tr')][0];
   expect(sum?.textContent).toContain('872 mm');
