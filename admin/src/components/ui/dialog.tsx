@@ -18,8 +18,10 @@ export function Question({
   /** What takes the focus; the first control where it is not given. */
   readonly first?: RefObject<HTMLElement | null>;
 }) {
+  if (!open) return null;
+  // Gone at once when it closes, and not when a transition has ended: whoever goes on from it takes the focus then.
   return (
-    <Dialog open={open} onClose={onClose} initialFocus={first} className="relative z-40">
+    <Dialog static open onClose={onClose} initialFocus={first} className="relative z-40">
       <DialogBackdrop className="fixed inset-0 bg-ink/40" />
       <div className="fixed inset-0 overflow-y-auto p-4">
         <div className="flex min-h-full items-center justify-center">
