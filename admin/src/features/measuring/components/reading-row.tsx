@@ -78,7 +78,8 @@ function RowOfReading({ desk, row, current, draft, state, mistake, again }: Read
       id={id.row}
       aria-current={current ? 'step' : undefined}
       onBlur={leave}
-      onFocus={() => !current && desk.enter(row.key)}
+      // Also where it is the current row already: the focus may have been elsewhere for a moment in between.
+      onFocus={() => desk.enter(row.key)}
       className={`border-b border-l-4 border-b-hair px-3 py-1.5 ${current ? 'border-l-weld bg-weld-tint' : 'border-l-transparent'}`}
     >
       <div className="grid min-h-[3.125rem] grid-cols-[1.625rem_minmax(0,1fr)_auto_auto] items-center gap-x-3 xl:grid-cols-[1.625rem_minmax(0,1fr)_auto_auto_7rem_auto]">
