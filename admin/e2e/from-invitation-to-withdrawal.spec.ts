@@ -112,6 +112,7 @@ test('a dress goes from the invitation of its measurers to the public, and is wi
   await measure(odile, 'Bodice', bodice);
   await expectWorkedOut(odile.page, 'Neck to waist, front', '458 mm − 118 mm = 340 mm');
   await answerFinding(odile.page, /across the back/i, 'Dropped shoulders: the seams sit far down the arms.');
+  await answerFinding(odile.page, /tissue lay inside/i, 'The tissue was taken out of the sleeves first.');
   await completeSheet(odile.page);
   await backToTheGarment(odile.page);
   await measure(odile, 'Skirt', skirt);
