@@ -139,6 +139,12 @@ export const Part = z.object({
 });
 export type Part = z.infer<typeof Part>;
 
+/** The number of a part: its garment's with its suffix; all parts laid together have none but the garment's own. */
+export const numberOfPart = (
+  ownNumber: string,
+  { suffix, wornTogether }: { readonly suffix: string; readonly wornTogether: boolean },
+): string => (wornTogether ? ownNumber : `${ownNumber}${suffix}`);
+
 /** A garment as the Workroom holds it. `version` answers `If-Match: "<version>"`. */
 export const Garment = z.object({
   id: Uuid,

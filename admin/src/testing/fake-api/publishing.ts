@@ -1,6 +1,6 @@
 import { pointIn } from '@ellwand/shared/protocols/protocol';
 import { acceptedValues } from '@ellwand/shared/readings/accepted-value';
-import { type Garment, rightsStatements } from '@ellwand/shared/records/garment';
+import { type Garment, numberOfPart, rightsStatements } from '@ellwand/shared/records/garment';
 import { derivedViews, toReading } from '@ellwand/shared/records/measured';
 import { toProtocol } from '@ellwand/shared/records/protocol';
 import type { PublishedDocument, PublishedPart } from '@ellwand/shared/records/published-garment';
@@ -36,7 +36,7 @@ function publishedPart(house: House, garment: Garment, part: Garment['parts'][nu
     pointIn({ ownPoints: sheet ? toProtocol(sheet.protocol).ownPoints : [] }, pointId)?.name ?? pointId;
   const values = [...acceptedValues(readings.map(toReading)).values()];
   return {
-    number: garment.record.ownNumber + (part.wornTogether ? '' : part.suffix),
+    number: numberOfPart(garment.record.ownNumber, part),
     kind: part.kind,
     name: part.name,
     wornTogether: part.wornTogether,

@@ -1,4 +1,5 @@
 import { pointIn, type Protocol } from '@ellwand/shared/protocols/protocol';
+import { numberOfPart } from '@ellwand/shared/records/garment';
 import type { StoredReading } from '@ellwand/shared/records/sheet';
 import { lowerKind } from '@ellwand/shared/points/kinds';
 import { Inject, Injectable } from '@nestjs/common';
@@ -38,7 +39,7 @@ export class DamageService {
     const [first] = stopped;
     if (!first) return;
     const { ownNumber } = await tx.findOneByOrFail(GarmentRow, { id: part.garmentId });
-    const number = part.wornTogether ? ownNumber : `${ownNumber}${part.suffix}`;
+    const number = numberOfPart(ownNumber, part);
     const places = stopped.map(({ pointId, note }) => ({
       point: pointIn(protocol, pointId)?.name ?? pointId,
       note,

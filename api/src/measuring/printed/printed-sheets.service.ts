@@ -1,5 +1,5 @@
 import type { GarmentKind } from '@ellwand/shared/points/kinds';
-import { GarmentRecord } from '@ellwand/shared/records/garment';
+import { GarmentRecord, numberOfPart } from '@ellwand/shared/records/garment';
 import { readDate } from '@ellwand/shared/records/edtf-date';
 import type { Sheet } from '@ellwand/shared/records/sheet';
 import { Inject, Injectable } from '@nestjs/common';
@@ -89,7 +89,7 @@ export class PrintedSheetsService {
   }): GarmentOnPaper {
     const { ownNumber, partSuffix, partName, title, date, maker, handling, hazards } = garment;
     return {
-      number: wornTogether ? ownNumber : `${ownNumber}${partSuffix}`,
+      number: numberOfPart(ownNumber, { suffix: partSuffix, wornTogether }),
       part: wornTogether ? 'Parts laid together as worn' : partName,
       date: readDate(date)?.display ?? date,
       ...{ title, maker, handling, hazards },

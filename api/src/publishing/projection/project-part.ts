@@ -1,3 +1,4 @@
+import { numberOfPart } from '@ellwand/shared/records/garment';
 import { roundsRead } from '@ellwand/shared/cut-sheet/rounds-read';
 import { wholeFromHalf } from '@ellwand/shared/derivations/whole-from-half';
 import { type Protocol, pointsOf, protocolPointIds } from '@ellwand/shared/protocols/protocol';
@@ -50,12 +51,11 @@ function protocolOf({ kind, wornTogether }: SnapshotPart, { protocol }: Snapshot
   return wornTogether ? wornTogetherProtocol : protocolFor(kind);
 }
 
-/** All parts laid together as worn are the garment: they have no number but its own. */
 function headingOf(
   { suffix, kind, name, wornTogether = false }: SnapshotPart,
   { ownNumber }: PartContext,
 ): Pick<PublishedPart, 'number' | 'kind' | 'name' | 'wornTogether'> {
-  return { number: wornTogether ? ownNumber : `${ownNumber}${suffix}`, kind, name, wornTogether };
+  return { number: numberOfPart(ownNumber, { suffix, wornTogether }), kind, name, wornTogether };
 }
 
 /** A half is shown beside its measurement already; it is not told twice. */

@@ -61,6 +61,8 @@ function looksTheSame(one: ReadingRowProps, other: ReadingRowProps): boolean {
     one.current === other.current &&
     one.mistake === other.mistake &&
     before.locked === after.locked &&
+    // Somebody else who signs in over the page keeps things in a name of their own.
+    before.outbox === after.outbox &&
     before.keypad === after.keypad &&
     same(before.tape, after.tape) &&
     same([one.row, one.draft, one.state, one.again], [other.row, other.draft, other.state, other.again])

@@ -42,13 +42,16 @@ function alphabetOf(sign: string): Alphabet | undefined {
   return undefined;
 }
 
+/** A line's end is set as a space, and an accent with its letter. */
+export const inOneLine = (text: string): string => text.normalize('NFC').replace(/\s/gu, ' ');
+
 /**
  * Text in stretches of one typeface each. A sign that no typeface has is written as its number, "[U+65E5]", so that
  * nothing is lost on paper.
  */
 export function runsOf(text: string, weight: Weight): readonly Run[] {
   const runs: Run[] = [];
-  for (const sign of text.normalize('NFC').replace(/\s/gu, ' ')) {
+  for (const sign of inOneLine(text)) {
     const alphabet = alphabetOf(sign);
     const set = alphabet === undefined ? `[U+${codeOf(sign)}]` : sign;
     const face = faceOf(weight, alphabet ?? 'latin');

@@ -1,5 +1,5 @@
 import PDFDocument from 'pdfkit';
-import { type Face, runsOf } from './faces';
+import { type Face, inOneLine, runsOf } from './faces';
 import { margin, type Paper, points, sidesOf } from './paper-size';
 import { rule, type Style, styles } from './styles';
 
@@ -115,7 +115,7 @@ export class SheetPaper {
 
   heightOf(text: string, style: Style, width: number): number {
     if (text === '') return 0;
-    return this.face(style).heightOfString(text, { width, lineGap: style.lead });
+    return this.face(style).heightOfString(inOneLine(text), { width, lineGap: style.lead });
   }
 
   /** Sets text at a place, without a name: for inside of `tag`. */
